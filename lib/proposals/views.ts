@@ -1,0 +1,270 @@
+import type { EditOperation, LineKind, ProductKind } from "@/lib/vocabulary/lines";
+import type { Decision, ProposalState } from "@/lib/vocabulary/proposals";
+import type { Capacity } from "@/lib/vocabulary/roles";
+import type { Standing } from "@/lib/vocabulary/standing";
+
+export interface PersonView {
+  id: number;
+  name: string;
+}
+
+export interface LineReference {
+  kind: LineKind;
+  number: string;
+  name: string;
+}
+
+export interface NoteView {
+  code: string;
+  severity: "information" | "caution" | "refusal";
+  sentence: string;
+}
+
+/** Totals at one operating point before and after, in newtons. */
+export interface PointEffectView {
+  operatingPoint: string;
+  name: string;
+  basicWas: number;
+  basicNow: number;
+  predictedWas: number;
+  predictedNow: number;
+  predictedDelta: number;
+  limitWas: number;
+  limitNow: number;
+  reserveWas: number;
+  reserveNow: number;
+  marginWas: number;
+  marginNow: number;
+  standingWas: Standing;
+  standingNow: Standing;
+}
+
+/** One item at one operating point, in newtons; null where the item has no result on that side. */
+export interface ItemEffectView {
+  item: string;
+  name: string;
+  operatingPoint: string;
+  predictedWas: number | null;
+  predictedNow: number | null;
+  delta: number;
+  notesNew: NoteView[];
+  notesVanished: NoteView[];
+}
+
+export interface EffectView {
+  /** The issue on which the change was computed. */
+  onIssue: number;
+  /** Worst operating point first. */
+  points: PointEffectView[];
+  edited: ItemEffectView[];
+  /** Items nobody edited that move all the same. */
+  followers: ItemEffectView[];
+  /** "Predicted falls by 3.90 N; inside again." */
+  sentence: string;
+}
+
+export interface FieldChangeRow {
+  field: string;
+  label: string;
+  /** null where the field does not stand on that side. */
+  was: string | null;
+  toBe: string | null;
+  unit: string | null;
+  changed: boolean;
+  /** Newtons at the worst operating point, applied in the order shown so that they sum to the line's. */
+  effect: number | null;
+  remarkNumbers: number[];
+}
+
+export interface LineChangeView extends LineReference {
+  operation: EditOperation;
+  baseLetter: string | null;
+  /** Letter today; differs from the base letter when the line moved since. */
+  todayLetter: string | null;
+  nextLetter: string;
+  rows: FieldChangeRow[];
+  effect: number | null;
+}
+
+export interface HolderView {
+  kind: "item" | "group" | "unallocated";
+  number: string | null;
+  name: string;
+}
+
+export interface TransferView {
+  giver: HolderView;
+  receiver: HolderView;
+  hundredths: number;
+}
+
+export interface SignatureView {
+  id: number;
+  round: number;
+  capacity: Capacity;
+  decision: Decision;
+  meaning: string | null;
+  reason: string | null;
+  signer: PersonView;
+  /** As it was printed at the moment of signing. */
+  printedName: string;
+  deputyFor: PersonView | null;
+  at: string;
+  hash: string;
+  counts: boolean;
+  /** Why it does not count: "belongs to round 1", "taken back". */
+  becauseNot: string | null;
+}
+
+export interface CapacityView {
+  capacity: Capacity;
+  required: boolean;
+  reasons: string[];
+  filledBy: SignatureView | null;
+  /** Who may sign it now; empty and `missing` says which role is missing. */
+  maySign: PersonView[];
+  named: PersonView | null;
+  missing: string | null;
+}
+
+export interface RoutingView {
+  capacities: CapacityView[];
+  /** Persons who may not sign, each with why. */
+  barred: { person: PersonView; because: string }[];
+}
+
+export interface ReplyView {
+  id: number;
+  author: PersonView;
+  at: string;
+  text: string;
+  suggestion: string | null;
+}
+
+export interface RemarkView extends ReplyView {
+  /** "R1": counted within the proposal. */
+  number: number;
+  round: number;
+  line: LineReference | null;
+  field: string | null;
+  fieldLabel: string | null;
+  asksForAction: boolean;
+  settled: { by: PersonView; at: string; reason: string } | null;
+  replies: ReplyView[];
+  maySettle: boolean;
+}
+
+export interface ObjectionView {
+  id: number;
+  by: PersonView;
+  at: string;
+  round: number;
+  reason: string;
+}
+
+/** `applies` false: do not show it. Not `allowed`: show the sentence instead of the button. */
+export interface MoveView {
+  applies: boolean;
+  allowed: boolean;
+  because: string | null;
+}
+
+export const PROPOSAL_MOVES = [
+  "edit",
+  "share",
+  "propose",
+  "withdraw",
+  "carry_forward",
+  "sign_as_reviewer",
+  "sign_as_program_manager",
+  "return",
+  "disapprove",
+  "take_back",
+  "object",
+  "remark",
+  "name_reviewer",
+] as const;
+export type ProposalMove = (typeof PROPOSAL_MOVES)[number];
+
+export interface ProductView {
+  id: number;
+  code: string;
+  name: string;
+  kind: ProductKind;
+}
+
+export interface ProposalListRow {
+  proposalId: number;
+  /** As in the URL: the number, or "draft-17" before it has one. */
+  key: string;
+  /** "TF2-CP-04", or "Draft 17". */
+  label: string;
+  number: number | null;
+  title: string;
+  state: ProposalState;
+  round: number;
+  proposer: PersonView;
+  proposedAt: string | null;
+  decidedAt: string | null;
+  neededBy: string | null;
+  baseIssue: number;
+  lines: LineReference[];
+  /** Change of the predicted total at the worst point on today's issue, for what is open. */
+  effect: { operatingPoint: string; predictedDelta: number; standingWas: Standing; standingNow: Standing } | null;
+  waitingFor: { capacity: Capacity; names: string[] }[];
+  /** Sentences; empty when it is not overtaken. */
+  overtaken: string[];
+  unsettledRequests: number;
+}
+
+export interface RoundView {
+  round: number;
+  baseIssue: number;
+  submittedAt: string;
+  submittedBy: PersonView;
+  hash: string;
+}
+
+/** What is signed, exactly as it is kept. */
+export interface SigningSheetView {
+  text: string;
+  textHash: string;
+  roundHash: string;
+}
+
+export interface ProposalView {
+  product: ProductView;
+  proposalId: number;
+  key: string;
+  label: string;
+  number: number | null;
+  title: string;
+  reason: string;
+  neededBy: string | null;
+  state: ProposalState;
+  lockVersion: number;
+  proposer: PersonView;
+  coEditors: PersonView[];
+  newestIssue: number;
+  round: RoundView | null;
+  rounds: RoundView[];
+  /** Issue that the last signature made. */
+  approvedAsIssue: number | null;
+  lines: LineChangeView[];
+  transfers: TransferView[];
+  /** null where the content cannot be computed; `faults` says why. */
+  effectOnBase: EffectView | null;
+  effectToday: EffectView | null;
+  faults: { path: string; sentence: string }[];
+  /** Why today's issue could not take it: "010 would have to give 0.40 N more than it holds." */
+  blocked: string | null;
+  overtaken: string[];
+  routing: RoutingView | null;
+  signatures: SignatureView[];
+  objections: ObjectionView[];
+  remarks: RemarkView[];
+  moves: Record<ProposalMove, MoveView>;
+  /** For whom the reader may sign as a deputy, by capacity. */
+  deputyFor: { capacity: Capacity; person: PersonView }[];
+  signingSheet: SigningSheetView | null;
+}

@@ -1,0 +1,88 @@
+import type { LineKind } from "@/lib/vocabulary/lines";
+import type { ProposalState } from "@/lib/vocabulary/proposals";
+import type { Capacity } from "@/lib/vocabulary/roles";
+import type { Standing } from "@/lib/vocabulary/standing";
+import type { DraftContent } from "./schema";
+import type { LineReference, PersonView } from "./views";
+
+/** The working copy as its editors see it. */
+export interface DraftView {
+  proposalId: number;
+  key: string;
+  label: string;
+  productCode: string;
+  state: ProposalState;
+  lockVersion: number;
+  savedAt: string;
+  savedBy: PersonView;
+  /** Issue on which the working copy stands. */
+  baseIssue: number;
+  newestIssue: number;
+  content: DraftContent;
+  proposer: PersonView;
+  coEditors: PersonView[];
+  /** Members of the product whom one could name as co-editors. */
+  couldCoEdit: PersonView[];
+  /** Lines of this draft that drafts or open proposals of others touch too. */
+  touchedElsewhere: { line: LineReference; by: PersonView; state: ProposalState; number: number | null }[];
+  /** Warned before the first keystroke: editing bars from signing. */
+  warning: string | null;
+}
+
+/** One field that both sides changed since the base issue. */
+export interface SettlementRow {
+  kind: LineKind;
+  number: string;
+  lineName: string;
+  field: string;
+  label: string;
+  base: string | null;
+  theirs: string | null;
+  yours: string | null;
+}
+
+export interface SettlementView {
+  proposalId: number;
+  lockVersion: number;
+  baseIssue: number;
+  ontoIssue: number;
+  conflicts: SettlementRow[];
+  /** Fields that carry by themselves, with whose value. */
+  carried: (SettlementRow & { side: "theirs" | "yours" })[];
+  /** Why it cannot be carried at all, for example a line that was retired. */
+  obstacles: string[];
+  /** Effect on the newest issue as it would be without conflicts. */
+  predictedDelta: { operatingPoint: string; delta: number; standingNow: Standing }[];
+}
+
+export interface DaySheetEntry {
+  productCode: string;
+  proposalId: number;
+  key: string;
+  label: string;
+  title: string;
+  /** "Sign as reviewer", "Answer remark R2", "Carry forward to issue 14". */
+  what: string;
+  since: string;
+  neededBy: string | null;
+}
+
+export interface DaySheetItem {
+  productCode: string;
+  number: string;
+  name: string;
+  letter: string;
+  operatingPoint: string;
+  predicted: number | null;
+  allocationHundredths: number | null;
+  over: boolean;
+  cautions: number;
+}
+
+export interface DaySheetView {
+  waitsForMe: DaySheetEntry[];
+  iWaitFor: (DaySheetEntry & { waitingFor: { capacity: Capacity; names: string[] }[] })[];
+  myItems: DaySheetItem[];
+  changedSince: { productCode: string; issue: number; at: string; label: string; title: string; key: string }[];
+  lastSeenAt: string | null;
+}
