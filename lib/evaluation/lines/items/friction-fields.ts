@@ -1,0 +1,121 @@
+import { z } from "zod";
+import type { Choice, FieldSpec } from "../field-spec";
+import { nonNegativeQuantity, positiveNumber } from "../quantity";
+import { lineNumber } from "../text-schemas";
+
+export const FRICTION_LINES = [
+  "automatic",
+  "one-fifth-law",
+  "one-seventh-law",
+  "prandtl-schlichting",
+  "schultz-grunow",
+  "white",
+  "karman-schoenherr",
+  "ittc-1957",
+  "momentum-integral",
+  "fully-rough",
+  "fully-rough-mills-hang",
+] as const;
+export type FrictionLineChoice = (typeof FRICTION_LINES)[number];
+
+export const FRICTION_LINE_NAMES: Record<FrictionLineChoice, string> = {
+  automatic: "Automatic",
+  "one-fifth-law": "One-fifth power law",
+  "one-seventh-law": "One-seventh power law",
+  "prandtl-schlichting": "Prandtl–Schlichting",
+  "schultz-grunow": "Schultz-Grunow",
+  white: "White",
+  "karman-schoenherr": "Kármán–Schoenherr",
+  "ittc-1957": "ITTC 1957",
+  "momentum-integral": "Momentum integral (Coles)",
+  "fully-rough": "Fully rough (Schlichting)",
+  "fully-rough-mills-hang": "Fully rough (Mills–Hang)",
+};
+
+/** Surface, transition and line: the fields that every friction method shares. */
+export const frictionShape = {
+  finish: lineNumber.nullable().default(null),
+  roughness: nonNegativeQuantity.nullable().default(null),
+  transition: z.enum(["natural", "tripped", "laminar"], "Choose how the layer turns turbulent.").default("natural"),
+  criticalReynolds: positiveNumber.default(500_000),
+  trippedAt: nonNegativeQuantity.default({ value: 0 }),
+  frictionLine: z.enum(FRICTION_LINES, "Choose a friction line.").default("automatic"),
+};
+
+export const newFriction = {
+  finish: null,
+  roughness: { value: 0 },
+  transition: "natural",
+  criticalReynolds: 500_000,
+  trippedAt: { value: 0 },
+  frictionLine: "automatic",
+} as const;
+
+/** A surface takes its roughness from the catalogue or states it: exactly one of the two. */
+export function demandOneRoughness(
+  body: { finish: string | null; roughness: unknown },
+  context: { addIssue(issue: { code: "custom"; path: string[]; message: string }): void },
+): void {
+  const both = body.finish !== null && body.roughness !== null;
+  const none = body.finish === null && body.roughness === null;
+  if (!both && !none) return;
+
+  const message = both
+    ? "Choose a finish or type a roughness, not both."
+    : "Choose a finish from the catalogue or type a roughness (0 for a smooth surface).";
+  context.addIssue({ code: "custom", path: ["roughness"], message });
+}
+
+const TRANSITION_CHOICES: readonly Choice[] = [
+  { value: "natural", label: "Natural", help: "Turbulent from the critical Reynolds number on." },
+  { value: "tripped", label: "Tripped", help: "Turbulent from a stated place on; 0 means from the start." },
+  {
+    value: "laminar",
+    label: "Held laminar",
+    help: "Laminar to the end: needs evidence above the critical Reynolds number.",
+  },
+];
+
+export const FRICTION_FIELDS: readonly FieldSpec[] = [
+  {
+    key: "finish",
+    label: "Finish",
+    help: "From the catalogue; leave it empty to type the roughness.",
+    type: { type: "reference", to: "finish" },
+    optional: true,
+  },
+  {
+    key: "roughness",
+    label: "Roughness",
+    symbol: "k_s",
+    help: "Equivalent sand-grain roughness: not the Ra of a surface tester.",
+    type: { type: "quantity", dimension: "roughness" },
+    optional: true,
+    shownWhen: { field: "finish", is: [null] },
+  },
+  { key: "transition", label: "Transition", type: { type: "choice", choices: TRANSITION_CHOICES } },
+  {
+    key: "criticalReynolds",
+    label: "Critical Reynolds number",
+    symbol: "Re_tr",
+    type: { type: "number" },
+    shownWhen: { field: "transition", is: ["natural"] },
+  },
+  {
+    key: "trippedAt",
+    label: "Tripped at",
+    symbol: "x_tr",
+    help: "Measured from the start of the layer.",
+    type: { type: "quantity", dimension: "length" },
+    shownWhen: { field: "transition", is: ["tripped"] },
+  },
+  {
+    key: "frictionLine",
+    label: "Friction line",
+    help: "Automatic judges smooth or rough at each operating point; a line by name is used as asked.",
+    type: {
+      type: "choice",
+      choices: FRICTION_LINES.map((value) => ({ value, label: FRICTION_LINE_NAMES[value] })),
+    },
+  },
+];
