@@ -3,6 +3,11 @@ import { defineConfig } from "vitest/config";
 
 const root = path.resolve(__dirname, "..");
 
+/** Pure parts: no database, no other process. They run in the quick check. */
+const UNIT = ["lib/{vocabulary,units,aero,evaluation}", "policies", "templates"].map(
+  (folder) => `tests/${folder}/**/*.test.{ts,tsx}`,
+);
+
 export default defineConfig({
   root,
   resolve: {
@@ -13,11 +18,20 @@ export default defineConfig({
     },
   },
   test: {
-    include: ["tests/**/*.test.ts", "tests/**/*.test.tsx"],
-    exclude: ["tests/e2e/**", "node_modules/**"],
     pool: "forks",
     maxWorkers: 2,
     testTimeout: 30_000,
     hookTimeout: 60_000,
+    projects: [
+      { extends: true, test: { name: "unit", include: UNIT } },
+      {
+        extends: true,
+        test: {
+          name: "integration",
+          include: ["tests/**/*.test.{ts,tsx}"],
+          exclude: [...UNIT, "tests/e2e/**", "node_modules/**"],
+        },
+      },
+    ],
   },
 });
