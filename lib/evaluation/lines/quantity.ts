@@ -22,11 +22,14 @@ export const signedNumber = anyNumber;
 export const fractionNumber = anyNumber.min(0, "Must be 0 or greater.").max(1, "At most 1, which is 100 %.");
 
 function quantityOf(value: z.ZodNumber) {
-  return z.strictObject({
-    value,
-    entered: z.string().max(40, "At most 40 characters.").optional(),
-    standardUncertainty: nonNegativeNumber.optional(),
-  });
+  return z.strictObject(
+    {
+      value,
+      entered: z.string().max(40, "At most 40 characters.").optional(),
+      standardUncertainty: nonNegativeNumber.optional(),
+    },
+    { error: (issue) => (issue.code === "invalid_type" ? "Give a value." : undefined) },
+  );
 }
 
 export const positiveQuantity = quantityOf(positiveNumber);

@@ -4,15 +4,19 @@ const CONTROL_CHARACTERS = /[\u0000-\u0008\u000b-\u001f\u007f]/;
 
 /** One line of text that must be there. */
 export function requiredText(sentence: string, longest: number) {
-  return optionalText(longest).min(1, sentence);
+  return text(sentence, longest).min(1, sentence);
 }
 
 export function optionalText(longest: number) {
+  return text("Give a text.", longest);
+}
+
+function text(sentence: string, longest: number) {
   return z
-    .string("Give a text.")
+    .string(sentence)
     .trim()
     .max(longest, `At most ${longest} characters.`)
-    .refine((text) => !CONTROL_CHARACTERS.test(text), "Contains control characters.");
+    .refine((typed) => !CONTROL_CHARACTERS.test(typed), "Contains control characters.");
 }
 
 /** A line's number within its product and kind: the author's choice, never reused. */
