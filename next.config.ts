@@ -5,6 +5,12 @@ const config: NextConfig = {
   serverExternalPackages: ["sequelize"],
   typedRoutes: true,
   poweredByHeader: false,
+  experimental: {
+    // forbidden() answers 403 with app/forbidden.tsx.
+    authInterrupts: true,
+    serverActions: { bodySizeLimit: "512kb" },
+    proxyClientMaxBodySize: "1mb",
+  },
 };
 
 export default config;

@@ -1,0 +1,84 @@
+"use client";
+
+import { useRouter } from "next/navigation";
+import { type FormEvent, type ReactNode, type RefObject, useRef, useState } from "react";
+
+import type { ActionResult } from "../_server/action-result";
+import { Button, type ButtonKind } from "./button";
+import { ModalSheet } from "./modal-sheet";
+import { Notice } from "./notice";
+
+/** Looks up the sentence at a field. */
+export type FaultOf = (path: string) => string | undefined;
+
+interface ConfirmDialogProps {
+  /** Text of the button that opens the dialog; ends in an ellipsis. */
+  trigger: string;
+  triggerKind?: ButtonKind;
+  disabled?: boolean;
+  title: string;
+  /** Text of the button that acts: "Sign". */
+  confirm: string;
+  confirmKind?: ButtonKind;
+  /** What is agreed to, and the fields that are asked. */
+  children: ReactNode | ((faultOf: FaultOf) => ReactNode);
+  onConfirm: (form: FormData) => Promise<ActionResult<unknown>>;
+  /** After success; without it the page is read again. */
+  onDone?: () => void;
+}
+
+/** Asks once more before an act: native dialog, its own form, refusals shown inside it. */
+export function ConfirmDialog(props: ConfirmDialogProps) {
+  const { trigger, triggerKind, disabled, title, confirm, confirmKind = "primary", children } = props;
+  const dialog = useRef<HTMLDialogElement>(null);
+  const { busy, answer, submit, clear } = useConfirmation(dialog, props);
+  const refused = answer && !answer.ok ? answer : null;
+  const faultOf: FaultOf = (path) => refused?.faults.find((fault) => fault.path === path)?.sentence;
+
+  return (
+    <>
+      <Button kind={triggerKind} disabled={disabled} aria-haspopup="dialog" onClick={() => dialog.current?.showModal()}>
+        {trigger}
+      </Button>
+      <ModalSheet dialog={dialog} title={title} onClose={clear}>
+        <form onSubmit={submit} className="space-y-4">
+          {typeof children === "function" ? children(faultOf) : children}
+          {refused ? <Notice kind="refusal">{refused.sentence}</Notice> : null}
+          <div className="flex flex-wrap gap-2">
+            <Button type="submit" kind={confirmKind} busy={busy}>
+              {busy ? "One moment…" : confirm}
+            </Button>
+            <Button onClick={() => dialog.current?.close()}>Leave it</Button>
+          </div>
+        </form>
+      </ModalSheet>
+    </>
+  );
+}
+
+function useConfirmation(
+  dialog: RefObject<HTMLDialogElement | null>,
+  { onConfirm, onDone }: Pick<ConfirmDialogProps, "onConfirm" | "onDone">,
+) {
+  const router = useRouter();
+  const [busy, setBusy] = useState(false);
+  const [answer, setAnswer] = useState<ActionResult<unknown> | null>(null);
+
+  async function submit(event: FormEvent<HTMLFormElement>) {
+    event.preventDefault();
+    if (busy) return;
+    setBusy(true);
+    try {
+      const result = await onConfirm(new FormData(event.currentTarget));
+      setAnswer(result);
+      if (!result.ok) return;
+      dialog.current?.close();
+      if (onDone) onDone();
+      else router.refresh();
+    } finally {
+      setBusy(false);
+    }
+  }
+
+  return { busy, answer, submit, clear: () => setAnswer(null) };
+}
