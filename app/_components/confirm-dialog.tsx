@@ -48,7 +48,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
             <Button type="submit" kind={confirmKind} busy={busy}>
               {busy ? "One moment…" : confirm}
             </Button>
-            <Button onClick={() => dialog.current?.close()}>Leave it</Button>
+            <Button onClick={() => dialog.current?.close()}>Cancel</Button>
           </div>
         </form>
       </ModalSheet>

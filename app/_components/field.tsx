@@ -23,7 +23,7 @@ interface FieldProps extends FieldTexts {
 }
 
 export const CONTROL =
-  "block w-full min-h-9 rounded-edge border border-rule-strong bg-sheet px-2.5 py-1.5 text-base text-ink placeholder:text-ink-2 aria-invalid:border-signal aria-invalid:border-2 disabled:bg-band disabled:text-ink-2";
+  "block w-full min-h-9 rounded-edge border border-ink-2 bg-sheet px-2.5 py-1.5 text-base text-ink placeholder:text-ink-2 aria-invalid:border-signal aria-invalid:border-2 disabled:bg-band disabled:text-ink-2";
 
 /** Label above, hint and error below, all tied to the control. */
 export function Field({ label, hint, error, optional, children, id }: FieldProps) {

@@ -15,7 +15,7 @@ interface TableProps {
 }
 
 const SCROLL =
-  "max-lg:[&_tr>*:first-child]:sticky max-lg:[&_tr>*:first-child]:left-0 max-lg:[&_tr>*:first-child]:z-10 max-lg:[&_tr>*:first-child]:max-w-[42vw] max-lg:[&_tr>*:first-child]:bg-inherit max-lg:[&_tr>*:first-child]:whitespace-normal";
+  "max-lg:min-w-[42rem] max-lg:[&_tr>*:first-child]:sticky max-lg:[&_tr>*:first-child]:left-0 max-lg:[&_tr>*:first-child]:z-10 max-lg:[&_tr>*:first-child]:max-w-[42vw] max-lg:[&_tr>*:first-child]:bg-inherit max-lg:[&_tr>*:first-child]:whitespace-normal";
 
 const STACK =
   "max-sm:block max-sm:[&_thead]:sr-only max-sm:[&_tbody]:block max-sm:[&_tbody_tr]:block max-sm:[&_tbody_tr]:border-b max-sm:[&_tbody_tr]:border-rule-strong max-sm:[&_tbody_tr]:py-2 max-sm:[&_tbody_tr>*]:grid max-sm:[&_tbody_tr>*]:grid-cols-[8rem_minmax(0,1fr)] max-sm:[&_tbody_tr>*]:gap-x-3 max-sm:[&_tbody_tr>*]:border-0 max-sm:[&_tbody_tr>*]:px-0 max-sm:[&_tbody_tr>*]:py-1 max-sm:[&_tbody_tr>*]:text-left max-sm:[&_tbody_tr>*]:whitespace-normal max-sm:[&_tbody_tr>*]:before:text-xs max-sm:[&_tbody_tr>*]:before:font-normal max-sm:[&_tbody_tr>*]:before:text-ink-2 max-sm:[&_tbody_tr>*]:before:content-[attr(data-label)]";
@@ -32,7 +32,7 @@ export function Table({ caption, showCaption = false, narrow = "scroll", childre
   if (narrow === "stack") return table;
 
   return (
-    <div role="region" aria-label={caption} tabIndex={0} className="overflow-x-auto lg:overflow-visible">
+    <div role="region" aria-label={caption} tabIndex={0} className="relative overflow-x-auto lg:overflow-visible">
       {table}
     </div>
   );
@@ -103,7 +103,7 @@ interface CellProps extends ComponentProps<"td"> {
   label?: string;
 }
 
-export function Cell({ numeric = false, label, className, ...rest }: CellProps) {
+export function Cell({ numeric = false, label, className, children, ...rest }: CellProps) {
   return (
     <td
       data-label={label}
@@ -113,19 +113,23 @@ export function Cell({ numeric = false, label, className, ...rest }: CellProps) 
         className,
       )}
       {...rest}
-    />
+    >
+      {label ? <div className="min-w-0">{children}</div> : children}
+    </td>
   );
 }
 
 /** The cell that names its row. */
-export function RowHead({ label, className, ...rest }: ComponentProps<"th"> & { label?: string }) {
+export function RowHead({ label, className, children, ...rest }: ComponentProps<"th"> & { label?: string }) {
   return (
     <th
       scope="row"
       data-label={label}
       className={join("border-b border-rule px-2.5 py-2 text-left align-top font-normal", className)}
       {...rest}
-    />
+    >
+      {label ? <div className="min-w-0">{children}</div> : children}
+    </th>
   );
 }
 

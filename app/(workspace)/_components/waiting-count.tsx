@@ -1,0 +1,25 @@
+"use client";
+
+import Link from "next/link";
+import useSWR from "swr";
+import { z } from "zod";
+
+const Waiting = z.object({ count: z.int().min(0) });
+
+async function readWaiting(address: string): Promise<number | null> {
+  const answer = await fetch(address);
+
+  return answer.ok ? Waiting.parse(await answer.json()).count : null;
+}
+
+/** How much waits for the reader; read anew when they come back to the window. */
+export function WaitingCount() {
+  const { data } = useSWR("/api/waiting", readWaiting, { refreshInterval: 60_000 });
+  if (!data) return null;
+
+  return (
+    <Link href="/" className="py-1 hover:text-ink hover:underline">
+      {data === 1 ? "1 waits for you" : `${data} wait for you`}
+    </Link>
+  );
+}

@@ -1,0 +1,35 @@
+import Link from "next/link";
+
+import { LeeboardMark } from "@/app/_components/leeboard-mark";
+
+import { HeaderLink } from "./header-link";
+import { SignOutButton } from "./sign-out-button";
+import { WaitingCount } from "./waiting-count";
+
+interface WorkspaceHeaderProps {
+  name: string;
+  isAdministrator: boolean;
+}
+
+/** Head of every page behind the sign-in. */
+export function WorkspaceHeader({ name, isAdministrator }: WorkspaceHeaderProps) {
+  return (
+    <header className="flex flex-wrap items-baseline gap-x-5 gap-y-1 border-b border-rule-strong px-3 py-3 sm:px-7 print:hidden">
+      <Link href="/" className="mr-1 py-1" aria-label="Leeboard, to the day sheet">
+        <LeeboardMark />
+      </Link>
+      <nav aria-label="Places" className="flex flex-wrap gap-x-5">
+        <HeaderLink href="/" exact>
+          Day sheet
+        </HeaderLink>
+        <HeaderLink href="/products">Products</HeaderLink>
+        {isAdministrator ? <HeaderLink href="/administration">Administration</HeaderLink> : null}
+      </nav>
+      <div className="flex flex-wrap items-baseline gap-x-5 text-ink-2 sm:ml-auto">
+        <WaitingCount />
+        <HeaderLink href="/account">{name}</HeaderLink>
+        <SignOutButton />
+      </div>
+    </header>
+  );
+}
