@@ -25,9 +25,13 @@ export interface JustificationNeed {
 const EXCESS_TOLERANCE = 1e-9;
 
 /** Every note of an edited item that needs a justification, whether it has one or not. */
-export function justificationNeeds(edits: readonly LineEdit[], results: BudgetResults): JustificationNeed[] {
+export function justificationNeeds(
+  edits: readonly LineEdit[],
+  after: BudgetState,
+  results: BudgetResults,
+): JustificationNeed[] {
   return edits.flatMap((edit, index) => {
-    const body = editedItem(edit);
+    const body = editedItem(edit, after);
     if (body === null) return [];
     return worstNotes(edit.number, results).map(({ code, excess, sentence }) => {
       const given = body.justifications.find((justification) => justification.code === code);
@@ -42,8 +46,9 @@ export function justificationNeeds(edits: readonly LineEdit[], results: BudgetRe
  * what it covered there.
  */
 export function stampJustifications(edit: LineEdit, base: BudgetState, results: BudgetResults): LineEdit {
-  const body = editedItem(edit);
-  if (body === null || body.justifications.length === 0) return edit;
+  const parsed = edit.kind === "item" ? parseBody("item", edit.body) : null;
+  if (!parsed?.ok || parsed.content.kind !== "item" || parsed.content.body.justifications.length === 0) return edit;
+  const { body } = parsed.content;
   const line = base.lines.find(({ kind, number }) => kind === "item" && number === edit.number);
   const earlier = line?.kind === "item" ? line.body.justifications : [];
   const worst = worstNotes(edit.number, results);
@@ -67,9 +72,9 @@ export function justificationFaults(needs: readonly JustificationNeed[]): FieldF
 }
 
 /** A grade above estimated rests on a document that is cited. */
-export function evidenceFaults(edits: readonly LineEdit[]): FieldFault[] {
+export function evidenceFaults(edits: readonly LineEdit[], after: BudgetState): FieldFault[] {
   return edits.flatMap((edit, index) => {
-    const body = editedItem(edit);
+    const body = editedItem(edit, after);
     if (body === null || body.grade === "estimated" || body.evidence.length > 0) return [];
     const grade = MATURITY_GRADE_NAMES[body.grade];
     const sentence = `The grade ${grade} needs evidence: cite a document with its revision and date.`;
@@ -89,10 +94,11 @@ export function refusedResultFaults(edits: readonly LineEdit[], results: BudgetR
   );
 }
 
-function editedItem({ kind, operation, body }: LineEdit): ItemBody | null {
+/** The item as the edit leaves it; a retired one needs nothing any more. */
+function editedItem({ kind, operation, number }: LineEdit, after: BudgetState): ItemBody | null {
   if (kind !== "item" || operation === "retire") return null;
-  const parsed = parseBody("item", body);
-  return parsed.ok && parsed.content.kind === "item" ? parsed.content.body : null;
+  const line = after.lines.find((candidate) => candidate.kind === "item" && candidate.number === number);
+  return line?.kind === "item" ? line.body : null;
 }
 
 function worstNotes(item: string, results: BudgetResults): { code: NoteCode; excess: number; sentence: string }[] {
