@@ -33,7 +33,8 @@ export const ALLOCATIONS_FIELDS: readonly FieldSpec[] = [
     label: "Allocation",
     type: {
       type: "list",
-      entry: "Allocation",
+      entry: "Allocation of",
+      keyedBy: ["kind", "number"],
       of: [
         { key: "kind", label: "Kind", type: { type: "text", longest: 10 } },
         { key: "number", label: "Number", type: { type: "text", longest: 12 } },

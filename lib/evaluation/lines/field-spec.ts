@@ -28,7 +28,8 @@ export type FieldType =
   | { type: "references"; to: LineKind }
   | { type: "person" }
   | { type: "date" }
-  | { type: "list"; entry: string; of: readonly FieldSpec[] }
+  /** `keyedBy`: the columns that name an entry, so that it keeps its name when others come and go. */
+  | { type: "list"; entry: string; of: readonly FieldSpec[]; keyedBy?: readonly string[] }
   | { type: "record"; of: readonly FieldSpec[] };
 
 export interface FieldSpec {

@@ -61,7 +61,7 @@ export const TERMS_FIELDS: readonly FieldSpec[] = [
     key: "reserves",
     label: "Reserve",
     help: "At an operating point that is not named here the reserve scales with the limit.",
-    type: { type: "list", entry: "Reserve", of: RESERVE_COLUMNS },
+    type: { type: "list", entry: "Reserve at", of: RESERVE_COLUMNS, keyedBy: ["operatingPoint"] },
   },
   {
     key: "growthTable",
@@ -103,7 +103,7 @@ export const TERMS_FIELDS: readonly FieldSpec[] = [
     key: "plannedProfile",
     label: "Planned profile",
     help: "Where the predicted total is meant to stand, and when.",
-    type: { type: "list", entry: "Planned", of: PROFILE_COLUMNS },
+    type: { type: "list", entry: "Planned on", of: PROFILE_COLUMNS, keyedBy: ["date"] },
     optional: true,
   },
   {

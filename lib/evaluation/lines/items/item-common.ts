@@ -82,7 +82,8 @@ export const ITEM_CLOSING_FIELDS: readonly FieldSpec[] = [
     help: "One for each note that needs one.",
     type: {
       type: "list",
-      entry: "Justification",
+      entry: "Justification of",
+      keyedBy: ["code"],
       of: [
         { key: "code", label: "Note", type: { type: "text", longest: 80 }, fixed: true },
         { key: "text", label: "Justification", type: { type: "text", longest: 1000, multiline: true } },
