@@ -4,8 +4,8 @@ import { ensureBuild } from "./readiness/build.mjs";
 import { nodeVersionFault } from "./readiness/node-version.mjs";
 import { ensurePackages } from "./readiness/packages.mjs";
 import { repositoryRoot } from "./readiness/repository-root.mjs";
-import { runProgram } from "./readiness/run-program.mjs";
 import { applicationEnvironment, startApplication } from "./start/application.mjs";
+import { prepareDatabase } from "./start/database.mjs";
 import { startMailCatcher } from "./start/mail-catcher.mjs";
 import { preconditionFaults } from "./start/preconditions.mjs";
 import { sessionSecret } from "./start/secret.mjs";
@@ -58,19 +58,6 @@ async function start() {
 /** @param {readonly string[]} faults */
 function refuse(faults) {
   if (faults.length > 0) throw new Error(faults.join("\n"));
-}
-
-/**
- * Migrates the database, fills an empty one, and says who can sign in.
- * @param {import("./start/settings.mjs").Settings} settings
- */
-async function prepareDatabase({ dataFolder, demo, adminEmail }) {
-  const code = await runProgram(
-    process.execPath,
-    ["--conditions=react-server", "--import", "tsx", `${repositoryRoot}/scripts/prepare-database.ts`],
-    { LEEBOARD_DATA: dataFolder, LEEBOARD_DEMO: demo ? "on" : "off", LEEBOARD_ADMIN_EMAIL: adminEmail ?? "" },
-  );
-  if (code !== 0) throw new Error("The database could not be prepared; the reason stands above.");
 }
 
 /** @param {number} code */

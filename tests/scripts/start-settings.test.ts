@@ -59,12 +59,12 @@ describe("the settings of the start", () => {
     expect(faults[0]).not.toContain("secret");
   });
 
-  it("names the oldest version of Node that will do", () => {
+  it("names the versions of Node that will do", () => {
     expect(nodeVersionFault("18.20.4")).toBe(
-      "Leeboard needs Node 20.9 or later; this is Node 18.20.4. Install a newer Node and run the command again.",
+      "Leeboard needs Node 20.19, 22.13 or a later version; this is Node 18.20.4. Install one of these and run the command again.",
     );
-    expect(["20.9.0", "20.20.2", "22.1.0"].map(nodeVersionFault)).toEqual([null, null, null]);
-    expect(nodeVersionFault("20.8.9")).not.toBeNull();
+    expect(["20.19.0", "20.20.2", "22.13.0", "24.1.0"].map(nodeVersionFault)).toEqual([null, null, null, null]);
+    expect(["20.18.9", "21.7.3", "22.12.0"].map(nodeVersionFault)).not.toContain(null);
   });
 });
 

@@ -1,0 +1,29 @@
+import { defineConfig } from "@playwright/test";
+
+export default defineConfig({
+  testDir: "e2e",
+  testMatch: "**/*.spec.ts",
+  outputDir: "../test-results/browser",
+  globalSetup: "./e2e/support/global-setup.ts",
+  // One application with one database: the tests of a file build on each other's acts no more than people do.
+  workers: 1,
+  fullyParallel: false,
+  retries: 0,
+  timeout: 60_000,
+  expect: { timeout: 10_000 },
+  use: {
+    browserName: "chromium",
+    viewport: { width: 1280, height: 900 },
+    locale: "en-GB",
+    trace: "off",
+    screenshot: "only-on-failure",
+    launchOptions: {
+      executablePath: "/usr/bin/chromium",
+      // The sandbox needs rights that a container's root does not have; the rest keeps Chromium off the network.
+      args: [
+        ...["--no-sandbox", "--disable-gpu", "--disable-background-networking"],
+        ...["--disable-component-update", "--disable-sync"],
+      ],
+    },
+  },
+});
