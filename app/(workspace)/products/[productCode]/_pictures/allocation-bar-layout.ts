@@ -32,6 +32,6 @@ export function allocationBarLayout({ basic, predicted, allocation }: Allocation
     basic: { from: 0, to: solid / length },
     growth: { from: solid / length, to: end / length },
     over: !isSaving && predicted > overFrom ? { from: Math.max(0, overFrom) / length, to: predicted / length } : null,
-    post: reference === null ? null : reference / length,
+    post: allocation === null ? null : Math.abs(allocation) / length,
   };
 }

@@ -1,0 +1,48 @@
+import { describe, expect, it } from "vitest";
+import { trendLayout } from "@/app/(workspace)/products/[productCode]/_pictures/trend-layout";
+
+const issues = [
+  { issue: 1, at: "2026-01-01T00:00:00.000Z", basic: 80, predicted: 100, limit: 120, reserve: 10 },
+  { issue: 2, at: "2026-03-01T00:00:00.000Z", basic: 90, predicted: 105, limit: 120, reserve: 10 },
+];
+const until = "2026-05-01T00:00:00.000Z";
+
+describe("the trend over issues", () => {
+  it("holds a value until the next issue, and the last one until the end", () => {
+    const { predicted } = trendLayout(issues, [], until);
+
+    expect(predicted.map(({ x }) => x)).toEqual([0, 59 / 120, 59 / 120, 1]);
+    expect(predicted[0]?.y).toBe(predicted[1]?.y);
+    expect(predicted[2]?.y).toBeGreaterThan(predicted[1]?.y ?? Infinity);
+  });
+
+  it("draws the reserve below the limit and no limit where none is set", () => {
+    const layout = trendLayout(issues, [], until);
+    expect(layout.reserve[0]?.y).toBeLessThan(layout.limit[0]?.y ?? -Infinity);
+
+    const without = issues.map((issue) => ({ ...issue, limit: null }));
+    expect(trendLayout(without, [], until)).toMatchObject({ limit: [], reserve: [] });
+  });
+
+  it("encloses the planned profile by its tolerance", () => {
+    const layout = trendLayout(issues, [{ date: "2026-02-01", predicted: 100, tolerance: 5 }], until);
+
+    expect(layout.plannedBand[0]?.y).toBeGreaterThan(layout.planned[0]?.y ?? Infinity);
+    expect(layout.plannedBand[1]?.y).toBeLessThan(layout.planned[0]?.y ?? -Infinity);
+  });
+
+  it("names a few whole days along the foot, each once", () => {
+    const labels = trendLayout(issues, [], until).dates.map(({ label }) => label);
+
+    expect(labels.length).toBeGreaterThan(1);
+    expect(labels.length).toBeLessThanOrEqual(6);
+    expect(new Set(labels).size).toBe(labels.length);
+  });
+
+  it("can be drawn from a single issue at a single moment", () => {
+    const [only] = issues;
+    const layout = trendLayout(only ? [only] : [], [], only?.at ?? until);
+
+    expect(layout.marks.every(({ x, y }) => Number.isFinite(x) && Number.isFinite(y))).toBe(true);
+  });
+});
