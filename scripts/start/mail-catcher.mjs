@@ -20,7 +20,7 @@ export async function startMailCatcher({ smtpPort, webPort }) {
     mailDirectory: mailFolder,
     silent: true,
   });
-  const { smtp, api } = await catcher.start();
+  const { smtp, api } = await quietly(() => catcher.start());
   return {
     smtpPort: portOf(smtp.getAddress()),
     webPort: portOf(api?.getAddress()),
@@ -29,6 +29,21 @@ export async function startMailCatcher({ smtpPort, webPort }) {
       rmSync(mailFolder, { recursive: true, force: true });
     },
   };
+}
+
+/**
+ * The catcher announces its address even when told to be silent; the caller prints it once, with the others.
+ * @template Result
+ * @param {() => Promise<Result>} work
+ */
+async function quietly(work) {
+  const { info } = console;
+  console.info = () => {};
+  try {
+    return await work();
+  } finally {
+    console.info = info;
+  }
 }
 
 /** @param {{ port: number } | null | undefined} address */
