@@ -1,6 +1,7 @@
 import { z } from "zod";
 import type { FieldSpec } from "./field-spec";
-import { FLUID_CHOICES, FLUIDS, type Fluid } from "./fluids";
+import { FLUID_STATE_FIELDS, fluidStateFaults } from "./fluid-state";
+import { FLUID_CHOICES, FLUIDS } from "./fluids";
 import { nonNegativeNumber, positiveQuantity, signedQuantity } from "./quantity";
 import { hundredths, requiredText } from "./text-schemas";
 
@@ -20,74 +21,11 @@ export const OperatingPointBody = z
     limitHundredths: hundredths.min(1, "Must be greater than 0.").nullable().default(null),
   })
   .superRefine((body, context) => {
-    for (const { path, message } of stateFaults(body)) context.addIssue({ code: "custom", path: [path], message });
+    for (const { field, sentence } of fluidStateFaults(body)) {
+      context.addIssue({ code: "custom", path: [field], message: sentence });
+    }
   });
 export type OperatingPointBody = z.output<typeof OperatingPointBody>;
-
-const STATE_FIELDS = [
-  "staticTemperature",
-  "staticPressure",
-  "pressureAltitude",
-  "density",
-  "dynamicViscosity",
-] as const;
-type StateField = (typeof STATE_FIELDS)[number];
-
-const STATE_FIELDS_OF: Record<Fluid, readonly StateField[]> = {
-  air: ["staticTemperature", "staticPressure", "pressureAltitude"],
-  "fresh-water": ["staticTemperature"],
-  "sea-water": ["staticTemperature"],
-  custom: ["density", "dynamicViscosity"],
-};
-
-/** Admitted states, as the formulas of the fluids are stated for. */
-const RANGES: Partial<Record<`${Fluid} ${StateField}`, { least: number; greatest: number; sentence: string }>> = {
-  "air staticTemperature": {
-    least: 150,
-    greatest: 600,
-    sentence: "Air is admitted from 150 to 600 K (−123.15 to 326.85 °C).",
-  },
-  "air staticPressure": { least: 5e3, greatest: 1e6, sentence: "Air is admitted from 5 × 10³ to 10⁶ Pa." },
-  "air pressureAltitude": { least: -2000, greatest: 20000, sentence: "Admitted from −2 to 20 km." },
-  "fresh-water staticTemperature": {
-    least: 273.15,
-    greatest: 373.15,
-    sentence: "Fresh water is admitted from 273.15 to 373.15 K (0 to 100 °C).",
-  },
-  "sea-water staticTemperature": {
-    least: 273.15,
-    greatest: 313.15,
-    sentence: "Sea water is admitted from 273.15 to 313.15 K (0 to 40 °C).",
-  },
-};
-
-type State = { fluid: Fluid } & Record<StateField, { value: number } | null>;
-
-function stateFaults(body: State): { path: StateField; message: string }[] {
-  return STATE_FIELDS.flatMap((path) => {
-    const quantity = body[path];
-    if (quantity === null) return missing(body, path) ? [{ path, message: missingSentence(body.fluid, path) }] : [];
-    if (!STATE_FIELDS_OF[body.fluid].includes(path)) {
-      return [{ path, message: "Does not belong to this fluid: leave it empty." }];
-    }
-    if (path === "pressureAltitude" && body.staticPressure !== null) {
-      return [{ path, message: "Give a pressure or an altitude, not both." }];
-    }
-    const range = RANGES[`${body.fluid} ${path}`];
-    const outside = range && (quantity.value < range.least || quantity.value > range.greatest);
-    return outside ? [{ path, message: range.sentence }] : [];
-  });
-}
-
-function missing(body: State, path: StateField): boolean {
-  if (!STATE_FIELDS_OF[body.fluid].includes(path) || path === "pressureAltitude") return false;
-  if (body.fluid === "air" && body.pressureAltitude !== null) return false;
-  return true;
-}
-
-function missingSentence(fluid: Fluid, path: StateField): string {
-  return fluid === "air" && path === "staticPressure" ? "Give a pressure or an altitude." : "Needed for this fluid.";
-}
 
 const AIR_ONLY = { field: "fluid", is: ["air"] };
 const CUSTOM_ONLY = { field: "fluid", is: ["custom"] };
@@ -160,7 +98,7 @@ export const OPERATING_POINT_FIELDS: readonly FieldSpec[] = [
 export const OPERATING_POINT_STATE_FIELDS: readonly (keyof OperatingPointBody)[] = [
   "fluid",
   "fluidVersion",
-  ...STATE_FIELDS,
+  ...FLUID_STATE_FIELDS,
   "speed",
 ];
 

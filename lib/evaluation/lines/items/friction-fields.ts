@@ -32,6 +32,10 @@ export const FRICTION_LINE_NAMES: Record<FrictionLineChoice, string> = {
   "fully-rough-mills-hang": "Fully rough (Mills–Hang)",
 };
 
+export function isFullyRough(line: FrictionLineChoice): boolean {
+  return line === "fully-rough" || line === "fully-rough-mills-hang";
+}
+
 /** Surface, transition and line: the fields that every friction method shares. */
 export const frictionShape = {
   finish: lineNumber.nullable().default(null),
@@ -53,12 +57,18 @@ export const newFriction = {
 
 /** A surface takes its roughness from the catalogue or states it: exactly one of the two. */
 export function demandOneRoughness(
-  body: { finish: string | null; roughness: unknown },
+  body: { finish: string | null; roughness: { value: number } | null; frictionLine: FrictionLineChoice },
   context: { addIssue(issue: { code: "custom"; path: string[]; message: string }): void },
 ): void {
   const both = body.finish !== null && body.roughness !== null;
   const none = body.finish === null && body.roughness === null;
-  if (!both && !none) return;
+  if (!both && !none) {
+    if (isFullyRough(body.frictionLine) && body.roughness?.value === 0) {
+      const message = "A fully rough line needs a roughness greater than 0.";
+      context.addIssue({ code: "custom", path: ["roughness"], message });
+    }
+    return;
+  }
 
   const message = both
     ? "Choose a finish or type a roughness, not both."

@@ -1,8 +1,9 @@
 import { z } from "zod";
 import type { FieldSpec } from "../field-spec";
-import { positiveQuantity, signedQuantity } from "../quantity";
+import { fluidStateFaults, type FluidState, type FluidStateField } from "../fluid-state";
+import { FLUID_CHOICES, FLUIDS, type Fluid } from "../fluids";
+import { positiveQuantity, signedQuantity, type Quantity } from "../quantity";
 import { calendarDate, requiredText } from "../text-schemas";
-import { FLUID_CHOICES, FLUIDS } from "../fluids";
 import { itemCommonShape, newItemCommon, type NewItem } from "./item-common";
 import { demandSign } from "./saving-sign";
 
@@ -22,26 +23,39 @@ export const MeasuredBody = z
   })
   .superRefine((body, context) => {
     demandSign(body.saving, body.force, "force", context);
-    for (const field of TEST_STATE_OF[body.testFluid]) {
-      if (body[field] === null) {
-        context.addIssue({
-          code: "custom",
-          path: [field],
-          message: "Needed: a force without the state of its stream says nothing.",
-        });
-      }
+    for (const { field, sentence } of fluidStateFaults(testState(body))) {
+      context.addIssue({ code: "custom", path: [TEST_FIELDS[field]], message: sentence });
     }
   });
 export type MeasuredBody = z.output<typeof MeasuredBody>;
 
-type TestStateField = "testTemperature" | "testPressure" | "testDensity" | "testDynamicViscosity";
-
-const TEST_STATE_OF: Record<(typeof FLUIDS)[number], readonly TestStateField[]> = {
-  air: ["testTemperature", "testPressure"],
-  "fresh-water": ["testTemperature"],
-  "sea-water": ["testTemperature"],
-  custom: ["testDensity", "testDynamicViscosity"],
+/** A force without the state of its stream says nothing: the test is held to the rules of an operating point. */
+const TEST_FIELDS: Record<FluidStateField, string> = {
+  staticTemperature: "testTemperature",
+  staticPressure: "testPressure",
+  pressureAltitude: "testPressure",
+  density: "testDensity",
+  dynamicViscosity: "testDynamicViscosity",
 };
+
+interface TestFields {
+  testFluid: Fluid;
+  testTemperature: Quantity | null;
+  testPressure: Quantity | null;
+  testDensity: Quantity | null;
+  testDynamicViscosity: Quantity | null;
+}
+
+function testState(body: TestFields): FluidState {
+  return {
+    fluid: body.testFluid,
+    staticTemperature: body.testTemperature,
+    staticPressure: body.testPressure,
+    pressureAltitude: null,
+    density: body.testDensity,
+    dynamicViscosity: body.testDynamicViscosity,
+  };
+}
 
 export const MEASURED_FIELDS: readonly FieldSpec[] = [
   {
