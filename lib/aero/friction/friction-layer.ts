@@ -1,7 +1,7 @@
 import { blasiusFrictionIntegral, blasiusLocalCoefficient } from "./blasius";
 import type { FrictionLine, TurbulentLayer } from "./friction-line";
 import type { FrictionLineName } from "./friction-line-name";
-import type { Transition } from "./transition";
+import { isBeyond, type Transition } from "./transition";
 
 /** A layer from its start, laminar stretch and all. All functions take Re = U x/ν, 0 or greater. */
 export interface FrictionLayer {
@@ -51,7 +51,7 @@ function withLaminarStretch(
 ): FrictionLayer {
   const laminar = blasiusFrictionIntegral(transitionReynolds);
   const { shift, excess } = continuation(turbulent, transitionReynolds, laminar);
-  const isLaminar = (reynolds: number): boolean => reynolds <= transitionReynolds;
+  const isLaminar = (reynolds: number): boolean => !isBeyond(reynolds, transitionReynolds);
   return {
     frictionIntegral: (reynolds) =>
       isLaminar(reynolds) ? blasiusFrictionIntegral(reynolds) : turbulent.frictionIntegral(reynolds + shift) - excess,

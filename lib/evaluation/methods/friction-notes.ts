@@ -1,0 +1,168 @@
+import { AUTOMATIC_RANGE } from "@/lib/aero/friction/automatic-layer";
+import { BLASIUS_RANGE } from "@/lib/aero/friction/blasius";
+import { frictionBetween } from "@/lib/aero/friction/friction-between";
+import { frictionLayer } from "@/lib/aero/friction/friction-layer";
+import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
+import { PRANDTL_SCHLICHTING } from "@/lib/aero/friction/prandtl-schlichting";
+import { isBelow, isBeyond } from "@/lib/aero/friction/transition";
+import { within } from "@/lib/aero/range";
+import type { Note } from "../notes/note";
+import { makeNote } from "../notes/note-catalogue";
+import type { FrictionAnswer } from "./friction-answer";
+import type { FrictionCase, FrictionSetup } from "./friction-setup";
+import { machNotes } from "./mach-note";
+import type { StreamState } from "./stream-state";
+
+interface FrictionFacts {
+  friction: FrictionCase;
+  setup: FrictionSetup;
+  answer: FrictionAnswer;
+  newtonsPerMetre: number;
+  isThicknessBorrowed: boolean;
+  stream: StreamState;
+}
+
+/** Everything that is to be said of a layer's friction. */
+export function frictionNotes(facts: FrictionFacts): Note[] {
+  return [
+    ...rangeNotes(facts),
+    ...laminarNotes(facts),
+    ...roughnessNotes(facts),
+    ...machNotes(facts.stream),
+    ...(facts.friction.frictionLine === "automatic" ? automaticNotes(facts) : namedLineNotes(facts)),
+    ...(facts.isThicknessBorrowed
+      ? [makeNote("thickness-by-wall-and-wake", { line: facts.answer.frictionLineUsed })]
+      : []),
+  ];
+}
+
+/** Laminar because it was asked to be, not because the critical Re is not reached. */
+function isHeldLaminar({ friction, setup }: FrictionFacts): boolean {
+  if (setup.transition.kind === "never") return true;
+  return friction.transition.kind === "tripped" && isLaminarAtEnd(setup);
+}
+
+function isLaminarAtEnd({ transition, endReynolds }: FrictionSetup): boolean {
+  if (transition.kind === "at") return !isBeyond(endReynolds, transition.reynolds);
+  return transition.kind === "never";
+}
+
+function rangeNotes(facts: FrictionFacts): Note[] {
+  const { friction, setup, answer } = facts;
+  if (isHeldLaminar(facts)) return [];
+  const reynolds = setup.endReynolds;
+  const asked = friction.frictionLine;
+  const notes: Note[] = [];
+  const { min, max } = asked === "automatic" ? AUTOMATIC_RANGE : FRICTION_LINES[asked].reynoldsRange;
+  if (isBelow(reynolds, min) || isBelow(max, reynolds)) {
+    notes.push(makeNote("reynolds-outside-line-range", { line: asked, reynolds, min, max }));
+  }
+  const used = answer.frictionLineUsed;
+  const ratioRange = used === "blasius" ? undefined : FRICTION_LINES[used].lengthOverRoughnessRange;
+  if (ratioRange && friction.roughness > 0) {
+    const lengthOverRoughness = (friction.runUp + friction.length) / friction.roughness;
+    if (!within(lengthOverRoughness, ratioRange)) {
+      notes.push(
+        makeNote("roughness-ratio-outside-range", {
+          line: used,
+          lengthOverRoughness,
+          min: ratioRange.min,
+          ...(Number.isFinite(ratioRange.max) ? { max: ratioRange.max } : {}),
+        }),
+      );
+    }
+  }
+  return notes;
+}
+
+function laminarNotes({ friction, setup }: FrictionFacts): Note[] {
+  const { transition, endReynolds } = setup;
+  if (transition.kind === "from-start") return [];
+  const notes: Note[] = [];
+  const laminarReynolds = transition.kind === "at" ? Math.min(transition.reynolds, endReynolds) : endReynolds;
+  if (isBelow(BLASIUS_RANGE.max, laminarReynolds)) {
+    notes.push(makeNote("laminar-above-critical", { laminarReynolds, criticalReynolds: BLASIUS_RANGE.max }));
+  }
+  if (transition.kind === "never" && friction.runUp > 0) {
+    notes.push(makeNote("laminar-behind-body", { runUp: friction.runUp }));
+  }
+  return notes;
+}
+
+function roughnessNotes(facts: FrictionFacts): Note[] {
+  const { friction, setup, answer } = facts;
+  const { roughness, frictionLine: line } = friction;
+  const { admissibleRoughness } = setup;
+  const heights = { roughness, admissibleRoughness };
+  const notes: Note[] = [];
+  if (!setup.isSmoothEnough && isHeldLaminar(facts)) notes.push(makeNote("laminar-on-rough-surface", heights));
+  if (line === "automatic") {
+    if (setup.transition.kind === "from-start" && setup.askedTransition.kind === "at") {
+      notes.push(makeNote("roughness-turbulent-from-start", heights));
+    }
+    return notes;
+  }
+  const { surface } = FRICTION_LINES[line];
+  if (surface === "smooth" && !setup.isSmoothEnough && !isHeldLaminar(facts)) {
+    notes.push(makeNote("roughness-above-admissible", { line, ...heights }));
+  }
+  if (surface === "rough" && answer.roughnessVerdict !== "rough" && !isHeldLaminar(facts)) {
+    const { roughnessReynolds } = answer;
+    const verdict = answer.roughnessVerdict ?? "smooth";
+    notes.push(makeNote("fully-rough-line-on-smoother-surface", { line, verdict, roughnessReynolds }));
+  }
+  return notes;
+}
+
+function namedLineNotes({ friction, setup, answer }: FrictionFacts): Note[] {
+  const line = friction.frictionLine;
+  if (line === "automatic" || answer.frictionLineUsed !== "blasius" || isLaminarAtEnd(setup)) return [];
+  const crossing = FRICTION_LINES[line].turbulentLayer(setup.roughnessReynolds).blasiusBelow;
+  return [makeNote("blasius-below-crossing", { line, reynolds: setup.endReynolds, crossing })];
+}
+
+function automaticNotes(facts: FrictionFacts): Note[] {
+  const { friction, setup, answer } = facts;
+  const { frictionLineUsed: line, roughnessReynolds } = answer;
+  const notes = [
+    makeNote("automatic-choice", {
+      line,
+      reason: automaticReason(facts),
+      reynolds: setup.endReynolds,
+      roughnessReynolds,
+      ...(friction.roughness > 0
+        ? { lengthOverRoughness: (friction.runUp + friction.length) / friction.roughness }
+        : {}),
+    }),
+  ];
+  if (line === "fully-rough" && setup.isSmoothEnough) {
+    notes.push(makeNote("rough-line-governs-smooth-surface", { ratio: setup.roughnessReynolds }));
+  }
+  if (line === "blasius" && !isLaminarAtEnd(setup)) {
+    const crossing = PRANDTL_SCHLICHTING.turbulentLayer(0).blasiusBelow;
+    notes.push(
+      makeNote("blasius-below-crossing", { line: PRANDTL_SCHLICHTING.name, reynolds: setup.endReynolds, crossing }),
+    );
+  }
+  if (answer.roughnessVerdict === "between" && !isLaminarAtEnd(setup)) notes.push(betweenNote(facts));
+  return notes;
+}
+
+function automaticReason({ setup, answer }: FrictionFacts): string {
+  if (isLaminarAtEnd(setup)) return "laminar";
+  if (answer.frictionLineUsed === "blasius") return "below-crossing";
+  return answer.frictionLineUsed === "fully-rough" ? "rough" : "smooth";
+}
+
+/** Between the regimes neither line is meant: the momentum integral, which knows them all, stands beside. */
+function betweenNote({ setup, answer, newtonsPerMetre }: FrictionFacts): Note {
+  const layer = frictionLayer(FRICTION_LINES["momentum-integral"], setup.roughnessReynolds, setup.transition);
+  const momentumIntegralDrag =
+    newtonsPerMetre * setup.viscousLength * frictionBetween(layer, setup.startReynolds, setup.spanReynolds);
+  return makeNote("regime-between", {
+    roughnessReynolds: answer.roughnessReynolds,
+    drag: answer.drag,
+    momentumIntegralDrag,
+    difference: momentumIntegralDrag / answer.drag - 1,
+  });
+}

@@ -1,0 +1,98 @@
+import { admissibleRoughness } from "@/lib/aero/admissible-roughness";
+import { automaticLayer, automaticTransition } from "@/lib/aero/friction/automatic-layer";
+import { frictionLayer, type FrictionLayer } from "@/lib/aero/friction/friction-layer";
+import type { FrictionLineName } from "@/lib/aero/friction/friction-line-name";
+import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
+import { isBelow, type Transition } from "@/lib/aero/friction/transition";
+import { numberOf } from "../document/number-input";
+import type { InputOf, TransitionInput } from "../document/schema";
+import type { StreamState } from "./stream-state";
+
+/** The friction fields that a plate and the walls of a duct share, as plain numbers. */
+export interface FrictionCase {
+  length: number;
+  runUp: number;
+  roughness: number;
+  transition: TransitionInput;
+  frictionLine: FrictionLineName | "automatic";
+}
+
+/** A friction case in its stream, in the dimensionless numbers that lines take. */
+export interface FrictionSetup {
+  /** ν/U [m]: a length over it is a Re. */
+  viscousLength: number;
+  startReynolds: number;
+  spanReynolds: number;
+  endReynolds: number;
+  /** Re_k = U k_s/ν. */
+  roughnessReynolds: number;
+  admissibleRoughness: number;
+  isSmoothEnough: boolean;
+  /** As it was asked for. */
+  askedTransition: Transition;
+  /** As it takes effect. */
+  transition: Transition;
+  layer: FrictionLayer;
+}
+
+export function plateCase(input: InputOf<"flat-plate-friction">): FrictionCase {
+  return { ...surfaceOf(input), length: numberOf(input.length), runUp: numberOf(input.runUp) };
+}
+
+export function ductCase(input: InputOf<"duct-entry">): FrictionCase {
+  return { ...surfaceOf(input), length: numberOf(input.length), runUp: 0 };
+}
+
+function surfaceOf(
+  input: InputOf<"flat-plate-friction" | "duct-entry">,
+): Pick<FrictionCase, "roughness" | "transition" | "frictionLine"> {
+  return { roughness: numberOf(input.roughness), transition: input.transition, frictionLine: input.frictionLine };
+}
+
+/** Sets a friction case up in the stream that the surface sees. */
+export function frictionSetup(friction: FrictionCase, stream: StreamState): FrictionSetup {
+  const viscousLength = stream.kinematicViscosity / stream.speed;
+  const admissible = admissibleRoughness(stream.speed, stream.kinematicViscosity);
+  const reynoldsOf = (length: number): number => (stream.speed * length) / stream.kinematicViscosity;
+  const isSmoothEnough = !isBelow(admissible, friction.roughness);
+  const roughnessReynolds = reynoldsOf(friction.roughness);
+  const askedTransition = transitionOf(friction, reynoldsOf);
+  const isAutomatic = friction.frictionLine === "automatic";
+  const transition = isAutomatic ? automaticTransition(askedTransition, isSmoothEnough) : askedTransition;
+  return {
+    viscousLength,
+    startReynolds: reynoldsOf(friction.runUp),
+    spanReynolds: reynoldsOf(friction.length),
+    endReynolds: reynoldsOf(friction.runUp + friction.length),
+    roughnessReynolds,
+    admissibleRoughness: admissible,
+    isSmoothEnough,
+    askedTransition,
+    transition,
+    layer: layerOf(friction.frictionLine, roughnessReynolds, transition),
+  };
+}
+
+export function layerOf(
+  line: FrictionLineName | "automatic",
+  roughnessReynolds: number,
+  transition: Transition,
+): FrictionLayer {
+  return line === "automatic"
+    ? automaticLayer(roughnessReynolds, transition)
+    : frictionLayer(FRICTION_LINES[line], roughnessReynolds, transition);
+}
+
+/** A trip keeps its place wherever the plate ends, so that a plate and its parts see one layer. */
+function transitionOf({ transition }: FrictionCase, reynoldsOf: (length: number) => number): Transition {
+  switch (transition.kind) {
+    case "natural":
+      return { kind: "at", reynolds: numberOf(transition.criticalReynolds) };
+    case "tripped": {
+      const at = numberOf(transition.at);
+      return at === 0 ? { kind: "from-start" } : { kind: "at", reynolds: reynoldsOf(at) };
+    }
+    case "laminar":
+      return { kind: "never" };
+  }
+}

@@ -1,0 +1,88 @@
+import { figure } from "./figure";
+import { lineTitle } from "./line-title";
+import type { NoteValues } from "./note";
+import type { NoteCode } from "./note-code";
+import { caution, valueOf, type NoteMeaning } from "./note-meaning";
+
+export const CAUTIONS = {
+  "reynolds-outside-line-range": caution(
+    ({ line, reynolds, min, max }) =>
+      `Re ${figure(reynolds)} is outside the stated range of ${lineTitle(line)} (${figure(min)} to ${figure(max)}), where its ` +
+      `scatter is unknown. Name a line that covers this Re, or say why it is used.`,
+    (values) => factorOutside(values, "reynolds"),
+  ),
+  "roughness-ratio-outside-range": caution(
+    ({ line, lengthOverRoughness, min, max }) =>
+      `x/k_s ${figure(lengthOverRoughness)} is outside the stated range of ${lineTitle(line)} (${figure(min)} ` +
+      `${max === undefined ? "or more" : `to ${figure(max)}`}). Check the roughness, or treat it as single obstacles.`,
+    (values) => factorOutside(values, "lengthOverRoughness"),
+  ),
+  "laminar-above-critical": caution(
+    ({ laminarReynolds, criticalReynolds }) =>
+      `The layer is claimed laminar up to Re ${figure(laminarReynolds)}, above the usual critical Re ` +
+      `${figure(criticalReynolds)}; few streams are quiet enough. Give evidence for the laminar run, or let it turn turbulent.`,
+    (values) => valueOf(values, "laminarReynolds") / valueOf(values, "criticalReynolds"),
+  ),
+  "laminar-behind-body": caution(
+    ({ runUp }) =>
+      `The plate is held laminar ${figure(runUp)} m behind the start of its layer; joints and wakes upstream usually trip it. ` +
+      `Give evidence, or let it turn turbulent.`,
+    (values) => valueOf(values, "runUp"),
+  ),
+  "laminar-on-rough-surface": caution(
+    ({ roughness, admissibleRoughness }) =>
+      `The layer is held laminar over roughness ${figure(roughness)} m, above the admissible ${figure(admissibleRoughness)} m, ` +
+      `which usually trips it. Give evidence, or choose a finer finish or a turbulent layer.`,
+    (values) => valueOf(values, "roughness") / valueOf(values, "admissibleRoughness"),
+  ),
+  "roughness-above-admissible": caution(
+    ({ line, roughness, admissibleRoughness }) =>
+      `Roughness ${figure(roughness)} m is above the admissible ${figure(admissibleRoughness)} m while ${lineTitle(line)}, a ` +
+      `line for smooth surfaces, is used: drag reads low. Choose a finer finish, or a line that knows roughness.`,
+    (values) => valueOf(values, "roughness") / valueOf(values, "admissibleRoughness"),
+  ),
+  "fully-rough-line-on-smoother-surface": caution(
+    ({ line, verdict, roughnessReynolds }) =>
+      `${lineTitle(line)} stands for a fully rough surface, yet this one is ${verdict === "smooth" ? "smooth" : "between the regimes"} ` +
+      `(k_s⁺ ${figure(roughnessReynolds)}, fully rough from 70). Name another line, or say why.`,
+    (values) => 70 / Math.max(valueOf(values, "roughnessReynolds"), 1e-6),
+  ),
+  "layers-meet-in-duct": caution(
+    ({ thickness, shorterSide }) =>
+      `The layers of opposite walls meet before the exit: 2δ is ${figure(2 * number(thickness))} m on a side of ` +
+      `${figure(shorterSide)} m, so that no core is left and plates from the entry no longer hold. Use a developed-flow loss.`,
+    (values) => (2 * valueOf(values, "thickness")) / valueOf(values, "shorterSide"),
+  ),
+  "mach-above-limit": caution(
+    ({ mach, limit }) =>
+      `Mach ${figure(mach)} is above ${figure(limit)}: the methods are for incompressible flow. Correct for Mach outside, or ` +
+      `lower the speed.`,
+    (values) => valueOf(values, "mach") / valueOf(values, "limit"),
+  ),
+  "measured-reynolds-differs": caution(
+    ({ ratio }) =>
+      `Re here is ${figure(ratio)} times that of the test, more than twofold apart: the drag area may have changed. Measure ` +
+      `nearer to this point, or say why it still holds.`,
+    (values) => Math.max(valueOf(values, "ratio"), 1 / valueOf(values, "ratio")) / 2,
+  ),
+  "fresh-leading-edge-behind": caution(
+    ({ behind }) =>
+      `The plate lies behind item ${figure(behind)} and claims a fresh leading edge: friction reads high, blockage low. Let ` +
+      `the run-up follow that item, or say why the layer starts anew.`,
+  ),
+  "same-surface-twice": caution(
+    ({ other }) =>
+      `Item ${figure(other)} stands on the same surface: its drag may be counted twice. Retire one of the two, or say how the ` +
+      `surface is shared.`,
+  ),
+} satisfies Partial<Record<NoteCode, NoteMeaning>>;
+
+function factorOutside(values: NoteValues, name: string): number {
+  const value = valueOf(values, name);
+  const min = valueOf(values, "min");
+  return value < min ? min / value : value / valueOf(values, "max");
+}
+
+function number(value: number | string | undefined): number {
+  return typeof value === "number" ? value : NaN;
+}
