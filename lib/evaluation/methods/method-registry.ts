@@ -1,4 +1,4 @@
-import type { InputOf, MethodInput } from "../document/schema";
+import type { MethodInput } from "../document/schema";
 import { evaluateBluffBody } from "./bluff-body";
 import { evaluateDragArea } from "./drag-area";
 import { evaluateDuctEntry } from "./duct-entry";
@@ -8,6 +8,7 @@ import { evaluateLossCoefficient } from "./loss-coefficient";
 import { evaluateMeasured } from "./measured";
 import type { MethodOutcome } from "./method-answer";
 import type { MethodName } from "./method-name";
+import { ofMethod } from "./of-method";
 import type { StreamState } from "./stream-state";
 
 export type { MethodAnswer, MethodOutcome } from "./method-answer";
@@ -27,13 +28,13 @@ export const CURRENT_METHOD_VERSIONS: Record<MethodName, number> = {
 type Evaluator = (input: MethodInput, stream: StreamState) => MethodOutcome;
 
 const EVALUATORS: ReadonlyMap<string, Evaluator> = new Map([
-  ["flat-plate-friction/1", forMethod("flat-plate-friction", evaluateFlatPlateFriction)],
-  ["duct-entry/1", forMethod("duct-entry", evaluateDuctEntry)],
-  ["loss-coefficient/1", forMethod("loss-coefficient", evaluateLossCoefficient)],
-  ["bluff-body/1", forMethod("bluff-body", evaluateBluffBody)],
-  ["drag-area/1", forMethod("drag-area", evaluateDragArea)],
-  ["measured/1", forMethod("measured", evaluateMeasured)],
-  ["fixed/1", forMethod("fixed", evaluateFixed)],
+  ["flat-plate-friction/1", ofMethod("flat-plate-friction", evaluateFlatPlateFriction)],
+  ["duct-entry/1", ofMethod("duct-entry", evaluateDuctEntry)],
+  ["loss-coefficient/1", ofMethod("loss-coefficient", evaluateLossCoefficient)],
+  ["bluff-body/1", ofMethod("bluff-body", evaluateBluffBody)],
+  ["drag-area/1", ofMethod("drag-area", evaluateDragArea)],
+  ["measured/1", ofMethod("measured", evaluateMeasured)],
+  ["fixed/1", ofMethod("fixed", evaluateFixed)],
 ]);
 
 /**
@@ -50,18 +51,4 @@ export function evaluateMethod(
   const evaluate = EVALUATORS.get(`${method}/${version}`);
   if (!evaluate) throw new RangeError(`no method ${method} of version ${version}`);
   return evaluate(input, stream);
-}
-
-function forMethod<M extends MethodName>(
-  name: M,
-  evaluate: (input: InputOf<M>, stream: StreamState) => MethodOutcome,
-): Evaluator {
-  return (input, stream) => {
-    if (!isOfMethod(input, name)) throw new RangeError(`input of ${input.method} given to ${name}`);
-    return evaluate(input, stream);
-  };
-}
-
-function isOfMethod<M extends MethodName>(input: MethodInput, name: M): input is InputOf<M> {
-  return input.method === name;
 }

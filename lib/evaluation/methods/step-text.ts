@@ -1,0 +1,41 @@
+import type { WorkedStep } from "./worked-step";
+
+/** A number in a worked step: six significant digits, so that a hand calculator comes to the same figure. */
+export function digits(value: number): string {
+  if (value === 0) return "0";
+  const size = Math.abs(value);
+  if (size >= 1e6 || size < 1e-3) return value.toExponential(5).replace("e+", "e");
+  return String(Number(value.toPrecision(6)));
+}
+
+type StepExtras = Pick<WorkedStep, "source" | "range">;
+
+/** `quantity|symbol|unit`, the equation in symbols, with its values, and what it gives. */
+export function step(
+  [quantity, symbol, unit]: readonly [string, string, string],
+  formula: string,
+  withValues: string,
+  value: number,
+  extras: StepExtras = {},
+): WorkedStep {
+  return { quantity, symbol, formula, withValues, value, unit, ...extras };
+}
+
+/** Local speed and dynamic pressure, with which every method of a moving stream begins. */
+export function streamSteps(stream: { speed: number; density: number }, ratio: number): WorkedStep[] {
+  const speed = stream.speed * ratio;
+  return [
+    step(
+      ["Local speed", "U", "m/s"],
+      "U = speed · local speed ratio",
+      `${digits(stream.speed)} · ${digits(ratio)}`,
+      speed,
+    ),
+    step(
+      ["Dynamic pressure", "q", "Pa"],
+      "q = ½ ρ U²",
+      `½ · ${digits(stream.density)} · ${digits(speed)}²`,
+      0.5 * stream.density * speed ** 2,
+    ),
+  ];
+}
