@@ -68,6 +68,10 @@ export const DUCT_ITEMS: readonly ItemDraft[] = [
     allocation: 4.5,
     evidence: ["Layout PD7-LA-05", "B"],
     basis: "10 m/s between the baffles.",
+    justify: {
+      "roughness-above-admissible":
+        "The wool stands behind a perforated sheet; the sheet itself is smooth, and the growth of the grade covers the holes.",
+    },
   },
   {
     number: "060",
@@ -106,7 +110,7 @@ export const DUCT_ITEMS: readonly ItemDraft[] = [
     group: "G30",
     grade: "preliminary",
     ...loss(0.22, "Catalogue of the damper's maker, sheet 14"),
-    allocation: 23,
+    allocation: 26.5,
     evidence: ["Catalogue sheet 14", "2"],
   },
   {

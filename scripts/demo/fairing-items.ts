@@ -117,7 +117,7 @@ export const FAIRING_ITEMS: readonly ItemDraft[] = [
     group: "G30",
     grade: "preliminary",
     ...form(1.1, 0.033, FORM_TABLE, [0.45, "They stand in the wake of the cross members."]),
-    allocation: 7,
+    allocation: 6.5,
     evidence: ["Drawing 7731", "B"],
   },
   {

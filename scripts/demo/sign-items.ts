@@ -8,6 +8,9 @@ export const SIGN_GROUPS = [
 
 const FORM_TABLE = "House table of edges and open sections, TH-DT-06";
 
+export const ROUGH_ON_PURPOSE =
+  "Taken as fully rough on purpose: drops and runs of the zinc are coarser than its grain, and the line reads high.";
+
 /** Sign panel GS-4, edge on, as it was first booked: the rear face still taken for smooth. */
 export const SIGN_ITEMS: readonly ItemDraft[] = [
   {
@@ -82,6 +85,7 @@ export const SIGN_ITEMS: readonly ItemDraft[] = [
     ...plate({ length: 6, breadth: 0.18, faces: 3, surface: "F80" }, { frictionLine: "fully-rough" }),
     allocation: 4.5,
     evidence: ["Layout GS4-LA-07", "A"],
+    justify: { "fully-rough-line-on-smoother-surface": ROUGH_ON_PURPOSE },
   },
   {
     number: "080",
