@@ -19,7 +19,7 @@ const WHITE_2D = "White, Fluid Mechanics, Table 7.2 (two-dimensional bodies, Re 
 const WHITE_3D = "White, Fluid Mechanics, Table 7.3 (three-dimensional bodies, Re about 1e4 and above)";
 const HOERNER = "Hoerner, Fluid-Dynamic Drag, 1965, ch. III (summary figure of simple shapes)";
 const OLDER_LIST = "older handbook list for rectangular plates (often credited to Rouse; attribution uncertain)";
-const EN_1991 = "EN 1991-1-4:2005, 7.4.3 signboards (force coefficient for wind loading)";
+const EN_1991 = "EN 1991-1-4:2005, 7.4.3 signboards (value of a loading code, no measured mean drag)";
 
 const SOURCE_WORDS: ReadonlyMap<string, string> = new Map([
   [WHITE_2D, "white"],

@@ -1,11 +1,9 @@
-const GAS_CONSTANT = 8.314472;
-const MOLAR_MASS_OF_WATER = 18.01528e-3;
 const ZERO_CELSIUS = 273.15;
 
 /**
  * Density of moist air (CIPM-2007).
  *
- *   ρ = p M_a/(Z R T) · [1 − x_v (1 − M_v/M_a)],  x_v = h f(p, t) p_sv(T)/p
+ *   ρ = [3.483740 + 1.4446 (x_CO₂ − 0.0004)]·10⁻³ · p/(Z T) · (1 − 0.3780 x_v),  x_v = h f(p, t) p_sv(T)/p
  *
  * @param staticTemperature T [K], 288.15 to 300.15
  * @param staticPressure p [Pa], 6e4 to 1.1e5
@@ -28,12 +26,9 @@ export function humidAirDensity(
       enhancementFactor(staticTemperature, staticPressure) *
       saturationVapourPressure(staticTemperature)) /
     staticPressure;
-  const molarMass = (28.96546 + 12.011 * (carbonDioxide - 0.0004)) * 1e-3;
+  const ratio = (3.48374 + 1.4446 * (carbonDioxide - 0.0004)) * 1e-3;
   const compressibility = compressibilityFactor(staticTemperature, staticPressure, vapour);
-  return (
-    ((staticPressure * molarMass) / (compressibility * GAS_CONSTANT * staticTemperature)) *
-    (1 - vapour * (1 - MOLAR_MASS_OF_WATER / molarMass))
-  );
+  return ((ratio * staticPressure) / (compressibility * staticTemperature)) * (1 - 0.378 * vapour);
 }
 
 /** p_sv(T) = exp(A T² + B T + C + D/T) [Pa], T in K; CIPM-2007, A1.1. */
