@@ -88,7 +88,7 @@ export function StaveBar({ layout, scale = layout.scale, top, height, named = fa
           <rect x="100%" width="4" height={height} transform="translate(-1.5)" className="fill-sheet" />
         </Segment>
       ))}
-      {savings ? <Hollow span={savings} scale={scale} top={top} height={height} /> : null}
+      {savings ? <Hollow span={savings} scale={scale} top={top} height={height} named={named} /> : null}
       <Part span={growth} scale={scale} top={top} height={height} part="growth" fill={`url(#${id}-growth)`} />
       {over ? <Part span={over} scale={scale} top={top} height={height} part="over" fill={`url(#${id}-over)`} /> : null}
     </>
@@ -129,20 +129,26 @@ function Part({ span, scale, top, height, part, fill }: BandProps & { part: stri
 }
 
 /** What savings give back stands left of zero, hollowed: it counts in no total. */
-function Hollow({ span, scale, top, height }: BandProps) {
-  const { x, width } = place(span, scale);
+function Hollow({ span, scale, top, height, named }: BandProps & { named: boolean }) {
   return (
-    <rect
-      x={x}
-      y={top}
-      width={width}
-      height={height}
-      strokeDasharray="3 3"
-      className="fill-water-pale stroke-water"
-      data-part="savings"
-      data-from={span.from}
-      data-to={span.to}
-    />
+    <Segment span={span} scale={scale} top={top} height={height}>
+      <rect
+        width="100%"
+        height={height}
+        strokeDasharray="3 3"
+        strokeWidth="2"
+        fillOpacity="0.82"
+        className="fill-sheet stroke-water"
+        data-part="savings"
+        data-from={span.from}
+        data-to={span.to}
+      />
+      {named ? (
+        <text x="6" y={height - 8} className="fill-ink text-xs">
+          savings {formatNewtonsNumber(span.from)}
+        </text>
+      ) : null}
+    </Segment>
   );
 }
 

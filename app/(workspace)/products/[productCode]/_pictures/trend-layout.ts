@@ -85,9 +85,11 @@ function newtonScale(issues: readonly TrendIssue[], planned: readonly PlannedPoi
     ),
     ...planned.flatMap(({ predicted, tolerance }) => [predicted - tolerance, predicted + tolerance]),
   ];
-  const min = Math.min(0, ...values);
+  const min = Math.min(...values);
   const max = Math.max(...values);
-  return max > min ? { min, max: max + (max - min) * 0.08 } : { min, max: min + 1 };
+  // Lines are read against the limit, not by their length: the scale closes in on them and its ticks say so.
+  const room = Math.max((max - min) * 0.12, Math.abs(max) * 0.01, 0.5);
+  return { min: min - room, max: max + room };
 }
 
 function stepLine(
@@ -113,7 +115,7 @@ const DAY = 86_400_000;
 /** Dates at even distances, whole days of UTC, never two that read the same. */
 function dateTicks(time: Scale): { label: string; x: number }[] {
   const days = (time.max - time.min) / DAY;
-  const step = Math.max(1, Math.ceil(days / 4));
+  const step = Math.max(1, Math.ceil(days / 3));
   const first = Math.ceil(time.min / DAY);
   const last = Math.floor(time.max / DAY);
   const count = Math.max(0, Math.floor((last - first) / step) + 1);

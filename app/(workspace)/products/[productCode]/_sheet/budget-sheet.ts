@@ -1,0 +1,144 @@
+import type { BudgetAt } from "@/lib/budget/views";
+import { groupsAboveItem } from "@/lib/evaluation/budget/group-tree";
+import { type IndexedState, indexState } from "@/lib/evaluation/budget/indexed-state";
+import type { ItemResult, PointResult } from "@/lib/evaluation/budget/results";
+import { type SheetRow, sheetOrder } from "@/lib/evaluation/budget/sheet-order";
+import type { GroupBody } from "@/lib/evaluation/lines/group-body";
+import type { ItemBody } from "@/lib/evaluation/lines/item-body";
+import type { LineState } from "@/lib/evaluation/lines/line-state";
+import { roundStored, toHundredths } from "@/lib/units/rounding";
+
+interface RowFigures {
+  number: string;
+  name: string;
+  letter: string;
+  depth: number;
+  basic: number;
+  growth: number;
+  predicted: number;
+  /** null where the sheet has no row for it. */
+  allocationHundredths: number | null;
+  /** Allocation less predicted, both as printed; null without an allocation. */
+  marginHundredths: number | null;
+}
+
+export interface ItemRow extends RowFigures {
+  kind: "item";
+  body: ItemBody;
+  owner: string;
+  result: ItemResult;
+}
+
+export interface GroupRow extends RowFigures {
+  kind: "group";
+  body: GroupBody;
+  /** Numbers of the items in it and in its subgroups. */
+  members: string[];
+}
+
+export type BudgetRow = ItemRow | GroupRow;
+
+/** A budget at one operating point as its sheet shows it. */
+export interface BudgetSheet {
+  budget: BudgetAt;
+  indexed: IndexedState;
+  point: PointResult;
+  /** Allocations are set at the reference operating point; at another one a margin is no flag. */
+  isReference: boolean;
+  /** Groups ahead of what they hold. */
+  rows: BudgetRow[];
+  retired: LineState[];
+}
+
+/** The operating point asked for, else the one that stands worst. */
+export function pointOf(budget: BudgetAt, asked: string | undefined): PointResult | undefined {
+  const { points, worstPoint } = budget.results;
+  return points.find(({ operatingPoint }) => operatingPoint === (asked ?? worstPoint));
+}
+
+export function budgetSheet(budget: BudgetAt, point: PointResult): BudgetSheet {
+  const indexed = indexState(budget.state);
+  const context: RowContext = {
+    indexed,
+    results: new Map(point.items.map((result) => [result.item, result])),
+    letters: new Map(budget.state.lines.map((line) => [`${line.kind} ${line.number}`, line.letter])),
+    people: new Map(budget.people.map(({ id, name }) => [id, name])),
+  };
+
+  return {
+    budget,
+    indexed,
+    point,
+    isReference: indexed.terms.referenceOperatingPoint === point.operatingPoint,
+    rows: sheetOrder(indexed).flatMap((row) => rowOf(row, context) ?? []),
+    retired: budget.state.lines.filter(({ retired }) => retired),
+  };
+}
+
+interface RowContext {
+  indexed: IndexedState;
+  results: ReadonlyMap<string, ItemResult>;
+  letters: ReadonlyMap<string, string>;
+  people: ReadonlyMap<number, string>;
+}
+
+function rowOf({ kind, number, depth }: SheetRow, context: RowContext): BudgetRow | null {
+  const letter = context.letters.get(`${kind} ${number}`) ?? "–";
+  return kind === "item" ? itemRow(number, depth, letter, context) : groupRow(number, depth, letter, context);
+}
+
+function itemRow(number: string, depth: number, letter: string, context: RowContext): ItemRow | null {
+  const body = context.indexed.items.get(number);
+  const result = context.results.get(number);
+  if (!body || !result) return null;
+  const { basic, growth, predicted } = result;
+
+  return {
+    kind: "item",
+    number,
+    name: body.name,
+    letter,
+    depth,
+    basic,
+    growth,
+    predicted,
+    ...allocationOf("item", number, predicted, context.indexed),
+    body,
+    owner: context.people.get(body.ownerId) ?? `person ${body.ownerId}`,
+    result,
+  };
+}
+
+function groupRow(number: string, depth: number, letter: string, context: RowContext): GroupRow | null {
+  const { indexed, results } = context;
+  const body = indexed.groups.get(number);
+  if (!body) return null;
+  const members = [...indexed.items.keys()].filter((item) => groupsAboveItem(indexed, item).includes(number));
+  const found = members.flatMap((member) => results.get(member) ?? []);
+  const sum = (pick: (result: ItemResult) => number) =>
+    roundStored(found.reduce((total, result) => total + pick(result), 0));
+  const predicted = sum((result) => result.predicted);
+
+  return {
+    kind: "group",
+    number,
+    name: body.name,
+    letter,
+    depth,
+    basic: sum((result) => result.basic),
+    growth: sum((result) => result.growth),
+    predicted,
+    ...allocationOf("group", number, predicted, indexed),
+    body,
+    members,
+  };
+}
+
+function allocationOf(kind: "item" | "group", number: string, predicted: number, { allocations }: IndexedState) {
+  const row = allocations.rows.find((entry) => entry.kind === kind && entry.number === number);
+  const allocationHundredths = row?.hundredths ?? null;
+  return {
+    allocationHundredths,
+    marginHundredths: allocationHundredths === null ? null : allocationHundredths - toHundredths(predicted),
+  };
+}

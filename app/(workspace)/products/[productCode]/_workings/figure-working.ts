@@ -1,0 +1,52 @@
+import type { LineRevisionView } from "@/lib/budget/views";
+
+import type { BudgetSheet } from "../_sheet/budget-sheet";
+import { allocationMarginWorking, allocationWorking } from "./allocation-working";
+import { basicWorking, growthWorking, predictedWorking } from "./item-working";
+import { groupWorking, limitWorking, totalWorking, withoutSavingsWorking } from "./total-working";
+import type { FigureQuestion, Working } from "./working";
+
+/** The working of any number on the sheet; null where the sheet has no such number. */
+export function figureWorking(
+  sheet: BudgetSheet,
+  { figure, of, number }: FigureQuestion,
+  allocationRevisions: readonly LineRevisionView[],
+): Working | null {
+  if (of === "total") return sheetWorking(sheet, figure);
+  const row = sheet.rows.find((candidate) => candidate.kind === of && candidate.number === number);
+  if (!row) return null;
+
+  switch (figure) {
+    case "basic":
+      return row.kind === "item" ? basicWorking(sheet, row) : groupWorking(sheet, row, figure);
+    case "growth":
+      return row.kind === "item" ? growthWorking(sheet, row) : groupWorking(sheet, row, figure);
+    case "predicted":
+      return row.kind === "item" ? predictedWorking(sheet, row) : groupWorking(sheet, row, figure);
+    case "allocation":
+      return allocationWorking(row, allocationRevisions);
+    case "margin":
+      return allocationMarginWorking(sheet, row);
+    default:
+      return null;
+  }
+}
+
+function sheetWorking(sheet: BudgetSheet, figure: FigureQuestion["figure"]): Working | null {
+  switch (figure) {
+    case "basic":
+    case "growth":
+    case "predicted":
+      return totalWorking(sheet, figure);
+    case "predictedWithoutSavings":
+      return withoutSavingsWorking(sheet);
+    case "margin":
+    case "clearOfReserve":
+    case "limit":
+    case "reserve":
+    case "unallocated":
+      return limitWorking(sheet, figure);
+    case "allocation":
+      return null;
+  }
+}

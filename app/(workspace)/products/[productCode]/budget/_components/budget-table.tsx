@@ -1,0 +1,84 @@
+import { Head, Table, TableHead } from "@/app/_components/table";
+
+import type { BudgetRow, BudgetSheet } from "../../_sheet/budget-sheet";
+import { sheetAddress, type SheetQuery, type SortKey } from "../../_sheet/sheet-filter";
+import { GroupTableRow } from "./group-table-row";
+import { ItemTableRow } from "./item-table-row";
+import { TotalRows } from "./total-rows";
+
+interface BudgetTableProps {
+  sheet: BudgetSheet;
+  rows: readonly BudgetRow[];
+  path: string;
+  query: SheetQuery;
+}
+
+/** Items and groups with their numbers; every number opens its working. */
+export function BudgetTable({ sheet, rows, path, query }: BudgetTableProps) {
+  const { product } = sheet.budget;
+  const itemHref = (number: string) => itemAddress(product.code, number, query);
+
+  return (
+    <Table caption={`Items at ${sheet.point.operatingPoint} ${sheet.point.name}`}>
+      <TableHead>
+        <Head {...sorting("number", path, query)}>Item</Head>
+        <Head>Method</Head>
+        <Head>Rev</Head>
+        {COLUMNS.map(({ key, label }) => (
+          <Head key={key} numeric unit="N" {...sorting(key, path, query)}>
+            {label}
+          </Head>
+        ))}
+        <Head className="max-sm:hidden">Against allocation</Head>
+      </TableHead>
+      <tbody>
+        {rows.map((row) =>
+          row.kind === "item" ? (
+            <ItemTableRow
+              key={`item ${row.number}`}
+              row={row}
+              isReference={sheet.isReference}
+              href={itemHref(row.number)}
+            />
+          ) : (
+            <GroupTableRow key={`group ${row.number}`} row={row} isReference={sheet.isReference} />
+          ),
+        )}
+      </tbody>
+      <tfoot>
+        <TotalRows point={sheet.point} />
+      </tfoot>
+    </Table>
+  );
+}
+
+const COLUMNS: readonly { key: SortKey; label: string }[] = [
+  { key: "basic", label: "Basic" },
+  { key: "growth", label: "Growth" },
+  { key: "predicted", label: "Predicted" },
+  { key: "allocation", label: "Allocation" },
+  { key: "margin", label: "Margin" },
+];
+
+/** First up, then down, then the order of the sheet again. */
+function sorting(key: SortKey, path: string, query: SheetQuery) {
+  const isSorted = query.sort === key;
+  const isDown = query.down !== undefined;
+  const next: Partial<SheetQuery> = !isSorted
+    ? { sort: key, down: undefined }
+    : isDown
+      ? { sort: "sheet", down: undefined }
+      : { sort: key, down: "1" };
+  return {
+    sortHref: sheetAddress(path, query, next),
+    sorted: isSorted ? (isDown ? ("descending" as const) : ("ascending" as const)) : undefined,
+  };
+}
+
+function itemAddress(productCode: string, number: string, { issue, point }: SheetQuery): string {
+  const parts = new URLSearchParams();
+  if (issue !== undefined) parts.set("issue", String(issue));
+  if (point !== undefined) parts.set("point", point);
+  const query = parts.toString();
+  return `/products/${productCode}/items/${number}${query === "" ? "" : `?${query}`}`;
+}

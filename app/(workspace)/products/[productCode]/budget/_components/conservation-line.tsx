@@ -1,0 +1,50 @@
+import { Notice } from "@/app/_components/notice";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { formatHundredths } from "@/lib/units/format-newtons";
+
+import { WorkingNumber } from "../../_components/workings-provider";
+import type { Conservation } from "../../_sheet/conservation";
+
+/** Allocations, unallocated and reserve against the limit: the sum that must hold after every act. */
+export function ConservationLine({ sums }: { sums: Conservation }) {
+  const parts = [
+    { sign: "", label: "allocated", value: sums.allocated, figure: null },
+    { sign: "+", label: "unallocated", value: sums.unallocated, figure: "unallocated" },
+    { sign: "+", label: "reserve", value: sums.reserve, figure: null },
+    { sign: "=", label: `limit at ${sums.operatingPoint}`, value: sums.limit, figure: null },
+  ] as const;
+
+  return (
+    <section aria-labelledby="conservation">
+      <SectionHeading id="conservation">What is given out</SectionHeading>
+      <dl className="flex flex-wrap items-baseline gap-x-4 gap-y-2">
+        {parts.map(({ sign, label, value, figure }) => (
+          <div key={label} className="flex items-baseline gap-x-2">
+            {sign ? (
+              <span aria-hidden className="text-lg text-ink-2">
+                {sign}
+              </span>
+            ) : null}
+            <dt className="order-2 text-sm text-ink-2">{label}</dt>
+            <dd className="text-lg font-semibold whitespace-nowrap" data-conservation={label.split(" ")[0]}>
+              {figure ? (
+                <WorkingNumber figure={figure} of="total" number={null} name="Unallocated">
+                  {formatHundredths(value)} N
+                </WorkingNumber>
+              ) : (
+                `${formatHundredths(value)} N`
+              )}
+            </dd>
+          </div>
+        ))}
+      </dl>
+      {sums.holds ? null : (
+        <div className="mt-3">
+          <Notice kind="refusal">
+            These do not add up to the limit. Nothing that was approved can bring that about: tell the administrator.
+          </Notice>
+        </div>
+      )}
+    </section>
+  );
+}

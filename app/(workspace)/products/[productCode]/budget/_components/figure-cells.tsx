@@ -1,0 +1,53 @@
+import { Cell } from "@/app/_components/table";
+import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
+
+import { WorkingNumber } from "../../_components/workings-provider";
+import { AllocationBar } from "../../_pictures/allocation-bar";
+import type { BudgetRow } from "../../_sheet/budget-sheet";
+import { isOver } from "../../_sheet/sheet-filter";
+
+const SUMS = [
+  { figure: "basic", label: "Basic estimate" },
+  { figure: "growth", label: "Growth allowance" },
+  { figure: "predicted", label: "Predicted" },
+] as const;
+
+/** The numbers of a row: basic, growth, predicted, allocation, margin and the small bar. */
+export function FigureCells({ row, isReference }: { row: BudgetRow; isReference: boolean }) {
+  const { kind, number, allocationHundredths, marginHundredths } = row;
+  const over = isReference && isOver(row);
+
+  return (
+    <>
+      {SUMS.map(({ figure, label }) => (
+        <Cell key={figure} numeric>
+          <WorkingNumber figure={figure} of={kind} number={number} name={`${label} of ${number}`}>
+            {formatNewtonsNumber(row[figure])}
+          </WorkingNumber>
+        </Cell>
+      ))}
+      <Cell numeric>
+        <WorkingNumber figure="allocation" of={kind} number={number} name={`Allocation of ${number}`}>
+          {allocationHundredths === null ? "none" : formatHundredths(allocationHundredths)}
+        </WorkingNumber>
+      </Cell>
+      <Cell numeric className={over ? "font-semibold text-signal" : undefined}>
+        {marginHundredths === null ? (
+          <span className="text-ink-2">–</span>
+        ) : (
+          <WorkingNumber figure="margin" of={kind} number={number} name={`Margin of ${number}`}>
+            {formatHundredths(marginHundredths)}
+          </WorkingNumber>
+        )}
+        {over ? <span className="block text-xs">over</span> : null}
+      </Cell>
+      <Cell className="max-sm:hidden">
+        <AllocationBar
+          basic={row.basic}
+          predicted={row.predicted}
+          allocation={allocationHundredths === null ? null : allocationHundredths / 100}
+        />
+      </Cell>
+    </>
+  );
+}

@@ -1,0 +1,28 @@
+import { RevisionLetter } from "@/app/_components/revision-letter";
+import { Cell, Row, RowHead } from "@/app/_components/table";
+
+import type { GroupRow } from "../../_sheet/budget-sheet";
+import { FigureCells } from "./figure-cells";
+
+/** A group ahead of what it holds: sums over it and its subgroups. */
+export function GroupTableRow({ row, isReference }: { row: GroupRow; isReference: boolean }) {
+  const { number, name, letter, depth, members } = row;
+
+  return (
+    <Row band data-group={number}>
+      <RowHead className="font-semibold">
+        <span className="block" style={{ paddingLeft: `${depth * 0.9}rem` }}>
+          <span className="mr-1.5 font-normal text-ink-2">{number}</span>
+          {name}
+        </span>
+      </RowHead>
+      <Cell className="text-xs font-normal text-ink-2">
+        {members.length === 0 ? "no items yet" : `${members.length} ${members.length === 1 ? "item" : "items"}`}
+      </Cell>
+      <Cell className="font-normal">
+        <RevisionLetter letter={letter} />
+      </Cell>
+      <FigureCells row={row} isReference={isReference} />
+    </Row>
+  );
+}

@@ -1,0 +1,80 @@
+import type { Route } from "next";
+import Link from "next/link";
+
+import { NoteMark } from "@/app/_components/note-mark";
+import { RevisionLetter } from "@/app/_components/revision-letter";
+import { Cell, Row, RowHead } from "@/app/_components/table";
+import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
+import type { Note } from "@/lib/evaluation/notes/note";
+
+import { SymbolText } from "../../_components/symbol-text";
+import type { ItemRow } from "../../_sheet/budget-sheet";
+import { keyFigures } from "../../_sheet/key-figures";
+import { FigureCells } from "./figure-cells";
+
+interface ItemTableRowProps {
+  row: ItemRow;
+  isReference: boolean;
+  href: string;
+}
+
+/** An item on the budget sheet. */
+export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
+  const { number, name, owner, letter, depth, body, result } = row;
+
+  return (
+    <Row data-item={number}>
+      <RowHead>
+        <span className="block" style={{ paddingLeft: `${depth * 0.9}rem` }}>
+          <Link href={href as Route} className="hover:underline">
+            <span className="mr-1.5 text-ink-2">{number}</span>
+            {name}
+          </Link>
+          <span className="block text-xs text-ink-2">
+            {owner}
+            {body.saving ? " · a saving" : ""}
+          </span>
+        </span>
+      </RowHead>
+      <Cell className="min-w-44 lg:max-w-72">
+        {ITEM_METHODS[body.method].label}
+        <span className="block text-xs text-ink-2">
+          {keyFigures(body, result.answer).map(({ symbol, text }, at) => (
+            <span key={symbol} className="whitespace-nowrap">
+              {at === 0 ? "" : " · "}
+              <SymbolText symbol={symbol} /> {text}
+            </span>
+          ))}
+        </span>
+        <RowNotes notes={result.notes} />
+      </Cell>
+      <Cell>
+        <RevisionLetter letter={letter} />
+      </Cell>
+      <FigureCells row={row} isReference={isReference} />
+    </Row>
+  );
+}
+
+/** Cautions and refusals stand in the row; what only informs is counted and opens with the working. */
+function RowNotes({ notes }: { notes: readonly Note[] }) {
+  const grave = notes.filter(({ severity }) => severity !== "information");
+  const informing = notes.length - grave.length;
+
+  return (
+    <>
+      {grave.map((note) => (
+        <NoteMark key={note.code} severity={note.severity}>
+          {noteSentence(note)}
+        </NoteMark>
+      ))}
+      {informing > 0 ? (
+        <span className="block text-xs text-ink-2">
+          <span aria-hidden>○ </span>
+          {informing} {informing === 1 ? "note" : "notes"} for information
+        </span>
+      ) : null}
+    </>
+  );
+}

@@ -1,0 +1,40 @@
+import type { Route } from "next";
+import Link from "next/link";
+
+import type { PointResult } from "@/lib/evaluation/budget/results";
+import { standingSentence } from "@/lib/evaluation/budget/standing-sentence";
+
+interface PointChoiceProps {
+  points: readonly PointResult[];
+  worstPoint: string;
+  chosen: string;
+  hrefOf: (operatingPoint: string) => string;
+}
+
+/** The operating points of the budget, the worst named first, each with where it stands. */
+export function PointChoice({ points, worstPoint, chosen, hrefOf }: PointChoiceProps) {
+  if (points.length < 2) return null;
+  const ordered = points.toSorted(
+    (one, other) => Number(other.operatingPoint === worstPoint) - Number(one.operatingPoint === worstPoint),
+  );
+
+  return (
+    <nav aria-label="Operating point" className="mb-4 flex flex-wrap border-b border-rule-strong print:hidden">
+      {ordered.map((point) => (
+        <Link
+          key={point.operatingPoint}
+          href={hrefOf(point.operatingPoint) as Route}
+          scroll={false}
+          aria-current={point.operatingPoint === chosen ? "true" : undefined}
+          className="-mb-px border-b-[3px] border-transparent py-1.5 pr-5 hover:border-b-rule-strong aria-[current=true]:border-b-ink aria-[current=true]:font-semibold"
+        >
+          {point.operatingPoint} {point.name}
+          <span className={`block text-xs font-normal ${point.standing === "over" ? "text-signal" : "text-ink-2"}`}>
+            {standingSentence(point)}
+            {point.operatingPoint === worstPoint ? ", the worst" : ""}
+          </span>
+        </Link>
+      ))}
+    </nav>
+  );
+}

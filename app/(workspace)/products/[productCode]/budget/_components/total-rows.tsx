@@ -1,0 +1,44 @@
+import { Cell, Row, RowHead } from "@/app/_components/table";
+import type { PointResult } from "@/lib/evaluation/budget/results";
+import { formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { toHundredths } from "@/lib/units/rounding";
+
+import { WorkingNumber } from "../../_components/workings-provider";
+
+const FIGURES = ["basic", "growth", "predicted"] as const;
+
+/** The totals, with savings and, where there are any, without them. */
+export function TotalRows({ point: { totals } }: { point: PointResult }) {
+  const hasSavings = toHundredths(totals.predicted) !== toHundredths(totals.predictedWithoutSavings);
+
+  return (
+    <>
+      <Row band className="border-t border-ink">
+        <RowHead colSpan={3} className="font-semibold">
+          {hasSavings ? "Total, savings counted" : "Total"}
+        </RowHead>
+        {FIGURES.map((figure) => (
+          <Cell key={figure} numeric>
+            <WorkingNumber figure={figure} of="total" number={null} name={`Total, ${figure}`}>
+              {formatNewtonsNumber(totals[figure])}
+            </WorkingNumber>
+          </Cell>
+        ))}
+        <Cell colSpan={2} />
+        <Cell className="max-sm:hidden" />
+      </Row>
+      {hasSavings ? (
+        <Row>
+          <RowHead colSpan={5}>Total, without savings</RowHead>
+          <Cell numeric>
+            <WorkingNumber figure="predictedWithoutSavings" of="total" number={null} name="Predicted without savings">
+              {formatNewtonsNumber(totals.predictedWithoutSavings)}
+            </WorkingNumber>
+          </Cell>
+          <Cell colSpan={2} />
+          <Cell className="max-sm:hidden" />
+        </Row>
+      ) : null}
+    </>
+  );
+}
