@@ -13,6 +13,12 @@ function isSqliteConnection(value: unknown): value is SqliteConnection {
 
 const PRAGMAS = "PRAGMA foreign_keys = ON; PRAGMA recursive_triggers = ON; PRAGMA synchronous = NORMAL;";
 
+/** Sequelize's name of the connection that queries outside a transaction share. */
+const SHARED = "default";
+
+/** Connections on their way out: the file may be copied or removed only after the last of them. */
+const closing = new Set<Promise<void>>();
+
 /** Sequelize calls no connection hook for SQLite, so that the pragmas of a connection are set where it is made. */
 export function prepareConnections(sequelize: Sequelize): void {
   const manager = sequelize.connectionManager;
@@ -27,6 +33,14 @@ export function prepareConnections(sequelize: Sequelize): void {
     }
     await prepared;
     return connection;
+  };
+  manager.releaseConnection = (connection) => {
+    const open = openConnections(sequelize);
+    const key = Object.keys(open).find((name) => name !== SHARED && open[name] === connection);
+    if (key === undefined) return;
+    delete open[key];
+    const closed = close(connection).finally(() => closing.delete(closed));
+    closing.add(closed);
   };
 }
 
@@ -43,6 +57,7 @@ export async function closeAllConnections(sequelize: Sequelize): Promise<void> {
     delete open[key];
     await close(connection);
   }
+  await Promise.all(closing);
 }
 
 /** Rolls back and closes what a failed COMMIT left open. */
