@@ -1,4 +1,3 @@
-import { Solver } from "odex";
 import { describe, expect, it } from "vitest";
 import {
   BLASIUS_SHAPE_FACTOR,
@@ -6,17 +5,18 @@ import {
   blasiusFrictionIntegral,
   blasiusLocalCoefficient,
 } from "@/lib/aero/friction/blasius";
+import { integrate } from "@/tests/support/integrate";
 import { expectRelative } from "@/tests/support/relative";
 import { numberAt, readVectors } from "@/tests/vectors/read-vectors";
 
 /** f''' + ½ f f'' = 0, f(0) = f'(0) = 0; with the two thickness integrals as fourth and fifth unknown. */
 function march(wallShear: number, to: number): number[] {
-  const solver = new Solver(
-    (_eta: number, [f = 0, u = 0, shear = 0]: number[]) => [u, shear, -0.5 * f * shear, 1 - u, u * (1 - u)],
-    5,
-    { absoluteTolerance: 1e-12, relativeTolerance: 1e-12 },
+  return integrate(
+    (_eta, [f = 0, u = 0, shear = 0]) => [u, shear, -0.5 * f * shear, 1 - u, u * (1 - u)],
+    0,
+    [0, 0, wallShear, 0, 0],
+    to,
   );
-  return solver.solve(0, [0, 0, wallShear, 0, 0], to).y;
 }
 
 /** Wall shear of the solution with f' → 1, by the scaling of the equation: a trial of shear 1 ends at some f'∞. */

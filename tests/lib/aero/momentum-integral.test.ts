@@ -1,4 +1,3 @@
-import { Solver } from "odex";
 import { describe, expect, it } from "vitest";
 import { blasiusFrictionIntegral } from "@/lib/aero/friction/blasius";
 import { frictionLayer } from "@/lib/aero/friction/friction-layer";
@@ -13,6 +12,7 @@ import {
   stateAtReynoldsTheta,
   thicknessRatioAt,
 } from "@/lib/aero/friction/wall-and-wake";
+import { integrate } from "@/tests/support/integrate";
 import { expectRelative } from "@/tests/support/relative";
 import { numberAt, readVectors, type VectorCase } from "@/tests/vectors/read-vectors";
 
@@ -63,12 +63,8 @@ describe("the wall-and-wake layer against the reference vectors", () => {
 
 /** dRe_θ/dRe_x = 1/λ²(Re_θ), marched by odex from the start of the turbulent layer: another route to the same layer. */
 function marched(fromReynolds: number, fromTheta: number, to: number, r: number): number {
-  const solver = new Solver(
-    (_x: number, [theta]: number[]) => [localCoefficientAt(stateAtReynoldsTheta(theta ?? NaN, r)) / 2],
-    1,
-    { absoluteTolerance: 1e-12, relativeTolerance: 1e-12 },
-  );
-  return solver.solve(fromReynolds, [fromTheta], to).y[0] ?? NaN;
+  const slope = (_x: number, [theta = NaN]: number[]) => [localCoefficientAt(stateAtReynoldsTheta(theta, r)) / 2];
+  return integrate(slope, fromReynolds, [fromTheta], to)[0] ?? NaN;
 }
 
 describe("the momentum integral as a friction line", () => {
