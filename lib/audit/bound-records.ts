@@ -56,6 +56,7 @@ const BOUND_TABLES: readonly BoundTable[] = [
     columns: "t.id, t.product_id, t.holder_id, t.deputy_id, t.from_day, t.until_day, t.named_by_id, t.named_at",
     product: "t.product_id",
   },
+  { type: "closing", table: "closings", columns: "t.*", product: "t.product_id" },
 ];
 
 const NEWEST = `SELECT ${BOUND_TABLES.map(({ table }) => `(SELECT coalesce(max(id), 0) FROM ${table}) AS ${table}`).join(", ")}`;

@@ -5,10 +5,18 @@ import { proposals } from "./0002-proposals";
 import { issues } from "./0003-issues";
 import { signaturesAndRemarks } from "./0004-signatures-and-remarks";
 import { historyAndOutbox } from "./0005-history-and-outbox";
+import { closings } from "./0006-closings";
 import type { Migration } from "./migration";
 
 /** A static list: a folder that is read at run time would be missing from the built application. */
-const MIGRATIONS: readonly Migration[] = [peopleAndProducts, proposals, issues, signaturesAndRemarks, historyAndOutbox];
+const MIGRATIONS: readonly Migration[] = [
+  peopleAndProducts,
+  proposals,
+  issues,
+  signaturesAndRemarks,
+  historyAndOutbox,
+  closings,
+];
 
 /** Brings the open database to the newest schema, each step in a transaction of its own; answers what it ran. */
 export async function migrateDatabase(): Promise<string[]> {
