@@ -6,6 +6,8 @@ import Qty from "js-quantities";
  * standard gravity 9.80665 m/s²).
  */
 const POUND_FORCE = 0.45359237 * 9.80665;
+/** Conventional density of mercury times standard gravity, Pa per metre of column. */
+const MERCURY = 13595.1 * 9.80665;
 const EXACT_UNITS: ReadonlyMap<string, { factor: number; si: string }> = new Map([
   ["kt", { factor: 1852 / 3600, si: "m/s" }],
   ["kn", { factor: 1852 / 3600, si: "m/s" }],
@@ -26,6 +28,9 @@ const EXACT_UNITS: ReadonlyMap<string, { factor: number; si: string }> = new Map
   ["sqft", { factor: 0.3048 ** 2, si: "m2" }],
   ["kg/m/s", { factor: 1, si: "Pa*s" }],
   ["kg/(m*s)", { factor: 1, si: "Pa*s" }],
+  ["inHg", { factor: MERCURY * 0.0254, si: "Pa" }],
+  ["mmHg", { factor: MERCURY * 0.001, si: "Pa" }],
+  ["kg/(m s)", { factor: 1, si: "Pa*s" }],
   ["thou", { factor: 2.54e-5, si: "m" }],
 ]);
 
