@@ -18,7 +18,7 @@ interface RowFigures {
   predicted: number;
   /** null where the sheet has no row for it. */
   allocationHundredths: number | null;
-  /** Allocation less predicted, both as printed; null without an allocation. */
+  /** Allocation less predicted, both as printed; null without an allocation or where an item is refused. */
   marginHundredths: number | null;
 }
 
@@ -102,7 +102,7 @@ function itemRow(number: string, depth: number, letter: string, context: RowCont
     basic,
     growth,
     predicted,
-    ...allocationOf("item", number, predicted, context.indexed),
+    ...allocationOf("item", number, result.refused ? null : predicted, context.indexed),
     body,
     owner: context.people.get(body.ownerId) ?? `person ${body.ownerId}`,
     result,
@@ -128,17 +128,18 @@ function groupRow(number: string, depth: number, letter: string, context: RowCon
     basic: sum((result) => result.basic),
     growth: sum((result) => result.growth),
     predicted,
-    ...allocationOf("group", number, predicted, indexed),
+    ...allocationOf("group", number, found.some(({ refused }) => refused) ? null : predicted, indexed),
     body,
     members,
   };
 }
 
-function allocationOf(kind: "item" | "group", number: string, predicted: number, { allocations }: IndexedState) {
+function allocationOf(kind: "item" | "group", number: string, predicted: number | null, { allocations }: IndexedState) {
   const row = allocations.rows.find((entry) => entry.kind === kind && entry.number === number);
   const allocationHundredths = row?.hundredths ?? null;
   return {
     allocationHundredths,
-    marginHundredths: allocationHundredths === null ? null : allocationHundredths - toHundredths(predicted),
+    marginHundredths:
+      allocationHundredths === null || predicted === null ? null : allocationHundredths - toHundredths(predicted),
   };
 }

@@ -43,7 +43,7 @@ export function allocationWorking(row: BudgetRow, sheetRevisions: readonly LineR
 export function allocationMarginWorking({ point, isReference, indexed }: BudgetSheet, row: BudgetRow): Working {
   const base = emptyWorking(`Margin of ${row.number} ${row.name} at ${point.operatingPoint}`);
   if (row.allocationHundredths === null || row.marginHundredths === null) {
-    return { ...base, sentences: ["Without an allocation there is no margin."] };
+    return { ...base, sentences: ["There is no margin without an allocation, nor while an item is refused."] };
   }
 
   const reference = indexed.terms.referenceOperatingPoint;

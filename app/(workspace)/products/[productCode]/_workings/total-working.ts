@@ -1,8 +1,8 @@
+import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { formatHundredths, formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatPercent } from "@/lib/units/format-number";
 
 import type { BudgetSheet, GroupRow, ItemRow } from "../_sheet/budget-sheet";
-import { conservationOf } from "../_sheet/conservation";
 import { step } from "./item-working";
 import type { Figure, Working, WorkingTerm } from "./working";
 
@@ -166,18 +166,18 @@ function reserveWorking(sheet: BudgetSheet): Working {
   };
 }
 
-function unallocatedWorking(sheet: BudgetSheet): Working {
-  const sums = conservationOf(sheet);
-  const base = emptyWorking("Unallocated");
-  if (!sums) return base;
+function unallocatedWorking({ budget }: BudgetSheet): Working {
+  const sums = allocationsView(budget.state, budget.results);
+  const { allocatedHundredths: allocated, reserveHundredths: reserve, limitHundredths: limit } = sums;
+
   return {
-    ...base,
-    answer: `${formatHundredths(sums.unallocated)} N`,
+    ...emptyWorking("Unallocated"),
+    answer: `${formatHundredths(sums.unallocatedHundredths)} N`,
     terms: [
-      { label: `Limit at ${sums.operatingPoint}`, value: formatHundredths(sums.limit) },
-      { label: "less reserve", value: formatHundredths(-sums.reserve) },
-      { label: "less allocations", value: formatHundredths(-sums.allocated) },
-      { label: "Unallocated", value: formatHundredths(sums.limit - sums.reserve - sums.allocated) },
+      { label: `Limit at ${sums.operatingPoint}`, value: formatHundredths(limit) },
+      { label: "less reserve", value: formatHundredths(-reserve) },
+      { label: "less allocations", value: formatHundredths(-allocated) },
+      { label: "Unallocated", value: formatHundredths(limit - reserve - allocated) },
     ],
     sentences: [
       "Stored on the allocations sheet and checked against this sum after every act. A group's allocation is a ceiling: what its members hold counts inside it, not beside it.",

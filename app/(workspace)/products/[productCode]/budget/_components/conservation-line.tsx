@@ -1,17 +1,17 @@
 import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
+import type { AllocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { formatHundredths } from "@/lib/units/format-newtons";
 
 import { WorkingNumber } from "../../_components/workings-provider";
-import type { Conservation } from "../../_sheet/conservation";
 
 /** Allocations, unallocated and reserve against the limit: the sum that must hold after every act. */
-export function ConservationLine({ sums }: { sums: Conservation }) {
+export function ConservationLine({ sums }: { sums: AllocationsView }) {
   const parts = [
-    { sign: "", label: "allocated", value: sums.allocated, figure: null },
-    { sign: "+", label: "unallocated", value: sums.unallocated, figure: "unallocated" },
-    { sign: "+", label: "reserve", value: sums.reserve, figure: null },
-    { sign: "=", label: `limit at ${sums.operatingPoint}`, value: sums.limit, figure: null },
+    { sign: "", label: "allocated", value: sums.allocatedHundredths, figure: null },
+    { sign: "+", label: "unallocated", value: sums.unallocatedHundredths, figure: "unallocated" },
+    { sign: "+", label: "reserve", value: sums.reserveHundredths, figure: null },
+    { sign: "=", label: `limit at ${sums.operatingPoint}`, value: sums.limitHundredths, figure: null },
   ] as const;
 
   return (
@@ -38,10 +38,11 @@ export function ConservationLine({ sums }: { sums: Conservation }) {
           </div>
         ))}
       </dl>
-      {sums.holds ? null : (
+      {sums.isConserved ? null : (
         <div className="mt-3">
           <Notice kind="refusal">
-            These do not add up to the limit. Nothing that was approved can bring that about: tell the administrator.
+            These do not add up to the limit, or a group's members hold more than its ceiling. Nothing that was approved
+            can bring that about: tell the administrator.
           </Notice>
         </div>
       )}

@@ -1,0 +1,98 @@
+import type { Metadata } from "next";
+import { notFound } from "next/navigation";
+
+import { requireActor } from "@/app/_server/session";
+import { PageHeading } from "@/app/_components/page-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
+import { abilityFor, covers } from "@/policies/ability";
+
+import { AsStoodBanner } from "../_components/as-stood-banner";
+import { NotEstablished } from "../_components/not-established";
+import { ServiceWindCaution } from "../_components/service-wind-caution";
+import { budgetFields } from "../_components/sheet-fields";
+import { WorkingsProvider } from "../_components/workings-provider";
+import { pageBudget, pageProduct } from "../_server/read-page";
+import { type BudgetSheet, budgetSheet, pointOf } from "../_sheet/budget-sheet";
+import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
+import { streamText } from "../_sheet/stream-text";
+import { BudgetActions } from "./_components/budget-actions";
+import { BudgetItems } from "./_components/budget-items";
+import { ConservationLine } from "./_components/conservation-line";
+import { MeasuresTable } from "./_components/measures-table";
+import { PointChoice } from "./_components/point-choice";
+import { RetiredLines } from "./_components/retired-lines";
+import { StandingHead } from "./_components/standing-head";
+import { StaveFigure } from "./_components/stave-figure";
+
+type Props = PageProps<"/products/[productCode]/budget">;
+
+export async function generateMetadata({ params, searchParams }: Props): Promise<Metadata> {
+  const { productCode } = await params;
+  const { issue } = SheetQuery.parse(await searchParams);
+  return { title: `Budget of ${productCode}${issue === undefined ? "" : ` at issue ${issue}`}` };
+}
+
+export default async function BudgetPage({ params, searchParams }: Props) {
+  const { productCode } = await params;
+  const query = SheetQuery.parse(await searchParams);
+  const [actor, product, budget] = await Promise.all([
+    requireActor(),
+    pageProduct(productCode),
+    pageBudget(productCode, query),
+  ]);
+  const ability = abilityFor(actor);
+  if (!budget) {
+    const mayEstablish = covers(ability, { on: "Product", action: "establish", productId: product.id });
+    return <NotEstablished product={product} mayEstablish={mayEstablish} />;
+  }
+
+  const point = pointOf(budget, query.point);
+  if (!point) notFound();
+  const sheet = budgetSheet(budget, point);
+  const mayStart = covers(ability, { on: "Product", action: "start_draft", productId: product.id });
+
+  return (
+    <>
+      <PageHeading
+        title={product.name}
+        subtitle={`${product.code} · issue ${budget.issue.number} · ${streamText(point)}`}
+        actions={<BudgetActions productCode={product.code} mayStart={mayStart} />}
+      />
+      <BudgetMatter sheet={sheet} query={query} userId={actor.userId} />
+    </>
+  );
+}
+
+interface BudgetMatterProps {
+  sheet: BudgetSheet;
+  query: SheetQuery;
+  userId: number;
+}
+
+function BudgetMatter({ sheet, query, userId }: BudgetMatterProps) {
+  const { budget, point } = sheet;
+  const path = `/products/${budget.product.code}/budget`;
+
+  return (
+    <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point)} />}>
+      <AsStoodBanner budget={budget} newestHref={sheetAddress(path, query, { issue: undefined, on: undefined })} />
+      <ServiceWindCaution kind={budget.product.kind} />
+      <WorkingsProvider productCode={budget.product.code} issue={budget.issue.number} point={point.operatingPoint}>
+        <PointChoice
+          points={budget.results.points}
+          worstPoint={budget.results.worstPoint}
+          chosen={point.operatingPoint}
+          hrefOf={(operatingPoint) => sheetAddress(path, query, { point: operatingPoint })}
+        />
+        <StandingHead point={point} />
+        <StaveFigure sheet={sheet} />
+        <BudgetItems sheet={sheet} query={query} path={path} userId={userId} />
+        <ConservationLine sums={allocationsView(budget.state, budget.results)} />
+        <MeasuresTable sheet={sheet} />
+      </WorkingsProvider>
+      <RetiredLines lines={sheet.retired} />
+    </Sheet>
+  );
+}

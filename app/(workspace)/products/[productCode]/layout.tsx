@@ -1,0 +1,38 @@
+import type { ReactNode } from "react";
+
+import { IndexLayout } from "@/app/_components/index-layout";
+import { SheetIndex } from "@/app/_components/sheet-index";
+
+import { pageProduct } from "./_server/read-page";
+
+interface ProductLayoutProps {
+  children: ReactNode;
+  params: Promise<{ productCode: string }>;
+}
+
+/** The sheets of one product, numbered as in a drawing set. */
+export default async function ProductLayout({ children, params }: ProductLayoutProps) {
+  const { productCode } = await params;
+  const product = await pageProduct(productCode);
+  const base = `/products/${product.code}`;
+
+  return (
+    <IndexLayout
+      index={
+        <SheetIndex
+          label={`Sheets of ${product.code}`}
+          entries={[
+            { href: `${base}/budget`, label: "Budget" },
+            { href: `${base}/proposals`, label: "Proposals" },
+            { href: `${base}/operating-points`, label: "Operating points" },
+            { href: `${base}/issues`, label: "Issues" },
+            { href: `${base}/history`, label: "History" },
+            { href: `${base}/people`, label: "People" },
+          ]}
+        />
+      }
+    >
+      {children}
+    </IndexLayout>
+  );
+}
