@@ -1,0 +1,91 @@
+import { performAct } from "@/lib/audit/perform-act";
+import { loadNewestBudget } from "@/lib/budget/load-budget";
+import type { Actor } from "@/lib/vocabulary/actor";
+import { systemClock, type Clock } from "@/lib/vocabulary/clock";
+import { Refusal, type FieldFault } from "@/lib/vocabulary/refusal";
+import { inSnapshot, inTransaction } from "@/models/database";
+import { Proposal } from "@/models/proposal";
+import { authorize } from "@/policies/authorize";
+import { authorizeChange } from "./authorize-change";
+import { draftViewOf } from "./draft-view";
+import { reserveLines } from "./line-ids";
+import { isOpen, wrongStateSentence } from "./moves";
+import { noteEditor } from "./note-editor";
+import { proposalById, proposalQuestion, subjectOf, type ProposalRecord } from "./proposal-record";
+import { sameValue } from "./same-value";
+import type { DraftContent, SaveDraftInput } from "./schema";
+import { replaceWorkingCopy, storedChange, type StoredChange } from "./working-copy";
+import type { DraftView } from "./workspace-views";
+
+export type SavedDraft =
+  | { outcome: "saved"; lockVersion: number; savedAt: string }
+  /** Somebody else saved since: what is stored now, and nothing of it was overwritten. */
+  | { outcome: "moved"; stored: DraftView };
+
+/**
+ * Keeps what was typed, complete or not. Saving is no act and leaves no trace in the history; a save that was refused
+ * for want of right does.
+ */
+export async function saveDraft(actor: Actor, input: SaveDraftInput, clock: Clock = systemClock): Promise<SavedDraft> {
+  const named = await inSnapshot((tx) => proposalById(input.proposalId, tx));
+  try {
+    return await inTransaction(async (tx): Promise<SavedDraft> => {
+      const at = clock().toISOString();
+      const proposal = await proposalById(input.proposalId, tx);
+      authorize(actor, proposalQuestion(proposal, actor, "edit"));
+      if (!isOpen(proposal.state)) throw new Refusal("wrong_state", wrongStateSentence(proposal.state));
+      if (proposal.lockVersion !== input.lockVersion) {
+        return { outcome: "moved", stored: await draftViewOf(actor, proposal, at, tx) };
+      }
+
+      const stored = await storedChange({ proposalId: proposal.id }, tx);
+      const budget = await loadNewestBudget(proposal.productId, tx);
+      const typed = whatIsNew(input.content, stored);
+      authorizeChange(actor, [actor], { ...budget, productId: proposal.productId }, typed, input.content.edits);
+      refuseFaults([...editedTwice(input.content), ...(await reserveLines(proposal, input.content.edits, at, tx))]);
+
+      await replaceWorkingCopy(proposal, input.content, tx);
+      await updateFacts(proposal, input.content, tx);
+      await noteEditor(proposal.id, actor.userId, at, tx);
+      return { outcome: "saved", lockVersion: proposal.lockVersion + 1, savedAt: at };
+    });
+  } catch (problem) {
+    if (!(problem instanceof Refusal)) throw problem;
+    const frame = { act: "save_draft", chain: named.productCode, subject: subjectOf(named) } as const;
+    return performAct(actor, clock, frame, () => Promise.reject(problem));
+  }
+}
+
+/** Edits and transfers that differ from what is stored: what the saver answers for. */
+function whatIsNew({ edits, transfers }: DraftContent, stored: StoredChange): StoredChange {
+  return {
+    edits: edits.filter((edit) => !stored.edits.some((old) => sameValue(old, edit))),
+    transfers: transfers.filter((transfer) => !stored.transfers.some((old) => sameValue(old, transfer))),
+  };
+}
+
+function editedTwice({ edits }: DraftContent): FieldFault[] {
+  return edits.flatMap(({ kind, number, operation, baseLetter }, index) => {
+    const first = edits.findIndex((edit) => edit.kind === kind && edit.number === number);
+    const path = `edits.${index}.number`;
+    if (first < index) return [{ path, sentence: `${number} is edited twice here.` }];
+    if ((operation === "add") === (baseLetter === null)) return [];
+    return [{ path, sentence: "A new line starts from no revision, any other from one. Reload the page." }];
+  });
+}
+
+function refuseFaults(faults: readonly FieldFault[]): void {
+  const [first] = faults;
+  if (first) throw new Refusal("invalid", first.sentence, faults);
+}
+
+async function updateFacts(
+  proposal: ProposalRecord,
+  { title, reason, neededBy }: DraftContent,
+  tx: Parameters<typeof proposalById>[1],
+): Promise<void> {
+  await Proposal.update(
+    { title, reason, neededBy, lockVersion: proposal.lockVersion + 1 },
+    { where: { id: proposal.id, lockVersion: proposal.lockVersion }, transaction: tx },
+  );
+}
