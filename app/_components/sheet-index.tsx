@@ -4,6 +4,8 @@ import type { Route } from "next";
 import Link from "next/link";
 import { usePathname } from "next/navigation";
 
+import { PendingMark } from "./pending-mark";
+
 export interface SheetIndexEntry {
   href: string;
   label: string;
@@ -31,7 +33,10 @@ export function SheetIndex({ entries, label = "Sheets" }: SheetIndexProps) {
               className="flex items-baseline gap-2 border-b border-rule py-2.5 pr-3 pl-2 whitespace-nowrap hover:bg-band focus-visible:-outline-offset-2 aria-[current=page]:border-b-[3px] aria-[current=page]:border-b-ink aria-[current=page]:font-semibold lg:aria-[current=page]:border-b lg:aria-[current=page]:border-b-rule lg:aria-[current=page]:border-l-4 lg:aria-[current=page]:border-l-ink"
             >
               <span className="w-5 text-sm text-ink-2">{at + 1}</span>
-              <span className="lg:grow">{entry.label}</span>
+              <span className="lg:grow">
+                {entry.label}
+                <PendingMark />
+              </span>
               {entry.count ? <span className="text-sm font-normal text-ink-2">({entry.count})</span> : null}
             </Link>
           </li>

@@ -5,6 +5,8 @@ import Link from "next/link";
 import { usePathname } from "next/navigation";
 import type { ReactNode } from "react";
 
+import { PendingMark } from "@/app/_components/pending-mark";
+
 interface HeaderLinkProps {
   href: Route;
   /** Only this very page counts as being there, not the pages below it. */
@@ -23,6 +25,7 @@ export function HeaderLink({ href, exact = false, children }: HeaderLinkProps) {
       className="py-1 text-ink-2 hover:text-ink hover:underline aria-[current=page]:text-ink aria-[current=page]:underline aria-[current=page]:decoration-2 aria-[current=page]:underline-offset-6"
     >
       {children}
+      <PendingMark />
     </Link>
   );
 }
