@@ -1,0 +1,129 @@
+import Link from "next/link";
+import type { Route } from "next";
+
+import { MarkdownText } from "@/app/_components/markdown-text";
+import { Notice } from "@/app/_components/notice";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { UtcTime } from "@/app/_components/utc-time";
+import type { ProposalView } from "@/lib/proposals/views";
+
+import { ChangeTable } from "./change-table";
+import { EffectSummary } from "./effect-summary";
+import { ItemEffects } from "./followers-table";
+import { RemarksSchedule } from "./remarks-schedule";
+import { TransfersTable } from "./transfers-table";
+
+/** The body of a change sheet: effect, lines field by field, what follows, reason, remarks. */
+export function ChangeSheet({ proposal }: { proposal: ProposalView }) {
+  const effect = proposal.effectToday ?? proposal.effectOnBase;
+  const baseIssue = proposal.round?.baseIssue ?? proposal.newestIssue;
+  const mayRemark = proposal.moves.remark.applies && proposal.moves.remark.allowed;
+
+  return (
+    <>
+      <Warnings proposal={proposal} />
+      {effect ? <EffectSummary effect={effect} withLabel={`with ${shortLabel(proposal)}`} /> : null}
+      {proposal.lines.map((line) => (
+        <ChangeTable
+          key={`${line.kind} ${line.number}`}
+          proposalId={proposal.proposalId}
+          line={line}
+          baseIssue={baseIssue}
+          mayRemark={mayRemark}
+        />
+      ))}
+      <TransfersTable transfers={proposal.transfers} />
+      {effect ? (
+        <>
+          <ItemEffects heading="Results of the edited items" effects={effect.edited} />
+          <ItemEffects heading="What only follows" effects={effect.followers} />
+        </>
+      ) : null}
+      <section>
+        <SectionHeading>Reason</SectionHeading>
+        <MarkdownText text={proposal.reason} />
+      </section>
+      <Rounds proposal={proposal} />
+      <Objections proposal={proposal} />
+      <RemarksSchedule proposalId={proposal.proposalId} remarks={proposal.remarks} mayRemark={mayRemark} />
+    </>
+  );
+}
+
+function shortLabel({ number, label }: ProposalView): string {
+  return number === null ? label : String(number);
+}
+
+function Warnings({ proposal }: { proposal: ProposalView }) {
+  const { overtaken, blocked, faults } = proposal;
+  if (overtaken.length === 0 && !blocked && faults.length === 0) return null;
+
+  return (
+    <div className="mb-4 space-y-2">
+      {overtaken.length > 0 ? (
+        <Notice kind="caution">
+          <strong className="font-semibold">Overtaken.</strong> {overtaken.join(" ")} It takes no approving signature
+          until it is carried forward to issue {proposal.newestIssue}.
+        </Notice>
+      ) : null}
+      {blocked ? (
+        <Notice kind="caution">
+          <strong className="font-semibold">Blocked.</strong> {blocked}
+        </Notice>
+      ) : null}
+      {faults.map((fault) => (
+        <Notice key={`${fault.path} ${fault.sentence}`} kind="caution">
+          {fault.sentence}
+        </Notice>
+      ))}
+    </div>
+  );
+}
+
+function Rounds({ proposal }: { proposal: ProposalView }) {
+  if (proposal.rounds.length < 2) return null;
+  const base = `/products/${proposal.product.code}/proposals/${proposal.key}`;
+
+  return (
+    <section>
+      <SectionHeading>Rounds</SectionHeading>
+      <ul className="border-t border-ink">
+        {proposal.rounds.map((round) => (
+          <li key={round.round} className="border-b border-rule py-1.5">
+            <Link
+              className="link"
+              aria-current={round.round === proposal.round?.round ? "page" : undefined}
+              href={`${base}?round=${round.round}` as Route}
+            >
+              Round {round.round}
+            </Link>
+            , submitted by {round.submittedBy.name}, <UtcTime at={round.submittedAt} />, on issue {round.baseIssue}{" "}
+            <span className="font-code text-xs text-ink-2" title={round.hash}>
+              {round.hash.slice(0, 12)}
+            </span>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}
+
+function Objections({ proposal }: { proposal: ProposalView }) {
+  if (proposal.objections.length === 0) return null;
+
+  return (
+    <section>
+      <SectionHeading>Objections</SectionHeading>
+      <ul className="border-t border-ink">
+        {proposal.objections.map((objection) => (
+          <li key={objection.id} className="border-b border-rule py-2">
+            <p className="text-sm text-ink-2">
+              {objection.by.name}, <UtcTime at={objection.at} />, round {objection.round}
+            </p>
+            <p className="whitespace-pre-wrap">{objection.reason}</p>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}

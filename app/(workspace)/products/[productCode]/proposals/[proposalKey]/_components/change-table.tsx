@@ -1,0 +1,128 @@
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import { RemarkFlag } from "@/app/_components/remark-flag";
+import { RevisionLetter } from "@/app/_components/revision-letter";
+import type { FieldChangeRow, LineChangeView } from "@/lib/proposals/views";
+import { formatNewtonsChange } from "@/lib/units/format-newtons";
+import type { EditOperation } from "@/lib/vocabulary/lines";
+import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
+
+import { RemarkDialog } from "./remark-dialog";
+
+const OPERATION_WORDS: Record<EditOperation, string> = {
+  add: "added",
+  revise: "revised",
+  retire: "retired",
+  reinstate: "reinstated",
+};
+
+interface ChangeTableProps {
+  proposalId: number;
+  line: LineChangeView;
+  baseIssue: number;
+  mayRemark: boolean;
+}
+
+/** One line of the change sheet: every field as it was and as it is to be, changed rows with a bar in the margin. */
+export function ChangeTable({ proposalId, line, baseIssue, mayRemark }: ChangeTableProps) {
+  const added = line.operation === "add";
+
+  return (
+    <section className="mt-7" aria-label={`${line.number} ${line.name}, ${OPERATION_WORDS[line.operation]}`}>
+      <LineHeading line={line} />
+      <Table caption={`Fields of ${line.number} ${line.name}`} narrow="stack">
+        <TableHead>
+          <Head className="w-[27%]">Field</Head>
+          <Head className="w-[29%]">{added ? "Was" : `Was, issue ${baseIssue}`}</Head>
+          <Head className="w-[29%]">To be</Head>
+          <Head numeric unit="N">
+            Effect
+          </Head>
+          <Head>
+            <span className="sr-only">Remarks</span>
+          </Head>
+        </TableHead>
+        <tbody>
+          {line.rows.map((row) => (
+            <FieldRow key={row.field} proposalId={proposalId} line={line} row={row} mayRemark={mayRemark} />
+          ))}
+        </tbody>
+      </Table>
+    </section>
+  );
+}
+
+function LineHeading({ line }: { line: LineChangeView }) {
+  return (
+    <div className="mb-1 flex flex-wrap items-baseline gap-x-2.5 gap-y-1">
+      <h2 className="text-lg">
+        {line.kind === "item" ? "" : `${LINE_KIND_NAMES[line.kind]} `}
+        {line.number} {line.name}
+      </h2>
+      {line.baseLetter ? (
+        <>
+          <RevisionLetter letter={line.baseLetter} /> <span className="font-semibold">becomes</span>
+        </>
+      ) : null}
+      <RevisionLetter letter={line.nextLetter} />
+      <span className="ml-auto text-sm text-ink-2">
+        {OPERATION_WORDS[line.operation]}
+        {line.effect === null ? "" : `, ${formatNewtonsChange(line.effect)}`}
+      </span>
+    </div>
+  );
+}
+
+interface FieldRowProps {
+  proposalId: number;
+  line: LineChangeView;
+  row: FieldChangeRow;
+  mayRemark: boolean;
+}
+
+function FieldRow({ proposalId, line, row, mayRemark }: FieldRowProps) {
+  return (
+    <Row>
+      <RowHead label="Field" className={`text-ink-2 ${row.changed ? "change-bar" : ""}`}>
+        {row.label}
+        {row.changed ? <span className="sr-only">, changed</span> : null}
+      </RowHead>
+      <Cell label="Was" className="whitespace-pre-line text-ink-2">
+        <ValueText value={row.was} unit={row.unit} />
+      </Cell>
+      <Cell label="To be" className={`whitespace-pre-line ${row.changed ? "font-semibold" : ""}`}>
+        <ValueText value={row.toBe} unit={row.unit} />
+      </Cell>
+      <Cell label="Effect" numeric className="text-water">
+        {row.effect === null ? "" : formatNewtonsChange(row.effect)}
+      </Cell>
+      <Cell className="max-sm:!flex">
+        <span className="flex flex-wrap items-center justify-end gap-1.5">
+          {row.remarkNumbers.map((number) => (
+            <a key={number} href={`#remark-${number}`} aria-label={`Remark ${number} on ${row.label}`}>
+              <RemarkFlag>R{number}</RemarkFlag>
+            </a>
+          ))}
+          {mayRemark ? (
+            <RemarkDialog
+              proposalId={proposalId}
+              target={{ line: { kind: line.kind, number: line.number }, field: row.field }}
+              title={`Remark on ${line.number} ${row.label}`}
+              discreet
+            />
+          ) : null}
+        </span>
+      </Cell>
+    </Row>
+  );
+}
+
+function ValueText({ value, unit }: { value: string | null; unit: string | null }) {
+  if (value === null || value === "") return <span aria-label="empty">–</span>;
+
+  return (
+    <>
+      {value}
+      {unit ? `\u2009${unit}` : ""}
+    </>
+  );
+}

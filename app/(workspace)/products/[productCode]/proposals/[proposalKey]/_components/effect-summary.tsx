@@ -1,0 +1,107 @@
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { EffectView, PointEffectView } from "@/lib/proposals/views";
+import { formatNewtons, formatNewtonsChange, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { STANDING_NAMES } from "@/lib/vocabulary/standing";
+
+import { StavePair } from "../../../_pictures/stave-pair";
+
+interface EffectSummaryProps {
+  effect: EffectView;
+  /** "with TF2-CP-04": names the lower stave. */
+  withLabel: string;
+}
+
+/** What the proposal does to the total: in a sentence, drawn, and in figures at every operating point. */
+export function EffectSummary({ effect, withLabel }: EffectSummaryProps) {
+  const worst = effect.points[0];
+
+  return (
+    <>
+      <p className="mb-3 text-xl font-semibold">{effect.sentence}</p>
+      {worst ? (
+        <figure className="mb-4">
+          <StavePair staves={stavesOf(effect.onIssue, worst, withLabel)} />
+          <figcaption className="mt-1 text-xs text-ink-2">
+            {worst.operatingPoint} {worst.name}: solid is basic, hatched is growth; the post is the limit, the dashed
+            post where the reserve begins.
+          </figcaption>
+        </figure>
+      ) : null}
+      <PointsTable effect={effect} />
+    </>
+  );
+}
+
+function stavesOf(issue: number, point: PointEffectView, withLabel: string) {
+  const one = (label: string, basic: number, predicted: number, limit: number, reserve: number) => ({
+    label,
+    text: `${formatNewtons(predicted)} predicted`,
+    input: {
+      items: [{ number: "", name: "", basic }],
+      basic,
+      growth: predicted - basic,
+      predicted,
+      limit,
+      reserve,
+    },
+  });
+
+  return [
+    one(`issue ${issue}`, point.basicWas, point.predictedWas, point.limitWas, point.reserveWas),
+    one(withLabel, point.basicNow, point.predictedNow, point.limitNow, point.reserveNow),
+  ];
+}
+
+function PointsTable({ effect }: { effect: EffectView }) {
+  return (
+    <Table caption={`Effect at every operating point, on issue ${effect.onIssue}`} showCaption narrow="stack">
+      <TableHead>
+        <Head>Operating point</Head>
+        <Head numeric unit="N">
+          Predicted, issue {effect.onIssue}
+        </Head>
+        <Head numeric unit="N">
+          To be
+        </Head>
+        <Head numeric unit="N">
+          Effect
+        </Head>
+        <Head numeric unit="N">
+          Margin to limit
+        </Head>
+        <Head>Standing</Head>
+      </TableHead>
+      <tbody>
+        {effect.points.map((point) => (
+          <Row key={point.operatingPoint}>
+            <RowHead label="Operating point">
+              {point.operatingPoint} {point.name}
+            </RowHead>
+            <Cell numeric label={`Issue ${effect.onIssue}`}>
+              {formatNewtonsNumber(point.predictedWas)}
+            </Cell>
+            <Cell numeric label="To be">
+              {formatNewtonsNumber(point.predictedNow)}
+            </Cell>
+            <Cell numeric label="Effect">
+              {formatNewtonsChange(point.predictedDelta)}
+            </Cell>
+            <Cell numeric label="Margin">
+              {formatNewtonsNumber(point.marginWas)} → {formatNewtonsNumber(point.marginNow)}
+            </Cell>
+            <Cell label="Standing">
+              <Standings point={point} />
+            </Cell>
+          </Row>
+        ))}
+      </tbody>
+    </Table>
+  );
+}
+
+function Standings({ point }: { point: PointEffectView }) {
+  const now = STANDING_NAMES[point.standingNow];
+  const text = point.standingWas === point.standingNow ? now : `${STANDING_NAMES[point.standingWas]} → ${now}`;
+
+  return <span className={point.standingNow === "over" ? "font-semibold text-signal" : ""}>{text}</span>;
+}

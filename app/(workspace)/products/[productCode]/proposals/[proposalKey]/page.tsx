@@ -1,0 +1,84 @@
+import type { Metadata } from "next";
+import { notFound } from "next/navigation";
+
+import { PageHeading } from "@/app/_components/page-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { dayText } from "@/app/_components/utc-text";
+import { requireActor } from "@/app/_server/session";
+import { proposalView } from "@/lib/proposals/queries";
+import type { ProposalView } from "@/lib/proposals/views";
+
+import { stateWords } from "../_components/state-words";
+import { ChangeSheet } from "./_components/change-sheet";
+import { ExportLinks } from "./_components/export-links";
+import { ProposalMoves } from "./_components/proposal-moves";
+import { SignOffTable } from "./_components/sign-off-table";
+
+type Props = PageProps<"/products/[productCode]/proposals/[proposalKey]">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { productCode, proposalKey } = await params;
+
+  return { title: `Proposal ${proposalKey} of ${productCode}` };
+}
+
+export default async function ProposalPage({ params, searchParams }: Props) {
+  const { productCode, proposalKey } = await params;
+  const round = roundAsked((await searchParams).round);
+  const actor = await requireActor();
+  const proposal = await proposalView(actor, productCode, proposalKey, round);
+  if (!proposal) notFound();
+
+  return (
+    <>
+      <PageHeading
+        title={proposal.title}
+        subtitle={subtitleOf(proposal)}
+        actions={<ExportLinks productCode={productCode} proposalKey={proposal.key} />}
+      />
+      <Sheet
+        titleBlock={<TitleBlock fields={titleFields(proposal)} />}
+        foot={
+          <SignOffTable routing={proposal.routing} signatures={proposal.signatures}>
+            <ProposalMoves proposal={proposal} readerId={actor.userId} />
+          </SignOffTable>
+        }
+      >
+        <ChangeSheet proposal={proposal} />
+      </Sheet>
+    </>
+  );
+}
+
+function roundAsked(text: string | string[] | undefined): number | undefined {
+  return typeof text === "string" && /^[1-9]\d{0,3}$/.test(text) ? Number(text) : undefined;
+}
+
+function subtitleOf(proposal: ProposalView): string {
+  const parts = [
+    proposal.label,
+    stateWords(proposal.state, proposal.round?.round ?? 0),
+    `proposed by ${proposal.proposer.name}`,
+    proposal.round ? `on issue ${proposal.round.baseIssue}` : "not submitted yet",
+  ];
+  if (proposal.neededBy) parts.push(`needed by ${dayText(proposal.neededBy)}`);
+
+  return parts.join(" · ");
+}
+
+function titleFields(proposal: ProposalView) {
+  const approvers = proposal.signatures.filter(({ counts, decision }) => counts && decision === "approve");
+
+  return [
+    { label: "Product", value: `${proposal.product.code} ${proposal.product.name}` },
+    { label: "Change sheet", value: proposal.label },
+    { label: "Round", value: proposal.round?.round ?? "–" },
+    { label: "Proposed", value: proposal.proposer.name },
+    { label: "Approved", value: approvers.map(({ printedName }) => printedName).join(", ") || "–" },
+    {
+      label: proposal.approvedAsIssue ? "Made issue" : "Newest issue",
+      value: proposal.approvedAsIssue ?? proposal.newestIssue,
+    },
+  ];
+}

@@ -1,0 +1,74 @@
+import type { Metadata } from "next";
+import { notFound } from "next/navigation";
+
+import { requireActor } from "@/app/_server/session";
+import { EmptyNote } from "@/app/_components/empty-note";
+import { PageHeading } from "@/app/_components/page-heading";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { proposalList } from "@/lib/proposals/queries";
+import type { ProposalListRow } from "@/lib/proposals/views";
+import { END_STATES } from "@/lib/vocabulary/proposals";
+
+import { ProposalsTable } from "./_components/proposals-table";
+import { StartDraft } from "./_components/start-draft";
+
+type Props = PageProps<"/products/[productCode]/proposals">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: `Proposals of ${(await params).productCode}` };
+}
+
+export default async function ProposalsPage({ params }: Props) {
+  const { productCode } = await params;
+  const list = await proposalList(await requireActor(), productCode);
+  if (!list) notFound();
+  const { product, rows, mayStart, newestIssue } = list;
+
+  return (
+    <>
+      <PageHeading
+        title="Proposals"
+        subtitle={`${product.code} · ${product.name} · issue ${newestIssue}`}
+        actions={mayStart ? <StartDraft productCode={product.code} /> : null}
+      />
+      <Sheet
+        titleBlock={
+          <TitleBlock
+            fields={[
+              { label: "Product", value: `${product.code} ${product.name}` },
+              { label: "Issue", value: newestIssue },
+              { label: "Sheet", value: "Proposals" },
+            ]}
+          />
+        }
+      >
+        {rows.length === 0 ? (
+          <EmptyNote title="No proposals yet.">
+            A proposal is how any number of this budget changes: start a draft, revise its lines, propose it.
+          </EmptyNote>
+        ) : (
+          <Groups productCode={product.code} rows={rows} />
+        )}
+      </Sheet>
+    </>
+  );
+}
+
+function Groups({ productCode, rows }: { productCode: string; rows: readonly ProposalListRow[] }) {
+  const groups = [
+    { heading: "Drafts", rows: rows.filter(({ state }) => state === "draft") },
+    { heading: "Open", rows: rows.filter(({ state }) => state === "proposed" || state === "returned") },
+    { heading: "Decided", rows: rows.filter(({ state }) => END_STATES.includes(state)) },
+  ];
+
+  return groups
+    .filter((group) => group.rows.length > 0)
+    .map((group) => (
+      <section key={group.heading}>
+        <SectionHeading aside={group.rows.length}>{group.heading}</SectionHeading>
+        <ProposalsTable caption={`${group.heading} proposals`} productCode={productCode} rows={group.rows} />
+      </section>
+    ));
+}
