@@ -41,7 +41,9 @@ function referencePointProblems({ terms, operatingPoints }: IndexedState): Probl
 
 function termsProblems({ product, terms, operatingPoints }: IndexedState): Problem[] {
   const fault = (field: string, sentence: string) => problem("terms", TERMS_NUMBER, `body.${field}`, sentence);
-  const unknown = terms.reserves.find((row) => !operatingPoints.has(row.operatingPoint));
+  const unknown = terms.reserves.find(
+    ({ operatingPoint }) => operatingPoint !== terms.referenceOperatingPoint && !operatingPoints.has(operatingPoint),
+  );
   return [
     ...(ROLL_UP_VERSIONS.includes(terms.rollUpVersion) ? [] : [fault("rollUpVersion", "This version is not known.")]),
     ...(UNCERTAINTY_VERSIONS.includes(terms.uncertaintyVersion)

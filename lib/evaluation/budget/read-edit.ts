@@ -43,6 +43,7 @@ function readAddition(edit: LineEdit, current: LineState | undefined, issue: num
 }
 
 function withBody(edit: LineEdit, revision: Pick<LineState, "number" | "letter" | "issue" | "retired">): ReadEdit {
+  if (edit.body === null) return refused("body", "Fill in the fields of this line.");
   const parsed = parseBody(edit.kind, edit.body);
   if (parsed.ok) return { ok: true, line: joined(revision, parsed.content) };
   const faults = parsed.faults.map(({ path, sentence }) => ({ path: path === "" ? "body" : `body.${path}`, sentence }));
