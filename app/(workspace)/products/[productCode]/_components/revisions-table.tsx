@@ -13,7 +13,7 @@ interface RevisionsTableProps {
   productCode: string;
 }
 
-/** Every letter of a line, newest first: why it moved, what changed, who proposed and who approved. */
+/** Every letter of a line, as given newest first: why it moved, what changed, who proposed and who approved. */
 export function RevisionsTable({ revisions, productCode }: RevisionsTableProps) {
   return (
     <Table caption="Revisions" narrow="stack">
@@ -25,7 +25,7 @@ export function RevisionsTable({ revisions, productCode }: RevisionsTableProps) 
         <Head>Proposed, approved</Head>
       </TableHead>
       <tbody>
-        {revisions.toReversed().map(({ letter, retired, issue, fields }) => (
+        {revisions.map(({ letter, retired, issue, fields }) => (
           <Row key={letter}>
             <RowHead label="Rev">
               <RevisionLetter letter={letter} />

@@ -66,7 +66,7 @@ export function WorkingSteps({ steps }: { steps: readonly WorkingStep[] }) {
 }
 
 /** Parts that add up to the last of them. */
-function WorkingTerms({ terms }: { terms: readonly WorkingTerm[] }) {
+export function WorkingTerms({ terms }: { terms: readonly WorkingTerm[] }) {
   return (
     <table className="w-full border-collapse text-table">
       <caption className="sr-only">What is added up, in newtons</caption>

@@ -6,9 +6,9 @@ import { step } from "./item-working";
 import { emptyWorking } from "./total-working";
 import type { Working } from "./working";
 
-/** What a line was given, and which act last moved it. */
+/** What a line was given, and which act last moved it; revisions come newest first. */
 export function allocationWorking(row: BudgetRow, sheetRevisions: readonly LineRevisionView[]): Working {
-  const last = sheetRevisions.findLast(({ fields }) =>
+  const last = sheetRevisions.find(({ fields }) =>
     fields.some(({ field }) => field === `rows.${row.kind}-${row.number}`),
   );
   const change = last?.fields.find(({ field }) => field === `rows.${row.kind}-${row.number}`);

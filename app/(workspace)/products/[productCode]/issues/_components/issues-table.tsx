@@ -1,0 +1,83 @@
+import type { Route } from "next";
+import Link from "next/link";
+
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import { UtcTime } from "@/app/_components/utc-time";
+import type { IssueFacts, TrendIssue } from "@/lib/budget/views";
+import { formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { STANDING_NAMES } from "@/lib/vocabulary/standing";
+
+import { approvedBy, proposedBy } from "../../_components/sheet-fields";
+
+interface IssuesTableProps {
+  issues: readonly IssueFacts[];
+  trend: readonly TrendIssue[];
+  operatingPoint: string;
+  productCode: string;
+}
+
+/** Every issue, newest first: what made it, who signed, and where the total stood. */
+export function IssuesTable({ issues, trend, operatingPoint, productCode }: IssuesTableProps) {
+  const totals = new Map(trend.map(({ number, points }) => [number, points]));
+
+  return (
+    <Table caption={`Issues, with totals at ${operatingPoint}`}>
+      <TableHead>
+        <Head>Issue</Head>
+        <Head>Issued</Head>
+        <Head>By proposal</Head>
+        <Head>Proposed, approved</Head>
+        <Head numeric unit="N">
+          Predicted
+        </Head>
+        <Head numeric unit="N">
+          To limit
+        </Head>
+        <Head>Standing</Head>
+      </TableHead>
+      <tbody>
+        {issues.toReversed().map((issue) => {
+          const point = totals.get(issue.number)?.find((each) => each.operatingPoint === operatingPoint);
+          return (
+            <Row key={issue.number} data-issue={issue.number}>
+              <RowHead>
+                <Link className="link" href={`/products/${productCode}/budget?issue=${issue.number}` as Route}>
+                  Issue {issue.number}
+                </Link>
+                {issue.baselines.map(({ name }) => (
+                  <span key={name} className="block text-xs">
+                    baseline {name}
+                  </span>
+                ))}
+                <span className="block font-code text-2xs text-ink-2" title={issue.contentHash}>
+                  {issue.contentHash.slice(0, 12)}
+                </span>
+              </RowHead>
+              <Cell>
+                <UtcTime at={issue.at} />
+              </Cell>
+              <Cell className="min-w-44">
+                {issue.proposal ? (
+                  <Link className="link" href={`/products/${productCode}/proposals/${issue.proposal.number}` as Route}>
+                    {issue.proposal.label} {issue.proposal.title}
+                  </Link>
+                ) : (
+                  "established"
+                )}
+              </Cell>
+              <Cell>
+                {proposedBy(issue)}
+                <span className="block text-xs text-ink-2">{approvedBy(issue)}</span>
+              </Cell>
+              <Cell numeric>{point ? formatNewtonsNumber(point.predicted) : "–"}</Cell>
+              <Cell numeric>{point ? formatNewtonsNumber(point.margin) : "–"}</Cell>
+              <Cell className={point?.standing === "over" ? "font-semibold text-signal" : undefined}>
+                {point ? STANDING_NAMES[point.standing] : "no such operating point"}
+              </Cell>
+            </Row>
+          );
+        })}
+      </tbody>
+    </Table>
+  );
+}

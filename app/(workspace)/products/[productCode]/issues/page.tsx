@@ -1,0 +1,83 @@
+import type { Metadata } from "next";
+
+import { requireActor } from "@/app/_server/session";
+import { PageHeading } from "@/app/_components/page-heading";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { compareIssues } from "@/lib/budget/compare-issues";
+import { issuesOf, trendOf } from "@/lib/budget/queries";
+import { indexState } from "@/lib/evaluation/budget/indexed-state";
+import { abilityFor, covers } from "@/policies/ability";
+
+import { NotEstablished } from "../_components/not-established";
+import { ServiceWindCaution } from "../_components/service-wind-caution";
+import { budgetFields } from "../_components/sheet-fields";
+import { pageBudget, pageProduct, readForPage } from "../_server/read-page";
+import { pointOf } from "../_sheet/budget-sheet";
+import { Comparison } from "./_components/comparison";
+import { IssueForms } from "./_components/issue-forms";
+import { IssuesTable } from "./_components/issues-table";
+import { issuesQuery } from "./_components/issues-query";
+import { TrendFigure } from "./_components/trend-figure";
+import { TrendPoints } from "./_components/trend-points";
+
+type Props = PageProps<"/products/[productCode]/issues">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: `Issues of ${(await params).productCode}` };
+}
+
+export default async function IssuesPage({ params, searchParams }: Props) {
+  const { productCode } = await params;
+  const query = issuesQuery(await searchParams);
+  const [actor, product, budget] = await Promise.all([
+    requireActor(),
+    pageProduct(productCode),
+    pageBudget(productCode, {}),
+  ]);
+  if (!budget) {
+    const mayEstablish = covers(abilityFor(actor), { on: "Product", action: "establish", productId: product.id });
+    return <NotEstablished product={product} mayEstablish={mayEstablish} />;
+  }
+
+  const { compare } = query;
+  const [issues, trend, comparison] = await readForPage(() =>
+    Promise.all([
+      issuesOf(actor, productCode),
+      trendOf(actor, productCode),
+      compare ? compareIssues(actor, productCode, compare.from, compare.to) : null,
+    ]),
+  );
+  const { terms } = indexState(budget.state);
+  const point = pointOf(budget, query.point) ?? budget.results.points[0];
+  const operatingPoint = point?.operatingPoint ?? terms.referenceOperatingPoint;
+
+  return (
+    <>
+      <PageHeading
+        title="Issues"
+        subtitle={`${product.code} · ${product.name} · newest is issue ${budget.issue.number}`}
+      />
+      <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point ?? null)} />}>
+        <ServiceWindCaution kind={product.kind} />
+        <TrendPoints points={budget.results.points} chosen={operatingPoint} path={`/products/${product.code}/issues`} />
+        <TrendFigure
+          trend={trend}
+          operatingPoint={operatingPoint}
+          planned={operatingPoint === terms.referenceOperatingPoint ? terms.plannedProfile : []}
+          until={new Date().toISOString()}
+        />
+        <IssueForms
+          productCode={product.code}
+          numbers={issues.map(({ number }) => number)}
+          compare={compare}
+          operatingPoint={operatingPoint}
+        />
+        {comparison ? <Comparison comparison={comparison} operatingPoint={operatingPoint} /> : null}
+        <SectionHeading>All issues</SectionHeading>
+        <IssuesTable issues={issues} trend={trend} operatingPoint={operatingPoint} productCode={product.code} />
+      </Sheet>
+    </>
+  );
+}

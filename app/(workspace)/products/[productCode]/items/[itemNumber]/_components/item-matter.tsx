@@ -1,0 +1,97 @@
+import type { Route } from "next";
+import Link from "next/link";
+
+import { RevisionLetter } from "@/app/_components/revision-letter";
+import { SectionHeading } from "@/app/_components/section-heading";
+import type { LineRevisionView } from "@/lib/budget/views";
+import { fieldRows } from "@/lib/evaluation/lines/field-rows";
+import type { LineOf } from "@/lib/evaluation/lines/line-state";
+import { nameBookOf } from "@/lib/evaluation/lines/name-book";
+
+import { FieldTable } from "../../../_components/field-table";
+import { RevisionsTable } from "../../../_components/revisions-table";
+import { WorkingNotes } from "../../../_components/working-view";
+import { itemNotes } from "../../../_workings/item-working";
+import { AlternateLinesTable } from "./alternate-lines-table";
+import { AnswerTable } from "./answer-table";
+import { EvidenceTable } from "./evidence-table";
+import { ItemWorking } from "./item-working-section";
+import { type PointRow, ResultsTable } from "./results-table";
+
+interface ItemMatterProps {
+  line: LineOf<"item">;
+  points: readonly PointRow[];
+  /** The operating point whose working is written out. */
+  chosen: string;
+  hrefOf: (operatingPoint: string) => string;
+  revisions: readonly LineRevisionView[];
+  now: Date;
+}
+
+/** Everything about one item at an issue: results, notes, working, fields, evidence, revisions. */
+export function ItemMatter({ line, points, chosen, hrefOf, revisions, now }: ItemMatterProps) {
+  const shown = points.find(({ sheet }) => sheet.point.operatingPoint === chosen) ?? points[0];
+  if (!shown) return null;
+  const { budget, indexed } = shown.sheet;
+  const names = nameBookOf(budget.state, new Map(budget.people.map(({ id, name }) => [id, name])));
+
+  return (
+    <>
+      <SectionHeading aside={<>owner {shown.row.owner}</>}>
+        Results <RevisionLetter letter={line.letter} />
+      </SectionHeading>
+      <ResultsTable points={points} />
+      <ItemNotes points={points} />
+      <SectionHeading aside={points.length > 1 ? <PointLinks points={points} chosen={chosen} hrefOf={hrefOf} /> : null}>
+        How it comes about at {shown.sheet.point.operatingPoint}
+      </SectionHeading>
+      <ItemWorking shown={shown} />
+      <SectionHeading>What the method gives</SectionHeading>
+      <AnswerTable points={points} />
+      <AlternateLinesTable shown={shown} />
+      <SectionHeading>Fields</SectionHeading>
+      <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} />
+      <SectionHeading>Evidence</SectionHeading>
+      <EvidenceTable evidence={line.body.evidence} ageDays={indexed.terms.evidenceAgeDays} now={now} />
+      <SectionHeading>Revisions</SectionHeading>
+      <RevisionsTable revisions={revisions} productCode={budget.product.code} />
+    </>
+  );
+}
+
+function PointLinks({ points, chosen, hrefOf }: Pick<ItemMatterProps, "points" | "chosen" | "hrefOf">) {
+  return points.map(({ sheet: { point } }, at) => (
+    <span key={point.operatingPoint}>
+      {at === 0 ? "" : " · "}
+      {point.operatingPoint === chosen ? (
+        <strong>{point.operatingPoint}</strong>
+      ) : (
+        <Link className="link" href={hrefOf(point.operatingPoint) as Route} scroll={false}>
+          {point.operatingPoint}
+        </Link>
+      )}
+    </span>
+  ));
+}
+
+/** Notes by operating point: the same code can stand at one and not at another. */
+function ItemNotes({ points }: { points: readonly PointRow[] }) {
+  const noted = points.filter(({ row }) => row.result.notes.length > 0);
+  if (noted.length === 0) return null;
+
+  return (
+    <>
+      <SectionHeading>Notes</SectionHeading>
+      <div className="space-y-4">
+        {noted.map(({ sheet: { point }, row }) => (
+          <div key={point.operatingPoint}>
+            <h3 className="mb-1 text-sm">
+              {point.operatingPoint} {point.name}
+            </h3>
+            <WorkingNotes notes={itemNotes(row)} />
+          </div>
+        ))}
+      </div>
+    </>
+  );
+}

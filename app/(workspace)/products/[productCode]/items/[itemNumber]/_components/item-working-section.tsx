@@ -1,0 +1,22 @@
+import { WorkingSteps, WorkingTerms } from "../../../_components/working-view";
+import { basicWorking, growthWorking, predictedWorking } from "../../../_workings/item-working";
+import type { PointRow } from "./results-table";
+
+/** The whole calculation of an item at one operating point, from its fields to the predicted value. */
+export function ItemWorking({ shown: { sheet, row } }: { shown: PointRow }) {
+  const basic = basicWorking(sheet, row);
+  if (row.result.refused) return <p className="text-ink-2">Refused: there is nothing to write out. See the notes.</p>;
+  const steps = [...basic.steps, ...growthWorking(sheet, row).steps, ...predictedWorking(sheet, row).steps];
+
+  return (
+    <div className="space-y-3">
+      {basic.sentences.map((sentence) => (
+        <p key={sentence} className="text-sm text-ink-2">
+          {sentence}
+        </p>
+      ))}
+      {basic.terms.length > 0 ? <WorkingTerms terms={basic.terms} /> : null}
+      <WorkingSteps steps={steps} />
+    </div>
+  );
+}

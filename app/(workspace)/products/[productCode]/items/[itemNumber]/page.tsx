@@ -1,0 +1,75 @@
+import type { Metadata } from "next";
+import { notFound } from "next/navigation";
+
+import { requireActor } from "@/app/_server/session";
+import { PageHeading } from "@/app/_components/page-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { lineHistory } from "@/lib/budget/line-history";
+import type { BudgetAt } from "@/lib/budget/views";
+import { findLine } from "@/lib/evaluation/budget/indexed-state";
+import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+
+import { AsStoodBanner } from "../../_components/as-stood-banner";
+import { budgetFields } from "../../_components/sheet-fields";
+import { ServiceWindCaution } from "../../_components/service-wind-caution";
+import { pageBudget, readForPage } from "../../_server/read-page";
+import { budgetSheet, pointOf } from "../../_sheet/budget-sheet";
+import { sheetAddress, SheetQuery } from "../../_sheet/sheet-filter";
+import { ItemMatter } from "./_components/item-matter";
+import { RetiredItem } from "./_components/retired-item";
+import type { PointRow } from "./_components/results-table";
+
+type Props = PageProps<"/products/[productCode]/items/[itemNumber]">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { productCode, itemNumber } = await params;
+  return { title: `Item ${itemNumber} of ${productCode}` };
+}
+
+export default async function ItemPage({ params, searchParams }: Props) {
+  const { productCode, itemNumber } = await params;
+  const query = SheetQuery.parse(await searchParams);
+  const [actor, budget] = await Promise.all([requireActor(), pageBudget(productCode, query)]);
+  const line = budget ? findLine(budget.state, "item", itemNumber) : undefined;
+  if (!budget || line?.kind !== "item") notFound();
+
+  const revisions = await readForPage(() => lineHistory(actor, productCode, "item", itemNumber));
+  const until = revisions.filter(({ issue }) => issue.number <= budget.issue.number);
+  const path = `/products/${budget.product.code}/items/${itemNumber}`;
+  const chosen = pointOf(budget, query.point);
+  if (!chosen) notFound();
+
+  return (
+    <>
+      <PageHeading
+        title={`${itemNumber} ${line.body.name}`}
+        subtitle={`${budget.product.code} · issue ${budget.issue.number} · ${ITEM_METHODS[line.body.method].label}`}
+      />
+      <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, null)} />}>
+        <AsStoodBanner budget={budget} newestHref={sheetAddress(path, query, { issue: undefined, on: undefined })} />
+        <ServiceWindCaution kind={budget.product.kind} />
+        {line.retired ? (
+          <RetiredItem line={line} revisions={until} productCode={budget.product.code} />
+        ) : (
+          <ItemMatter
+            line={line}
+            points={pointRows(budget, itemNumber)}
+            chosen={chosen.operatingPoint}
+            hrefOf={(point) => sheetAddress(path, query, { point })}
+            revisions={until}
+            now={new Date()}
+          />
+        )}
+      </Sheet>
+    </>
+  );
+}
+
+function pointRows(budget: BudgetAt, itemNumber: string): PointRow[] {
+  return budget.results.points.flatMap((point) => {
+    const sheet = budgetSheet(budget, point);
+    const row = sheet.rows.find((candidate) => candidate.kind === "item" && candidate.number === itemNumber);
+    return row?.kind === "item" ? [{ sheet, row }] : [];
+  });
+}

@@ -1,0 +1,62 @@
+import type { Metadata } from "next";
+
+import { requireActor } from "@/app/_server/session";
+import { PageHeading } from "@/app/_components/page-heading";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { fieldRows } from "@/lib/evaluation/lines/field-rows";
+import { nameBookOf } from "@/lib/evaluation/lines/name-book";
+import { abilityFor, covers } from "@/policies/ability";
+
+import { AsStoodBanner } from "../_components/as-stood-banner";
+import { FieldTable } from "../_components/field-table";
+import { NotEstablished } from "../_components/not-established";
+import { ServiceWindCaution } from "../_components/service-wind-caution";
+import { budgetFields } from "../_components/sheet-fields";
+import { pageBudget, pageProduct } from "../_server/read-page";
+import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
+import { FinishTable } from "./_components/finish-table";
+import { PointsTable } from "./_components/points-table";
+
+type Props = PageProps<"/products/[productCode]/operating-points">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  return { title: `Operating points of ${(await params).productCode}` };
+}
+
+export default async function OperatingPointsPage({ params, searchParams }: Props) {
+  const { productCode } = await params;
+  const query = SheetQuery.parse(await searchParams);
+  const [actor, product, budget] = await Promise.all([
+    requireActor(),
+    pageProduct(productCode),
+    pageBudget(productCode, query),
+  ]);
+  if (!budget) {
+    const mayEstablish = covers(abilityFor(actor), { on: "Product", action: "establish", productId: product.id });
+    return <NotEstablished product={product} mayEstablish={mayEstablish} />;
+  }
+
+  const base = `/products/${product.code}`;
+  const names = nameBookOf(budget.state, new Map(budget.people.map(({ id, name }) => [id, name])));
+  const terms = budget.state.lines.find(({ kind }) => kind === "terms");
+
+  return (
+    <>
+      <PageHeading
+        title="Operating points"
+        subtitle={`${product.code} · ${product.name} · issue ${budget.issue.number}`}
+      />
+      <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, null)} />}>
+        <AsStoodBanner budget={budget} newestHref={`${base}/operating-points`} />
+        <ServiceWindCaution kind={product.kind} />
+        <PointsTable budget={budget} budgetHref={(point) => sheetAddress(`${base}/budget`, query, { point })} />
+        <SectionHeading aside={terms ? `revision ${terms.letter}` : null}>Terms</SectionHeading>
+        {terms ? <FieldTable rows={fieldRows(terms, names)} caption="Terms" /> : null}
+        <SectionHeading>Finishes</SectionHeading>
+        <FinishTable lines={budget.state.lines} />
+      </Sheet>
+    </>
+  );
+}
