@@ -90,6 +90,11 @@ module.exports = {
     onlyOwn("lib/audit", ["^lib/vocabulary/", "^models/"], "the history knows no domain"),
     onlyOwn("lib/mail", ["^lib/vocabulary/", "^models/", "^templates/"], "the outbox knows no domain"),
     onlyOwn("lib/users", ["^lib/vocabulary/", "^models/"], "accounts know no domain"),
+    onlyOwn(
+      "lib/accounts",
+      ["^lib/(vocabulary|audit|users)/", "^models/", "^policies/"],
+      "acts on accounts, each recorded",
+    ),
     onlyOwn("lib/budget", DOMAIN, "reads and issues of a budget"),
     onlyOwn("lib/products", [...DOMAIN, "^lib/(budget|mail)/"], "products and roles"),
     onlyOwn("lib/proposals", [...DOMAIN, "^lib/(budget|mail)/"], "the review cycle"),
@@ -97,7 +102,9 @@ module.exports = {
       name: "lib-is-placed",
       comment: "A folder of lib that no rule above places: give it one.",
       severity: "error",
-      from: { path: "^lib/(?!(vocabulary|units|aero|evaluation|audit|mail|users|budget|products|proposals)/)" },
+      from: {
+        path: "^lib/(?!(vocabulary|units|aero|evaluation|audit|mail|users|accounts|budget|products|proposals)/)",
+      },
       to: {},
     },
     onlyOwn("app", ["^lib/", "^policies/"], "pages use lib; policies only to show or hide"),
