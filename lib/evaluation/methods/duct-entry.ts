@@ -1,4 +1,4 @@
-import { COLEBROOK_RANGE, colebrookFriction, developedDuctDrag } from "@/lib/aero/colebrook";
+import { COLEBROOK_RANGE, COLEBROOK_ROUGHEST, colebrookFriction, developedDuctDrag } from "@/lib/aero/colebrook";
 import { ductBlockage, hydraulicDiameter, type DuctBlockage } from "@/lib/aero/duct-blockage";
 import { within } from "@/lib/aero/range";
 import { numberOf } from "../document/number-input";
@@ -61,8 +61,10 @@ function developedNotes(input: InputOf<"duct-entry">, stream: StreamState, drag:
   const diameter = hydraulicDiameter(width, height);
   const lengthOverDiameter = numberOf(input.length) / diameter;
   const reynolds = (stream.speed * diameter) / stream.kinematicViscosity;
-  if ((!layersMeet && lengthOverDiameter < LONG_DUCT) || !within(reynolds, COLEBROOK_RANGE)) return [];
-  const factor = colebrookFriction(reynolds, numberOf(input.roughness) / diameter);
+  const relativeRoughness = numberOf(input.roughness) / diameter;
+  const holds = within(reynolds, COLEBROOK_RANGE) && relativeRoughness <= COLEBROOK_ROUGHEST;
+  if ((!layersMeet && lengthOverDiameter < LONG_DUCT) || !holds) return [];
+  const factor = colebrookFriction(reynolds, relativeRoughness);
   const developedDrag = developedDuctDrag(factor, lengthOverDiameter, stream.dynamicPressure, width * height);
   return [makeNote("fully-developed-cross-check", { lengthOverDiameter, developedDrag, drag })];
 }
