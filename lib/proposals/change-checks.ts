@@ -42,24 +42,26 @@ export function justificationNeeds(
 }
 
 /**
- * Writes into each justification how far its note goes, unless it is the base revision's own, which then covers only
- * what it covered there.
+ * The justifications of an edit, each with how far its note goes now; the base revision's own keep what they covered
+ * there. null where the edit carries none.
  */
-export function stampJustifications(edit: LineEdit, base: BudgetState, results: BudgetResults): LineEdit {
+export function stampedJustifications(
+  edit: LineEdit,
+  base: BudgetState,
+  results: BudgetResults,
+): ItemBody["justifications"] | null {
   const parsed = edit.kind === "item" ? parseBody("item", edit.body) : null;
-  if (!parsed?.ok || parsed.content.kind !== "item" || parsed.content.body.justifications.length === 0) return edit;
-  const { body } = parsed.content;
+  if (!parsed?.ok || parsed.content.kind !== "item" || parsed.content.body.justifications.length === 0) return null;
   const line = base.lines.find(({ kind, number }) => kind === "item" && number === edit.number);
   const earlier = line?.kind === "item" ? line.body.justifications : [];
   const worst = worstNotes(edit.number, results);
-  const justifications = body.justifications.map((given) => {
+  return parsed.content.body.justifications.map((given) => {
     const isOld = earlier.some(
       ({ code, text, excess }) => code === given.code && text === given.text && excess === given.excess,
     );
     const excess = worst.find(({ code }) => code === given.code)?.excess;
     return isOld || excess === undefined ? given : { ...given, excess };
   });
-  return { ...edit, body: { ...body, justifications } };
 }
 
 export function justificationFaults(needs: readonly JustificationNeed[]): FieldFault[] {

@@ -1,9 +1,11 @@
 import type { Effects, PointEffect } from "@/lib/evaluation/budget/effects";
 import { formatHundredths, formatNewtons, formatNewtonsChange } from "@/lib/units/format-newtons";
 import type { EditOperation } from "@/lib/vocabulary/lines";
-import { ROLE_NAMES } from "@/lib/vocabulary/roles";
+import type { Decision } from "@/lib/vocabulary/proposals";
+import { CAPACITIES, ROLE_NAMES, type Capacity } from "@/lib/vocabulary/roles";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 import type { RequiredCapacity } from "@/policies/approval-routing";
+import { isRoutingRule } from "./routing-rules";
 
 /** One edited line as it is signed: its rows of canonical text that differ, in SI. */
 export interface SignedLine {
@@ -24,8 +26,14 @@ export interface SignedSheet {
   transfers: readonly string[];
   onIssue: number;
   effects: Effects;
+  /** Why it cannot be applied to that issue; empty when it can. */
+  obstacles: readonly string[];
   routing: readonly RequiredCapacity[];
 }
+
+const ROUTING_HEADING = "signatures asked for";
+const SIGNED_HEADING = "signed";
+const BY_SUBMITTING = "signed by submitting";
 
 /** The text that a signature stands under: the round, its effect on today's issue, and what has to be signed and why. */
 export function signingText(sheet: SignedSheet): string {
@@ -39,11 +47,59 @@ export function signingText(sheet: SignedSheet): string {
     `effect on issue ${sheet.onIssue}`,
     ...sheet.effects.points.map(pointRow),
     ...sheet.effects.items.map(itemRow),
+    ...sheet.obstacles.map((obstacle) => `cannot be applied: ${obstacle}`),
     "",
-    "signatures asked for",
+    ROUTING_HEADING,
     ...sheet.routing.flatMap(routingRows),
     "",
   ].join("\n");
+}
+
+export interface SignerBlock {
+  decision: Decision;
+  capacity: Capacity;
+  meaning: string | null;
+  reason: string | null;
+  printedName: string;
+  deputyForName: string | null;
+  at: string;
+  /** Hash of the text as it was shown. */
+  shownHash: string;
+}
+
+/** What is kept of a signature: the text as it was shown, and who signed it, how and when. */
+export function signedText(shown: string, signer: SignerBlock): string {
+  const oneRow = (text: string) => text.replace(/\\/g, "\\\\").replace(/\n/g, "\\n");
+  return [
+    shown,
+    SIGNED_HEADING,
+    `decision: ${signer.decision}`,
+    `capacity: ${signer.capacity}`,
+    `meaning: ${oneRow(signer.meaning ?? "none")}`,
+    `reason: ${oneRow(signer.reason ?? "none")}`,
+    `printed name: ${signer.printedName}`,
+    `deputy for: ${signer.deputyForName ?? "none"}`,
+    `at: ${signer.at}`,
+    `hash of the text above as shown: ${signer.shownHash}`,
+    "",
+  ].join("\n");
+}
+
+/** What a kept text says has to be signed: within a round that only grows. */
+export function routingOfText(text: string): RequiredCapacity[] {
+  const rows = text.split("\n");
+  const start = rows.lastIndexOf(ROUTING_HEADING);
+  const section = rows.slice(start + 1, rows.indexOf("", start));
+  const routing: RequiredCapacity[] = [];
+  for (const row of section) {
+    const [, rule = "", sentence = ""] = /^ {2}(\w+): (.*)$/.exec(row) ?? [];
+    if (isRoutingRule(rule)) routing.at(-1)?.reasons.push({ rule, sentence });
+    const [name, count, submitting] = row.split(", ");
+    const capacity = CAPACITIES.find((each) => ROLE_NAMES[each].toLowerCase() === name);
+    if (!capacity) continue;
+    routing.push({ capacity, count: Number(count), reasons: [], signedBySubmitting: submitting === BY_SUBMITTING });
+  }
+  return routing;
 }
 
 function lineRows({ title, operation, letterWas, letterNow, rows }: SignedLine): string[] {
@@ -66,6 +122,7 @@ function itemRow({ item, operatingPoint, predictedDelta, newNotes, vanishedNotes
   return `  item ${item} at ${operatingPoint}: ${[formatNewtonsChange(predictedDelta), ...notes].join(", ")}`;
 }
 
-function routingRows({ capacity, count, reasons }: RequiredCapacity): string[] {
-  return [`${ROLE_NAMES[capacity].toLowerCase()}, ${count}:`, ...reasons.map(({ sentence }) => `  ${sentence}`)];
+function routingRows({ capacity, count, reasons, signedBySubmitting }: RequiredCapacity): string[] {
+  const head = [ROLE_NAMES[capacity].toLowerCase(), String(count), ...(signedBySubmitting ? [BY_SUBMITTING] : [])];
+  return [head.join(", "), ...reasons.map(({ rule, sentence }) => `  ${rule}: ${sentence}`)];
 }
