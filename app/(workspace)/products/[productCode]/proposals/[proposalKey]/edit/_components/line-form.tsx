@@ -1,0 +1,164 @@
+"use client";
+
+import { RevisionLetter } from "@/app/_components/revision-letter";
+import { TextField } from "@/app/_components/text-field";
+import { isShown, valuesOf } from "@/lib/evaluation/lines/field-rows";
+import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
+import type { DraftEdit } from "@/lib/proposals/schema";
+import type { FieldFault } from "@/lib/vocabulary/refusal";
+import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
+
+import type { Body } from "./body";
+import type { EditorNames } from "./editor-names";
+import { FieldInput } from "./field-input";
+import { withMethod } from "./new-edit";
+
+interface LineFormProps {
+  edit: DraftEdit;
+  index: number;
+  onChange: (edit: DraftEdit) => void;
+  onRemove: () => void;
+  names: EditorNames;
+  faults: readonly FieldFault[];
+  /** Before the first try to propose, empty fields are no faults yet. */
+  strict: boolean;
+  /** The body before the edit: what differs from it carries a change bar. */
+  before: Body | null;
+}
+
+const OPERATION_WORDS = { add: "new", revise: "revised", retire: "to be retired", reinstate: "to be reinstated" };
+
+/** One line of the proposal as a form, drawn from the field catalogue of its kind. */
+export function LineForm({ edit, index, onChange, onRemove, names, faults, strict, before }: LineFormProps) {
+  const own = faults
+    .filter(({ path }) => path.startsWith(`edits.${index}.`))
+    .map(({ path, sentence }) => ({ path: path.replace(/^edits\.\d+\.(body\.)?/, ""), sentence }));
+
+  return (
+    <section className="mt-5 border-t border-ink pt-3" aria-label={`${edit.number} ${nameOf(edit, before)}`}>
+      <div className="mb-2 flex flex-wrap items-baseline gap-x-2.5 gap-y-1">
+        <h3 className="text-base font-semibold">
+          {edit.kind === "item" ? "" : `${LINE_KIND_NAMES[edit.kind]} `}
+          {edit.number} {nameOf(edit, before)}
+        </h3>
+        {edit.baseLetter ? <RevisionLetter letter={edit.baseLetter} /> : null}
+        <span className="text-sm text-ink-2">{OPERATION_WORDS[edit.operation]}</span>
+        <span className="ml-auto">
+          <button type="button" className="link min-h-6 text-sm" onClick={onRemove}>
+            Take out of the proposal
+          </button>
+        </span>
+      </div>
+      <LineFaults faults={own} strict={strict} body={edit.body} />
+      {edit.operation === "add" ? (
+        <div className="mb-3 max-w-44">
+          <TextField
+            label="Number"
+            hint="Unique here, never used again."
+            value={edit.number}
+            maxLength={12}
+            onChange={(event) => onChange({ ...edit, number: event.target.value.toUpperCase().trim() })}
+            error={own.find(({ path }) => path === "number")?.sentence}
+          />
+        </div>
+      ) : null}
+      {edit.body ? (
+        <Fields
+          edit={edit}
+          body={edit.body}
+          onChange={(body) => onChange({ ...edit, body })}
+          names={names}
+          faults={own}
+          strict={strict}
+          before={before}
+          index={index}
+        />
+      ) : null}
+    </section>
+  );
+}
+
+function nameOf(edit: DraftEdit, before: Body | null): string {
+  const name = edit.body?.name ?? before?.name;
+
+  return typeof name === "string" && name !== "" ? name : edit.operation === "add" ? "(no name yet)" : "";
+}
+
+interface FieldsProps extends Pick<LineFormProps, "edit" | "index" | "names" | "faults" | "strict" | "before"> {
+  body: Body;
+  onChange: (body: Body) => void;
+}
+
+function Fields({ edit, index, body, onChange, names, faults, strict, before }: FieldsProps) {
+  const specs = fieldsOfBody(edit.kind, body).filter((spec) => !spec.fixed && spec.key !== "justifications");
+  const shown = specs.filter((spec) => isShown(spec, valuesOf(body)));
+  const faultAt = (path: string) => {
+    const top = path.split(".")[0] ?? path;
+    const isEmpty = body[top] === null || body[top] === "" || body[top] === undefined;
+    if (isEmpty && !strict) return undefined;
+
+    return faults.find((fault) => fault.path === path || isPartOf(fault.path, path))?.sentence;
+  };
+
+  return (
+    <div className="grid gap-x-5 gap-y-3.5 sm:grid-cols-2 xl:grid-cols-3">
+      {shown.map((spec) => {
+        const isWide = spec.type.type === "list" || spec.type.type === "record" || spec.type.type === "references";
+        const isChanged = before !== null && JSON.stringify(body[spec.key]) !== JSON.stringify(before[spec.key]);
+
+        return (
+          <div
+            key={`${spec.key} ${spec.type.type}`}
+            className={`${isWide ? "sm:col-span-full" : ""} ${isChanged ? "change-bar" : ""}`}
+          >
+            <FieldInput
+              spec={spec}
+              value={body[spec.key]}
+              onChange={(value) =>
+                onChange(
+                  spec.key === "method" && typeof value === "string"
+                    ? withMethod(body, value)
+                    : { ...body, [spec.key]: value },
+                )
+              }
+              names={names}
+              faultAt={faultAt}
+              path={spec.key}
+              id={`edit-${index}-${spec.key}`}
+            />
+          </div>
+        );
+      })}
+    </div>
+  );
+}
+
+/** A fault of a quantity's inner value stands at the quantity. */
+function isPartOf(faultPath: string, path: string): boolean {
+  return (
+    faultPath === `${path}.value` || faultPath === `${path}.entered` || faultPath === `${path}.standardUncertainty`
+  );
+}
+
+interface LineFaultsProps {
+  faults: readonly FieldFault[];
+  strict: boolean;
+  body: Body | null;
+}
+
+/** What is wrong with the line as a whole, or with a field that its form does not show. */
+function LineFaults({ faults, strict, body }: LineFaultsProps) {
+  const whole = faults.filter(({ path }) => path === "" || path === "body" || path === "operation" || !body);
+  if (whole.length === 0 || (!strict && body)) return null;
+
+  return (
+    <ul className="mb-2">
+      {whole.map(({ path, sentence }) => (
+        <li key={`${path} ${sentence}`} className="text-sm font-medium text-signal">
+          <span aria-hidden>✕ </span>
+          {sentence}
+        </li>
+      ))}
+    </ul>
+  );
+}

@@ -1,0 +1,49 @@
+import { findLine } from "@/lib/evaluation/budget/indexed-state";
+import { newFinish } from "@/lib/evaluation/lines/finish-body";
+import { newGroup } from "@/lib/evaluation/lines/group-body";
+import type { MethodName } from "@/lib/evaluation/lines/item-body";
+import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
+import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
+import { METHOD_NAMES } from "@/lib/evaluation/methods/method-name";
+import type { DraftEdit } from "@/lib/proposals/schema";
+
+import { asRecord, type Body } from "./body";
+
+export type NewLineKind = "item" | "group" | "operating_point" | "finish";
+
+/** An edit that starts from a line as it stands. */
+export function reviseEdit(line: LineState, operation: "revise" | "retire" | "reinstate"): DraftEdit {
+  const { kind, number, letter } = line;
+
+  return { operation, kind, number, baseLetter: letter, body: operation === "retire" ? null : asRecord(line.body) };
+}
+
+export function addEdit(kind: NewLineKind, number: string, state: BudgetState, ownerId: number): DraftEdit {
+  return { operation: "add", kind, number, baseLetter: null, body: asRecord(template(kind, state, ownerId)) };
+}
+
+function template(kind: NewLineKind, state: BudgetState, ownerId: number): object {
+  const order = (state.lines.filter((line) => line.kind === kind).length + 1) * 10;
+  if (kind === "item") return ITEM_METHODS["flat-plate-friction"].template({ ownerId, order, group: null });
+  if (kind === "group") return newGroup(order);
+
+  return kind === "finish" ? newFinish() : newOperatingPoint();
+}
+
+/** Another method: what both methods have stays as typed, the rest starts from the new one's defaults. */
+export function withMethod(body: Body, method: string): Body {
+  const name: MethodName | undefined = METHOD_NAMES.find((known) => known === method);
+  if (!name) return body;
+  const fresh = asRecord(ITEM_METHODS[name].template({ ownerId: 0, order: 0, group: null }));
+  const kept = Object.fromEntries(Object.keys(fresh).map((key) => [key, body[key] ?? fresh[key] ?? null]));
+
+  return { ...kept, method: name, methodVersion: fresh.methodVersion ?? 1 };
+}
+
+/** The body that a line has before the edit; null for a new one. */
+export function bodyBefore(edit: DraftEdit, state: BudgetState): Body | null {
+  const line = findLine(state, edit.kind, edit.number);
+
+  return edit.operation === "add" || !line ? null : asRecord(line.body);
+}

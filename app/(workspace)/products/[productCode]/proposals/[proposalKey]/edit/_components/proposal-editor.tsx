@@ -1,0 +1,158 @@
+"use client";
+
+import { useState } from "react";
+
+import { MarkdownEditor } from "@/app/_components/markdown-editor";
+import { Notice } from "@/app/_components/notice";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { TextField } from "@/app/_components/text-field";
+import type { EditorView } from "@/lib/proposals/editor-view";
+import type { DraftContent } from "@/lib/proposals/schema";
+
+import { CoEditors } from "./co-editors";
+import { linesToName } from "./editor-names";
+import { EffectPanel } from "./effect-panel";
+import { JustificationsForm } from "./justifications-form";
+import { LineChooser } from "./line-chooser";
+import { LineForm } from "./line-form";
+import { bodyBefore } from "./new-edit";
+import { Obstacles } from "./obstacles";
+import { ProposeDialog } from "./propose-dialog";
+import { RoutingPanel } from "./routing-panel";
+import { MovedNotice, SaveWords } from "./save-words";
+import { TransfersForm } from "./transfers-form";
+import { usePreview } from "./use-preview";
+import { useSavedDraft } from "./use-saved-draft";
+
+/** The working copy of a proposal: its lines as forms, and beside them what they do. */
+export function ProposalEditor({ view }: { view: EditorView }) {
+  const { draft, budget } = view;
+  const { content, setContent, save, lockVersion, settle } = useSavedDraft(draft);
+  const preview = usePreview(view, content);
+  const [strict, setStrict] = useState(false);
+
+  return (
+    <div className="grid gap-x-8 gap-y-6 lg:grid-cols-[minmax(0,1fr)_22rem]">
+      <div className="min-w-0">
+        {draft.warning ? <Notice kind="caution">{draft.warning}</Notice> : null}
+        {save.state === "moved" ? <MovedNotice stored={save.stored} settle={settle} /> : null}
+        <Heading content={content} setContent={setContent} faults={save.state === "failed" ? save.faults : []} />
+        <Lines view={view} content={content} setContent={setContent} preview={preview} strict={strict} />
+      </div>
+      <aside className="min-w-0 lg:sticky lg:top-4 lg:max-h-[calc(100dvh-2rem)] lg:self-start lg:overflow-y-auto lg:border-l lg:border-rule lg:pl-6">
+        <SaveWords save={save} />
+        <EffectPanel preview={preview} issue={budget.issue} />
+        <RoutingPanel preview={preview} />
+        <CoEditors draft={draft} />
+        <Obstacles
+          obstacles={preview.obstacles}
+          hasReason={content.reason.trim() !== ""}
+          strict={strict}
+          onShow={() => setStrict(true)}
+        />
+        <div className="mt-4">
+          <ProposeDialog
+            draft={draft}
+            lockVersion={lockVersion}
+            preview={preview}
+            disabled={save.state !== "saved" || preview.obstacles.length > 0 || content.reason.trim() === ""}
+          />
+        </div>
+      </aside>
+    </div>
+  );
+}
+
+interface PartProps {
+  content: DraftContent;
+  setContent: (change: (content: DraftContent) => DraftContent) => void;
+}
+
+function Heading({
+  content,
+  setContent,
+  faults,
+}: PartProps & { faults: readonly { path: string; sentence: string }[] }) {
+  const faultAt = (path: string) => faults.find((fault) => fault.path === `content.${path}`)?.sentence;
+
+  return (
+    <div className="grid gap-4 sm:grid-cols-[minmax(0,1fr)_12rem]">
+      <TextField
+        label="Title"
+        value={content.title}
+        maxLength={120}
+        onChange={(event) => setContent((old) => ({ ...old, title: event.target.value }))}
+        error={faultAt("title")}
+      />
+      <TextField
+        label="Needed by"
+        type="date"
+        optional
+        value={content.neededBy ?? ""}
+        onChange={(event) =>
+          setContent((old) => ({ ...old, neededBy: event.target.value === "" ? null : event.target.value }))
+        }
+        error={faultAt("neededBy")}
+      />
+      <div className="sm:col-span-full">
+        <MarkdownEditor
+          id="reason"
+          label="Reason"
+          hint="Why the change is right: what was measured, drawn or decided. Headings, lists and tables can be used."
+          value={content.reason}
+          onChange={(reason) => setContent((old) => ({ ...old, reason }))}
+          error={faultAt("reason")}
+          height={160}
+        />
+      </div>
+    </div>
+  );
+}
+
+interface LinesProps extends PartProps {
+  view: EditorView;
+  preview: ReturnType<typeof usePreview>;
+  strict: boolean;
+}
+
+function Lines({ view, content, setContent, preview, strict }: LinesProps) {
+  const { state } = view.budget;
+  const names = { lines: linesToName(state, content.edits), people: view.people, owners: view.owners };
+  const setEdits = (change: (edits: DraftContent["edits"]) => DraftContent["edits"]) =>
+    setContent((old) => ({ ...old, edits: change(old.edits) }));
+  const replace = (at: number, edit: DraftContent["edits"][number]) =>
+    setEdits((edits) => edits.map((old, index) => (index === at ? edit : old)));
+
+  return (
+    <>
+      <SectionHeading aside={content.edits.length || ""}>Lines</SectionHeading>
+      {content.edits.map((edit, at) => (
+        <LineForm
+          key={`${edit.kind} ${edit.operation} ${at}`}
+          edit={edit}
+          index={at}
+          onChange={(changed) => replace(at, changed)}
+          onRemove={() => setEdits((edits) => edits.filter((_, index) => index !== at))}
+          names={names}
+          faults={preview.obstacles}
+          strict={strict}
+          before={bodyBefore(edit, state)}
+        />
+      ))}
+      <LineChooser
+        state={state}
+        edits={content.edits}
+        me={view.me}
+        onAdd={(edit) => setEdits((edits) => [...edits, edit])}
+      />
+      <JustificationsForm needs={preview.justifications} edits={content.edits} onChange={replace} />
+      <SectionHeading aside={content.transfers.length || ""}>Transfers of allocation</SectionHeading>
+      <TransfersForm
+        transfers={content.transfers}
+        onChange={(transfers) => setContent((old) => ({ ...old, transfers }))}
+        names={names}
+        faults={preview.obstacles}
+      />
+    </>
+  );
+}

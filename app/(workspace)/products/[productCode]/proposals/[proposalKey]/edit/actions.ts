@@ -1,0 +1,9 @@
+"use server";
+
+import { defineAction } from "@/app/_server/define-action";
+import { propose } from "@/lib/proposals/propose";
+import { ProposeInput, ShareDraftInput } from "@/lib/proposals/schema";
+import { shareDraft } from "@/lib/proposals/share-draft";
+
+export const proposeAction = defineAction(ProposeInput, propose);
+export const shareDraftAction = defineAction(ShareDraftInput, shareDraft);

@@ -1,0 +1,64 @@
+import { approvedMoves } from "@/lib/budget/approved-moves";
+import { loadBudget, productByCode } from "@/lib/budget/load-budget";
+import { membersAt, namesOf } from "@/lib/budget/members";
+import { termsOf } from "@/lib/evaluation/budget/indexed-state";
+import type { Actor } from "@/lib/vocabulary/actor";
+import { systemClock, type Clock } from "@/lib/vocabulary/clock";
+import { Refusal } from "@/lib/vocabulary/refusal";
+import { inSnapshot } from "@/models/database";
+import { authorize } from "@/policies/authorize";
+import { draftViewOf } from "./draft-view";
+import { isOpen, wrongStateSentence } from "./moves";
+import type { BudgetAtIssue, RoutingContext } from "./preview-proposal";
+import { proposalByKey, proposalQuestion } from "./proposal-record";
+import type { PersonView } from "./views";
+import type { DraftView } from "./workspace-views";
+
+/** All that the editor of a proposal computes with, so that it previews what the server will decide. */
+export interface EditorView {
+  draft: DraftView;
+  /** The budget at the issue on which the working copy stands. */
+  budget: BudgetAtIssue;
+  people: PersonView[];
+  /** Persons who may own an item here. */
+  owners: PersonView[];
+  routing: RoutingContext;
+  me: { userId: number; isProgramManager: boolean };
+}
+
+/** @throws Refusal where there is no such proposal, the reader may not edit it, or it is closed */
+export function editorView(
+  actor: Actor,
+  productCode: string,
+  key: string,
+  clock: Clock = systemClock,
+): Promise<EditorView> {
+  return inSnapshot(async (tx) => {
+    const at = clock().toISOString();
+    const product = await productByCode(productCode, tx);
+    const proposal = await proposalByKey(product.id, key, tx);
+    if (!proposal) throw new Refusal("not_found", "There is no such proposal.");
+    authorize(actor, proposalQuestion(proposal, actor, "edit"));
+    if (!isOpen(proposal.state)) throw new Refusal("wrong_state", wrongStateSentence(proposal.state));
+
+    const { issue, state, results } = await loadBudget(proposal.productId, proposal.baseIssue, tx);
+    const rules = termsOf(state).reviewRules;
+    const members = await membersAt(proposal.productId, at, tx);
+    const mine = members.find(({ userId }) => userId === actor.userId)?.roles ?? [];
+    const isProgramManager = mine.includes("program_manager");
+    return {
+      draft: await draftViewOf(actor, proposal, at, tx),
+      budget: { issue, state, results },
+      people: await namesOf(proposal.productId, tx),
+      owners: members
+        .filter(({ roles }) => roles.includes("component_owner"))
+        .map(({ userId, printedName }) => ({ id: userId, name: printedName })),
+      routing: {
+        rules,
+        earlierMoves: await approvedMoves(proposal.productId, at, rules.programManagerOn.windowDays, tx),
+        isSubmittedByManager: isProgramManager,
+      },
+      me: { userId: actor.userId, isProgramManager },
+    };
+  });
+}
