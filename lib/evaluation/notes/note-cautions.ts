@@ -13,7 +13,7 @@ export const CAUTIONS = {
   ),
   "roughness-ratio-outside-range": caution(
     ({ line, lengthOverRoughness, min, max }) =>
-      `x/k_s ${figure(lengthOverRoughness)} is outside the stated range of ${lineTitle(line)} (${figure(min)} ` +
+      `The ratio x/k_s ${figure(lengthOverRoughness)} is outside the stated range of ${lineTitle(line)} (${figure(min)} ` +
       `${max === undefined ? "or more" : `to ${figure(max)}`}). Check the roughness, or treat it as single obstacles.`,
     (values) => factorOutside(values, "lengthOverRoughness"),
   ),

@@ -58,7 +58,10 @@ function automaticChoice({ line, reason, roughnessReynolds, reynolds, lengthOver
         `${figure(roughnessReynolds)} it gives more friction than the smooth line.`
       );
     default:
-      return `The automatic choice took ${chosen}: at Re ${figure(reynolds)} it gives the greater friction on this surface.`;
+      return lengthOverRoughness === undefined
+        ? `The automatic choice took ${chosen}: the surface is given without roughness, at Re ${figure(reynolds)}.`
+        : `The automatic choice took ${chosen}: at Re ${figure(reynolds)} and x/k_s ${figure(lengthOverRoughness)} it gives ` +
+            `more friction than the fully rough line.`;
   }
 }
 
