@@ -1,0 +1,55 @@
+import { proposalNotice, type MailFrame, type MailText, type ProposalFacts } from "./proposal-notice";
+
+export interface SupersededFacts extends ProposalFacts {
+  proposerName: string;
+  /** The round that was signed. */
+  signedRound: number;
+  /** The round that stands now. */
+  round: number;
+  /** Lines and transfers that moved: "Item 050 Side mirrors". */
+  moved: string[];
+}
+
+export interface OvertakenFacts extends ProposalFacts {
+  /** What has changed since, a sentence each. */
+  because: string[];
+}
+
+export interface ReminderFacts extends ProposalFacts {
+  proposerName: string;
+  /** "2026-12-20" */
+  neededBy: string;
+}
+
+/** To the signer of an earlier round: their signature no longer counts, and what moved since. */
+export function superseded(frame: MailFrame, facts: SupersededFacts): MailText {
+  const { label, proposerName, signedRound, round, moved } = facts;
+  return proposalNotice(frame, facts, {
+    subject: `${label}: round ${round} replaces what you signed`,
+    sentences: [
+      `${proposerName} has submitted round ${round} of ${label}. Your signature on round ${signedRound} stays visible and no longer counts. Moved since you signed:`,
+    ],
+    listing: moved,
+  });
+}
+
+/** To the proposer and the co-editors: another issue went past it. */
+export function overtaken(frame: MailFrame, facts: OvertakenFacts): MailText {
+  const { label, because } = facts;
+  return proposalNotice(frame, facts, {
+    subject: `${label} is overtaken`,
+    sentences: [`${label} was drafted on an earlier issue and can't be approved until it is carried forward, because:`],
+    listing: because,
+  });
+}
+
+/** To the signers, then the program manager, when the needed-by date has passed. */
+export function reminder(frame: MailFrame, facts: ReminderFacts): MailText {
+  const { label, proposerName, neededBy } = facts;
+  return proposalNotice(frame, facts, {
+    subject: `${label} was needed by ${neededBy}`,
+    sentences: [
+      `${label} by ${proposerName} was needed by ${neededBy} and still waits for signatures. It stays proposed until somebody signs or returns it.`,
+    ],
+  });
+}
