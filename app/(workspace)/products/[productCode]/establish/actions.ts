@@ -1,0 +1,9 @@
+"use server";
+
+import { defineAction } from "@/app/_server/define-action";
+import { establishProduct } from "@/lib/products/establish-product";
+import { EstablishProductInput } from "@/lib/products/schema";
+
+export const establishAction = defineAction(EstablishProductInput, (actor, input, clock) =>
+  establishProduct(actor, clock, input),
+);
