@@ -1,4 +1,5 @@
 import { QueryTypes, type Transaction } from "sequelize";
+import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { database, inSnapshot } from "@/models/database";
@@ -23,7 +24,8 @@ export function budgetAt(actor: Actor, productCode: string, asOf: AsOf): Promise
     const issue = facts.find((each) => each.number === number);
     if (!issue) throw new Refusal("not_found", `There is no issue ${number} of this budget.`);
     const people = await namesOf(product.id, tx);
-    return { product: productFacts(product, facts), issue, state, results, people };
+    const allocations = allocationsView(state, results);
+    return { product: productFacts(product, facts), issue, state, results, allocations, people };
   });
 }
 

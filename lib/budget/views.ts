@@ -1,7 +1,8 @@
+import type { AllocationsView } from "@/lib/evaluation/budget/allocations-view";
 import type { BudgetResults } from "@/lib/evaluation/budget/results";
 import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import type { LineKind, ProductKind } from "@/lib/vocabulary/lines";
-import type { Capacity } from "@/lib/vocabulary/roles";
+import type { Capacity, Role } from "@/lib/vocabulary/roles";
 import type { Standing } from "@/lib/vocabulary/standing";
 
 export interface PersonName {
@@ -43,6 +44,8 @@ export interface BudgetAt {
   issue: IssueFacts;
   state: BudgetState;
   results: BudgetResults;
+  /** At the reference operating point of this issue. */
+  allocations: AllocationsView;
   people: PersonName[];
 }
 
@@ -115,7 +118,7 @@ export interface LineRevisionView {
 export interface RegisterEntry {
   product: ProductFacts;
   /** Roles that the reader holds there; empty for an administrator. */
-  roles: string[];
+  roles: Role[];
   /** null until it is established, and for those who may not read the budget. */
   worst: {
     operatingPoint: string;

@@ -1,7 +1,7 @@
+import { giveRole } from "@/lib/products/give-role";
 import type { Actor } from "@/lib/vocabulary/actor";
 import type { Role } from "@/lib/vocabulary/roles";
 import { inTransaction } from "@/models/database";
-import { Membership } from "@/models/membership";
 import { Product } from "@/models/product";
 import { User } from "@/models/user";
 
@@ -20,14 +20,11 @@ export async function person(
   return { userId: row.id, printedName: name, isAdministrator, memberships: [] };
 }
 
-/** Gives a role and answers the person as they are signed in afterwards. */
+/** Gives a role by its command, so that the history is whole, and answers the person as they are signed in afterwards. */
 export async function withRole(actor: Actor, productCode: string, role: Role): Promise<Actor> {
-  const productId = await inTransaction(async (tx) => {
-    const product = await Product.findOne({ where: { code: productCode }, rejectOnEmpty: true, transaction: tx });
-    const fromAt = "2026-01-01T00:00:00.000Z";
-    await Membership.create({ userId: actor.userId, productId: product.id, role, fromAt }, { transaction: tx });
-    return product.id;
-  });
+  const clock = () => new Date("2026-01-01T00:00:00.000Z");
+  await giveRole({ ...actor, isAdministrator: true }, clock, { productCode, userId: actor.userId, role, reason: "" });
+  const { id: productId } = await Product.findOne({ where: { code: productCode }, rejectOnEmpty: true });
   return { ...actor, memberships: [...actor.memberships, { productId, role }] };
 }
 

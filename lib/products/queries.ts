@@ -1,0 +1,108 @@
+import { QueryTypes, type Transaction } from "sequelize";
+import { productByCode, type ProductRow } from "@/lib/budget/load-budget";
+import { parseTotals } from "@/lib/budget/stored-results";
+import type { PersonName, RegisterEntry } from "@/lib/budget/views";
+import { listAccounts, type AccountRow } from "@/lib/users/queries";
+import type { Actor } from "@/lib/vocabulary/actor";
+import type { Role } from "@/lib/vocabulary/roles";
+import { database, inSnapshot } from "@/models/database";
+import { authorize, isAllowed } from "@/policies/authorize";
+import { warningsFor } from "./establish-product";
+
+/** All products that a person may see, by code: where each stands at its worst point, and what is under way. */
+export function registerFor(actor: Actor): Promise<RegisterEntry[]> {
+  return inSnapshot(async (tx) => {
+    const rows = await database.query<RegisterRow>(REGISTER, { type: QueryTypes.SELECT, transaction: tx });
+    return rows
+      .filter(({ id }) => isAllowed(actor, { on: "Product", action: "see", productId: id }))
+      .map((row) => registerEntry(row, actor));
+  });
+}
+
+/** One role of one person in a product, ended ones too. */
+export interface MembershipView {
+  membershipId: number;
+  person: PersonName;
+  role: Role;
+  from: string;
+  until: string | null;
+}
+
+/** Who holds or held which role in a product, newest first. */
+export function membershipsOf(actor: Actor, productCode: string): Promise<MembershipView[]> {
+  return inSnapshot(async (tx) => {
+    const product = await visibleProduct(actor, productCode, tx);
+    const rows = await database.query<MembershipRow>(
+      `SELECT m.id AS membershipId, u.id AS userId, u.name, m.role, m.from_at AS fromAt, m.until_at AS untilAt
+       FROM memberships m JOIN users u ON u.id = m.user_id
+       WHERE m.product_id = :productId ORDER BY m.until_at IS NOT NULL, u.name, m.from_at DESC`,
+      { type: QueryTypes.SELECT, replacements: { productId: product.id }, transaction: tx },
+    );
+    return rows.map(({ membershipId, userId, name, role, fromAt, untilAt }) => ({
+      membershipId,
+      person: { id: userId, name },
+      role,
+      from: fromAt,
+      until: untilAt,
+    }));
+  });
+}
+
+/** What a program manager is told before and after establishing: a role that is missing. */
+export function establishWarnings(actor: Actor, productCode: string, at: string): Promise<string[]> {
+  return inSnapshot(async (tx) => warningsFor((await visibleProduct(actor, productCode, tx)).id, at, tx));
+}
+
+/** Every account, open and closed, for an administrator. */
+export async function accountsFor(actor: Actor): Promise<AccountRow[]> {
+  authorize(actor, { on: "Installation", action: "read_accounts" });
+  return listAccounts();
+}
+
+async function visibleProduct(actor: Actor, productCode: string, tx: Transaction): Promise<ProductRow> {
+  const product = await productByCode(productCode, tx);
+  authorize(actor, { on: "Product", action: "see", productId: product.id });
+  return product;
+}
+
+interface MembershipRow {
+  membershipId: number;
+  userId: number;
+  name: string;
+  role: Role;
+  fromAt: string;
+  untilAt: string | null;
+}
+
+interface RegisterRow extends ProductRow {
+  newestIssue: number | null;
+  totals: string | null;
+  openProposals: number;
+}
+
+const REGISTER = `
+  SELECT p.id, p.code, p.name, p.kind, p.time_zone AS timeZone, i.number AS newestIssue, i.totals,
+    (SELECT count(*) FROM proposals c WHERE c.product_id = p.id AND c.state IN ('proposed', 'returned')) AS openProposals
+  FROM products p LEFT JOIN issues i ON i.product_id = p.id
+    AND i.number = (SELECT max(number) FROM issues WHERE product_id = p.id)
+  ORDER BY p.code`;
+
+function registerEntry(row: RegisterRow, actor: Actor): RegisterEntry {
+  const { id, code, name, kind, timeZone, newestIssue, totals, openProposals } = row;
+  const mayRead = isAllowed(actor, { on: "Product", action: "read_budget", productId: id });
+  return {
+    product: { id, code, name, kind, timeZone, newestIssue },
+    roles: actor.memberships.filter(({ productId }) => productId === id).map(({ role }) => role),
+    worst: mayRead && totals !== null ? worstOf(totals) : null,
+    openProposals: mayRead ? openProposals : 0,
+  };
+}
+
+function worstOf(text: string): RegisterEntry["worst"] {
+  const { worstPoint, points } = parseTotals(text);
+  const worst = points.find(({ operatingPoint }) => operatingPoint === worstPoint);
+  if (!worst) return null;
+  const { operatingPoint, name, totals, limitHundredths, standing } = worst;
+  const { predicted, margin } = totals;
+  return { operatingPoint, name, predicted, limit: limitHundredths / 100, margin, standing };
+}

@@ -1,0 +1,168 @@
+import { performAct } from "@/lib/audit/perform-act";
+import { textHash } from "@/lib/audit/text-hash";
+import { loadNewestBudget, productByCode } from "@/lib/budget/load-budget";
+import { writeIssue, type WrittenIssue } from "@/lib/budget/write-issue";
+import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
+import type { LineEdit, TransferEdit } from "@/lib/evaluation/budget/edits";
+import { previewChange } from "@/lib/evaluation/budget/preview-change";
+import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
+import { newTerms } from "@/lib/evaluation/lines/terms-body";
+import { firstIssueLines } from "@/lib/products/first-issue";
+import type { Actor } from "@/lib/vocabulary/actor";
+import type { Capacity } from "@/lib/vocabulary/roles";
+import { inSnapshot } from "@/models/database";
+import { Proposal } from "@/models/proposal";
+import { ProposalEditor } from "@/models/proposal-editor";
+import { Round } from "@/models/round";
+import { Signature } from "@/models/signature";
+
+/** Air at 15 °C and 25 m/s; limit and reserve in hundredths of a newton. */
+export function firstPoint(limitHundredths: number) {
+  return { ...newOperatingPoint(), name: "Cruise", speed: { value: 25, entered: "25 m/s" }, limitHundredths };
+}
+
+/** A bluff body: its drag is q · C_D · A, which a test can compute by hand. */
+export function bluffItem(ownerId: number, dragCoefficient: number, area: number, more: object = {}) {
+  return {
+    name: "Mirror",
+    ownerId,
+    group: null,
+    order: 10,
+    grade: "estimated",
+    saving: false,
+    method: "bluff-body",
+    methodVersion: 1,
+    dragCoefficient,
+    source: "Test",
+    referenceArea: { value: area },
+    ...more,
+  };
+}
+
+export const addItem = (number: string, body: object): LineEdit => ({
+  operation: "add",
+  kind: "item",
+  number,
+  baseLetter: null,
+  body,
+});
+
+/** Establishes without the command, so that tests of reading don't hash passwords. */
+export async function establish(
+  manager: Actor,
+  code: string,
+  at: string,
+  { limit = 10000, reserve = 1000 }: { limit?: number; reserve?: number } = {},
+): Promise<WrittenIssue> {
+  const frame = { act: "establish_product", chain: code } as const;
+  return performAct(
+    manager,
+    () => new Date(at),
+    frame,
+    async (tx, record, now) => {
+      const product = await productByCode(code, tx);
+      const lines = firstIssueLines(product.kind, {
+        productCode: code,
+        operatingPoint: { number: "OP-1", body: firstPoint(limit) },
+        terms: newTerms({ referenceOperatingPoint: "OP-1", reserveHundredths: reserve }),
+        password: "not asked",
+      });
+      const { name, kind } = product;
+      const results = evaluateBudget({ product: { code, name, kind }, lines });
+      const issue = await writeIssue(
+        { product, proposalId: null, at: now, changedLines: lines, resultsBefore: null, results },
+        tx,
+      );
+      const subject = { type: "issue", id: "1", label: `${code} issue 1` };
+      record({ act: "establish_product", subject, now: { ...issue } });
+      return issue;
+    },
+  );
+}
+
+export interface ApprovedChange {
+  proposer: Actor;
+  signers: readonly (readonly [Actor, Capacity])[];
+  edits: readonly LineEdit[];
+  transfers?: readonly TransferEdit[];
+  title?: string;
+}
+
+/** A change with its rows as the review leaves them, written without the review's commands. */
+export async function approve(code: string, at: string, change: ApprovedChange): Promise<WrittenIssue> {
+  const { proposer, signers, edits, transfers = [], title = "Change" } = change;
+  const clock = () => new Date(at);
+  return performAct(proposer, clock, { act: "approve_proposal", chain: code }, async (tx, record, now) => {
+    const product = await productByCode(code, tx);
+    const before = await loadNewestBudget(product.id, tx);
+    const { after, faults, shortfall, changedLines } = previewChange(before.state, before.results, edits, transfers);
+    if (faults.length > 0 || shortfall) throw new Error(JSON.stringify({ faults, shortfall }));
+
+    const number = 1 + (await Proposal.count({ where: { productId: product.id }, transaction: tx }));
+    const proposal = await Proposal.create(
+      { productId: product.id, title, baseIssue: before.issue, proposerId: proposer.userId, createdAt: now },
+      { transaction: tx },
+    );
+    const times = { firstEditAt: now, lastEditAt: now };
+    await ProposalEditor.create({ proposalId: proposal.id, userId: proposer.userId, ...times }, { transaction: tx });
+    const round = await Round.create(
+      {
+        proposalId: proposal.id,
+        number: 1,
+        baseIssue: before.issue,
+        title,
+        reason: "For the test",
+        evidence: "[]",
+        rules: "{}",
+        canonicalText: title,
+        hash: textHash("round", title),
+        submittedById: proposer.userId,
+        submittedAt: now,
+      },
+      { transaction: tx },
+    );
+    await proposal.update({ number, round: 1, state: "proposed" }, { transaction: tx });
+    for (const [signer, capacity] of signers) {
+      const last: number | null = await Signature.max("sequence", {
+        where: { productId: product.id },
+        transaction: tx,
+      });
+      await Signature.create(
+        {
+          productId: product.id,
+          sequence: (last ?? 0) + 1,
+          subjectType: "round",
+          roundId: round.id,
+          signerId: signer.userId,
+          printedName: signer.printedName,
+          capacity,
+          decision: "approve",
+          meaning: "Checked",
+          canonicalText: title,
+          hash: textHash("signature", title),
+          signedAt: now,
+        },
+        { transaction: tx },
+      );
+    }
+    const issue = await writeIssue(
+      {
+        product,
+        proposalId: proposal.id,
+        at: now,
+        changedLines,
+        resultsBefore: before.results,
+        results: after.results,
+      },
+      tx,
+    );
+    await proposal.update({ state: "approved", endedAt: now }, { transaction: tx });
+    const subject = { type: "proposal", id: String(proposal.id), label: `${code}-CP-0${number}` };
+    record({ act: "approve_proposal", subject, now: { ...issue } });
+    return issue;
+  });
+}
+
+export async function newestBudget(code: string) {
+  return inSnapshot(async (tx) => loadNewestBudget((await productByCode(code, tx)).id, tx));
+}
