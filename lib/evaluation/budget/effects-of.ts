@@ -41,10 +41,11 @@ function itemEffects(
   now: PointResult | undefined,
   edited: readonly string[],
 ): ItemEffect[] {
-  const items = [...new Set([...(now?.items ?? []), ...(was?.items ?? [])].map((result) => result.item))];
+  const [before, after] = [resultsByItem(was), resultsByItem(now)];
   const isSamePoint = was !== undefined && now !== undefined;
-  return items
-    .map((item) => itemEffect(resultOf(was, item), resultOf(now, item), isSamePoint, edited.includes(item)))
+  return [...new Set([...after.keys(), ...before.keys()])]
+    .filter((item) => !isSamePoint || before.get(item) !== after.get(item) || edited.includes(item))
+    .map((item) => itemEffect(before.get(item), after.get(item), isSamePoint, edited.includes(item)))
     .filter((effect) => effect !== null)
     .filter((effect) => effect.edited || !isSamePoint || isMoved(effect));
 }
@@ -99,6 +100,6 @@ function pointOf(results: BudgetResults, number: string): PointResult | undefine
   return results.points.find((point) => point.operatingPoint === number);
 }
 
-function resultOf(point: PointResult | undefined, item: string): ItemResult | undefined {
-  return point?.items.find((result) => result.item === item);
+function resultsByItem(point: PointResult | undefined): ReadonlyMap<string, ItemResult> {
+  return new Map(point?.items.map((result) => [result.item, result]));
 }

@@ -6,7 +6,7 @@ import type { StreamState } from "../methods/stream-state";
 import type { Note } from "../notes/note";
 import { makeNote } from "../notes/note-catalogue";
 import type { IndexedState } from "./indexed-state";
-import { lineNotes } from "./line-notes";
+import { lineNotes, placesOf, type Places } from "./line-notes";
 import { methodInputOf } from "./method-input";
 import type { ItemResult } from "./results";
 import { roundAnswer, roundNote } from "./round-answer";
@@ -23,7 +23,8 @@ export interface PointToEvaluate {
 /** Every item at one operating point, in the order of the sheet. */
 export function evaluatePoint(point: PointToEvaluate, state: IndexedState): ItemResult[] {
   const order = itemsInSheetOrder(state);
-  const evaluation: Evaluation = { point, state, results: new Map(), open: [] };
+  const places = placesOf(state.items);
+  const evaluation: Evaluation = { point, state, places, results: new Map(), open: [] };
   for (const item of order) evaluate(item, evaluation);
   return order.flatMap((item) => evaluation.results.get(item) ?? []);
 }
@@ -31,6 +32,7 @@ export function evaluatePoint(point: PointToEvaluate, state: IndexedState): Item
 interface Evaluation {
   point: PointToEvaluate;
   state: IndexedState;
+  places: Places;
   results: Map<string, ItemResult>;
   /** Shares whose members are being added up: meeting one of them again is a circle. */
   open: string[];
@@ -81,7 +83,12 @@ function refusalThrough(member: ItemResult): Note {
   return isCircle && member.refused ? member.refused : makeNote("share-of-refused", { item: member.item });
 }
 
-function toResult(item: string, body: ItemBody, outcome: MethodOutcome, { point, state }: Evaluation): ItemResult {
+function toResult(
+  item: string,
+  body: ItemBody,
+  outcome: MethodOutcome,
+  { point, state, places }: Evaluation,
+): ItemResult {
   const growthFraction = state.terms.growthTable[body.grade];
   const head = { item, operatingPoint: point.operatingPoint, methodVersion: body.methodVersion, growthFraction };
   if (outcome.outcome === "refused") {
@@ -92,7 +99,7 @@ function toResult(item: string, body: ItemBody, outcome: MethodOutcome, { point,
   const answer = roundAnswer(outcome.answer);
   const basic = roundStored(basicEstimate(outcome.answer, state));
   const growth = roundStored(Math.abs(basic) * growthFraction);
-  const notes = [...answer.notes, ...lineNotes(item, state).map(roundNote)];
+  const notes = [...answer.notes, ...lineNotes(item, body, places).map(roundNote)];
   return { ...head, basic, growth, predicted: roundStored(basic + growth), answer, notes, refused: null };
 }
 

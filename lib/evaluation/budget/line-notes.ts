@@ -1,43 +1,46 @@
 import type { ItemBody } from "../lines/item-body";
 import { makeNote } from "../notes/note-catalogue";
 import type { Note } from "../notes/note";
-import type { IndexedState } from "./indexed-state";
 import { compareNumbers } from "./sheet-order";
 
-type Plate = Extract<ItemBody, { method: "flat-plate-friction" }>;
+type Items = ReadonlyMap<string, ItemBody>;
+
+/** Items by the place that they say they are in. */
+export type Places = ReadonlyMap<string, readonly string[]>;
+
+export function placesOf(items: Items): Places {
+  const places = new Map<string, string[]>();
+  for (const [item, body] of items) {
+    const place = placeOf(body);
+    if (place === null) continue;
+    const others = places.get(place);
+    if (others) others.push(item);
+    else places.set(place, [item]);
+  }
+  return places;
+}
 
 /** Notes that come from how items stand to one another; the method of one item alone cannot know them. */
-export function lineNotes(item: string, { items }: Pick<IndexedState, "items">): Note[] {
-  const body = items.get(item);
-  if (body?.method !== "flat-plate-friction") return [];
+export function lineNotes(item: string, body: ItemBody, places: Places): Note[] {
+  if (body.method !== "flat-plate-friction") return [];
 
-  const startsAnew = body.liesBehind !== null && !body.runUpFollows && body.runUp.value === 0;
+  const { liesBehind, runUpFollows, runUp } = body;
+  const startsAnew = liesBehind !== null && !runUpFollows && runUp.value === 0;
   return [
-    ...(startsAnew && body.liesBehind !== null
-      ? [makeNote("fresh-leading-edge-behind", { behind: body.liesBehind })]
-      : []),
-    ...twinsOf(item, body, items).map((other) => makeNote("same-surface-twice", { other })),
+    ...(startsAnew ? [makeNote("fresh-leading-edge-behind", { behind: liesBehind })] : []),
+    ...twinsOf(item, body, places).map((other) => makeNote("same-surface-twice", { other })),
   ];
 }
 
-/** Plates that agree in everything that places them: most likely the same surface, entered twice. */
-function twinsOf(item: string, plate: Plate, items: IndexedState["items"]): string[] {
-  return [...items]
-    .filter(([number, other]) => number !== item && other.method === "flat-plate-friction" && samePlace(plate, other))
-    .map(([number]) => number)
-    .sort(compareNumbers);
+function twinsOf(item: string, body: ItemBody, places: Places): string[] {
+  const inPlace = places.get(placeOf(body) ?? "") ?? [];
+  return inPlace.filter((other) => other !== item).sort(compareNumbers);
 }
 
-function samePlace(one: Plate, other: Plate): boolean {
-  return (
-    one.group === other.group &&
-    one.length.value === other.length.value &&
-    one.breadth.value === other.breadth.value &&
-    one.faces === other.faces &&
-    one.liesBehind === other.liesBehind &&
-    one.runUp.value === other.runUp.value &&
-    one.localSpeedRatio === other.localSpeedRatio &&
-    one.finish === other.finish &&
-    one.roughness?.value === other.roughness?.value
-  );
+/** Plates that agree in everything that places them are most likely the same surface, entered twice. */
+function placeOf(body: ItemBody): string | null {
+  if (body.method !== "flat-plate-friction") return null;
+  const { group, length, breadth, faces, liesBehind, runUp, localSpeedRatio, finish, roughness } = body;
+  const sizes = [length.value, breadth.value, faces, runUp.value, localSpeedRatio, roughness?.value];
+  return JSON.stringify([group, liesBehind, finish, ...sizes]);
 }

@@ -4,7 +4,7 @@ import { sameBody } from "../lines/same-body";
 import type { BudgetState } from "../lines/line-state";
 import type { EvaluationOptions } from "./evaluate-budget";
 import { indexState, type IndexedState } from "./indexed-state";
-import { lineNotes } from "./line-notes";
+import { lineNotes, placesOf, type Places } from "./line-notes";
 import type { BudgetResults, ItemResult } from "./results";
 import { runUpOf } from "./run-up";
 import { shareMembers } from "./share-members";
@@ -42,7 +42,8 @@ function pointsMoved(was: IndexedState, now: IndexedState): ReadonlySet<string> 
 }
 
 function itemsMoved(was: IndexedState, now: IndexedState): ReadonlySet<string> {
-  const moved = new Set([...now.items.keys()].filter((item) => isMovedItself(item, was, now)));
+  const places = [placesOf(was.items), placesOf(now.items)] as const;
+  const moved = new Set([...now.items.keys()].filter((item) => isMovedItself(item, was, now, places)));
   // Shares of shares: as long as one more follows, another may follow it.
   for (let grown = true; grown;) {
     const followers = [...now.items].filter(
@@ -55,11 +56,17 @@ function itemsMoved(was: IndexedState, now: IndexedState): ReadonlySet<string> {
 }
 
 /** What an item reads besides the results of others. */
-function isMovedItself(item: string, was: IndexedState, now: IndexedState): boolean {
+function isMovedItself(
+  item: string,
+  was: IndexedState,
+  now: IndexedState,
+  [placesWas, placesNow]: readonly [Places, Places],
+): boolean {
   const [earlier, body] = [was.items.get(item), now.items.get(item)];
   if (!earlier || !body || !sameBody(earlier, body)) return true;
   if (was.terms.growthTable[body.grade] !== now.terms.growthTable[body.grade]) return true;
-  return readsMovedLine(body, was, now) || !sameBody(lineNotes(item, was), lineNotes(item, now));
+  if (readsMovedLine(body, was, now)) return true;
+  return !sameBody(lineNotes(item, earlier, placesWas), lineNotes(item, body, placesNow));
 }
 
 function readsMovedLine(body: ItemBody, was: IndexedState, now: IndexedState): boolean {
