@@ -35,7 +35,7 @@ export function ductSteps(input: InputOf<"duct-entry">, stream: StreamState): Wo
   const drag = stream.dynamicPressure * 2 * (width + height) * stretch;
   return [
     ...steps,
-    ...blockageSteps(input, stream),
+    ...blockageSteps(input, stream, stretch),
     step(
       DRAG,
       "D = q · 2 (W + H) · ΔF",
@@ -45,7 +45,7 @@ export function ductSteps(input: InputOf<"duct-entry">, stream: StreamState): Wo
   ];
 }
 
-function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState): WorkedStep[] {
+function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState, stretch: number): WorkedStep[] {
   const outcome = evaluateDuctEntry(input, stream);
   if (outcome.outcome === "refused") return [];
   const { displacementThickness, coreSpeedAtExit, pressureLoss } = outcome.answer;
@@ -60,16 +60,17 @@ function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState): Worke
     ),
     step(
       ["Core speed at the exit", "U_c", "m/s"],
-      "U_c = U W H/((W − 2δ*)(H − 2δ*))",
+      "U_c = U · W · H/((W − 2δ*) · (H − 2δ*))",
       `${digits(stream.speed)} · ${digits(width)} · ${digits(height)}/((${digits(width)} − 2 · ` +
-        `${digits(displacementThickness)})(${digits(height)} − 2 · ${digits(displacementThickness)}))`,
+        `${digits(displacementThickness)}) · (${digits(height)} − 2 · ${digits(displacementThickness)}))`,
       coreSpeedAtExit,
       { source: "continuity, single pass" },
     ),
     step(
       ["Pressure loss", "Δp", "Pa"],
-      "Δp = D/(W H)",
-      `${digits(outcome.answer.drag)}/(${digits(width)} · ${digits(height)})`,
+      "Δp = q · 2 (W + H) · ΔF/(W H)",
+      `${digits(stream.dynamicPressure)} · 2 · (${digits(width)} + ${digits(height)}) · ${digits(stretch)}/(${digits(width)} · ` +
+        `${digits(height)})`,
       pressureLoss,
     ),
   ];
