@@ -1,5 +1,5 @@
 // @ts-check
-import { existsSync } from "node:fs";
+import { readdirSync } from "node:fs";
 import path from "node:path";
 import { browserFault } from "../readiness/browser.mjs";
 import { ensureBuild } from "../readiness/build.mjs";
@@ -13,10 +13,7 @@ import { countsOfPlaywright, countsOfProgram, countsOfVitest } from "./counts.mj
  * @typedef {{ name: string, run: (context: Context) => Promise<Counts> }} Stage
  */
 
-const LAYERED = [
-  ...["app", "lib", "models", "policies", "templates", "scripts", "tests"],
-  ...["instrumentation.ts", "proxy.ts", "next.config.ts"],
-].filter((name) => existsSync(path.join(repositoryRoot, name)));
+const LAYERED = ["app", "lib", "models", "policies", "templates", "scripts", "tests"];
 
 /** Every check, the cheapest first. @type {readonly Stage[]} */
 export const STAGES = [
@@ -30,6 +27,7 @@ export const STAGES = [
         "--config",
         "scripts/dependency-cruiser.cjs",
         ...LAYERED,
+        ...readdirSync(repositoryRoot).filter((name) => /^[^.]+\.ts$/.test(name)),
       ]),
   },
   { name: "unit", run: (context) => vitestStage("unit", context) },

@@ -1,4 +1,5 @@
 import { test as base, expect, type Page } from "@playwright/test";
+import { DEMO_PASSWORD } from "@/scripts/demo/people";
 import { caughtMails, type CaughtMail } from "./caught-mails";
 import { runningApplication, type RunningApplication } from "./running-application";
 
@@ -34,9 +35,6 @@ export const test = base.extend<Fixtures, { application: RunningApplication }>({
   },
   mails: async ({ application }, use) => use(() => caughtMails(application.mailAddress)),
 });
-
-/** The demo's accounts share one password; the start prints it. */
-export const DEMO_PASSWORD = "leeboard demo";
 
 /** React has taken over the page: what is typed or pressed before would be lost. */
 export async function hydrated(page: Page): Promise<void> {
