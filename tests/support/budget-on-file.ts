@@ -23,20 +23,21 @@ export function firstPoint(limitHundredths: number) {
 
 /** A bluff body: its drag is q · C_D · A, which a test can compute by hand. */
 export function bluffItem(ownerId: number, dragCoefficient: number, area: number, more: object = {}) {
-  return {
-    name: "Mirror",
-    ownerId,
-    group: null,
-    order: 10,
-    grade: "estimated",
-    saving: false,
-    method: "bluff-body",
-    methodVersion: 1,
-    dragCoefficient,
-    source: "Test",
-    referenceArea: { value: area },
-    ...more,
-  };
+  const own = { method: "bluff-body", dragCoefficient, referenceArea: { value: area } };
+  return { ...commonItem(ownerId), name: "Mirror", ...own, ...more };
+}
+
+export function shareItem(ownerId: number, fraction: number, of: readonly string[], more: object = {}) {
+  const own = { method: "share", fraction, of, ofGroup: null, includeSavings: false };
+  return { ...commonItem(ownerId), name: "Gaps", ...own, ...more };
+}
+
+export function fixedItem(ownerId: number, newtons: number, more: object = {}) {
+  return { ...commonItem(ownerId), name: "Lamp", method: "fixed", force: { value: newtons }, ...more };
+}
+
+function commonItem(ownerId: number) {
+  return { ownerId, group: null, order: 10, grade: "estimated", saving: false, methodVersion: 1, source: "Test" };
 }
 
 export const addItem = (number: string, body: object): LineEdit => ({
