@@ -11,6 +11,7 @@ export interface ProposalRecord {
   id: number;
   productId: number;
   productCode: string;
+  productName: string;
   number: number | null;
   title: string;
   reason: string;
@@ -33,7 +34,8 @@ interface ProposalRow extends Omit<ProposalRecord, "coEditorIds" | "editorIds"> 
   editors: string;
 }
 
-const SELECT_PROPOSALS = `SELECT p.id, p.product_id AS productId, d.code AS productCode, p.number, p.title, p.reason,
+const SELECT_PROPOSALS = `SELECT p.id, p.product_id AS productId, d.code AS productCode,
+    d.name AS productName, p.number, p.title, p.reason,
     p.needed_by AS neededBy, p.state, p.round, p.base_issue AS baseIssue, p.proposer_id AS proposerId,
     p.lock_version AS lockVersion, p.created_at AS createdAt, p.ended_at AS endedAt,
     (SELECT json_group_array(user_id) FROM proposal_coeditors WHERE proposal_id = p.id AND ended_at IS NULL) AS coEditors,

@@ -3,6 +3,7 @@ import { textHash } from "@/lib/audit/text-hash";
 import { approvedMoves } from "@/lib/budget/approved-moves";
 import type { LoadedBudget } from "@/lib/budget/load-budget";
 import { namesOf } from "@/lib/budget/members";
+import type { Capacity } from "@/lib/vocabulary/roles";
 import { grownRouting, routeCapacities, type RequiredCapacity, type RoutedCapacity } from "@/policies/approval-routing";
 import type { SigningFacts } from "@/policies/signing-rights";
 import type { BudgetReader } from "./budget-reader";
@@ -67,10 +68,14 @@ export async function reviewRound(
   };
 }
 
-/** Whether every capacity that is asked for has been signed. */
-export function isFilled({ capacity, count, signedBySubmitting }: RequiredCapacity, review: RoundReview): boolean {
-  if (signedBySubmitting && review.round.isSubmittedByManager) return true;
-  return review.approvals.filter((approval) => approval.capacity === capacity).length >= count;
+/** Whether a capacity has all the approvals that it asks for. */
+export function isFilled(
+  { capacity, count, signedBySubmitting }: RequiredCapacity,
+  approvals: readonly { capacity: Capacity }[],
+  round: RoundRecord,
+): boolean {
+  if (signedBySubmitting && round.isSubmittedByManager) return true;
+  return approvals.filter((approval) => approval.capacity === capacity).length >= count;
 }
 
 async function previewOn(

@@ -133,6 +133,7 @@ export const ReturnProposalInput = z.strictObject({
   proposalId: Id,
   roundHash: Hash,
   capacity: z.enum(CAPACITIES),
+  deputyForId: Id.nullable().default(null),
   reason: sentenceText(2000, "Say in a sentence what has to be done before it can be approved."),
 });
 export type ReturnProposalInput = z.infer<typeof ReturnProposalInput>;

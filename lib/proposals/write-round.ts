@@ -11,7 +11,12 @@ import type { ProposalAct } from "./act-on-proposal";
 import type { Submission } from "./check-submission";
 import { stateAfter } from "./moves";
 import { noteEditor } from "./note-editor";
-import { keyOf, labelOf, subjectOf } from "./proposal-record";
+import { budgetReader } from "./budget-reader";
+import { mailProposed, mailSuperseded } from "./mails";
+import { keyOf, labelOf, proposalById, subjectOf } from "./proposal-record";
+import { roundOf } from "./round-record";
+import { reviewRound } from "./round-review";
+import { whatMoved } from "./what-moved";
 import { roundText } from "./round-text";
 import { editRowsOf, replaceWorkingCopy, transferRowsOf } from "./working-copy";
 
@@ -65,7 +70,19 @@ export async function writeRound(actor: Actor, context: ProposalAct, submission:
     reason: title,
     ...(signsBySubmitting ? { capacity: "program_manager" } : {}),
   });
+  await mailRound(actor, context, round);
   return { key: keyOf(numbered), number, round };
+}
+
+/** Earlier signers are told what moved, everybody else who may sign that they are asked. */
+async function mailRound(actor: Actor, { tx, at, proposal: { id } }: ProposalAct, number: number): Promise<void> {
+  const proposal = await proposalById(id, tx);
+  const [earlier, round] = [await roundOf(id, number - 1, tx), await roundOf(id, number, tx)];
+  if (!round) throw new Error(`Round ${number} of proposal ${id} was not written.`);
+  const context = { tx, at, proposal };
+  if (earlier) await mailSuperseded(actor, context, { round: number, moved: whatMoved(earlier, round) });
+  const { routing } = await reviewRound(proposal, round, budgetReader(proposal.productId, tx), { at, tx });
+  await mailProposed(actor, context, { routing, round: number });
 }
 
 async function nextProposalNumber(productId: number, { tx }: ProposalAct): Promise<number> {

@@ -1,0 +1,22 @@
+import { writeIssue, type WrittenIssue } from "@/lib/budget/write-issue";
+import type { ProposalAct } from "./act-on-proposal";
+import { endProposal } from "./end-proposal";
+import type { RoundReview } from "./round-review";
+
+/** The last signature was given: the next issue, with every revision and every result that changed. */
+export async function approveRound(context: ProposalAct, review: RoundReview): Promise<WrittenIssue> {
+  const { today, onToday, proposal } = review;
+  const issue = await writeIssue(
+    {
+      product: today.product,
+      proposalId: proposal.id,
+      at: context.at,
+      changedLines: onToday.change.changedLines,
+      resultsBefore: today.results,
+      results: onToday.change.after.results,
+    },
+    context.tx,
+  );
+  await endProposal(context, "approve");
+  return issue;
+}

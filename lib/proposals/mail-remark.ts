@@ -1,0 +1,28 @@
+import type { Actor } from "@/lib/vocabulary/actor";
+import type { Comment } from "@/models/comment";
+import type { ProposalAct } from "./act-on-proposal";
+import { editorsOf, mailFacts, mailMany } from "./mails";
+
+/** A request for action goes to the editors, an answer to who raised the remark; other remarks send no mail. */
+export async function mailRemark(
+  actor: Actor,
+  context: ProposalAct,
+  { remark, number, parent }: { remark: Comment; number: number; parent: Comment | null },
+): Promise<void> {
+  const data = { ...mailFacts(context.proposal), authorName: actor.printedName, remarkNumber: number };
+  const mail = { occasion: `remark ${remark.id}`, except: actor, data };
+  if (parent) await mailMany(context, { ...mail, template: "remark_answered", to: [parent.authorId] });
+  else if (remark.asksAction) {
+    await mailMany(context, { ...mail, template: "remark_asks_action", to: editorsOf(context.proposal) });
+  }
+}
+
+export function mailSettled(actor: Actor, context: ProposalAct, remark: Comment): Promise<void> {
+  return mailMany(context, {
+    template: "remark_settled",
+    occasion: `remark ${remark.id} settled`,
+    to: editorsOf(context.proposal),
+    except: actor,
+    data: { ...mailFacts(context.proposal), authorName: actor.printedName, remarkNumber: remark.number ?? 0 },
+  });
+}

@@ -1,0 +1,97 @@
+import type { Actor } from "@/lib/vocabulary/actor";
+import { systemClock, type Clock } from "@/lib/vocabulary/clock";
+import type { ProposalState } from "@/lib/vocabulary/proposals";
+import { Refusal } from "@/lib/vocabulary/refusal";
+import { actOnProposal, type ProposalAct } from "./act-on-proposal";
+import { approveRound } from "./approve-round";
+import { demandApprovable } from "./demand-approvable";
+import { openRound } from "./open-round";
+import { mailApproved, mailDecided, mailSigned } from "./mails";
+import { mailOvertaken } from "./mail-overtaken";
+import { isFilled, type RoundReview } from "./round-review";
+import type { SignProposalInput } from "./schema";
+import { endProposal } from "./end-proposal";
+import { passwordRefusal } from "./signer-password";
+import { writeSignature } from "./write-signature";
+
+export interface SignedProposal {
+  state: ProposalState;
+  /** The issue that this signature made; null where others have still to sign. */
+  issue: number | null;
+}
+
+/**
+ * Approves or disapproves a round in one capacity, with a password. The approval that completes the routing makes the
+ * next issue in the same transaction: all of it happens or nothing.
+ */
+export async function signProposal(
+  actor: Actor,
+  input: SignProposalInput,
+  clock: Clock = systemClock,
+): Promise<SignedProposal> {
+  const wrongPassword = await passwordRefusal(actor.userId, input.password);
+  const act = input.decision === "approve" ? "approve_proposal" : "disapprove_proposal";
+  return actOnProposal(actor, clock, { act, proposalId: input.proposalId }, async (context) => {
+    const review = await openRound(actor, context, input);
+    if (wrongPassword) throw wrongPassword;
+    if (input.roundHash !== review.round.hash) throw moved("A newer round was submitted in the meantime.");
+    return input.decision === "approve"
+      ? approve(actor, context, review, input)
+      : disapprove(actor, context, review, input);
+  });
+}
+
+type Approval = Extract<SignProposalInput, { decision: "approve" }>;
+type Disapproval = Extract<SignProposalInput, { decision: "disapprove" }>;
+
+async function approve(
+  actor: Actor,
+  context: ProposalAct,
+  review: RoundReview,
+  { capacity, meaning, deputyForId, textHash }: Approval,
+): Promise<SignedProposal> {
+  const { tx, at, record } = context;
+  await demandApprovable(actor, review, { capacity, deputyForId }, tx);
+  if (textHash !== review.textHash) throw moved("The effect on today's issue or what has to be signed moved.");
+
+  const words = { decision: "approve", capacity, meaning, reason: null, deputyForId, takesBackId: null } as const;
+  const signature = await writeSignature(actor, review, words, at, tx);
+  const approvals = [...review.approvals, { capacity }];
+  const missing = review.required.filter((required) => !isFilled(required, approvals, review.round));
+  const signed = { round: review.round.number, signature: signature.hash, meaning };
+  if (missing.length > 0) {
+    record({ capacity, now: signed });
+    await mailSigned(actor, context, { capacity, signatureId: signature.id, missing });
+    return { state: "proposed", issue: null };
+  }
+  const issue = await approveRound(context, review);
+  record({
+    capacity,
+    was: { state: "proposed", issue: review.today.issue },
+    now: { ...signed, state: "approved", issue: issue.number, contentHash: issue.contentHash },
+  });
+  await mailApproved(actor, context, { issue: issue.number, approvals: review.approvals });
+  await mailOvertaken(context, issue.number);
+  return { state: "approved", issue: issue.number };
+}
+
+async function disapprove(
+  actor: Actor,
+  context: ProposalAct,
+  review: RoundReview,
+  { capacity, reason, deputyForId, textHash }: Disapproval,
+): Promise<SignedProposal> {
+  const { tx, at, record } = context;
+  if (textHash !== review.textHash) throw moved("The effect on today's issue or what has to be signed moved.");
+  const words = { decision: "disapprove", capacity, meaning: null, reason, deputyForId, takesBackId: null } as const;
+  const signature = await writeSignature(actor, review, words, at, tx);
+  await endProposal(context, "disapprove");
+  const now = { state: "disapproved", round: review.round.number, signature: signature.hash };
+  record({ capacity, was: { state: "proposed" }, now, reason });
+  await mailDecided(actor, context, "disapproved");
+  return { state: "disapproved", issue: null };
+}
+
+function moved(what: string): Refusal {
+  return new Refusal("moved", `${what} Read the sheet again before you sign it.`);
+}
