@@ -6,6 +6,8 @@ export interface Choice {
   label: string;
   /** What choosing it means, where the label alone doesn't say. */
   help?: string;
+  /** What choosing it writes into other fields, which can be changed afterwards unless the schema says no. */
+  sets?: Readonly<Record<string, string | number>>;
 }
 
 /** Everything a form, a difference sheet and a canonical text need to know of a field. */
@@ -45,4 +47,10 @@ export interface FieldSpec {
   shownWhen?: { field: string; is: readonly (string | boolean | null)[] };
   /** Set by the application, never typed. */
   fixed?: boolean;
+}
+
+/** What a choice writes into the other fields of its body. */
+export function setByChoice({ type }: FieldSpec, value: unknown): Readonly<Record<string, string | number>> {
+  if (type.type !== "choice") return {};
+  return type.choices.find((choice) => choice.value === value)?.sets ?? {};
 }

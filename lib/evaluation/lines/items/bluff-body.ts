@@ -1,14 +1,19 @@
 import { z } from "zod";
-import type { FieldSpec } from "../field-spec";
+import { BLUFF_BODY_SHAPES, type BluffBodyShape } from "@/lib/aero/bluff-body-shapes";
+import type { Choice, FieldSpec } from "../field-spec";
 import { coefficientUncertainty, nonNegativeNumber, positiveNumber, positiveQuantity } from "../quantity";
 import { optionalText, requiredText } from "../text-schemas";
 import { itemCommonShape, newItemCommon, type NewItem } from "./item-common";
+
+/** The value of a loading code is no measured drag: such a shape is not offered. */
+const CATALOGUE = BLUFF_BODY_SHAPES.filter((shape) => !shape.isLoadingCodeValue);
+const SHAPES = CATALOGUE.map(({ id }) => id);
 
 export const BluffBodyBody = z
   .strictObject({
     ...itemCommonShape,
     method: z.literal("bluff-body"),
-    shape: optionalText(80).nullable().default(null),
+    shape: z.enum(SHAPES, "Choose a shape of the catalogue.").nullable().default(null),
     dragCoefficient: nonNegativeNumber,
     coefficientUncertainty,
     source: requiredText("Say where the drag coefficient comes from.", 300),
@@ -18,9 +23,15 @@ export const BluffBodyBody = z
     localSpeedRatio: positiveNumber.default(1),
   })
   .superRefine((body, context) => {
-    if (body.shelterFactor === 1 || body.shelterReason !== "") return;
-    const message = "Say what shelters it: the factor is not 1.";
-    context.addIssue({ code: "custom", path: ["shelterReason"], message });
+    const published = CATALOGUE.find(({ id }) => id === body.shape)?.dragCoefficient;
+    if (published !== undefined && body.dragCoefficient !== published) {
+      const message = `The catalogue has ${published} for this shape: choose no shape for a coefficient of your own.`;
+      context.addIssue({ code: "custom", path: ["dragCoefficient"], message });
+    }
+    if (body.shelterFactor !== 1 && body.shelterReason === "") {
+      const message = "Say what shelters it: the factor is not 1.";
+      context.addIssue({ code: "custom", path: ["shelterReason"], message });
+    }
   });
 export type BluffBodyBody = z.output<typeof BluffBodyBody>;
 
@@ -29,7 +40,7 @@ export const BLUFF_BODY_FIELDS: readonly FieldSpec[] = [
     key: "shape",
     label: "Shape from the catalogue",
     help: "Fills in the published coefficient and its source; leave it empty for one of your own.",
-    type: { type: "text", longest: 80 },
+    type: { type: "choice", choices: CATALOGUE.map(choiceOf) },
     optional: true,
   },
   {
@@ -73,6 +84,22 @@ export const BLUFF_BODY_FIELDS: readonly FieldSpec[] = [
     type: { type: "number" },
   },
 ];
+
+function choiceOf(shape: BluffBodyShape): Choice {
+  const { id, name, dragCoefficient, referenceArea } = shape;
+  const source = shape.isFromMemory ? `${shape.source}; quoted from memory, check the book` : shape.source;
+  return {
+    value: id,
+    label: `${name}: ${dragCoefficient} (${bookOf(shape)})`,
+    help: `On the ${referenceArea}. ${source}.`,
+    sets: { dragCoefficient, source },
+  };
+}
+
+/** The book alone: one shape may stand there twice, by two of them. */
+function bookOf({ source }: BluffBodyShape): string {
+  return source.split(",")[0] ?? source;
+}
 
 export function newBluffBody(item: NewItem) {
   return {

@@ -96,6 +96,14 @@ describe("a body from outside", () => {
       "shelterReason",
       "Say what shelters it: the factor is not 1.",
     ],
+    [
+      "another coefficient than its shape's",
+      "item",
+      { ...BODY, shape: "cube-face-on-white" },
+      "dragCoefficient",
+      "The catalogue has 1.07 for this shape: choose no shape for a coefficient of your own.",
+    ],
+    ["a shape of no catalogue", "item", { ...BODY, shape: "banana" }, "shape", "Choose a shape of the catalogue."],
     ["no source", "item", { ...BODY, source: "" }, "source", "Say where the drag coefficient comes from."],
     [
       "a negative force that is no saving",

@@ -52,7 +52,7 @@ export function FieldInput(props: FieldInputProps) {
     case "yes-no":
       return <CheckField {...texts} checked={value === true} onChange={(event) => onChange(event.target.checked)} />;
     case "choice":
-      return <SelectInput {...texts} choices={type.choices} value={value} onChange={onChange} />;
+      return <SelectInput {...texts} choices={type.choices} value={value} onChange={onChange} empty={spec.optional} />;
     case "number-choice": {
       const choices = type.choices.map((choice) => ({ value: String(choice.value), label: choice.label }));
       return <SelectInput {...texts} choices={choices} value={value} onChange={(text) => onChange(Number(text))} />;

@@ -4,6 +4,7 @@ import { RevisionLetter } from "@/app/_components/revision-letter";
 import { TextField } from "@/app/_components/text-field";
 import { isShown, valuesOf } from "@/lib/evaluation/lines/field-rows";
 import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
+import { setByChoice } from "@/lib/evaluation/lines/field-spec";
 import type { DraftEdit } from "@/lib/proposals/schema";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
@@ -118,7 +119,7 @@ function Fields({ edit, index, body, onChange, names, faults, strict, before }: 
                 onChange(
                   spec.key === "method" && typeof value === "string"
                     ? withMethod(body, value)
-                    : { ...body, [spec.key]: value },
+                    : { ...body, [spec.key]: value, ...setByChoice(spec, value) },
                 )
               }
               names={names}
