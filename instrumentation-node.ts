@@ -1,13 +1,16 @@
+import { startDeliveryLoop } from "@/lib/mail/delivery-loop";
 import { openDatabase } from "@/models/database";
 import { migrateDatabase } from "@/models/migrations/migrate";
 
-/** Opens and migrates the database. A server that cannot would answer every request with an error: it ends instead. */
+/** Opens and migrates the database and begins to deliver mail. */
 export async function prepareServer(): Promise<void> {
   try {
     await openDatabase();
     await migrateDatabase();
   } catch (error) {
+    // A server without its database would answer every request with an error: it ends instead.
     console.error("Leeboard cannot open its database and stops.", error);
     process.exit(1);
   }
+  startDeliveryLoop();
 }

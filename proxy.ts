@@ -12,6 +12,8 @@ export function proxy(request: NextRequest): NextResponse {
   const policy = contentSecurityPolicy(nonce, process.env.NODE_ENV === "development");
   const headers = new Headers(request.headers);
   headers.set("x-nonce", nonce);
+  // Where a sign-in leads back to.
+  headers.set("x-path", `${request.nextUrl.pathname}${request.nextUrl.search}`);
   headers.set("content-security-policy", policy);
 
   return harden(NextResponse.next({ request: { headers } }), policy);

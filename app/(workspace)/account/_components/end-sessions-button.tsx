@@ -1,0 +1,19 @@
+"use client";
+
+import { ConfirmDialog } from "@/app/_components/confirm-dialog";
+
+import { endSessionsAction } from "../actions";
+
+export function EndSessionsButton() {
+  return (
+    <ConfirmDialog
+      trigger="Sign out everywhere…"
+      title="Sign out everywhere"
+      confirm="Sign out everywhere"
+      onConfirm={() => endSessionsAction({})}
+      onDone={() => window.location.assign("/sign-in")}
+    >
+      <p>Every session of yours ends, this one too. What you typed and did not save elsewhere is lost there.</p>
+    </ConfirmDialog>
+  );
+}

@@ -1,0 +1,14 @@
+"use server";
+
+import { z } from "zod";
+
+import { defineAction } from "@/app/_server/define-action";
+import { changePassword } from "@/lib/accounts/change-password";
+import { ChangePasswordInput } from "@/lib/accounts/schema";
+import { endSessions } from "@/lib/accounts/sign-out";
+
+export const changePasswordAction = defineAction(ChangePasswordInput, async (actor, input, clock) => {
+  await changePassword(actor, clock, input);
+});
+
+export const endSessionsAction = defineAction(z.strictObject({}), (actor, _input, clock) => endSessions(actor, clock));

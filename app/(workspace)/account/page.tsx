@@ -1,0 +1,46 @@
+import type { Metadata } from "next";
+
+import { PageHeading } from "@/app/_components/page-heading";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { Sheet } from "@/app/_components/sheet";
+import { TitleBlock } from "@/app/_components/title-block";
+import { requireActor } from "@/app/_server/session";
+import { actorById } from "@/lib/users/queries";
+import { systemClock } from "@/lib/vocabulary/clock";
+
+import { ChangePasswordForm } from "./_components/change-password-form";
+import { EndSessionsButton } from "./_components/end-sessions-button";
+
+export const metadata: Metadata = { title: "Account" };
+
+export default async function AccountPage() {
+  const { userId, printedName, isAdministrator } = await requireActor();
+  const account = await actorById(userId, systemClock().toISOString());
+
+  return (
+    <div className="mx-auto max-w-4xl">
+      <PageHeading title={printedName} subtitle={account?.email} />
+      <Sheet
+        titleBlock={
+          <TitleBlock
+            fields={[
+              { label: "Sheet", value: "Account" },
+              { label: "Name", value: printedName },
+              { label: "Administrator", value: isAdministrator ? "yes" : "no" },
+            ]}
+          />
+        }
+      >
+        <SectionHeading>Change the password</SectionHeading>
+        <p className="mb-3 max-w-[62ch] text-ink-2">
+          You type it when you sign in and when you sign a proposal. Changing it ends every session of yours, this one
+          too.
+        </p>
+        <ChangePasswordForm />
+        <SectionHeading>Sign out everywhere</SectionHeading>
+        <p className="mb-3 max-w-[62ch] text-ink-2">Ends every session of yours, on whatever machine it was begun.</p>
+        <EndSessionsButton />
+      </Sheet>
+    </div>
+  );
+}

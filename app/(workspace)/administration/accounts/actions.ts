@@ -1,0 +1,29 @@
+"use server";
+
+import { z } from "zod";
+
+import { defineAction } from "@/app/_server/define-action";
+import { createAccount } from "@/lib/products/create-account";
+import { deactivateAccount } from "@/lib/products/deactivate-account";
+import { reactivateAccount } from "@/lib/products/reactivate-account";
+import { CreateAccountInput, DeactivateAccountInput } from "@/lib/products/schema";
+
+export const createAccountAction = defineAction(CreateAccountInput, (actor, input, clock) =>
+  createAccount(actor, clock, input),
+);
+
+export const deactivateAccountAction = defineAction(DeactivateAccountInput, (actor, input, clock) =>
+  deactivateAccount(actor, clock, input),
+);
+
+const ReactivateAccountInput = DeactivateAccountInput.extend({
+  reason: z
+    .string()
+    .trim()
+    .min(3, "Say in a sentence why the account is opened again.")
+    .pipe(DeactivateAccountInput.shape.reason),
+});
+
+export const reactivateAccountAction = defineAction(ReactivateAccountInput, (actor, input, clock) =>
+  reactivateAccount(actor, clock, input),
+);
