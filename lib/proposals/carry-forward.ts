@@ -1,5 +1,6 @@
 import { z } from "zod";
 import type { LoadedBudget } from "@/lib/budget/load-budget";
+import type { ActRecord } from "@/lib/vocabulary/acts";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal } from "@/lib/vocabulary/refusal";
@@ -40,13 +41,9 @@ export function carryForward(actor: Actor, input: CarryForwardInput, clock: Cloc
     await moveWorkingCopy(context, base, onto, input.settled);
     await noteEditor(proposal.id, actor.userId, at, tx);
 
-    const now = {
-      baseIssue: onto.issue,
-      settled: input.settled.map(({ number, field, choice }) => `${number} ${field}: ${choice}`),
-    };
-    const reason = input.settled.map(({ number, field, why }) => `${number} ${field}: ${why}`).join("\n");
-    const round = proposal.state === "proposed" ? await nextRound(actor, context) : null;
-    if (round === null || reason !== "") record({ was: { baseIssue: base.issue }, now, ...(reason ? { reason } : {}) });
+    const settlement = settlementRecord(input.settled);
+    const round = proposal.state === "proposed" ? await nextRound(actor, context, settlement) : null;
+    if (round === null) record({ was: { baseIssue: base.issue }, now: { baseIssue: onto.issue }, ...settlement });
     const answer = { lockVersion: (await proposalById(proposal.id, tx)).lockVersion, round };
     await keepAnswer(form, answer, at, tx);
     return answer;
@@ -97,12 +94,21 @@ function refuseUnsettled({ edit, merges }: CarriedEdit, choices: ReadonlyMap<str
 }
 
 /** What was proposed stays proposed: the carried copy is its next round, checked like any submission. */
-async function nextRound(actor: Actor, context: ProposalAct): Promise<number> {
+async function nextRound(actor: Actor, context: ProposalAct, details: Partial<ActRecord>): Promise<number> {
   const proposal = await proposalById(context.proposal.id, context.tx);
   const carried = { ...context, proposal };
   const submission = await checkedSubmission(actor, carried);
-  const { round } = await writeRound(actor, carried, { ...submission, signsBySubmitting: false, act: "carry_forward" });
+  const how = { signsBySubmitting: false, act: "carry_forward", details } as const;
+  const { round } = await writeRound(actor, carried, { ...submission, ...how });
   return round;
+}
+
+/** Every choice with its reason goes into the history. */
+function settlementRecord(settled: readonly SettlementChoice[]): Pick<ActRecord, "reason"> {
+  if (settled.length === 0) return {};
+  return {
+    reason: settled.map(({ number, field, choice, why }) => `${number} ${field}: ${choice}. ${why}`).join("\n"),
+  };
 }
 
 function movedSince(): Refusal {

@@ -77,9 +77,9 @@ function obstacleOf({ operation, kind, number }: DraftEdit, now: LineState): str
 }
 
 function specOf(edit: DraftEdit, onto: LineState | null, path: string): FieldSpec | undefined {
-  const bodies = [edit.body, onto?.body ?? null].flatMap((body) => body ?? []);
+  const bodies: (object | null)[] = [edit.body, onto?.body ?? null];
   for (const body of bodies) {
-    const found = specAt(fieldsOfBody(edit.kind, body), path.split("."));
+    const found = body && specAt(fieldsOfBody(edit.kind, body), path.split("."));
     if (found) return found;
   }
   return undefined;

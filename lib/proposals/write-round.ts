@@ -1,6 +1,7 @@
 import { textHash } from "@/lib/audit/text-hash";
 import { canonicalJson } from "@/lib/audit/canonical-json";
 import { termsOf } from "@/lib/evaluation/budget/indexed-state";
+import type { ActRecord } from "@/lib/vocabulary/acts";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Product } from "@/models/product";
 import { Proposal } from "@/models/proposal";
@@ -23,6 +24,7 @@ import { editRowsOf, replaceWorkingCopy, transferRowsOf } from "./working-copy";
 type SubmittedRound = Submission & {
   signsBySubmitting: boolean;
   act: "propose" | "propose_next_round" | "carry_forward";
+  details?: Partial<ActRecord>;
 };
 
 /** Writes the next round with what was submitted, moves the proposal and tells the signers. */
@@ -68,6 +70,7 @@ export async function writeRound(actor: Actor, context: ProposalAct, submission:
     was: { state: proposal.state, round: proposal.round },
     now: { state, round, baseIssue: base.issue, hash },
     reason: title,
+    ...submission.details,
     ...(signsBySubmitting ? { capacity: "program_manager" } : {}),
   });
   await mailRound(actor, context, round);
