@@ -39,7 +39,7 @@ export const signaturesAndRemarks: Migration = {
       deputy_for_name TEXT,
       decision TEXT NOT NULL CHECK (${isOneOf("decision", ["approve", "return", "disapprove", "take_back"])}),
       takes_back_id INTEGER UNIQUE REFERENCES signatures (id),
-      meaning TEXT CHECK (decision <> 'approve' OR length(meaning) > 0),
+      meaning TEXT CHECK (decision <> 'approve' OR coalesce(length(meaning), 0) > 0),
       reason TEXT,
       canonical_text TEXT NOT NULL,
       hash TEXT NOT NULL CHECK (${isHash("hash")}),
@@ -51,7 +51,7 @@ export const signaturesAndRemarks: Migration = {
       CHECK ((decision = 'take_back') = (takes_back_id IS NOT NULL)),
       CHECK ((deputy_for_id IS NULL) = (deputy_for_name IS NULL) AND deputy_for_id IS NOT signer_id),
       CHECK (decision <> 'disapprove' OR capacity = 'program_manager'),
-      CHECK (decision = 'approve' OR length(reason) > 0)
+      CHECK (decision = 'approve' OR coalesce(length(reason), 0) > 0)
     ) STRICT`,
     "CREATE INDEX signatures_of_round ON signatures (round_id)",
     "CREATE UNIQUE INDEX signatures_established_once ON signatures (product_id) WHERE subject_type = 'establishment'",
