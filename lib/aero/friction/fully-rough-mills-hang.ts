@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { roughLine } from "./rough-line";
 
 /**
@@ -7,11 +8,13 @@ import { roughLine } from "./rough-line";
  *
  * @param lengthOverRoughness x/k_s [-], 150 to 1.5e7
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if x/k_s ≤ 0.0141: there the formula has no value
  *
  * Source: A. F. Mills & X. Hang, ASME J. Fluids Eng. 105 (1983) 364–365; coefficients and range from memory, supported by
  * the momentum integral within 0.6 %. Worked: x/k_s = 1e4 gives 0.0043087.
  */
 export function millsHangMean(lengthOverRoughness: number): number {
+  requireAbove(0.0141, lengthOverRoughness, "x/k_s");
   return (2.635 + 0.618 * Math.log(lengthOverRoughness)) ** -2.57;
 }
 

@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { roughLine } from "./rough-line";
 
 /**
@@ -7,11 +8,13 @@ import { roughLine } from "./rough-line";
  *
  * @param lengthOverRoughness x/k_s [-], 1e2 to 1e6
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if x/k_s ≤ 0.0682: there the formula has no value
  *
  * Source: Prandtl & Schlichting 1934; H. Schlichting, Boundary-Layer Theory, 7th ed. 1979, ch. XXI.
  * Worked: x/k_s = 1e4 gives 0.0049339.
  */
 export function fullyRoughMean(lengthOverRoughness: number): number {
+  requireAbove(0.0682, lengthOverRoughness, "x/k_s");
   return (1.89 + 1.62 * Math.log10(lengthOverRoughness)) ** -2.5;
 }
 

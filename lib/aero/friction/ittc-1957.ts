@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { blasiusFrictionIntegral, blasiusLocalCoefficient } from "./blasius";
 import type { FrictionLine } from "./friction-line";
 
@@ -12,11 +13,13 @@ const JOIN_SCALE = (JOIN * ittc1957Mean(JOIN)) / blasiusFrictionIntegral(JOIN);
  *
  * @param reynolds Re = U x/ν [-], 1e5 to 1e10
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 100: there the formula has no value
  *
  * Source: 8th International Towing Tank Conference, Madrid 1957; ITTC procedure 7.5-02-02-01. It is a line for correlating
  * models with ships and lies above flat-plate lines at low Re. Worked: Re = 1e7 gives 0.003.
  */
 export function ittc1957Mean(reynolds: number): number {
+  requireAbove(100, reynolds, "Re");
   return 0.075 / (Math.log10(reynolds) - 2) ** 2;
 }
 

@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { smoothLine } from "./smooth-line";
 
 const CONSTANT = 0.242;
@@ -12,11 +13,13 @@ const CONSTANT = 0.242;
  *
  * @param reynolds Re = U x/ν [-], 1e5 to 1e10
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 0: there the formula has no value
  *
  * Source: K. E. Schoenherr, Trans. SNAME 40 (1932). The printed form 1/√C_F = 4.13 log₁₀(Re·C_F) differs by 0.09 %.
  * Worked: Re = 1e7 gives 0.0029343.
  */
 export function karmanSchoenherrMean(reynolds: number): number {
+  requireAbove(0, reynolds, "Re");
   const scale = CONSTANT * Math.LN10 * Math.sqrt(reynolds);
   let w = 1;
   let step = Infinity;

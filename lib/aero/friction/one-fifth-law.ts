@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { smoothLine } from "./smooth-line";
 
 /**
@@ -7,11 +8,13 @@ import { smoothLine } from "./smooth-line";
  *
  * @param reynolds Re = U x/ν [-], 5e5 to 1e7
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 0: there the formula has no value
  *
  * Source: L. Prandtl 1927; H. Schlichting, Boundary-Layer Theory, 7th ed. 1979, ch. XXI. The momentum integral gives 0.072;
  * 0.074 is adjusted to tests. Worked: Re = 1e6 gives 0.0046691.
  */
 export function oneFifthMean(reynolds: number): number {
+  requireAbove(0, reynolds, "Re");
   return 0.074 * reynolds ** -0.2;
 }
 

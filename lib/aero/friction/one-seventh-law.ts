@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { smoothLine } from "./smooth-line";
 
 /**
@@ -7,10 +8,12 @@ import { smoothLine } from "./smooth-line";
  *
  * @param reynolds Re = U x/ν [-], 5e5 to 1e9 (range chosen here: the source gives no hard limits)
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 0: there the formula has no value
  *
  * Source: F. M. White, Fluid Mechanics, sec. 7.4. Worked: Re = 1e7 gives 0.0031.
  */
 export function oneSeventhMean(reynolds: number): number {
+  requireAbove(0, reynolds, "Re");
   return 0.031 * reynolds ** (-1 / 7);
 }
 

@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { smoothLine } from "./smooth-line";
 
 /**
@@ -7,11 +8,13 @@ import { smoothLine } from "./smooth-line";
  *
  * @param reynolds Re = U x/ν [-], 5e5 to 1e9
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 1: there the formula has no value
  *
  * Source: H. Schlichting, Boundary-Layer Theory, 7th ed. 1979, eq. (21.16) (number from memory).
  * Worked: Re = 1e7 gives 0.0030037.
  */
 export function prandtlSchlichtingMean(reynolds: number): number {
+  requireAbove(1, reynolds, "Re");
   return 0.455 / Math.log10(reynolds) ** 2.58;
 }
 

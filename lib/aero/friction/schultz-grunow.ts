@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { smoothLine } from "./smooth-line";
 
 /**
@@ -7,11 +8,13 @@ import { smoothLine } from "./smooth-line";
  *
  * @param reynolds Re = U x/ν [-], 1e6 to 1e9
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 2.5527: there the formula has no value
  *
  * Source: F. Schultz-Grunow, Luftfahrtforschung 17 (1940) 239 (exponents from memory as given by Schlichting).
  * Worked: Re = 1e6 gives 0.0045357.
  */
 export function schultzGrunowMean(reynolds: number): number {
+  requireAbove(2.5527, reynolds, "Re");
   return 0.427 / (Math.log10(reynolds) - 0.407) ** 2.64;
 }
 

@@ -1,3 +1,4 @@
+import { requireAbove } from "../require-above";
 import { smoothLine } from "./smooth-line";
 
 /**
@@ -7,11 +8,13 @@ import { smoothLine } from "./smooth-line";
  *
  * @param reynolds Re = U x/ν [-], 5e5 to 1e10 (range chosen here)
  * @returns C_F of one side, on its wetted area [-]
+ * @throws RangeError if Re ≤ 16.667: there the formula has no value
  *
  * Source: F. M. White, Viscous Fluid Flow, 3rd ed. 2006, flat-plate section. It lies 4.4 % below the integral of his local
  * 0.455/ln²(0.06 Re) at Re = 1e7. Worked: Re = 5e5 gives 0.0049212.
  */
 export function whiteMean(reynolds: number): number {
+  requireAbove(16.667, reynolds, "Re");
   return 0.523 / Math.log(0.06 * reynolds) ** 2;
 }
 

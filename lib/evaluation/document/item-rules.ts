@@ -7,6 +7,8 @@ const SAVING_FIELDS: ReadonlyMap<unknown, string> = new Map([
   ["drag-area", "dragArea"],
 ]);
 
+const FRICTION_METHODS: readonly unknown[] = ["flat-plate-friction", "duct-entry"];
+
 /** Rules between the fields of one item. They look at raw input, so that they are told beside other faults. */
 export function checkItemRules(item: unknown, context: z.RefinementCtx): void {
   if (typeof item !== "object" || item === null) return;
@@ -35,6 +37,7 @@ function checkSaving(fields: Fields, fault: Fault): void {
 }
 
 function checkRoughness(fields: Fields, fault: Fault): void {
+  if (!FRICTION_METHODS.includes(fields.get("method"))) return;
   const line = fields.get("frictionLine");
   if (typeof line !== "string" || !FULLY_ROUGH_LINE_NAMES.includes(line)) return;
   const roughness = fields.get("roughness");

@@ -6,7 +6,7 @@ import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
 import { PRANDTL_SCHLICHTING } from "@/lib/aero/friction/prandtl-schlichting";
 import { isBelow, isBeyond } from "@/lib/aero/friction/transition";
 import { within } from "@/lib/aero/range";
-import type { Note } from "../notes/note";
+import type { Note, NoteValues } from "../notes/note";
 import { makeNote } from "../notes/note-catalogue";
 import type { FrictionAnswer } from "./friction-answer";
 import type { FrictionCase, FrictionSetup } from "./friction-setup";
@@ -59,20 +59,19 @@ function rangeNotes(facts: FrictionFacts): Note[] {
   }
   const used = answer.frictionLineUsed;
   const ratioRange = used === "blasius" ? undefined : FRICTION_LINES[used].lengthOverRoughnessRange;
-  if (ratioRange && friction.roughness > 0) {
-    const lengthOverRoughness = (friction.runUp + friction.length) / friction.roughness;
-    if (!within(lengthOverRoughness, ratioRange)) {
-      notes.push(
-        makeNote("roughness-ratio-outside-range", {
-          line: used,
-          lengthOverRoughness,
-          min: ratioRange.min,
-          ...(Number.isFinite(ratioRange.max) ? { max: ratioRange.max } : {}),
-        }),
-      );
-    }
+  const lengthOverRoughness = lengthOverRoughnessOf(friction);
+  if (ratioRange && lengthOverRoughness !== undefined && !within(lengthOverRoughness, ratioRange)) {
+    const values: NoteValues = { line: used, lengthOverRoughness, min: ratioRange.min };
+    if (Number.isFinite(ratioRange.max)) values.max = ratioRange.max;
+    notes.push(makeNote("roughness-ratio-outside-range", values));
   }
   return notes;
+}
+
+/** x/k_s at the end; nothing on a surface without roughness, or with so little that the ratio has no number. */
+function lengthOverRoughnessOf({ runUp, length, roughness }: FrictionCase): number | undefined {
+  const ratio = (runUp + length) / roughness;
+  return Number.isFinite(ratio) ? ratio : undefined;
 }
 
 function laminarNotes({ friction, setup }: FrictionFacts): Note[] {
@@ -124,15 +123,14 @@ function namedLineNotes({ friction, setup, answer }: FrictionFacts): Note[] {
 function automaticNotes(facts: FrictionFacts): Note[] {
   const { friction, setup, answer } = facts;
   const { frictionLineUsed: line, roughnessReynolds } = answer;
+  const lengthOverRoughness = lengthOverRoughnessOf(friction);
   const notes = [
     makeNote("automatic-choice", {
       line,
       reason: automaticReason(facts),
       reynolds: setup.endReynolds,
       roughnessReynolds,
-      ...(friction.roughness > 0
-        ? { lengthOverRoughness: (friction.runUp + friction.length) / friction.roughness }
-        : {}),
+      ...(lengthOverRoughness === undefined ? {} : { lengthOverRoughness }),
     }),
   ];
   if (line === "fully-rough" && setup.isSmoothEnough) {
