@@ -5,17 +5,12 @@ import type { Route } from "next";
 import { signIn } from "next-auth/react";
 import { useState } from "react";
 import { useForm } from "react-hook-form";
-import { z } from "zod";
 
 import { Button } from "@/app/_components/button";
 import { Notice } from "@/app/_components/notice";
 import { TextField } from "@/app/_components/text-field";
-
-const SignInInput = z.object({
-  email: z.string().trim().min(1, "Type the e-mail address of your account.").max(200, "This is too long."),
-  password: z.string().min(1, "Type your password.").max(200, "This is too long for a password."),
-});
-type SignInInput = z.infer<typeof SignInInput>;
+import { useHydrated } from "@/app/_components/use-hydrated";
+import { SignInInput } from "@/lib/accounts/schema";
 
 const REFUSALS: Record<string, string> = {
   CredentialsSignin: "E-mail address and password do not belong together. Check both and try again.",
@@ -26,6 +21,8 @@ export function SignInForm({ destination }: { destination: Route }) {
   const [refusal, setRefusal] = useState<string | null>(null);
   const { register, handleSubmit, formState } = useForm<SignInInput>({ resolver: zodResolver(SignInInput) });
   const { errors, isSubmitting } = formState;
+  // Sent before the page is alive, the form would only load itself again.
+  const hydrated = useHydrated();
 
   async function submit(input: SignInInput) {
     setRefusal(null);
@@ -55,7 +52,7 @@ export function SignInForm({ destination }: { destination: Route }) {
         {...register("password")}
       />
       {refusal ? <Notice kind="refusal">{refusal}</Notice> : null}
-      <Button type="submit" kind="primary" busy={isSubmitting}>
+      <Button type="submit" kind="primary" busy={isSubmitting} disabled={!hydrated}>
         {isSubmitting ? "One moment…" : "Sign in"}
       </Button>
     </form>
