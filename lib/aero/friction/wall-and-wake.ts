@@ -13,6 +13,11 @@ const C = (2 + 2 * WAKE * (1 + SINE_INTEGRAL_RATIO) + 1.5 * WAKE ** 2) / KAPPA *
 const K = Math.exp(-KAPPA * WALL_CONSTANT - 2 * WAKE);
 /** λ at which θ = 0. */
 const START = C / A;
+const EI_AT_START = exponentialIntegral(KAPPA * START);
+/** The fits that start the search are good to 0.14 and about 1 in λ; the margins put the start above the root. */
+const SMOOTH_GUESS_MARGIN = 0.15;
+const ROUGH_GUESS_MARGIN = 1;
+const SMALLEST_GUESS = 1;
 /** Below this u the closed form loses digits to a difference, and a quadrature of the positive integrand keeps them. */
 const QUADRATURE_LIMIT = 2;
 
@@ -45,15 +50,20 @@ function thetaSlope(u: number, r: number): number {
 
 /** Re_x at u > 0. */
 export function reynoldsAt(u: number, r: number): number {
-  return u < QUADRATURE_LIMIT
-    ? reynoldsByQuadrature(u, r)
-    : antiderivative(START + u, u, r) - antiderivative(START, 0, r);
+  if (u < QUADRATURE_LIMIT) return reynoldsByQuadrature(u, r);
+  const lambda = START + u;
+  const fromStart = growth(lambda, r, exponentialAt(lambda, r)) - growth(START, r, r === 0 ? 0 : EI_AT_START);
+  return lambda ** 2 * reynoldsThetaAt(u, r) - 2 * K * fromStart;
 }
 
-function antiderivative(lambda: number, u: number, r: number): number {
-  const bracket = A * (lambda / KAPPA - 1 / KAPPA ** 2) + (r * A - C) / KAPPA;
-  const ei = r === 0 ? 0 : r * C * exponentialIntegral(KAPPA * lambda);
-  return lambda ** 2 * reynoldsThetaAt(u, r) - 2 * K * (Math.exp(KAPPA * lambda) * bracket - ei);
+/** ∫ λ Re_θ dλ over K, up to a constant. */
+function growth(lambda: number, r: number, ei: number): number {
+  return Math.exp(KAPPA * lambda) * (A * (lambda / KAPPA - 1 / KAPPA ** 2) + (r * A - C) / KAPPA) - r * C * ei;
+}
+
+/** Ei(κλ); a smooth layer does without. */
+function exponentialAt(lambda: number, r: number): number {
+  return r === 0 ? 0 : exponentialIntegral(KAPPA * lambda);
 }
 
 /** Nodes (on 0 to 1, the left half) and weights of the ten-point Gauss–Legendre rule; A&S table 25.4. */
@@ -79,14 +89,15 @@ function reynoldsByQuadrature(u: number, r: number): number {
  * @param r c·Re_k [-], 0 or greater
  */
 export function stateAtReynolds(reynolds: number, r: number): number {
-  const slopeAtStart = START ** 2 * thetaSlope(0, r);
+  const linear = reynolds / (START ** 2 * thetaSlope(0, r));
   const s = Math.max(Math.log10(reynolds), 0);
-  const smoothGuess = 0.024 + 3.541 * s + 0.0749 * s ** 2 + 1 - START;
-  return newtonFromAbove(
-    Math.min(reynolds / slopeAtStart, Math.max(smoothGuess, 1)),
-    (u) => Math.log(reynoldsAt(u, r) / reynolds),
-    (u) => (u * (START + u) ** 2 * thetaSlope(u, r)) / reynoldsAt(u, r),
-  );
+  const smooth = 0.024 + 3.541 * s + 0.0749 * s ** 2 + SMOOTH_GUESS_MARGIN - START;
+  // x/k_s = c Re/r; on a smooth layer this guess is infinite.
+  const rough = 4.51 + 4.806 * Math.log10((ROUGHNESS_COEFFICIENT * reynolds) / r) + ROUGH_GUESS_MARGIN - START;
+  return newtonFromAbove(Math.min(linear, Math.max(Math.min(smooth, rough), SMALLEST_GUESS)), (u) => {
+    const reached = reynoldsAt(u, r);
+    return Math.log(reached / reynolds) / ((u * (START + u) ** 2 * thetaSlope(u, r)) / reached);
+  });
 }
 
 /**
@@ -97,21 +108,20 @@ export function stateAtReynolds(reynolds: number, r: number): number {
  */
 export function stateAtReynoldsTheta(reynoldsTheta: number, r: number): number {
   const upper = Math.max(START + 1, Math.log(reynoldsTheta / (0.49 * K)) / KAPPA) - START;
-  return newtonFromAbove(
-    Math.min(reynoldsTheta / thetaSlope(0, r), upper),
-    (u) => Math.log(reynoldsThetaAt(u, r) / reynoldsTheta),
-    (u) => (u * thetaSlope(u, r)) / reynoldsThetaAt(u, r),
-  );
+  return newtonFromAbove(Math.min(reynoldsTheta / thetaSlope(0, r), upper), (u) => {
+    const reached = reynoldsThetaAt(u, r);
+    return Math.log(reached / reynoldsTheta) / ((u * thetaSlope(u, r)) / reached);
+  });
 }
 
 /**
- * Root of f in ln u. Both logarithms are convex and rising in ln u, and the start lies above the root: Newton falls to it
- * without overshooting.
+ * Root in ln u, by the Newton step at u. ln Re_x and ln Re_θ are convex and rising in ln u, and the start lies above the
+ * root: Newton falls to it without overshooting.
  */
-function newtonFromAbove(start: number, f: (u: number) => number, slope: (u: number) => number): number {
+function newtonFromAbove(start: number, stepAt: (u: number) => number): number {
   let u = start;
   for (let iteration = 0; iteration < 100; iteration += 1) {
-    const step = f(u) / slope(u);
+    const step = stepAt(u);
     u *= Math.exp(-step);
     if (Math.abs(step) < 1e-9) return u;
   }
