@@ -11,9 +11,9 @@ export function AllocationBar(input: AllocationBarInput) {
   const { basic, growth, over, post } = allocationBarLayout(input);
 
   return (
-    <svg width="120" height="18" className="inline-block align-middle" aria-hidden>
+    <svg width="92" height="18" className="inline-block align-middle" aria-hidden>
       <Hatches id={id} />
-      <rect y="3" width="120" height="12" className="fill-trough" />
+      <rect y="3" width="100%" height="12" className="fill-trough" />
       <Bar span={basic} className="fill-water" />
       <Bar span={growth} fill={`url(#${id}-growth)`} />
       {over ? <Bar span={over} fill={`url(#${id}-over)`} className="stroke-signal" /> : null}

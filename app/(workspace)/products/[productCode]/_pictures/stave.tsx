@@ -6,7 +6,7 @@ import { formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { DimensionLines } from "./dimension-lines";
 import { type Dimension, placeDimensions } from "./dimension-rows";
 import { type Scale, fractionOf, percent } from "./scale";
-import { type Span, type StaveInput, type StaveLayout, staveLayout } from "./stave-layout";
+import { type Span, type StaveInput, type StaveLayout, type StaveSegment, staveLayout } from "./stave-layout";
 
 const BAR = { top: 36, height: 38 };
 const RULER = 86;
@@ -80,11 +80,7 @@ export function StaveBar({ layout, scale = layout.scale, top, height, named = fa
             data-from={segment.from}
             data-to={segment.to}
           />
-          {named && fractionOf(scale, segment.to) - fractionOf(scale, segment.from) > 0.05 ? (
-            <text x="6" y="16" className="fill-sheet text-xs">
-              {segment.name}
-            </text>
-          ) : null}
+          {named ? <SegmentName segment={segment} scale={scale} /> : null}
           <rect x="100%" width="4" height={height} transform="translate(-1.5)" className="fill-sheet" />
         </Segment>
       ))}
@@ -92,6 +88,18 @@ export function StaveBar({ layout, scale = layout.scale, top, height, named = fa
       <Part span={growth} scale={scale} top={top} height={height} part="growth" fill={`url(#${id}-growth)`} />
       {over ? <Part span={over} scale={scale} top={top} height={height} part="over" fill={`url(#${id}-over)`} /> : null}
     </>
+  );
+}
+
+/** Left of zero the savings lie over a segment: its name stands in the part that counts. */
+function SegmentName({ segment: { from, to, name }, scale }: { segment: StaveSegment; scale: Scale }) {
+  const start = Math.max(from, Math.min(0, to));
+  if (fractionOf(scale, to) - fractionOf(scale, start) <= 0.05) return null;
+
+  return (
+    <text x={percent((start - from) / (to - from))} dx="6" y="16" className="fill-sheet text-xs">
+      {name}
+    </text>
   );
 }
 
@@ -143,7 +151,7 @@ function Hollow({ span, scale, top, height, named }: BandProps & { named: boolea
         data-from={span.from}
         data-to={span.to}
       />
-      {named ? (
+      {named && fractionOf(scale, span.to) - fractionOf(scale, span.from) > 0.12 ? (
         <text x="6" y={height - 8} className="fill-ink text-xs">
           savings {formatNewtonsNumber(span.from)}
         </text>

@@ -1,7 +1,7 @@
 import { formatExact } from "@/lib/units/format-number";
 
 import { percent } from "./scale";
-import { type PlannedPoint, type TrendIssue, type TrendPoint, trendLayout } from "./trend-layout";
+import { type PlannedPoint, type TrendIssue, type TrendLayout, type TrendPoint, trendLayout } from "./trend-layout";
 
 interface TrendPictureProps {
   issues: readonly TrendIssue[];
@@ -16,10 +16,28 @@ const FOOT = 24;
 /** Predicted and basic totals over the issues, with limit, reserve and the planned profile. */
 export function TrendPicture({ issues, planned, until }: TrendPictureProps) {
   const layout = trendLayout(issues, planned, until);
-  const y = (fraction: number) => (1 - fraction) * HEIGHT;
 
   return (
-    <svg width="100%" height={HEIGHT + FOOT} className="block overflow-visible" aria-hidden>
+    <div className="grid grid-cols-[2.5rem_minmax(0,1fr)]" aria-hidden>
+      <svg width="100%" height={HEIGHT + FOOT} className="block overflow-visible">
+        {layout.ticks.map((tick) => (
+          <text key={tick.value} x="100%" dx="-8" y={y(tick.y) + 4} textAnchor="end" className="fill-ink-2 text-2xs">
+            {formatExact(tick.value)}
+          </text>
+        ))}
+      </svg>
+      <TrendLines layout={layout} />
+    </div>
+  );
+}
+
+function y(fraction: number): number {
+  return (1 - fraction) * HEIGHT;
+}
+
+function TrendLines({ layout }: { layout: TrendLayout }) {
+  return (
+    <svg width="100%" height={HEIGHT + FOOT} className="block overflow-visible">
       {layout.ticks.map((tick) => (
         <line key={tick.value} x1="0" x2="100%" y1={y(tick.y)} y2={y(tick.y)} className="stroke-rule" />
       ))}
@@ -38,17 +56,6 @@ export function TrendPicture({ issues, planned, until }: TrendPictureProps) {
             {mark.issue}
           </text>
         </g>
-      ))}
-      {layout.ticks.map((tick) => (
-        <text
-          key={tick.value}
-          x="2"
-          y={y(tick.y) - 3}
-          strokeWidth="3"
-          className="fill-ink-2 stroke-sheet text-2xs [paint-order:stroke]"
-        >
-          {formatExact(tick.value)}
-        </text>
       ))}
       {layout.dates.map((date) => (
         <text

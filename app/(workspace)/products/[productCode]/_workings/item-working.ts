@@ -102,7 +102,8 @@ function methodSteps({ indexed, point }: BudgetSheet, { body, result }: ItemRow)
 
 function printed({ value, source, range, ...texts }: WorkedStep): WorkingStep {
   const text = texts.unit === "N" ? formatNewtonsNumber(value) : formatSignificant(value, 4);
-  return { ...texts, value: text, source: source ?? null, range: range ?? null };
+  const unit = texts.unit === "–" ? "" : texts.unit;
+  return { ...texts, unit, value: text, source: source ?? null, range: range ?? null };
 }
 
 function shareStep(body: Extract<ItemBody, { method: "share" }>, basic: number): WorkingStep {

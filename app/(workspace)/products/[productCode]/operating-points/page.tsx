@@ -5,7 +5,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
-import { fieldRows } from "@/lib/evaluation/lines/field-rows";
+import { type FieldRow, fieldRows } from "@/lib/evaluation/lines/field-rows";
 import { nameBookOf } from "@/lib/evaluation/lines/name-book";
 import { abilityFor, covers } from "@/policies/ability";
 
@@ -41,6 +41,7 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
   const base = `/products/${product.code}`;
   const names = nameBookOf(budget.state, new Map(budget.people.map(({ id, name }) => [id, name])));
   const terms = budget.state.lines.find(({ kind }) => kind === "terms");
+  const termsRows = terms ? fieldRows(terms, names) : [];
 
   return (
     <>
@@ -53,10 +54,21 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
         <ServiceWindCaution kind={product.kind} />
         <PointsTable budget={budget} budgetHref={(point) => sheetAddress(`${base}/budget`, query, { point })} />
         <SectionHeading aside={terms ? `revision ${terms.letter}` : null}>Terms</SectionHeading>
-        {terms ? <FieldTable rows={fieldRows(terms, names)} caption="Terms" /> : null}
+        <FieldTable rows={termsRows.filter((row) => !isReviewRule(row))} caption="Terms" />
+        <SectionHeading aside="a program manager signs too on what is said yes to">Review rules</SectionHeading>
+        <FieldTable rows={termsRows.filter(isReviewRule).map(shortRule)} caption="Review rules" />
         <SectionHeading>Finishes</SectionHeading>
         <FinishTable lines={budget.state.lines} />
       </Sheet>
     </>
   );
+}
+
+function isReviewRule({ field }: FieldRow): boolean {
+  return field.startsWith("reviewRules.");
+}
+
+/** Under their own heading the rules need not say again whose they are. */
+function shortRule(row: FieldRow): FieldRow {
+  return { ...row, label: row.label.split(": ").at(-1) ?? row.label };
 }

@@ -21,8 +21,10 @@ export function BudgetTable({ sheet, rows, path, query }: BudgetTableProps) {
   return (
     <Table caption={`Items at ${sheet.point.operatingPoint} ${sheet.point.name}`}>
       <TableHead>
-        <Head {...sorting("number", path, query)}>Item</Head>
-        <Head>Method</Head>
+        <Head className="min-w-36 lg:min-w-48" {...sorting("number", path, query)}>
+          Item
+        </Head>
+        <Head className="max-sm:hidden">Method</Head>
         <Head>Rev</Head>
         {COLUMNS.map(({ key, label }) => (
           <Head key={key} numeric unit="N" {...sorting(key, path, query)}>

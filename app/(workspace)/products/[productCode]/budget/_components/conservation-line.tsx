@@ -15,7 +15,7 @@ export function ConservationLine({ sums }: { sums: AllocationsView }) {
   ] as const;
 
   return (
-    <section aria-labelledby="conservation">
+    <section aria-labelledby="conservation" className="mt-7">
       <SectionHeading id="conservation">What is given out</SectionHeading>
       <dl className="flex flex-wrap items-baseline gap-x-4 gap-y-2">
         {parts.map(({ sign, label, value, figure }) => (

@@ -46,6 +46,7 @@ export function FigureCells({ row, isReference }: { row: BudgetRow; isReference:
           basic={row.basic}
           predicted={row.predicted}
           allocation={allocationHundredths === null ? null : allocationHundredths / 100}
+          judged={isReference}
         />
       </Cell>
     </>

@@ -16,7 +16,7 @@ export function GroupTableRow({ row, isReference }: { row: GroupRow; isReference
           {name}
         </span>
       </RowHead>
-      <Cell className="text-xs font-normal text-ink-2">
+      <Cell className="text-xs font-normal text-ink-2 max-sm:hidden">
         {members.length === 0 ? "no items yet" : `${members.length} ${members.length === 1 ? "item" : "items"}`}
       </Cell>
       <Cell className="font-normal">

@@ -1,17 +1,15 @@
 import type { Route } from "next";
 import Link from "next/link";
 
-import { NoteMark } from "@/app/_components/note-mark";
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { Cell, Row, RowHead } from "@/app/_components/table";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
-import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
-import type { Note } from "@/lib/evaluation/notes/note";
 
 import { SymbolText } from "../../_components/symbol-text";
 import type { ItemRow } from "../../_sheet/budget-sheet";
 import { keyFigures } from "../../_sheet/key-figures";
 import { FigureCells } from "./figure-cells";
+import { NoteCount, RowNotes } from "./row-notes";
 
 interface ItemTableRowProps {
   row: ItemRow;
@@ -35,9 +33,12 @@ export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
             {owner}
             {body.saving ? " · a saving" : ""}
           </span>
+          <span className="block sm:hidden">
+            <NoteCount notes={result.notes} />
+          </span>
         </span>
       </RowHead>
-      <Cell className="min-w-44 lg:max-w-72">
+      <Cell className="min-w-44 max-sm:hidden lg:max-w-64">
         {ITEM_METHODS[body.method].label}
         <span className="block text-xs text-ink-2">
           {keyFigures(body, result.answer).map(({ symbol, text }, at) => (
@@ -54,27 +55,5 @@ export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
       </Cell>
       <FigureCells row={row} isReference={isReference} />
     </Row>
-  );
-}
-
-/** Cautions and refusals stand in the row; what only informs is counted and opens with the working. */
-function RowNotes({ notes }: { notes: readonly Note[] }) {
-  const grave = notes.filter(({ severity }) => severity !== "information");
-  const informing = notes.length - grave.length;
-
-  return (
-    <>
-      {grave.map((note) => (
-        <NoteMark key={note.code} severity={note.severity}>
-          {noteSentence(note)}
-        </NoteMark>
-      ))}
-      {informing > 0 ? (
-        <span className="block text-xs text-ink-2">
-          <span aria-hidden>○ </span>
-          {informing} {informing === 1 ? "note" : "notes"} for information
-        </span>
-      ) : null}
-    </>
   );
 }

@@ -18,7 +18,7 @@ export function MeasuresTable({ sheet: { budget, indexed, point } }: { sheet: Bu
   if (predicted.length === 0) return null;
 
   return (
-    <section aria-labelledby="measures">
+    <section aria-labelledby="measures" className="mt-7">
       <SectionHeading id="measures">In other measures</SectionHeading>
       <Table caption="The predicted total and the limit in other measures" narrow="stack">
         <TableHead>

@@ -9,7 +9,7 @@ export function RetiredLines({ lines }: { lines: readonly LineState[] }) {
   if (lines.length === 0) return null;
 
   return (
-    <section aria-labelledby="retired">
+    <section aria-labelledby="retired" className="mt-7">
       <SectionHeading id="retired" aside="numbers are never used again">
         Retired
       </SectionHeading>

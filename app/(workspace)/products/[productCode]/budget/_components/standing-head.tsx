@@ -8,22 +8,19 @@ import { WorkingNumber } from "../../_components/workings-provider";
 /** Where the total stands, in one sentence; the figures behind it open their workings. */
 export function StandingHead({ point }: { point: PointResult }) {
   const { totals, limitHundredths, reserveHundredths, standing } = point;
-  const ofLimit =
-    limitHundredths === 0
-      ? ""
-      : `, ${formatPercent(Math.abs(totals.margin) / (limitHundredths / 100), 1)} of the limit`;
+  const isOver = standing === "over";
+  const ofLimit = `${formatPercent(Math.abs(totals.margin) / (limitHundredths / 100), 1)} of the limit`;
 
   return (
     <p className="mb-3 flex flex-wrap items-baseline gap-x-3 gap-y-0.5">
-      <strong className={`text-xl font-semibold ${standing === "over" ? "text-signal" : ""}`} data-standing={standing}>
-        <WorkingNumber figure="clearOfReserve" of="total" number={null} name="Standing">
+      <strong className={`text-xl font-semibold ${isOver ? "text-signal" : ""}`} data-standing={standing}>
+        <WorkingNumber figure={isOver ? "margin" : "clearOfReserve"} of="total" number={null} name="Standing">
           {standingSentence(point)}
         </WorkingNumber>
       </strong>
       <span className="text-sm text-ink-2">
         <WorkingNumber figure="margin" of="total" number={null} name="Margin to the limit">
-          {totals.margin < 0 ? "over the limit by" : "to the limit"} {formatNewtonsNumber(Math.abs(totals.margin))} N
-          {ofLimit}
+          {isOver ? ofLimit : `${formatNewtonsNumber(totals.margin)} N to the limit, ${ofLimit}`}
         </WorkingNumber>
         {" · reserve "}
         <WorkingNumber figure="reserve" of="total" number={null} name="Reserve">

@@ -14,9 +14,9 @@ export function TotalRows({ point: { totals } }: { point: PointResult }) {
   return (
     <>
       <Row band className="border-t border-ink">
-        <RowHead colSpan={3} className="font-semibold">
-          {hasSavings ? "Total, savings counted" : "Total"}
-        </RowHead>
+        <RowHead className="font-semibold">{hasSavings ? "Total, savings counted" : "Total"}</RowHead>
+        <Cell className="max-sm:hidden" />
+        <Cell />
         {FIGURES.map((figure) => (
           <Cell key={figure} numeric>
             <WorkingNumber figure={figure} of="total" number={null} name={`Total, ${figure}`}>
@@ -29,7 +29,9 @@ export function TotalRows({ point: { totals } }: { point: PointResult }) {
       </Row>
       {hasSavings ? (
         <Row>
-          <RowHead colSpan={5}>Total, without savings</RowHead>
+          <RowHead>Total, without savings</RowHead>
+          <Cell className="max-sm:hidden" />
+          <Cell colSpan={3} />
           <Cell numeric>
             <WorkingNumber figure="predictedWithoutSavings" of="total" number={null} name="Predicted without savings">
               {formatNewtonsNumber(totals.predictedWithoutSavings)}

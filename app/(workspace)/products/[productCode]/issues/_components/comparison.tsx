@@ -20,7 +20,7 @@ export function Comparison({ comparison, operatingPoint }: ComparisonProps) {
   const { from, to, lines } = comparison;
 
   return (
-    <section aria-labelledby="comparison">
+    <section aria-labelledby="comparison" className="mt-7">
       <SectionHeading id="comparison" aside={`${lines.length} ${lines.length === 1 ? "line" : "lines"} changed`}>
         Issue {from.number} compared with issue {to.number}
       </SectionHeading>

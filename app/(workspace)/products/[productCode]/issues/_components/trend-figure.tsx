@@ -49,8 +49,8 @@ export function TrendFigure({ trend, operatingPoint, planned, until }: TrendFigu
 function TrendKey({ planned }: { planned: boolean }) {
   return (
     <span>
-      Newtons. Thick line: predicted, with the number of the issue; thin line: basic; solid post line: limit; dashed:
-      where the reserve begins{planned ? "; dotted in its band: planned profile with tolerance" : ""}.
+      Newtons. Thick line: predicted, with the number of the issue; thin line: basic; solid black: limit; dashed: where
+      the reserve begins{planned ? "; dotted in its band: planned profile with tolerance" : ""}.
     </span>
   );
 }

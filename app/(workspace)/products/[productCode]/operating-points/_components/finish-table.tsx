@@ -7,6 +7,8 @@ import { formatQuantityNumber } from "@/lib/units/format-quantity";
 export function FinishTable({ lines }: { lines: readonly LineState[] }) {
   const finishes = lines.filter((line): line is LineOf<"finish"> => line.kind === "finish");
 
+  if (finishes.length === 0) return <p className="text-ink-2">None: every item types its own roughness.</p>;
+
   return (
     <Table caption="Finishes" narrow="stack">
       <TableHead>

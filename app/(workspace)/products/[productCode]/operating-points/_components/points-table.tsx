@@ -77,7 +77,7 @@ function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
     <Row data-point={point.operatingPoint}>
       <RowHead>
         <Link href={href as Route} className="hover:underline">
-          <span className="mr-1.5 text-ink-2">{point.operatingPoint}</span>
+          <span className="mr-1.5 whitespace-nowrap text-ink-2">{point.operatingPoint}</span>
           {point.name}
         </Link>
         {isReference ? <span className="block text-xs text-ink-2">reference</span> : null}
@@ -101,7 +101,7 @@ function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
       ))}
       <Cell numeric>{formatHundredths(point.limitHundredths)}</Cell>
       <Cell numeric>{formatHundredths(point.reserveHundredths)}</Cell>
-      <Cell className={`min-w-36 ${point.standing === "over" ? "font-semibold text-signal" : ""}`}>
+      <Cell className={`whitespace-nowrap ${point.standing === "over" ? "font-semibold text-signal" : ""}`}>
         {standingSentence(point)}
       </Cell>
     </Row>
