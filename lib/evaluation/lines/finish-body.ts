@@ -1,11 +1,11 @@
 import { z } from "zod";
 import type { FieldSpec } from "./field-spec";
-import { nonNegativeQuantity } from "./quantity";
+import { roughnessQuantity } from "./quantity";
 import { requiredText } from "./text-schemas";
 
 export const FinishBody = z.strictObject({
   name: requiredText("Give the finish a name.", 120),
-  roughness: nonNegativeQuantity,
+  roughness: roughnessQuantity,
   source: requiredText("Say where the roughness comes from.", 300),
 });
 export type FinishBody = z.output<typeof FinishBody>;

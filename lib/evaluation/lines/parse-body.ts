@@ -8,6 +8,7 @@ import { ItemBody } from "./item-body";
 import type { LineContent } from "./line-state";
 import { OperatingPointBody } from "./operating-point-body";
 import { TermsBody } from "./terms-body";
+import { typedTextFaults, unreadTextSentence } from "./typed-quantities";
 
 export type ParsedBody = { ok: true; content: LineContent } | { ok: false; faults: FieldFault[] };
 
@@ -15,31 +16,40 @@ export type ParsedBody = { ok: true; content: LineContent } | { ok: false; fault
 export function parseBody(kind: LineKind, json: unknown): ParsedBody {
   switch (kind) {
     case "item":
-      return parsed(ItemBody, json, (body) => ({ kind, body }));
+      return parsed(kind, ItemBody, json, (body) => ({ kind, body }));
     case "group":
-      return parsed(GroupBody, json, (body) => ({ kind, body }));
+      return parsed(kind, GroupBody, json, (body) => ({ kind, body }));
     case "operating_point":
-      return parsed(OperatingPointBody, json, (body) => ({ kind, body }));
+      return parsed(kind, OperatingPointBody, json, (body) => ({ kind, body }));
     case "finish":
-      return parsed(FinishBody, json, (body) => ({ kind, body }));
+      return parsed(kind, FinishBody, json, (body) => ({ kind, body }));
     case "allocations":
-      return parsed(AllocationsBody, json, (body) => ({ kind, body }));
+      return parsed(kind, AllocationsBody, json, (body) => ({ kind, body }));
     case "terms":
-      return parsed(TermsBody, json, (body) => ({ kind, body }));
+      return parsed(kind, TermsBody, json, (body) => ({ kind, body }));
   }
 }
 
-function parsed<Body>(schema: z.ZodType<Body>, json: unknown, toContent: (body: Body) => LineContent): ParsedBody {
+function parsed<Body extends object>(
+  kind: LineKind,
+  schema: z.ZodType<Body>,
+  json: unknown,
+  toContent: (body: Body) => LineContent,
+): ParsedBody {
   const result = schema.safeParse(json);
-  if (result.success) return { ok: true, content: toContent(result.data) };
-  return { ok: false, faults: result.error.issues.flatMap(faultsOf) };
+  if (!result.success)
+    return { ok: false, faults: result.error.issues.flatMap((issue) => faultsOf(issue, kind, json)) };
+
+  const faults = typedTextFaults(kind, result.data);
+  return faults.length === 0 ? { ok: true, content: toContent(result.data) } : { ok: false, faults };
 }
 
-function faultsOf(issue: z.core.$ZodIssue): FieldFault[] {
+function faultsOf(issue: z.core.$ZodIssue, kind: LineKind, json: unknown): FieldFault[] {
   if (issue.code === "unrecognized_keys") {
     return issue.keys.map((key) => ({ path: [...issue.path, key].join("."), sentence: "Is no field of this line." }));
   }
+  if (issue.path.at(-1) !== "value") return [{ path: issue.path.join("."), sentence: issue.message }];
   // A quantity is one field on every form: its fault stands at the field, not at the number inside.
-  const path = issue.path.at(-1) === "value" ? issue.path.slice(0, -1) : issue.path;
-  return [{ path: path.join("."), sentence: issue.message }];
+  const path = issue.path.slice(0, -1).join(".");
+  return [{ path, sentence: unreadTextSentence(kind, json, path) ?? issue.message }];
 }

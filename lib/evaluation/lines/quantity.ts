@@ -34,6 +34,8 @@ function quantityOf(value: z.ZodNumber) {
 
 export const positiveQuantity = quantityOf(positiveNumber);
 export const nonNegativeQuantity = quantityOf(nonNegativeNumber);
+/** Nothing built is rougher than 0.1 m: a greater number is one in µm that lost its unit. */
+export const roughnessQuantity = quantityOf(nonNegativeNumber.max(0.1, "Rougher than 0.1 m: check the unit."));
 export const signedQuantity = quantityOf(signedNumber);
 /** How well a coefficient without dimension is known; null where nothing is said. */
 export const coefficientUncertainty = nonNegativeNumber.nullable().default(null);

@@ -1,6 +1,6 @@
 import { z } from "zod";
 import type { Choice, FieldSpec } from "../field-spec";
-import { nonNegativeQuantity, positiveNumber } from "../quantity";
+import { nonNegativeQuantity, positiveNumber, roughnessQuantity } from "../quantity";
 import { lineNumber } from "../text-schemas";
 
 export const FRICTION_LINES = [
@@ -39,7 +39,7 @@ export function isFullyRough(line: FrictionLineChoice): boolean {
 /** Surface, transition and line: the fields that every friction method shares. */
 export const frictionShape = {
   finish: lineNumber.nullable().default(null),
-  roughness: nonNegativeQuantity.nullable().default(null),
+  roughness: roughnessQuantity.nullable().default(null),
   transition: z.enum(["natural", "tripped", "laminar"], "Choose how the layer turns turbulent.").default("natural"),
   criticalReynolds: positiveNumber.default(500_000),
   trippedAt: nonNegativeQuantity.default({ value: 0 }),
