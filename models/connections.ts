@@ -45,7 +45,7 @@ export function prepareConnections(sequelize: Sequelize): void {
 }
 
 /** The next connections go to this file. The driver reads the setting each time that it opens one. */
-export function useFile(sequelize: Sequelize, file: string): void {
+export function pointAt(sequelize: Sequelize, file: string): void {
   const options: unknown = Reflect.get(sequelize, "options");
   if (!isRecord(options)) throw new Error("The database driver keeps its settings elsewhere than expected.");
   options.storage = file;

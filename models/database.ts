@@ -4,7 +4,7 @@ import { mkdirSync } from "node:fs";
 import path from "node:path";
 import { QueryTypes, Sequelize, Transaction } from "sequelize";
 import { guardWrites } from "./guard-writes";
-import { closeAllConnections, discardConnection, prepareConnections, useFile } from "./connections";
+import { closeAllConnections, discardConnection, prepareConnections, pointAt } from "./connections";
 
 interface Store {
   sequelize: Sequelize;
@@ -43,7 +43,7 @@ export const database = store.sequelize;
 /** Opens the file (made when missing) and puts it into write-ahead mode, which sticks to the file. */
 export async function openDatabase(file: string = databaseFile()): Promise<void> {
   mkdirSync(path.dirname(file), { recursive: true });
-  useFile(database, file);
+  pointAt(database, file);
   await database.query("PRAGMA journal_mode = WAL", { type: QueryTypes.SELECT });
 }
 

@@ -44,6 +44,6 @@ async function deliverOnce(delivery: Delivery): Promise<void> {
     await deliverPending(delivery);
   } catch (problem) {
     // The outbox could not be read or marked; the rows stay and the next turn tries again.
-    console.error("Mail could not be delivered this time.", problem);
+    process.stderr.write(`Mail could not be delivered this time. ${String(problem)}\n`);
   }
 }

@@ -19,7 +19,7 @@ import { Membership } from "@/models/membership";
 import { inTransaction } from "@/models/database";
 import { Product } from "@/models/product";
 import { User } from "@/models/user";
-import { withDatabase } from "../../support/database";
+import { withDatabase } from "@/tests/support/database";
 
 withDatabase();
 

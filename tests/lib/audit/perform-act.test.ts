@@ -8,8 +8,8 @@ import { HOUSE_CHAIN } from "@/lib/vocabulary/acts";
 import { RECORDED_REFUSALS, Refusal, type RefusalCode } from "@/lib/vocabulary/refusal";
 import { HistoryEntry } from "@/models/history-entry";
 import { User } from "@/models/user";
-import { withDatabase } from "../../support/database";
-import { twoPersons, type Persons } from "../../support/recorded-product";
+import { withDatabase } from "@/tests/support/database";
+import { twoPersons, type Persons } from "@/tests/support/recorded-product";
 
 withDatabase();
 

@@ -6,9 +6,9 @@ import { verifyChain } from "@/lib/audit/verify-chain";
 import { performAct } from "@/lib/audit/perform-act";
 import { Comment } from "@/models/comment";
 import { HistoryEntry } from "@/models/history-entry";
-import { withDatabase } from "../../support/database";
-import { forge } from "../../support/forge";
-import { CODE, recordedProduct, remark, sign, type RecordedProduct } from "../../support/recorded-product";
+import { withDatabase } from "@/tests/support/database";
+import { forge } from "@/tests/support/forge";
+import { CODE, recordedProduct, remark, sign, type RecordedProduct } from "@/tests/support/recorded-product";
 
 withDatabase();
 

@@ -9,9 +9,9 @@ import { inTransaction } from "@/models/database";
 import { HistoryEntry } from "@/models/history-entry";
 import { OutboxMessage } from "@/models/outbox-message";
 import { User } from "@/models/user";
-import { withDatabase } from "../../support/database";
-import { freePort, startMailCatcher, type MailCatcher } from "../../support/mail-catcher";
-import { twoPersons, type Persons } from "../../support/recorded-product";
+import { withDatabase } from "@/tests/support/database";
+import { freePort, startMailCatcher, type MailCatcher } from "@/tests/support/mail-catcher";
+import { twoPersons, type Persons } from "@/tests/support/recorded-product";
 
 const baseUrl = "http://127.0.0.1:3000";
 const facts = { productCode: "TF2", productName: "Tractor fairing", label: "TF2-CP-04", proposalNumber: 4 };
