@@ -1,3 +1,4 @@
+import type { Transaction } from "sequelize";
 import { performAct } from "@/lib/audit/perform-act";
 import { textHash } from "@/lib/audit/text-hash";
 import { loadNewestBudget, productByCode } from "@/lib/budget/load-budget";
@@ -9,11 +10,15 @@ import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
 import { newTerms } from "@/lib/evaluation/lines/terms-body";
 import { firstIssueLines } from "@/lib/products/first-issue";
 import type { Actor } from "@/lib/vocabulary/actor";
+import { DEFAULT_REVIEW_RULES } from "@/lib/vocabulary/review-rules";
 import type { Capacity } from "@/lib/vocabulary/roles";
 import { inSnapshot } from "@/models/database";
+import { Line } from "@/models/line";
 import { Proposal } from "@/models/proposal";
 import { ProposalEditor } from "@/models/proposal-editor";
 import { Round } from "@/models/round";
+import { RoundEdit } from "@/models/round-edit";
+import { RoundTransfer } from "@/models/round-transfer";
 import { Signature } from "@/models/signature";
 
 /** Air at 15 °C and 25 m/s; limit and reserve in hundredths of a newton. */
@@ -114,7 +119,7 @@ export async function approve(code: string, at: string, change: ApprovedChange):
         title,
         reason: "For the test",
         evidence: "[]",
-        rules: "{}",
+        rules: JSON.stringify(DEFAULT_REVIEW_RULES),
         canonicalText: title,
         hash: textHash("round", title),
         submittedById: proposer.userId,
@@ -122,6 +127,7 @@ export async function approve(code: string, at: string, change: ApprovedChange):
       },
       { transaction: tx },
     );
+    await writeRoundContent(product.id, round.id, change, now, tx);
     await proposal.update({ number, round: 1, state: "proposed" }, { transaction: tx });
     for (const [signer, capacity] of signers) {
       const last: number | null = await Signature.max("sequence", {
@@ -162,6 +168,27 @@ export async function approve(code: string, at: string, change: ApprovedChange):
     record({ act: "approve_proposal", subject, now: { ...issue } });
     return issue;
   });
+}
+
+async function writeRoundContent(
+  productId: number,
+  roundId: number,
+  { edits, transfers = [] }: ApprovedChange,
+  at: string,
+  tx: Transaction,
+): Promise<void> {
+  for (const [position, { kind, number, operation, baseLetter, body }] of edits.entries()) {
+    const key = { productId, kind, number };
+    const line =
+      (await Line.findOne({ where: key, transaction: tx })) ??
+      (await Line.create({ ...key, reservedAt: at }, { transaction: tx }));
+    const text = body === null ? null : JSON.stringify(body);
+    const row = { roundId, position, lineId: line.id, operation, baseLetter, body: text };
+    await RoundEdit.create(row, { transaction: tx });
+  }
+  for (const [position, transfer] of transfers.entries()) {
+    await RoundTransfer.create({ roundId, position, body: JSON.stringify(transfer) }, { transaction: tx });
+  }
 }
 
 export async function newestBudget(code: string) {

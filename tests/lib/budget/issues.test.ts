@@ -18,9 +18,9 @@ import {
   fixedItem,
   newestBudget,
   shareItem,
-} from "../../support/budget-on-file";
-import { withDatabase } from "../../support/database";
-import { person, product, withRole } from "../../support/people";
+} from "@/tests/support/budget-on-file";
+import { withDatabase } from "@/tests/support/database";
+import { person, product, withRole } from "@/tests/support/people";
 
 withDatabase();
 

@@ -1,9 +1,9 @@
 import { describe, expect, it } from "vitest";
 import { performAct } from "@/lib/audit/perform-act";
 import { checkHistory, exportedHistory, productHistory } from "@/lib/budget/product-history";
-import { withDatabase } from "../../support/database";
-import { CODE, recordedProduct } from "../../support/recorded-product";
-import { person, withRole } from "../../support/people";
+import { withDatabase } from "@/tests/support/database";
+import { CODE, recordedProduct } from "@/tests/support/recorded-product";
+import { person, withRole } from "@/tests/support/people";
 
 withDatabase();
 

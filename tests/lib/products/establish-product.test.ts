@@ -11,9 +11,9 @@ import type { Actor } from "@/lib/vocabulary/actor";
 import { Issue } from "@/models/issue";
 import { LineRevision } from "@/models/line-revision";
 import { Signature } from "@/models/signature";
-import { firstPoint, newestBudget } from "../../support/budget-on-file";
-import { withDatabase } from "../../support/database";
-import { person, product, withRole } from "../../support/people";
+import { firstPoint, newestBudget } from "@/tests/support/budget-on-file";
+import { withDatabase } from "@/tests/support/database";
+import { person, product, withRole } from "@/tests/support/people";
 
 withDatabase();
 

@@ -8,8 +8,8 @@ import { CreateProductInput } from "@/lib/products/schema";
 import { inSnapshot } from "@/models/database";
 import { Membership } from "@/models/membership";
 import { Product } from "@/models/product";
-import { withDatabase } from "../../support/database";
-import { person, product } from "../../support/people";
+import { withDatabase } from "@/tests/support/database";
+import { person, product } from "@/tests/support/people";
 
 withDatabase();
 
