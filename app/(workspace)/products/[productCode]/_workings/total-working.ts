@@ -1,4 +1,3 @@
-import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { formatHundredths, formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatPercent } from "@/lib/units/format-number";
 
@@ -167,7 +166,7 @@ function reserveWorking(sheet: BudgetSheet): Working {
 }
 
 function unallocatedWorking({ budget }: BudgetSheet): Working {
-  const sums = allocationsView(budget.state, budget.results);
+  const sums = budget.allocations;
   const { allocatedHundredths: allocated, reserveHundredths: reserve, limitHundredths: limit } = sums;
 
   return {

@@ -5,7 +5,6 @@ import { requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
-import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { abilityFor, covers } from "@/policies/ability";
 
 import { AsStoodBanner } from "../_components/as-stood-banner";
@@ -89,7 +88,7 @@ function BudgetMatter({ sheet, query, userId }: BudgetMatterProps) {
         <StandingHead point={point} />
         <StaveFigure sheet={sheet} />
         <BudgetItems sheet={sheet} query={query} path={path} userId={userId} />
-        <ConservationLine sums={allocationsView(budget.state, budget.results)} />
+        <ConservationLine sums={budget.allocations} />
         <MeasuresTable sheet={sheet} />
       </WorkingsProvider>
       <RetiredLines lines={sheet.retired} />
