@@ -7,9 +7,10 @@ export interface OwnUncertainty {
   source: string;
 }
 
-type Fluid = "air" | "fresh-water" | "sea-water" | "custom";
-
-/** The one table of what lines, methods and fluids are uncertain by, beside their inputs. */
+/**
+ * The one table of what lines and methods are uncertain by, beside their inputs. The fluids' formulas state theirs where
+ * they stand: they lie far below the lines' and are not combined.
+ */
 export const OWN_UNCERTAINTIES: Record<FrictionLineName | "blasius" | MethodName, OwnUncertainty> = {
   blasius: { relative: 0.02, source: "judgement: exact for the ideal plate, pressure gradient and edge beside it" },
   "one-fifth-law": {
@@ -36,24 +37,4 @@ export const OWN_UNCERTAINTIES: Record<FrictionLineName | "blasius" | MethodName
   measured: { relative: 0.02, source: "judgement: carried over by dynamic pressure alone" },
   fixed: { relative: 0, source: "judgement: the force is given, with what uncertainty it has" },
   share: { relative: 0.2, source: "judgement: shares for gaps and interference scatter so" },
-};
-
-/** Of the fluids' formulas. Far below the lines' and not combined; what is given for the state itself is. */
-export const FLUID_UNCERTAINTIES: Record<Fluid, { density: OwnUncertainty; dynamicViscosity: OwnUncertainty }> = {
-  air: {
-    density: { relative: 0.003, source: "judgement: dry air for moist air, up to 0.5 %" },
-    dynamicViscosity: { relative: 0.005, source: "judgement: printed sets of constants and tables" },
-  },
-  "fresh-water": {
-    density: { relative: 1e-5, source: "IAPWS SR6-08, rounded up for dissolved air" },
-    dynamicViscosity: { relative: 0.01, source: "IAPWS SR6-08" },
-  },
-  "sea-water": {
-    density: { relative: 4e-6, source: "EOS-80, standard deviation at salinity 35" },
-    dynamicViscosity: { relative: 0.015, source: "Sharqawy et al. 2010" },
-  },
-  custom: {
-    density: { relative: 0, source: "as given" },
-    dynamicViscosity: { relative: 0, source: "as given" },
-  },
 };
