@@ -2,9 +2,12 @@ import { createProduct } from "@/lib/products/create-product";
 import { establishProduct } from "@/lib/products/establish-product";
 import { giveRole } from "@/lib/products/give-role";
 import type { CreateProductInput } from "@/lib/products/schema";
+import { tellDuctStory } from "./duct-story";
+import { tellFairingStory } from "./fairing-story";
 import { openDemoHouse, type DemoHouse } from "./demo-house";
 import { DEMO_ADMINISTRATOR, DEMO_PASSWORD, DEMO_ROLES } from "./people";
 import { DUCT, FAIRING, SIGN, type DemoProduct } from "./products";
+import { tellSignStory } from "./sign-story";
 
 /** Everything in the demo is done by commands, as people would, on days before the one on which it is filled. */
 export async function fillDemo(filledAt: Date): Promise<void> {
@@ -14,6 +17,9 @@ export async function fillDemo(filledAt: Date): Promise<void> {
     await openProduct(house, product);
     await establish(house, product.code, first);
   }
+  await tellFairingStory(house);
+  await tellDuctStory(house);
+  await tellSignStory(house);
 }
 
 async function openProduct(house: DemoHouse, product: CreateProductInput): Promise<void> {

@@ -30,10 +30,12 @@ export const pascals = (value: number) => ({ value, entered: `${value} Pa` });
 
 /** The body that a form would send for this item. */
 export function itemBody(draft: ItemDraft, ownerId: number, evidenceDate: string): Record<string, unknown> {
-  const { number, name, group, grade, method, fields, evidence, basis = "" } = draft;
+  const { number, name, group, grade, method, fields, evidence, basis = "", justify = {} } = draft;
   const citations = evidence ? [{ document: evidence[0], revision: evidence[1], date: evidenceDate }] : [];
+  // How far each reaches is written in when the item is proposed.
+  const justifications = Object.entries(justify).map(([code, text]) => ({ code, text, excess: 0 }));
   const template = ITEM_METHODS[method].template({ ownerId, order: Number(number), group });
-  return { ...template, name, grade, basis, evidence: citations, ...fields };
+  return { ...template, name, grade, basis, evidence: citations, justifications, ...fields };
 }
 
 interface Plate {

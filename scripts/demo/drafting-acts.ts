@@ -1,0 +1,50 @@
+import { propose } from "@/lib/proposals/propose";
+import { saveDraft } from "@/lib/proposals/save-draft";
+import { SaveDraftInput, type DraftContent } from "@/lib/proposals/schema";
+import { startDraft } from "@/lib/proposals/start-draft";
+import type { Desk } from "./desk";
+import type { DemoPerson } from "./people";
+import { lockVersionOf } from "./shown-sheet";
+
+/** What a person of the demo proposes: the form as they would fill it. */
+export type DemoChange = Pick<DraftContent, "title" | "reason"> & {
+  edits?: readonly unknown[];
+  transfers?: readonly unknown[];
+  neededBy?: string;
+};
+
+export function draftingActs({ house, productCode, key, deliverMail }: Desk) {
+  /** A working copy; it stays one until it is submitted. */
+  async function draft(person: DemoPerson, change: DemoChange): Promise<number> {
+    const input = { productCode, title: change.title, key: key() };
+    const { proposalId } = await startDraft(await house.actor(person), input, house.clock);
+    await save(person, proposalId, change);
+    return proposalId;
+  }
+
+  async function save(person: DemoPerson, proposalId: number, change: DemoChange): Promise<void> {
+    const content = { neededBy: null, edits: [], transfers: [], ...change };
+    const input = SaveDraftInput.parse({ proposalId, lockVersion: await lockVersionOf(proposalId), content });
+    await saveDraft(await house.actor(person), input, house.clock);
+  }
+
+  async function submit(person: DemoPerson, change: DemoChange): Promise<number> {
+    const proposalId = await draft(person, change);
+    await proposeIt(person, proposalId);
+    return proposalId;
+  }
+
+  /** The next round, with what was changed since. */
+  async function submitAgain(person: DemoPerson, proposalId: number, change: DemoChange): Promise<void> {
+    await save(person, proposalId, change);
+    await proposeIt(person, proposalId);
+  }
+
+  async function proposeIt(person: DemoPerson, proposalId: number): Promise<void> {
+    const input = { proposalId, lockVersion: await lockVersionOf(proposalId), key: key(), password: null };
+    await propose(await house.actor(person), input, house.clock);
+    await deliverMail();
+  }
+
+  return { draft, submit, submitAgain };
+}

@@ -1,0 +1,59 @@
+import { addRemark } from "@/lib/proposals/add-remark";
+import { raiseObjection } from "@/lib/proposals/raise-objection";
+import { returnProposal } from "@/lib/proposals/return-proposal";
+import { AddRemarkInput, ReturnProposalInput, SignProposalInput } from "@/lib/proposals/schema";
+import { settleRemark } from "@/lib/proposals/settle-remark";
+import { signProposal } from "@/lib/proposals/sign-proposal";
+import { SIGNATURE_MEANINGS } from "@/lib/vocabulary/proposals";
+import type { Capacity } from "@/lib/vocabulary/roles";
+import type { Desk } from "./desk";
+import { DEMO_PASSWORD, type DemoPerson } from "./people";
+import { shownSheet } from "./shown-sheet";
+
+interface DemoRemark {
+  text: string;
+  line?: { kind: string; number: string };
+  field?: string;
+  asksForAction?: boolean;
+}
+
+export function reviewingActs({ house, key, deliverMail }: Desk) {
+  const approve = (person: DemoPerson, capacity: Capacity, proposalId: number) =>
+    sign(person, proposalId, { decision: "approve", capacity, meaning: SIGNATURE_MEANINGS[capacity][0] });
+
+  const disapprove = (person: DemoPerson, proposalId: number, reason: string) =>
+    sign(person, proposalId, { decision: "disapprove", capacity: "program_manager", reason });
+
+  async function sign(person: DemoPerson, proposalId: number, decision: Record<string, string>): Promise<void> {
+    const { roundHash, textHash } = await shownSheet(proposalId, house.clock);
+    const shown = { proposalId, roundHash, textHash, deputyForId: null, password: DEMO_PASSWORD };
+    await signProposal(await house.actor(person), SignProposalInput.parse({ ...shown, ...decision }), house.clock);
+    await deliverMail();
+  }
+
+  async function giveBack(person: DemoPerson, proposalId: number, reason: string): Promise<void> {
+    const { roundHash } = await shownSheet(proposalId, house.clock);
+    const input = ReturnProposalInput.parse({ proposalId, roundHash, capacity: "reviewer", reason });
+    await returnProposal(await house.actor(person), input, house.clock);
+    await deliverMail();
+  }
+
+  async function remark(person: DemoPerson, proposalId: number, said: DemoRemark, parentId: number | null = null) {
+    const { text, line = null, field = null, asksForAction = false } = said;
+    const input = { proposalId, parentId, line, field, text, suggestion: null, asksForAction, key: key() };
+    const added = await addRemark(await house.actor(person), AddRemarkInput.parse(input), house.clock);
+    await deliverMail();
+    return added;
+  }
+
+  async function settle(person: DemoPerson, remarkId: number, reason: string): Promise<void> {
+    await settleRemark(await house.actor(person), { remarkId, reason }, house.clock);
+  }
+
+  async function object(person: DemoPerson, proposalId: number, reason: string): Promise<void> {
+    await raiseObjection(await house.actor(person), { proposalId, reason, key: key() }, house.clock);
+    await deliverMail();
+  }
+
+  return { approve, disapprove, giveBack, remark, settle, object };
+}
