@@ -1,3 +1,5 @@
+import canonicalize from "canonicalize";
+import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { canonicalJson } from "@/lib/audit/canonical-json";
 import { entryHash, GENESIS_HASH } from "@/lib/audit/entry-hash";
@@ -30,9 +32,16 @@ describe("canonical JSON", () => {
     expect(order).toEqual(["2", "4", "6", "7", "1", "5", "3"]);
   });
 
-  it.each([NaN, Infinity, "\ud800", undefined])("refuses %s", (value) => {
-    expect(() => canonicalJson(value)).toThrow();
+  it("agrees with another implementation on whatever JSON can hold", () => {
+    fc.assert(fc.property(fc.jsonValue(), (value) => canonicalJson(value) === canonicalize(value)));
   });
+
+  it.each([NaN, Infinity, "\ud800", { "\udc00": 1 }, undefined, [undefined], new Date(0), new Map(), 1n])(
+    "refuses %s",
+    (value) => {
+      expect(() => canonicalJson(value)).toThrow();
+    },
+  );
 });
 
 describe("an entry's hash", () => {
