@@ -3,7 +3,7 @@ import { canonicalJson } from "@/lib/audit/canonical-json";
 import { issueContentHash, type IssueContent } from "@/lib/audit/issue-content-hash";
 import { lineRevisionHash } from "@/lib/audit/line-revision-hash";
 import { chainHead } from "@/lib/audit/write-entry";
-import type { BudgetResults } from "@/lib/evaluation/budget/results";
+import type { BudgetResults, ItemResult } from "@/lib/evaluation/budget/results";
 import type { LineState } from "@/lib/evaluation/lines/line-state";
 import { database } from "@/models/database";
 import { Issue } from "@/models/issue";
@@ -82,21 +82,30 @@ function storedRevision({ kind, number, letter, retired, body }: LineState, prod
   return { kind, number, letter, retired, body: text, hash };
 }
 
-/** Results that the newest issue does not hold already, as rows. */
+/** Results that the newest issue does not hold already, as rows. What was reused as it is needs no comparing. */
 function changedResults(before: BudgetResults | null, after: BudgetResults): StoredRow[] {
-  const known = new Set(before ? storedRows(before).map((row) => canonicalJson(row)) : []);
-  return storedRows(after).filter((row) => !known.has(canonicalJson(row)));
+  const known = new Map(resultsOf(before).map((result) => [pairOf(result), result]));
+  return resultsOf(after).flatMap((result) => {
+    const frozen = known.get(pairOf(result));
+    if (frozen === result) return [];
+    const row = storedRow(result);
+    return frozen && canonicalJson(storedRow(frozen)) === canonicalJson(row) ? [] : [row];
+  });
 }
 
-function storedRows({ points }: BudgetResults): StoredRow[] {
-  return points.flatMap((point) =>
-    point.items.map((result) => {
-      const { item, operatingPoint, methodVersion, basic, growthFraction, growth, predicted } = result;
-      const { answer, notes } = textsToStore(result);
-      const texts = { answer: canonicalJson(answer), notes: canonicalJson(notes) };
-      return { item, operatingPoint, methodVersion, basic, growthFraction, growth, predicted, ...texts };
-    }),
-  );
+function resultsOf(results: BudgetResults | null): ItemResult[] {
+  return results?.points.flatMap(({ items }) => items) ?? [];
+}
+
+function pairOf({ item, operatingPoint }: ItemResult): string {
+  return `${operatingPoint} ${item}`;
+}
+
+function storedRow(result: ItemResult): StoredRow {
+  const { item, operatingPoint, methodVersion, basic, growthFraction, growth, predicted } = result;
+  const { answer, notes } = textsToStore(result);
+  const texts = { answer: canonicalJson(answer), notes: canonicalJson(notes) };
+  return { item, operatingPoint, methodVersion, basic, growthFraction, growth, predicted, ...texts };
 }
 
 async function newestOf(productId: number, tx: Transaction): Promise<{ number: number; madeAt: string }> {
