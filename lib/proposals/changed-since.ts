@@ -1,0 +1,28 @@
+import type { Transaction } from "sequelize";
+import { issueFactsOf } from "@/lib/budget/issue-facts";
+import type { ProductRow } from "@/lib/budget/load-budget";
+import type { DaySheetView } from "./workspace-views";
+
+const FIRST_VISIT_DAYS = 14;
+const DAY = 86_400_000;
+
+/** Issues made since a person's last visit, newest first; on the first one those of two weeks. */
+export async function changedSince(
+  product: ProductRow,
+  lastSeenAt: string | null,
+  at: string,
+  tx: Transaction,
+): Promise<DaySheetView["changedSince"]> {
+  const since = lastSeenAt ?? new Date(Date.parse(at) - FIRST_VISIT_DAYS * DAY).toISOString();
+  const issues = (await issueFactsOf(product, tx)).filter((issue) => issue.at > since);
+  return issues.reverse().flatMap(({ number, at: madeAt, proposal }) =>
+    proposal === null
+      ? []
+      : [
+          {
+            ...{ productCode: product.code, issue: number, at: madeAt },
+            ...{ label: proposal.label, title: proposal.title, key: String(proposal.number) },
+          },
+        ],
+  );
+}
