@@ -1,6 +1,7 @@
 import type { ReactNode } from "react";
 
 import { requireActor } from "@/app/_server/session";
+import { isAllowed } from "@/policies/authorize";
 
 import { WorkspaceHeader } from "./_components/workspace-header";
 
@@ -15,7 +16,11 @@ export default async function WorkspaceLayout({ children }: { children: ReactNod
       >
         Go to the sheet
       </a>
-      <WorkspaceHeader name={actor.printedName} isAdministrator={actor.isAdministrator} />
+      <WorkspaceHeader
+        name={actor.printedName}
+        showAccounts={isAllowed(actor, { on: "Installation", action: "read_accounts" })}
+        showHouseHistory={isAllowed(actor, { on: "Installation", action: "read_house_history" })}
+      />
       <main id="matter" tabIndex={-1} className="px-3 py-5 outline-none sm:px-7 sm:py-6 print:p-0">
         {children}
       </main>

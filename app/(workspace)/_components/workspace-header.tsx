@@ -8,11 +8,12 @@ import { WaitingCount } from "./waiting-count";
 
 interface WorkspaceHeaderProps {
   name: string;
-  isAdministrator: boolean;
+  showAccounts: boolean;
+  showHouseHistory: boolean;
 }
 
 /** Head of every page behind the sign-in. */
-export function WorkspaceHeader({ name, isAdministrator }: WorkspaceHeaderProps) {
+export function WorkspaceHeader({ name, showAccounts, showHouseHistory }: WorkspaceHeaderProps) {
   return (
     <header className="flex flex-wrap items-baseline gap-x-5 gap-y-1 border-b border-rule-strong px-3 py-3 sm:px-7 print:hidden">
       <Link href="/" className="mr-1 py-1" aria-label="Leeboard, to the day sheet">
@@ -23,7 +24,10 @@ export function WorkspaceHeader({ name, isAdministrator }: WorkspaceHeaderProps)
           Day sheet
         </HeaderLink>
         <HeaderLink href="/products">Products</HeaderLink>
-        {isAdministrator ? <HeaderLink href="/administration">Administration</HeaderLink> : null}
+        {showAccounts ? <HeaderLink href="/administration">Administration</HeaderLink> : null}
+        {showHouseHistory && !showAccounts ? (
+          <HeaderLink href="/administration/history">House history</HeaderLink>
+        ) : null}
       </nav>
       <div className="flex flex-wrap items-baseline gap-x-5 text-ink-2 sm:ml-auto">
         <WaitingCount />

@@ -4,7 +4,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
-import { requireActor } from "@/app/_server/session";
+import { requireAdministrator } from "@/app/_server/administration-access";
 import { listAccounts } from "@/lib/users/queries";
 
 import { AccountsTable } from "./_components/accounts-table";
@@ -13,7 +13,7 @@ import { NewAccountForm } from "./_components/new-account-form";
 export const metadata: Metadata = { title: "Accounts" };
 
 export default async function AccountsPage() {
-  const actor = await requireActor();
+  const actor = await requireAdministrator();
   const accounts = await listAccounts();
 
   return (

@@ -7,7 +7,7 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { TitleBlock } from "@/app/_components/title-block";
-import { requireActor } from "@/app/_server/session";
+import { requireAdministrator } from "@/app/_server/administration-access";
 import type { RegisterEntry } from "@/lib/budget/views";
 import { registerFor } from "@/lib/products/queries";
 import { PRODUCT_KIND_NAMES } from "@/lib/vocabulary/lines";
@@ -17,7 +17,7 @@ import { NewProductForm } from "./_components/new-product-form";
 export const metadata: Metadata = { title: "Products of the installation" };
 
 export default async function AdministrationProductsPage() {
-  const entries = await registerFor(await requireActor());
+  const entries = await registerFor(await requireAdministrator());
   // Intl does not list UTC, which is the first choice here.
   const timeZones = ["UTC", ...Intl.supportedValuesOf("timeZone").filter((zone) => zone !== "UTC")];
 

@@ -5,7 +5,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
-import { requireActor } from "@/app/_server/session";
+import { requireAdministrator } from "@/app/_server/administration-access";
 import { membershipsOf, registerFor } from "@/lib/products/queries";
 import { listAccounts } from "@/lib/users/queries";
 
@@ -16,7 +16,7 @@ import { RolesTable } from "./_components/roles-table";
 export const metadata: Metadata = { title: "Roles" };
 
 export default async function RolesPage({ searchParams }: PageProps<"/administration/roles">) {
-  const actor = await requireActor();
+  const actor = await requireAdministrator();
   const products = (await registerFor(actor)).map(({ product }) => product);
   const { product: wanted } = await searchParams;
   const product = products.find(({ code }) => code === wanted) ?? products[0];
