@@ -46,3 +46,17 @@ describe("the trend over issues", () => {
     expect(layout.marks.every(({ x, y }) => Number.isFinite(x) && Number.isFinite(y))).toBe(true);
   });
 });
+
+describe("issues that crowd", () => {
+  it("are named where there is room, the newest first", () => {
+    const crowd = [0, 1, 2].map((minute) => ({
+      ...{ basic: 80, predicted: 100, limit: 120, reserve: 10 },
+      issue: minute + 1,
+      at: `2026-01-01T00:0${minute}:00.000Z`,
+    }));
+    const { marks, dates } = trendLayout(crowd, [], "2026-01-02T00:00:00.000Z");
+
+    expect(marks.map(({ labelled }) => labelled)).toEqual([false, false, true]);
+    expect(dates.map(({ label }) => label)).toEqual(["2026-01-01 00:00", "2026-01-02 00:00"]);
+  });
+});

@@ -2,6 +2,8 @@ import type { ReactNode } from "react";
 
 import { IndexLayout } from "@/app/_components/index-layout";
 import { SheetIndex } from "@/app/_components/sheet-index";
+import { requireActor } from "@/app/_server/session";
+import { registerFor } from "@/lib/products/queries";
 
 import { pageProduct } from "./_server/read-page";
 
@@ -13,7 +15,9 @@ interface ProductLayoutProps {
 /** The sheets of one product, numbered as in a drawing set. */
 export default async function ProductLayout({ children, params }: ProductLayoutProps) {
   const { productCode } = await params;
-  const product = await pageProduct(productCode);
+  const [actor, product] = await Promise.all([requireActor(), pageProduct(productCode)]);
+  const register = await registerFor(actor);
+  const open = register.find((entry) => entry.product.id === product.id)?.openProposals ?? 0;
   const base = `/products/${product.code}`;
 
   return (
@@ -23,7 +27,7 @@ export default async function ProductLayout({ children, params }: ProductLayoutP
           label={`Sheets of ${product.code}`}
           entries={[
             { href: `${base}/budget`, label: "Budget" },
-            { href: `${base}/proposals`, label: "Proposals" },
+            { href: `${base}/proposals`, label: "Proposals", count: open },
             { href: `${base}/operating-points`, label: "Operating points" },
             { href: `${base}/issues`, label: "Issues" },
             { href: `${base}/history`, label: "History" },

@@ -25,6 +25,8 @@ export interface TrendPoint {
 export interface TrendMark extends TrendPoint {
   issue: number;
   predicted: number;
+  /** Whether there is room for its number: where issues crowd, the newer one is named. */
+  labelled: boolean;
 }
 
 export interface TrendLayout {
@@ -61,7 +63,7 @@ export function trendLayout(
     newtons,
     ticks: rulerTicks(newtons, 6).map((value) => ({ value, y: y(value) })),
     dates: dateTicks(time),
-    marks: issues.map(({ issue, at, predicted }) => ({ issue, predicted, x: x(at), y: y(predicted) })),
+    marks: labelledMarks(issues.map(({ issue, at, predicted }) => ({ issue, predicted, x: x(at), y: y(predicted) }))),
     predicted: steps((issue) => issue.predicted),
     basic: steps((issue) => issue.basic),
     limit: steps((issue) => issue.limit),
@@ -110,10 +112,28 @@ function stepLine(
   });
 }
 
+/** Closer than this, two numbers would be printed over each other. */
+const LABEL_ROOM = 0.03;
+
+function labelledMarks(marks: readonly Omit<TrendMark, "labelled">[]): TrendMark[] {
+  let next = Infinity;
+  return marks
+    .toReversed()
+    .map((mark) => {
+      const labelled = next - mark.x >= LABEL_ROOM;
+      if (labelled) next = mark.x;
+      return { ...mark, labelled };
+    })
+    .reverse();
+}
+
 const DAY = 86_400_000;
 
-/** Dates at even distances, whole days of UTC, never two that read the same. */
+/** Dates at even distances, whole days of UTC, never two that read the same; within a day or two the ends by the minute. */
 function dateTicks(time: Scale): { label: string; x: number }[] {
+  if (time.max - time.min < 2 * DAY) {
+    return [time.min, time.max].map((at) => ({ label: minuteText(at), x: fractionOf(time, at) }));
+  }
   const days = (time.max - time.min) / DAY;
   const step = Math.max(1, Math.ceil(days / 3));
   const first = Math.ceil(time.min / DAY);
@@ -123,4 +143,8 @@ function dateTicks(time: Scale): { label: string; x: number }[] {
     const at = (first + index * step) * DAY;
     return { label: new Date(at).toISOString().slice(0, 10), x: fractionOf(time, at) };
   });
+}
+
+function minuteText(at: number): string {
+  return new Date(at).toISOString().slice(0, 16).replace("T", " ");
 }

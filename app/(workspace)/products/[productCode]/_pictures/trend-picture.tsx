@@ -52,9 +52,11 @@ function TrendLines({ layout }: { layout: TrendLayout }) {
       {layout.marks.map((mark) => (
         <g key={mark.issue}>
           <circle cx={percent(mark.x)} cy={y(mark.y)} r="3.5" className="fill-sheet stroke-water" strokeWidth="2" />
-          <text x={percent(mark.x)} y={y(mark.y) - 8} textAnchor={anchorAt(mark.x)} className="fill-ink text-2xs">
-            {mark.issue}
-          </text>
+          {mark.labelled ? (
+            <text x={percent(mark.x)} y={y(mark.y) - 8} textAnchor={anchorAt(mark.x)} className="fill-ink text-2xs">
+              {mark.issue}
+            </text>
+          ) : null}
         </g>
       ))}
       {layout.dates.map((date) => (

@@ -20,6 +20,7 @@ import { BudgetActions } from "./_components/budget-actions";
 import { BudgetItems } from "./_components/budget-items";
 import { ConservationLine } from "./_components/conservation-line";
 import { MeasuresTable } from "./_components/measures-table";
+import { NewerIssue } from "./_components/newer-issue";
 import { PointChoice } from "./_components/point-choice";
 import { RetiredLines } from "./_components/retired-lines";
 import { StandingHead } from "./_components/standing-head";
@@ -77,6 +78,9 @@ function BudgetMatter({ sheet, query, userId }: BudgetMatterProps) {
   return (
     <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point)} />}>
       <AsStoodBanner budget={budget} newestHref={sheetAddress(path, query, { issue: undefined, on: undefined })} />
+      {query.issue === undefined && query.on === undefined ? (
+        <NewerIssue productCode={budget.product.code} shown={budget.issue.number} />
+      ) : null}
       <ServiceWindCaution kind={budget.product.kind} />
       <WorkingsProvider productCode={budget.product.code} issue={budget.issue.number} point={point.operatingPoint}>
         <PointChoice

@@ -1,5 +1,6 @@
 import type { Route } from "next";
 import Link from "next/link";
+import { Fragment } from "react";
 
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { Cell, Row, RowHead } from "@/app/_components/table";
@@ -41,11 +42,13 @@ export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
       <Cell className="min-w-44 max-sm:hidden lg:max-w-64">
         {ITEM_METHODS[body.method].label}
         <span className="block text-xs text-ink-2">
-          {keyFigures(body, result.answer).map(({ symbol, text }, at) => (
-            <span key={symbol} className="whitespace-nowrap">
-              {at === 0 ? "" : " · "}
-              <SymbolText symbol={symbol} /> {text}
-            </span>
+          {keyFigures(body, result.answer).map(({ symbol, text }, at, all) => (
+            <Fragment key={symbol}>
+              <span className="whitespace-nowrap">
+                <SymbolText symbol={symbol} /> {text}
+                {at < all.length - 1 ? " ·" : ""}
+              </span>{" "}
+            </Fragment>
           ))}
         </span>
         <RowNotes notes={result.notes} />

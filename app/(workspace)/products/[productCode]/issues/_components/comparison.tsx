@@ -64,7 +64,7 @@ function LineRow({ line }: { line: ComparedLine }) {
       <Cell label="What changed">
         {letterWas === null ? <span className="text-ink-2">new line</span> : null}
         {moved ? <span className="block">{moved}</span> : null}
-        {letterWas === null ? null : <ChangedFields fields={fields} />}
+        {letterWas === null || (moved && fields.length === 0) ? null : <ChangedFields fields={fields} />}
       </Cell>
     </Row>
   );
