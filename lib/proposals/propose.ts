@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { passwordRefusal } from "@/lib/users/password-refusal";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal } from "@/lib/vocabulary/refusal";
@@ -9,7 +10,6 @@ import { checkedSubmission } from "./check-submission";
 import { stateAfter } from "./moves";
 import { proposalQuestion } from "./proposal-record";
 import type { ProposeInput } from "./schema";
-import { passwordRefusal } from "./signer-password";
 import { writeRound } from "./write-round";
 
 const Proposed = z.object({ key: z.string(), number: z.int(), round: z.int() });

@@ -1,3 +1,4 @@
+import { passwordRefusal } from "@/lib/users/password-refusal";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import type { ProposalState } from "@/lib/vocabulary/proposals";
@@ -11,7 +12,6 @@ import { mailOvertaken } from "./mail-overtaken";
 import { isFilled, type RoundReview } from "./round-review";
 import type { SignProposalInput } from "./schema";
 import { endProposal } from "./end-proposal";
-import { passwordRefusal } from "./signer-password";
 import { writeSignature } from "./write-signature";
 
 export interface SignedProposal {

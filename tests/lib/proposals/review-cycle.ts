@@ -114,10 +114,10 @@ export async function approves(actor: Actor, proposalId: number, capacity: Capac
   return signProposal(actor, await approval(proposalId, capacity, clock), clock);
 }
 
-/** An approved proposal of Tansy's that adds items, signed by Ines and Lusia: the next issue. */
-export async function approvedItems(people: Team, edits: Content["edits"]) {
-  const { tansy, ines, lusia, clock } = people;
-  const proposalId = await proposed(tansy, clock, { title: "New items", edits });
+/** An approved proposal that adds items, signed by Ines and Lusia: the next issue. */
+export async function approvedItems(people: Team, edits: Content["edits"], proposer = people.tansy) {
+  const { ines, lusia, clock } = people;
+  const proposalId = await proposed(proposer, clock, { title: "New items", edits });
   await approves(ines, proposalId, "reviewer", clock);
   return approves(lusia, proposalId, "program_manager", clock);
 }
