@@ -50,6 +50,10 @@ export function covers(ability: AppAbility, question: Question): boolean {
       const { productId, signerId } = question;
       return ability.can(question.action, subject("Signature", { productId, signerId }));
     }
+    case "Deputyship": {
+      const { productId, holderId } = question;
+      return ability.can(question.action, subject("Deputyship", { productId, holderId }));
+    }
     case "Remark": {
       const { productId, authorId, hasPart } = question;
       return ability.can(question.action, subject("Remark", { productId, authorId, hasPart }));
@@ -119,4 +123,5 @@ function allowTakingPart(can: Can, actor: Actor, productId: number): void {
   can("withdraw", "Proposal", own);
   can(["sign_as_reviewer", "sign_as_program_manager", "disapprove"], "Round", { productId, asDeputy: true });
   can("take_back", "Signature", { productId, signerId: actor.userId });
+  can("end", "Deputyship", { productId, holderId: actor.userId });
 }

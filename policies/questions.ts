@@ -17,6 +17,7 @@ export type Question =
   | { on: "Proposal"; action: ProposalAction; productId: number; proposerId: number; isEditor: boolean }
   | { on: "Round"; action: RoundAction; productId: number; asDeputy: boolean }
   | { on: "Signature"; action: "take_back"; productId: number; signerId: number }
+  | { on: "Deputyship"; action: "end"; productId: number; holderId: number }
   | { on: "Remark"; action: "settle"; productId: number; authorId: number; hasPart: boolean };
 
 export const INSTALLATION_ACTIONS = [
@@ -113,6 +114,7 @@ const SENTENCES: Record<Exclude<Question["on"], "Line">, Record<string, string>>
     carry_forward: `${DRAFT_EDITORS} may carry this proposal forward.`,
   },
   Signature: { take_back: "Only who gave an approval may take it back." },
+  Deputyship: { end: "Only who named a deputy may end it." },
   Remark: {
     settle: "Only who raised a request for action may settle it, or a program manager who has no part in the proposal.",
   },

@@ -48,6 +48,37 @@ export function membershipsOf(actor: Actor, productCode: string): Promise<Member
   });
 }
 
+export interface DeputyView {
+  deputyshipId: number;
+  holder: PersonName;
+  deputy: PersonName;
+  fromDay: string;
+  untilDay: string;
+  endedAt: string | null;
+}
+
+/** Who stands in for whom in a product, latest range of days first. */
+export function deputiesOf(actor: Actor, productCode: string): Promise<DeputyView[]> {
+  return inSnapshot(async (tx) => {
+    const product = await visibleProduct(actor, productCode, tx);
+    const rows = await database.query<DeputyRow>(
+      `SELECT d.id, h.id AS holderId, h.name AS holderName, p.id AS deputyId, p.name AS deputyName,
+         d.from_day AS fromDay, d.until_day AS untilDay, d.ended_at AS endedAt
+       FROM deputies d JOIN users h ON h.id = d.holder_id JOIN users p ON p.id = d.deputy_id
+       WHERE d.product_id = :productId ORDER BY d.from_day DESC, d.id DESC`,
+      { type: QueryTypes.SELECT, replacements: { productId: product.id }, transaction: tx },
+    );
+    return rows.map(({ id, holderId, holderName, deputyId, deputyName, fromDay, untilDay, endedAt }) => ({
+      deputyshipId: id,
+      holder: { id: holderId, name: holderName },
+      deputy: { id: deputyId, name: deputyName },
+      fromDay,
+      untilDay,
+      endedAt,
+    }));
+  });
+}
+
 /** What a program manager is told before and after establishing: a role that is missing. */
 export function establishWarnings(actor: Actor, productCode: string, at: string): Promise<string[]> {
   return inSnapshot(async (tx) => warningsFor((await visibleProduct(actor, productCode, tx)).id, at, tx));
@@ -72,6 +103,17 @@ interface MembershipRow {
   role: Role;
   fromAt: string;
   untilAt: string | null;
+}
+
+interface DeputyRow {
+  id: number;
+  holderId: number;
+  holderName: string;
+  deputyId: number;
+  deputyName: string;
+  fromDay: string;
+  untilDay: string;
+  endedAt: string | null;
 }
 
 interface RegisterRow extends ProductRow {

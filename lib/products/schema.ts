@@ -79,3 +79,33 @@ export const EstablishProductInput = z.strictObject({
   password: z.string().min(1, "Type your password.").max(200, "This is too long for a password."),
 });
 export type EstablishProductInput = z.infer<typeof EstablishProductInput>;
+
+const Day = z.iso.date("State the day as 2026-05-31.");
+
+export const NameDeputyInput = z
+  .strictObject({ productCode: ProductCodeInput, deputyId: Id, fromDay: Day, untilDay: Day })
+  .refine(({ fromDay, untilDay }) => fromDay <= untilDay, {
+    path: ["untilDay"],
+    error: "This lies before the first day.",
+  })
+  .refine(({ fromDay, untilDay }) => daysBetween(fromDay, untilDay) <= 366, {
+    path: ["untilDay"],
+    error: "Name a deputy for a year at most.",
+  });
+export type NameDeputyInput = z.infer<typeof NameDeputyInput>;
+
+export const EndDeputyInput = z.strictObject({ deputyshipId: Id });
+export type EndDeputyInput = z.infer<typeof EndDeputyInput>;
+
+export const MakeBaselineInput = z.strictObject({
+  productCode: ProductCodeInput,
+  issue: Id,
+  name: line(2, 120, "Give the baseline a name, for example Preliminary design."),
+  purpose: line(3, 500, "Say in a sentence what it is for."),
+  password: z.string().min(1, "Type your password.").max(200, "This is too long for a password."),
+});
+export type MakeBaselineInput = z.infer<typeof MakeBaselineInput>;
+
+function daysBetween(one: string, other: string): number {
+  return (Date.parse(other) - Date.parse(one)) / 86_400_000;
+}

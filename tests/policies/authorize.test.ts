@@ -72,6 +72,12 @@ const round = (action: (typeof ROUND_ACTIONS)[number], asDeputy = false): Questi
   asDeputy,
 });
 const takeBack = (signerId: number): Question => ({ on: "Signature", action: "take_back", productId: HERE, signerId });
+const endDeputyship = (holderId: number): Question => ({
+  on: "Deputyship",
+  action: "end",
+  productId: HERE,
+  holderId,
+});
 const settle = (authorId: number, hasPart: boolean): Question => ({
   on: "Remark",
   action: "settle",
@@ -154,6 +160,8 @@ const TABLE: [string, Question, string][] = [
   ["sign as a program manager's deputy", round("sign_as_program_manager", true), TAKING_PART],
   ["take an own approval back", takeBack(ME), TAKING_PART],
   ["take another's approval back", takeBack(OTHER), ""],
+  ["end a deputyship one named", endDeputyship(ME), TAKING_PART],
+  ["end another's deputyship", endDeputyship(OTHER), ""],
   ["settle an own request for action", settle(ME, true), TAKING_PART],
   ["settle another's request without part in it", settle(OTHER, false), "manager"],
   ["settle another's request on a proposal of one's own", settle(OTHER, true), ""],
@@ -176,6 +184,7 @@ describe("who may do what", () => {
       ...["add", "revise", "retire", "reinstate"].map((action) => `Line ${action}`),
       "Transfer ask",
       "Signature take_back",
+      "Deputyship end",
       "Remark settle",
     ];
     expect(all.filter((action) => !asked.has(action))).toEqual([]);
