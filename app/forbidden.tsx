@@ -11,7 +11,7 @@ export default function Forbidden() {
       <MessageSheet title="Your roles do not reach here" reference="no right">
         <p>Whoever gives roles in this product, the administrator of the installation, can change that.</p>
         <p>
-          <Link className="link" href="/">
+          <Link className="link" href="/" prefetch={false}>
             To the day sheet
           </Link>
         </p>

@@ -11,7 +11,7 @@ export default function NotFound() {
       <MessageSheet title="There is no such sheet" reference="not found">
         <p>This address leads to nothing that you may see. A code or a number in it may be mistyped.</p>
         <p>
-          <Link className="link" href="/">
+          <Link className="link" href="/" prefetch={false}>
             To the day sheet
           </Link>
         </p>

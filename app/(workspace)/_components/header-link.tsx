@@ -21,6 +21,8 @@ export function HeaderLink({ href, exact = false, children }: HeaderLinkProps) {
   return (
     <Link
       href={href}
+      // Opening the day sheet is noted as a visit: fetching it ahead would be one too.
+      prefetch={false}
       aria-current={here ? "page" : undefined}
       className="py-1 text-ink-2 hover:text-ink hover:underline aria-[current=page]:text-ink aria-[current=page]:underline aria-[current=page]:decoration-2 aria-[current=page]:underline-offset-6"
     >

@@ -18,7 +18,7 @@ export function WaitingCount() {
   if (!data) return null;
 
   return (
-    <Link href="/" className="py-1 hover:text-ink hover:underline">
+    <Link href="/" prefetch={false} className="py-1 hover:text-ink hover:underline">
       {data === 1 ? "1 waits for you" : `${data} wait for you`}
     </Link>
   );

@@ -16,7 +16,7 @@ interface WorkspaceHeaderProps {
 export function WorkspaceHeader({ name, showAccounts, showHouseHistory }: WorkspaceHeaderProps) {
   return (
     <header className="flex flex-wrap items-baseline gap-x-5 gap-y-1 border-b border-rule-strong px-3 py-3 sm:px-7 print:hidden">
-      <Link href="/" className="mr-1 py-1" aria-label="Leeboard, to the day sheet">
+      <Link href="/" prefetch={false} className="mr-1 py-1" aria-label="Leeboard, to the day sheet">
         <LeeboardMark />
       </Link>
       <nav aria-label="Places" className="flex flex-wrap gap-x-5">

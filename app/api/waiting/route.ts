@@ -1,0 +1,7 @@
+import { answerRead } from "@/app/_server/route-problem";
+import { daySheet } from "@/lib/proposals/day-sheet";
+
+/** How much waits for the reader: for the head of every page. */
+export function GET(): Promise<Response> {
+  return answerRead(async (actor) => ({ count: (await daySheet(actor)).waitsForMe.length }));
+}
