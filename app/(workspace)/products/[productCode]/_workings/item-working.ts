@@ -9,6 +9,7 @@ import { formatExact, formatPercent, formatSignificant } from "@/lib/units/forma
 import { MATURITY_GRADE_NAMES } from "@/lib/vocabulary/grades";
 
 import type { BudgetSheet, ItemRow } from "../_sheet/budget-sheet";
+import { powersOfTen } from "./powers-of-ten";
 import type { Working, WorkingNote, WorkingStep, WorkingTerm } from "./working";
 
 /** How an item's basic estimate came about, step by step as a hand calculator can repeat it. */
@@ -82,7 +83,7 @@ export function itemNotes({ result, body }: ItemRow): WorkingNote[] {
   return result.notes.map((note) => ({
     code: note.code,
     severity: note.severity,
-    sentence: noteSentence(note),
+    sentence: powersOfTen(noteSentence(note)),
     justification: body.justifications.find(({ code }) => code === note.code)?.text ?? null,
   }));
 }
@@ -100,10 +101,18 @@ function methodSteps({ indexed, point }: BudgetSheet, { body, result }: ItemRow)
   return steps.map(printed);
 }
 
-function printed({ value, source, range, ...texts }: WorkedStep): WorkingStep {
+function printed({ value, source, range, formula, withValues, ...texts }: WorkedStep): WorkingStep {
   const text = texts.unit === "N" ? formatNewtonsNumber(value) : formatSignificant(value, 4);
   const unit = texts.unit === "–" ? "" : texts.unit;
-  return { ...texts, unit, value: text, source: source ?? null, range: range ?? null };
+  return {
+    ...texts,
+    unit,
+    formula: powersOfTen(formula),
+    withValues: powersOfTen(withValues),
+    value: text,
+    source: source ?? null,
+    range: range === undefined ? null : powersOfTen(range),
+  };
 }
 
 function shareStep(body: Extract<ItemBody, { method: "share" }>, basic: number): WorkingStep {

@@ -9,7 +9,8 @@ import { WorkingNumber } from "../../_components/workings-provider";
 export function StandingHead({ point }: { point: PointResult }) {
   const { totals, limitHundredths, reserveHundredths, standing } = point;
   const isOver = standing === "over";
-  const ofLimit = `${formatPercent(Math.abs(totals.margin) / (limitHundredths / 100), 1)} of the limit`;
+  const share = Math.abs(totals.margin) / (limitHundredths / 100);
+  const ofLimit = `${formatPercent(share, share < 0.001 ? 2 : 1)} of the limit`;
 
   return (
     <p className="mb-3 flex flex-wrap items-baseline gap-x-3 gap-y-0.5">
