@@ -18,8 +18,13 @@ export function formatNewtons(newtons: number): string {
   return `${formatNewtonsNumber(newtons)}${THIN_SPACE}N`;
 }
 
-/** A change, with its sign always: "+0.40 N", "−3.90 N"; "0.00 N" has none. */
-export function formatNewtonsChange(newtons: number): string {
+/** A change without the unit, with its sign always: "+0.40", "−3.90"; "0.00" has none. */
+export function formatNewtonsChangeNumber(newtons: number): string {
   const hundredths = toHundredths(newtons);
-  return `${hundredths > 0 ? "+" : ""}${formatHundredths(hundredths)}${THIN_SPACE}N`;
+  return `${hundredths > 0 ? "+" : ""}${formatHundredths(hundredths)}`;
+}
+
+/** A change with its sign and unit: "−3.90 N". */
+export function formatNewtonsChange(newtons: number): string {
+  return `${formatNewtonsChangeNumber(newtons)}${THIN_SPACE}N`;
 }

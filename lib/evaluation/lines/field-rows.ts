@@ -62,7 +62,13 @@ function listRows(label: string, type: ListType, path: string, value: unknown, n
 function entryText(printed: readonly (FieldText & { column: FieldSpec })[]): FieldText {
   const [only, ...others] = printed;
   if (only && others.length === 0) return { text: only.text, ...(only.unit === undefined ? {} : { unit: only.unit }) };
-  return { text: printed.map(({ text, unit }) => (unit === undefined ? text : `${text} ${unit}`)).join(", ") };
+  return { text: printed.map(columnText).join(", ") };
+}
+
+/** What the application adds to an entry says what it is; what was typed speaks for itself. */
+function columnText({ column, text, unit }: FieldText & { column: FieldSpec }): string {
+  const value = unit === undefined ? text : `${text} ${unit}`;
+  return column.fixed ? `${column.label.toLowerCase()} ${value}` : value;
 }
 
 /** The fields of a body or of a record inside it; of anything else none. */

@@ -66,7 +66,7 @@ function Groups({ productCode, rows }: { productCode: string; rows: readonly Pro
   return groups
     .filter((group) => group.rows.length > 0)
     .map((group) => (
-      <section key={group.heading}>
+      <section key={group.heading} className="mt-7 first:mt-0">
         <SectionHeading aside={group.rows.length}>{group.heading}</SectionHeading>
         <ProposalsTable caption={`${group.heading} proposals`} productCode={productCode} rows={group.rows} />
       </section>

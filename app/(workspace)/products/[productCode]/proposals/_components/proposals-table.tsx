@@ -21,11 +21,11 @@ export function ProposalsTable({ caption, productCode, rows }: ProposalsTablePro
   return (
     <Table caption={caption} narrow="stack">
       <TableHead>
-        <Head>Proposal</Head>
-        <Head>By</Head>
-        <Head>State</Head>
-        <Head>Waits for</Head>
-        <Head>Needed by</Head>
+        <Head className="w-[32%]">Proposal</Head>
+        <Head className="w-[13%]">By</Head>
+        <Head className="w-[13%]">State</Head>
+        <Head className="w-[18%]">Waits for</Head>
+        <Head className="w-[11%]">Needed by</Head>
         <Head numeric>Effect on predicted</Head>
       </TableHead>
       <tbody>

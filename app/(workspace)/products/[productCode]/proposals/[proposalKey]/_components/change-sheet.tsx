@@ -39,7 +39,7 @@ export function ChangeSheet({ proposal }: { proposal: ProposalView }) {
           <ItemEffects heading="What only follows" effects={effect.followers} />
         </>
       ) : null}
-      <section>
+      <section className="mt-7">
         <SectionHeading>Reason</SectionHeading>
         <MarkdownText text={proposal.reason} />
       </section>
@@ -85,7 +85,7 @@ function Rounds({ proposal }: { proposal: ProposalView }) {
   const base = `/products/${proposal.product.code}/proposals/${proposal.key}`;
 
   return (
-    <section>
+    <section className="mt-7">
       <SectionHeading>Rounds</SectionHeading>
       <ul className="border-t border-ink">
         {proposal.rounds.map((round) => (
@@ -112,7 +112,7 @@ function Objections({ proposal }: { proposal: ProposalView }) {
   if (proposal.objections.length === 0) return null;
 
   return (
-    <section>
+    <section className="mt-7">
       <SectionHeading>Objections</SectionHeading>
       <ul className="border-t border-ink">
         {proposal.objections.map((objection) => (

@@ -2,7 +2,7 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import { RemarkFlag } from "@/app/_components/remark-flag";
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import type { FieldChangeRow, LineChangeView } from "@/lib/proposals/views";
-import { formatNewtonsChange } from "@/lib/units/format-newtons";
+import { formatNewtonsChange, formatNewtonsChangeNumber } from "@/lib/units/format-newtons";
 import type { EditOperation } from "@/lib/vocabulary/lines";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
@@ -93,7 +93,7 @@ function FieldRow({ proposalId, line, row, mayRemark }: FieldRowProps) {
         <ValueText value={row.toBe} unit={row.unit} />
       </Cell>
       <Cell label="Effect" numeric className="text-water">
-        {row.effect === null ? "" : formatNewtonsChange(row.effect)}
+        {row.effect === null ? "" : formatNewtonsChangeNumber(row.effect)}
       </Cell>
       <Cell className="max-sm:!flex">
         <span className="flex flex-wrap items-center justify-end gap-1.5">

@@ -1,6 +1,6 @@
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { EffectView, PointEffectView } from "@/lib/proposals/views";
-import { formatNewtons, formatNewtonsChange, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { formatNewtons, formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
 import { StavePair } from "../../../_pictures/stave-pair";
@@ -84,7 +84,7 @@ function PointsTable({ effect }: { effect: EffectView }) {
               {formatNewtonsNumber(point.predictedNow)}
             </Cell>
             <Cell numeric label="Effect">
-              {formatNewtonsChange(point.predictedDelta)}
+              {formatNewtonsChangeNumber(point.predictedDelta)}
             </Cell>
             <Cell numeric label="Margin">
               {formatNewtonsNumber(point.marginWas)} → {formatNewtonsNumber(point.marginNow)}

@@ -2,14 +2,14 @@ import { NoteMark } from "@/app/_components/note-mark";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { ItemEffectView } from "@/lib/proposals/views";
-import { formatNewtonsChange, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
 
 /** Results of items at every operating point, as they were and as they become. */
 export function ItemEffects({ heading, effects }: { heading: string; effects: readonly ItemEffectView[] }) {
   if (effects.length === 0) return null;
 
   return (
-    <section>
+    <section className="mt-7">
       <SectionHeading>{heading}</SectionHeading>
       <Table caption={heading} narrow="stack">
         <TableHead>
@@ -40,7 +40,7 @@ export function ItemEffects({ heading, effects }: { heading: string; effects: re
                 {effect.predictedNow === null ? "–" : formatNewtonsNumber(effect.predictedNow)}
               </Cell>
               <Cell numeric label="Effect" className="text-water">
-                {formatNewtonsChange(effect.delta)}
+                {formatNewtonsChangeNumber(effect.delta)}
               </Cell>
             </Row>
           ))}

@@ -19,7 +19,7 @@ interface RemarksScheduleProps {
 /** The numbered remarks of a proposal with their answers, and how what they asked for was settled. */
 export function RemarksSchedule({ proposalId, remarks, mayRemark }: RemarksScheduleProps) {
   return (
-    <section aria-labelledby="remarks">
+    <section aria-labelledby="remarks" className="mt-7">
       <SectionHeading id="remarks" aside={asideText(remarks)}>
         Remarks
       </SectionHeading>

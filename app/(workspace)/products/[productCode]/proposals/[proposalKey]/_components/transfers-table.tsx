@@ -8,7 +8,7 @@ export function TransfersTable({ transfers }: { transfers: readonly TransferView
   if (transfers.length === 0) return null;
 
   return (
-    <section>
+    <section className="mt-7">
       <SectionHeading>Transfers of allocation</SectionHeading>
       <Table caption="Transfers of allocation" narrow="stack">
         <TableHead>

@@ -5,7 +5,7 @@ import type { ItemEffect, PointEffect } from "@/lib/evaluation/budget/effects";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import { effectSentence } from "@/lib/proposals/effect-sentence";
 import type { ProposalPreview } from "@/lib/proposals/preview-proposal";
-import { formatNewtonsChange, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
 interface EffectPanelProps {
@@ -19,7 +19,7 @@ export function EffectPanel({ preview, issue }: EffectPanelProps) {
   const worst = effects.points.find(({ operatingPoint }) => operatingPoint === after.results.worstPoint);
 
   return (
-    <section aria-labelledby="effect">
+    <section aria-labelledby="effect" className="mt-4">
       <h2 id="effect" className="text-lg">
         Effect on issue {issue}
       </h2>
@@ -69,7 +69,7 @@ function PointEffectTable({ point, items }: { point: PointEffect; items: readonl
           <td className="text-right" data-testid={`total-${point.operatingPoint}`}>
             {point.now ? formatNewtonsNumber(point.now.predicted) : "–"}
           </td>
-          <td className="text-right">{formatNewtonsChange(point.predictedDelta)}</td>
+          <td className="text-right">{formatNewtonsChangeNumber(point.predictedDelta)}</td>
         </tr>
         <StandingRow point={point} />
       </tbody>
@@ -116,7 +116,7 @@ function ItemEffectRow({ effect }: { effect: ItemEffect }) {
       </th>
       <td className="py-1 text-right">{predictedWas === null ? "–" : formatNewtonsNumber(predictedWas)}</td>
       <td className="py-1 text-right">{predictedNow === null ? "–" : formatNewtonsNumber(predictedNow)}</td>
-      <td className="py-1 text-right">{formatNewtonsChange(predictedDelta)}</td>
+      <td className="py-1 text-right">{formatNewtonsChangeNumber(predictedDelta)}</td>
     </tr>
   );
 }

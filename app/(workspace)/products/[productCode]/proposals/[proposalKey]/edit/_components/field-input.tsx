@@ -5,30 +5,17 @@ import { ChoiceField } from "@/app/_components/choice-field";
 import { QuantityField } from "@/app/_components/quantity-field";
 import { TextArea } from "@/app/_components/text-area";
 import { TextField } from "@/app/_components/text-field";
-import type { FieldSpec } from "@/lib/evaluation/lines/field-spec";
 import { parseQuantity } from "@/lib/units/parse-quantity";
 import { DIMENSIONS, type DimensionName } from "@/lib/units/dimensions";
 import { formatQuantity } from "@/lib/units/format-quantity";
 
 import { asList, asRecord, type Body, type Json } from "./body";
 import type { EditorNames } from "./editor-names";
+import type { FieldInputProps } from "./field-input-props";
 import { ListInput } from "./list-input";
 import { NumberInput } from "./number-input";
 import { RecordInput } from "./record-input";
 import { ReferencesInput } from "./references-input";
-
-export interface FieldInputProps {
-  spec: FieldSpec;
-  value: Json | undefined;
-  onChange: (value: Json) => void;
-  names: EditorNames;
-  /** Sentence at this field, or at a part of it by its path: "evidence.0.date". */
-  faultAt: (path: string) => string | undefined;
-  /** Path of the field within its body. */
-  path: string;
-  /** Id of the control, so that a fault listed elsewhere can lead to it. */
-  id: string;
-}
 
 /** The control of one field, drawn from the field catalogue. */
 export function FieldInput(props: FieldInputProps) {
@@ -70,9 +57,11 @@ export function FieldInput(props: FieldInputProps) {
     case "references":
       return <ReferencesInput {...texts} to={type.to} value={value} onChange={onChange} names={names} />;
     case "list":
-      return <ListInput {...props} texts={texts} list={type} rows={asList(value)} />;
+      return <ListInput {...props} renderField={renderField} texts={texts} list={type} rows={asList(value)} />;
     case "record":
-      return <RecordInput {...props} texts={texts} fields={type.of} record={asRecord(value)} />;
+      return (
+        <RecordInput {...props} renderField={renderField} texts={texts} fields={type.of} record={asRecord(value)} />
+      );
     case "text":
       return type.multiline ? (
         <TextArea
@@ -102,6 +91,8 @@ export function FieldInput(props: FieldInputProps) {
       );
   }
 }
+
+const renderField = (props: FieldInputProps) => <FieldInput {...props} />;
 
 type Texts = Pick<React.ComponentProps<typeof TextField>, "label" | "hint" | "optional" | "error"> & { id: string };
 

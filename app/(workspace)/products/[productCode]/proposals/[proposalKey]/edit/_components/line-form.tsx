@@ -3,6 +3,7 @@
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { TextField } from "@/app/_components/text-field";
 import { isShown, valuesOf } from "@/lib/evaluation/lines/field-rows";
+import { sameBody } from "@/lib/evaluation/lines/same-body";
 import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
 import { setByChoice } from "@/lib/evaluation/lines/field-spec";
 import type { DraftEdit } from "@/lib/proposals/schema";
@@ -105,7 +106,7 @@ function Fields({ edit, index, body, onChange, names, faults, strict, before }: 
     <div className="grid gap-x-5 gap-y-3.5 sm:grid-cols-2 xl:grid-cols-3">
       {shown.map((spec) => {
         const isWide = spec.type.type === "list" || spec.type.type === "record" || spec.type.type === "references";
-        const isChanged = before !== null && JSON.stringify(body[spec.key]) !== JSON.stringify(before[spec.key]);
+        const isChanged = before !== null && !sameBody(body[spec.key], before[spec.key]);
 
         return (
           <div

@@ -5,16 +5,17 @@ import type { FieldTexts } from "@/app/_components/field";
 import type { FieldSpec, FieldType } from "@/lib/evaluation/lines/field-spec";
 
 import type { Body } from "./body";
-import { FieldInput, type FieldInputProps } from "./field-input";
+import type { FieldInputProps, RenderField } from "./field-input-props";
 
 interface ListInputProps extends FieldInputProps {
   texts: FieldTexts;
+  renderField: RenderField;
   list: Extract<FieldType, { type: "list" }>;
   rows: readonly Body[];
 }
 
 /** Rows of fields: citations, reserves, a planned profile. */
-export function ListInput({ texts, list, rows, onChange, names, faultAt, path, id }: ListInputProps) {
+export function ListInput({ texts, list, rows, onChange, names, faultAt, path, id, renderField }: ListInputProps) {
   const fields = list.of.filter(({ fixed }) => !fixed);
   const replace = (at: number, row: Body) => onChange(rows.map((old, index) => (index === at ? row : old)));
 
@@ -32,15 +33,15 @@ export function ListInput({ texts, list, rows, onChange, names, faultAt, path, i
         <div key={at} className="clear-both mt-2 flex flex-wrap items-end gap-3">
           {fields.map((spec) => (
             <div key={spec.key} className="min-w-32 grow">
-              <FieldInput
-                spec={spec}
-                value={row[spec.key]}
-                onChange={(value) => replace(at, { ...row, [spec.key]: value })}
-                names={names}
-                faultAt={faultAt}
-                path={`${path}.${at}.${spec.key}`}
-                id={`${id}-${at}-${spec.key}`}
-              />
+              {renderField({
+                spec,
+                value: row[spec.key],
+                onChange: (value) => replace(at, { ...row, [spec.key]: value }),
+                names,
+                faultAt,
+                path: `${path}.${at}.${spec.key}`,
+                id: `${id}-${at}-${spec.key}`,
+              })}
             </div>
           ))}
           <Button onClick={() => onChange(rows.filter((_, index) => index !== at))}>Take out</Button>
