@@ -1,3 +1,4 @@
+import { formatSignificant } from "@/lib/units/format-number";
 import { blasiusFrictionIntegral } from "@/lib/aero/friction/blasius";
 import type { FrictionLine } from "@/lib/aero/friction/friction-line";
 import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
@@ -135,7 +136,7 @@ function lineStep(
     `${g} = ${re} · C_F, ${line.formula}`,
     `${digits(reynolds)} · ${digits(mean)}, ${substituted(line, setup, reynolds, mean)}`,
     value,
-    { source: line.source, range: `Re ${min.toExponential(0)} to ${max.toExponential(0)}`.replaceAll("e+", "e") },
+    { source: line.source, range: `Re ${formatSignificant(min, 1)} to ${formatSignificant(max, 1)}` },
   );
 }
 

@@ -1,10 +1,12 @@
+import { formatSignificant } from "@/lib/units/format-number";
 import type { WorkedStep } from "./worked-step";
 
 /** A number in a worked step: six significant digits, so that a hand calculator comes to the same figure. */
 export function digits(value: number): string {
   if (value === 0) return "0";
   const size = Math.abs(value);
-  if (size >= 1e6 || size < 1e-3) return value.toExponential(5).replace("e+", "e");
+  // In brackets, so that a division by it is read as one.
+  if (size >= 1e6 || size < 1e-3) return `(${formatSignificant(value, 6)})`;
   return String(Number(value.toPrecision(6)));
 }
 

@@ -19,14 +19,20 @@ function stepsOf(item: object) {
 /** A hand calculator: the text of a step with its values, read as arithmetic. */
 function handCalculated(text: string): number {
   const expression = text
+    .replace(/ × 10([⁻⁰¹²³⁴⁵⁶⁷⁸⁹]+)/g, (_, power: string) => ` * 10 ** (${plainDigits(power)})`)
     .replaceAll("½", "0.5")
     .replaceAll("·", "*")
     .replaceAll("−", "-")
     .replaceAll("²", "**2")
     .replaceAll("e^(", "Math.exp(")
+    .replaceAll("√(", "Math.sqrt(")
     .replace(/√([\d.e-]+)/g, "Math.sqrt($1)");
   if (!/^[\d.e*/+() \-Mathsqrtxp]+$/.test(expression)) return NaN;
   return Number(new Function(`return ${expression};`)());
+}
+
+function plainDigits(superscripts: string): string {
+  return [...superscripts].map((digit) => (digit === "⁻" ? "-" : "⁰¹²³⁴⁵⁶⁷⁸⁹".indexOf(digit))).join("");
 }
 
 const PLATES: [string, object][] = [
@@ -83,7 +89,7 @@ describe("worked steps", () => {
   it("states sources and ranges of the lines", () => {
     const { steps } = stepsOf(plate({ frictionLine: "white" }));
     const line = steps.find(({ symbol }) => symbol === "G_t");
-    expect(line).toMatchObject({ source: "White, Viscous Fluid Flow, 3rd ed. 2006", range: "Re 5e5 to 1e10" });
+    expect(line).toMatchObject({ source: "White, Viscous Fluid Flow, 3rd ed. 2006", range: "Re 5 × 10⁵ to 1 × 10¹⁰" });
   });
 
   it("are none for a refused item", () => {
