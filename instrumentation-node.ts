@@ -9,7 +9,7 @@ export async function prepareServer(): Promise<void> {
     await migrateDatabase();
   } catch (error) {
     // A server without its database would answer every request with an error: it ends instead.
-    console.error("Leeboard cannot open its database and stops.", error);
+    process.stderr.write(`Leeboard cannot open its database and stops: ${String(error)}\n`);
     process.exit(1);
   }
   startDeliveryLoop();

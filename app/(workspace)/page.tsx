@@ -7,12 +7,11 @@ import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { UtcTime } from "@/app/_components/utc-time";
 import { dayText } from "@/app/_components/utc-text";
+import { productsToEstablish } from "@/app/_server/products-to-establish";
 import { requireActor } from "@/app/_server/session";
-import { registerFor } from "@/lib/products/queries";
 import { daySheet } from "@/lib/proposals/day-sheet";
 import { noteVisit } from "@/lib/proposals/visits";
 import { systemClock } from "@/lib/vocabulary/clock";
-import { isAllowed } from "@/policies/authorize";
 
 import { AwaitedTable } from "./_components/day-sheet/awaited-table";
 import { ChangesTable } from "./_components/day-sheet/changes-table";
@@ -25,15 +24,8 @@ export default async function DaySheetPage() {
   const actor = await requireActor();
   // Before reading: what changed is told since the visit before this one.
   await noteVisit(actor);
-  const [sheet, register] = await Promise.all([daySheet(actor), registerFor(actor)]);
+  const [sheet, toEstablish] = await Promise.all([daySheet(actor), productsToEstablish(actor)]);
   const today = systemClock().toISOString().slice(0, 10);
-  const toEstablish = register
-    .map(({ product }) => product)
-    .filter(({ id, newestIssue }) => newestIssue === null && mayEstablish(id));
-
-  function mayEstablish(productId: number): boolean {
-    return isAllowed(actor, { on: "Product", action: "establish", productId });
-  }
 
   return (
     <div className="mx-auto max-w-[92rem]">

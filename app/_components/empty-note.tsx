@@ -10,7 +10,7 @@ interface EmptyNoteProps {
 /** An empty page says what to do first. */
 export function EmptyNote({ title, children }: EmptyNoteProps) {
   return (
-    <div className="border-y border-rule py-6">
+    <div className="border-y border-rule py-4">
       <p className="font-semibold">{title}</p>
       {children ? <div className="mt-1 max-w-[60ch] text-ink-2">{children}</div> : null}
     </div>

@@ -3,14 +3,15 @@
 import { signOut } from "next-auth/react";
 import { useState } from "react";
 
+import { loadAnew } from "@/app/_components/load-anew";
+
 export function SignOutButton() {
   const [busy, setBusy] = useState(false);
 
   async function leave() {
     setBusy(true);
     await signOut({ redirect: false });
-    // A full load: nothing that was read in this session may stay in the window.
-    window.location.assign("/sign-in");
+    loadAnew("/sign-in");
   }
 
   return (

@@ -7,8 +7,8 @@ import type { Actor } from "@/lib/vocabulary/actor";
 import { HOUSE_CHAIN } from "@/lib/vocabulary/acts";
 import { inTransaction } from "@/models/database";
 import { User } from "@/models/user";
-import { withDatabase } from "../../support/database";
-import { person } from "../../support/people";
+import { withDatabase } from "@/tests/support/database";
+import { person } from "@/tests/support/people";
 
 withDatabase();
 

@@ -7,6 +7,7 @@ import { useState } from "react";
 import { useForm } from "react-hook-form";
 
 import { Button } from "@/app/_components/button";
+import { loadAnew } from "@/app/_components/load-anew";
 import { Notice } from "@/app/_components/notice";
 import { TextField } from "@/app/_components/text-field";
 import { useHydrated } from "@/app/_components/use-hydrated";
@@ -28,8 +29,7 @@ export function SignInForm({ destination }: { destination: Route }) {
     setRefusal(null);
     const answer = await signIn("credentials", { ...input, redirect: false });
     if (answer?.ok && !answer.error) {
-      // A full load: nothing that was read for somebody else before may stay in this window.
-      window.location.assign(destination);
+      loadAnew(destination);
       return;
     }
     setRefusal(REFUSALS[answer?.error ?? ""] ?? "Signing in did not work. Try again in a moment.");

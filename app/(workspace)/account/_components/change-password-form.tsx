@@ -1,6 +1,7 @@
 "use client";
 
 import { Button } from "@/app/_components/button";
+import { loadAnew } from "@/app/_components/load-anew";
 import { Notice } from "@/app/_components/notice";
 import { TextField } from "@/app/_components/text-field";
 import { useActionForm } from "@/app/_components/use-action-form";
@@ -14,7 +15,7 @@ export function ChangePasswordForm() {
     action: changePasswordAction,
     defaults: { current: "", next: "", again: "" },
     // The session ended with the old password.
-    onDone: () => window.location.assign("/sign-in?to=/account"),
+    onDone: () => loadAnew("/sign-in?to=/account"),
   });
 
   return (

@@ -1,6 +1,7 @@
 "use client";
 
 import { ConfirmDialog } from "@/app/_components/confirm-dialog";
+import { loadAnew } from "@/app/_components/load-anew";
 
 import { endSessionsAction } from "../actions";
 
@@ -11,7 +12,7 @@ export function EndSessionsButton() {
       title="Sign out everywhere"
       confirm="Sign out everywhere"
       onConfirm={() => endSessionsAction({})}
-      onDone={() => window.location.assign("/sign-in")}
+      onDone={() => loadAnew("/sign-in")}
     >
       <p>Every session of yours ends, this one too. What you typed and did not save elsewhere is lost there.</p>
     </ConfirmDialog>

@@ -11,9 +11,13 @@ import { mergeRepeats } from "@/lib/audit/merge-repeats";
 import { houseHistory } from "@/lib/products/house-history";
 import { isAllowed } from "@/policies/authorize";
 
-import { HistoryFilter } from "../../products/[productCode]/history/_components/history-filter";
-import { filterOf, historyAddress, HistoryQuery } from "../../products/[productCode]/history/_components/history-query";
-import { HistoryTable } from "../../products/[productCode]/history/_components/history-table";
+import { HistoryFilter } from "@/app/(workspace)/products/[productCode]/history/_components/history-filter";
+import {
+  filterOf,
+  historyAddress,
+  HistoryQuery,
+} from "@/app/(workspace)/products/[productCode]/history/_components/history-query";
+import { HistoryTable } from "@/app/(workspace)/products/[productCode]/history/_components/history-table";
 import { CheckHouseChain } from "./_components/check-house-chain";
 
 export const metadata: Metadata = { title: "History of the installation" };
