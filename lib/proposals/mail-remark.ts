@@ -17,7 +17,7 @@ export async function mailRemark(
   }
 }
 
-export function mailSettled(actor: Actor, context: ProposalAct, remark: Comment): Promise<void> {
+export function mailSettled(actor: Actor, context: ProposalAct, remark: Comment): Promise<number> {
   return mailMany(context, {
     template: "remark_settled",
     occasion: `remark ${remark.id} settled`,

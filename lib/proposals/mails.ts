@@ -1,9 +1,11 @@
+import { namesOf } from "@/lib/budget/members";
 import { enqueueMail } from "@/lib/mail/enqueue";
 import type { MailData, MailTemplate } from "@/lib/mail/message-schemas";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { ROLE_NAMES, type Capacity } from "@/lib/vocabulary/roles";
 import type { RequiredCapacity, RoutedCapacity } from "@/policies/approval-routing";
 import type { ProposalAct } from "./act-on-proposal";
+import type { RoundRecord } from "./round-record";
 import { labelOf, type ProposalRecord } from "./proposal-record";
 import { signaturesOf, type SignatureRecord } from "./signature-records";
 
@@ -20,16 +22,18 @@ interface MailToMany<T extends MailTemplate> {
   data: MailData[T];
 }
 
-/** One mail per person, proposal and state. */
+/** One mail per person, proposal and state; answers how many are new. */
 export async function mailMany<T extends MailTemplate>(
   { tx, at, proposal }: Context,
   mail: MailToMany<T>,
-): Promise<void> {
+): Promise<number> {
+  let sent = 0;
   for (const toUserId of new Set(mail.to)) {
     if (toUserId === mail.except?.userId) continue;
     const key = `proposal ${proposal.id}, ${mail.occasion}, person ${toUserId}`;
-    await enqueueMail({ key, toUserId, template: mail.template, data: mail.data }, tx, at);
+    if (await enqueueMail({ key, toUserId, template: mail.template, data: mail.data }, tx, at)) sent += 1;
   }
+  return sent;
 }
 
 /** Proposals get mails from their first submission on, when they have a number. */
@@ -42,26 +46,33 @@ export function editorsOf({ proposerId, coEditorIds }: ProposalRecord): number[]
   return [proposerId, ...coEditorIds];
 }
 
-/** To everyone who may fill a capacity that is asked for and not signed. */
+/** To everyone who may fill a capacity that is asked for; who was asked in this round before gets no second mail. */
 export async function mailProposed(
-  actor: Actor,
+  actor: Actor | null,
   context: Context,
-  { routing, round }: { routing: readonly RoutedCapacity[]; round: number },
+  { routing, round }: { routing: readonly RoutedCapacity[]; round: RoundRecord },
 ): Promise<void> {
+  const { people, ...facts } = await proposerFacts(context);
   for (const { capacity, reasons, maySign, signedBySubmitting } of routing) {
     if (signedBySubmitting) continue;
     await mailMany(context, {
       template: "proposed",
-      occasion: `proposed in round ${round}`,
+      occasion: `proposed in round ${round.number}`,
       to: maySign.map(({ userId }) => userId),
       except: actor,
       data: {
-        ...mailFacts(context.proposal),
-        ...{ proposerName: actor.printedName, round, capacity, neededBy: context.proposal.neededBy },
+        ...facts,
+        proposerName: people.get(round.submittedById) ?? "",
+        ...{ round: round.number, capacity, neededBy: round.neededBy },
         reasons: reasons.map(({ sentence }) => sentence),
       },
     });
   }
+}
+
+async function proposerFacts({ proposal, tx }: Context) {
+  const people = new Map((await namesOf(proposal.productId, tx)).map(({ id, name }) => [id, name]));
+  return { ...mailFacts(proposal), people };
 }
 
 /** To the signers of the round before: what moved since. It stands in for the mail that asks them to sign. */
@@ -84,7 +95,7 @@ export function mailSigned(
   actor: Actor,
   context: Context,
   signed: { capacity: Capacity; signatureId: number; missing: readonly RequiredCapacity[] },
-): Promise<void> {
+): Promise<number> {
   const stillNeeded = signed.missing.map(({ capacity }) => `a ${ROLE_NAMES[capacity].toLowerCase()}`);
   return mailMany(context, {
     template: "signed",
@@ -99,7 +110,7 @@ export function mailApproved(
   actor: Actor,
   context: Context,
   { issue, approvals }: { issue: number; approvals: readonly SignatureRecord[] },
-): Promise<void> {
+): Promise<number> {
   return mailMany(context, {
     template: "approved",
     occasion: "approved",

@@ -19,7 +19,10 @@ export function moveViews(
   const { proposal, overtaken, today } = review;
   const { productId } = proposal;
   const when = (applies: boolean): MoveView => (applies ? OPEN : HIDDEN);
-  const mayEdit = isAllowed(actor, proposalQuestion(proposal, actor, "edit")) && isOpen(proposal.state);
+  const hasSigned = review.signatures.some(({ signerId, deputyForId }) =>
+    [signerId, deputyForId].includes(actor.userId),
+  );
+  const mayEdit = !hasSigned && isAllowed(actor, proposalQuestion(proposal, actor, "edit")) && isOpen(proposal.state);
   const isProposed = canMove(proposal.state, "approve");
   const isSubmitted = proposal.round > 0 && isOpen(proposal.state);
   const mayShare = {

@@ -51,6 +51,6 @@ export function nameReviewer(
     const nameOf = (id: number | null) => (id === null ? null : (people.get(id) ?? ""));
     record({ was: { reviewer: nameOf(signing.namedReviewerId) }, now: { reviewer: nameOf(userId) } });
     const { routing } = await reviewRound(proposal, round, budgets, { at, tx });
-    await mailProposed(actor, context, { routing, round: round.number });
+    await mailProposed(actor, context, { routing, round });
   });
 }

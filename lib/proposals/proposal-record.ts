@@ -55,11 +55,11 @@ export function proposalsOf(productId: number, tx: Transaction): Promise<Proposa
 
 /** By the key of its URL: the number, or "draft-17" before it has one. */
 export async function proposalByKey(productId: number, key: string, tx: Transaction): Promise<ProposalRecord | null> {
-  const [, draft, number] = /^(?:draft-([1-9]\d{0,8})|([1-9]\d{0,5}))$/.exec(key) ?? [];
-  const found = (await proposalsOf(productId, tx)).find((proposal) =>
-    draft === undefined ? String(proposal.number) === number : String(proposal.id) === draft,
-  );
-  return found ?? null;
+  const [, draft, number] = /^(?:draft-([1-9]\d{0,8})|([1-9]\d{0,8}))$/.exec(key) ?? [];
+  if (draft === undefined && number === undefined) return null;
+  const condition = draft === undefined ? "p.number = :value" : "p.id = :value AND p.number IS NULL";
+  const found = await rows(condition, Number(draft ?? number), tx);
+  return found.find((proposal) => proposal.productId === productId) ?? null;
 }
 
 export function keyOf({ id, number }: Pick<ProposalRecord, "id" | "number">): string {

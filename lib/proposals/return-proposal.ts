@@ -21,10 +21,7 @@ export function returnProposal(actor: Actor, input: ReturnProposalInput, clock: 
     const words = { decision: "return", capacity, meaning: null, reason, deputyForId, takesBackId: null } as const;
     const signature = await writeSignature(actor, review, words, at, tx);
     const state = stateAfter(proposal.state, "return");
-    await Proposal.update(
-      { state, lockVersion: proposal.lockVersion + 1 },
-      { where: { id: proposal.id }, transaction: tx },
-    );
+    await Proposal.update({ state }, { where: { id: proposal.id }, transaction: tx });
     record({
       capacity,
       was: { state: proposal.state },

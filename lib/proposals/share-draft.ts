@@ -6,6 +6,7 @@ import { ProposalCoeditor } from "@/models/proposal-coeditor";
 import { authorize } from "@/policies/authorize";
 import { actOnProposal } from "./act-on-proposal";
 import { isOpen, wrongStateSentence } from "./moves";
+import { roundSignedBy } from "./note-editor";
 import type { ShareDraftInput } from "./schema";
 
 /** Names a co-editor, who sees and edits the working copy from now on and can never sign it. */
@@ -25,6 +26,9 @@ export function shareDraft(
     }
     if (userId === proposerId) throw invalid("The proposer edits it already.");
     if (proposal.coEditorIds.includes(userId)) return;
+    if ((await roundSignedBy(proposal.id, userId, tx)) !== null) {
+      throw invalid(`${member.printedName} has signed this proposal: who signs it does not edit it.`);
+    }
 
     await ProposalCoeditor.create(
       { proposalId: proposal.id, userId, namedById: actor.userId, namedAt: at },

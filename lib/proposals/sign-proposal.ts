@@ -8,7 +8,7 @@ import { approveRound } from "./approve-round";
 import { demandApprovable } from "./demand-approvable";
 import { openRound } from "./open-round";
 import { mailApproved, mailDecided, mailSigned } from "./mails";
-import { mailOvertaken } from "./mail-overtaken";
+import { mailOthers } from "./mail-others";
 import { isFilled, type RoundReview } from "./round-review";
 import type { SignProposalInput } from "./schema";
 import { endProposal } from "./end-proposal";
@@ -71,7 +71,7 @@ async function approve(
     now: { ...signed, state: "approved", issue: issue.number, contentHash: issue.contentHash },
   });
   await mailApproved(actor, context, { issue: issue.number, approvals: review.approvals });
-  await mailOvertaken(context, issue.number);
+  await mailOthers(context);
   return { state: "approved", issue: issue.number };
 }
 

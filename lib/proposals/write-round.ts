@@ -85,7 +85,7 @@ async function mailRound(actor: Actor, { tx, at, proposal: { id } }: ProposalAct
   const context = { tx, at, proposal };
   if (earlier) await mailSuperseded(actor, context, { round: number, moved: whatMoved(earlier, round) });
   const { routing } = await reviewRound(proposal, round, budgetReader(proposal.productId, tx), { at, tx });
-  await mailProposed(actor, context, { routing, round: number });
+  await mailProposed(actor, context, { routing, round });
 }
 
 async function nextProposalNumber(productId: number, { tx }: ProposalAct): Promise<number> {
