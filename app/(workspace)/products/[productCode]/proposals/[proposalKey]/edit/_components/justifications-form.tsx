@@ -1,10 +1,9 @@
 "use client";
 
 import { TextArea } from "@/app/_components/text-area";
+import { asList, asRecord } from "@/app/_components/line-fields/body";
 import type { JustificationNeed } from "@/lib/proposals/change-checks";
 import type { DraftEdit } from "@/lib/proposals/schema";
-
-import { asList, asRecord } from "./body";
 
 interface JustificationsFormProps {
   needs: readonly JustificationNeed[];

@@ -4,13 +4,12 @@ import { useState } from "react";
 
 import { Button } from "@/app/_components/button";
 import { ChoiceField } from "@/app/_components/choice-field";
+import { nextNumber } from "@/app/_components/line-fields/editor-names";
+import { addEdit, type NewLineKind, reviseEdit } from "@/app/_components/line-fields/new-edit";
 import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { lineName } from "@/lib/evaluation/lines/name-book";
 import type { DraftEdit } from "@/lib/proposals/schema";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
-
-import { nextNumber } from "./editor-names";
-import { addEdit, type NewLineKind, reviseEdit } from "./new-edit";
 
 interface LineChooserProps {
   state: BudgetState;

@@ -2,6 +2,10 @@
 
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { TextField } from "@/app/_components/text-field";
+import type { Body } from "@/app/_components/line-fields/body";
+import type { EditorNames } from "@/app/_components/line-fields/editor-names";
+import { FieldInput } from "@/app/_components/line-fields/field-input";
+import { withMethod } from "@/app/_components/line-fields/new-edit";
 import { isShown, valuesOf } from "@/lib/evaluation/lines/field-rows";
 import { sameBody } from "@/lib/evaluation/lines/same-body";
 import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
@@ -9,11 +13,6 @@ import { setByChoice } from "@/lib/evaluation/lines/field-spec";
 import type { DraftEdit } from "@/lib/proposals/schema";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
-
-import type { Body } from "./body";
-import type { EditorNames } from "./editor-names";
-import { FieldInput } from "./field-input";
-import { withMethod } from "./new-edit";
 
 interface LineFormProps {
   edit: DraftEdit;

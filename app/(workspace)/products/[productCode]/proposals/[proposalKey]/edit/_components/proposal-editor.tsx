@@ -6,16 +6,16 @@ import { MarkdownEditor } from "@/app/_components/markdown-editor";
 import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { TextField } from "@/app/_components/text-field";
+import { linesToName } from "@/app/_components/line-fields/editor-names";
+import { bodyBefore } from "@/app/_components/line-fields/new-edit";
 import type { EditorView } from "@/lib/proposals/editor-view";
 import type { DraftContent } from "@/lib/proposals/schema";
 
 import { CoEditors } from "./co-editors";
-import { linesToName } from "./editor-names";
 import { EffectPanel } from "./effect-panel";
 import { JustificationsForm } from "./justifications-form";
 import { LineChooser } from "./line-chooser";
 import { LineForm } from "./line-form";
-import { bodyBefore } from "./new-edit";
 import { Obstacles } from "./obstacles";
 import { ProposeDialog } from "./propose-dialog";
 import { RoutingPanel } from "./routing-panel";

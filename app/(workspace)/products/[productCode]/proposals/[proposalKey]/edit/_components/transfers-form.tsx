@@ -3,11 +3,10 @@
 import { Button } from "@/app/_components/button";
 import { ChoiceField } from "@/app/_components/choice-field";
 import { Notice } from "@/app/_components/notice";
+import type { EditorNames } from "@/app/_components/line-fields/editor-names";
+import { NumberInput } from "@/app/_components/line-fields/number-input";
 import type { DraftTransfer } from "@/lib/proposals/schema";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
-
-import type { EditorNames } from "./editor-names";
-import { NumberInput } from "./number-input";
 
 interface TransfersFormProps {
   transfers: readonly DraftTransfer[];
