@@ -1,0 +1,69 @@
+import { streamStateOf } from "../methods/stream-state";
+import type { BudgetModel, ModelItem } from "./budget-model";
+import type { Cause } from "./cause";
+import { normalCumulative } from "./normal-distribution";
+import { normalQuantile } from "./normal-quantile";
+import { fillSlots } from "./slot";
+import type { UniformStream } from "./xoshiro";
+
+/** The number before 1, which the sum of two parts may be rounded to. */
+const GREATEST_PART = 1 - 2 ** -53;
+
+/** ΣB and ΣB + ΣG of one draw; NaN where a method refuses what was drawn. */
+export interface DrawnTotals {
+  basic: number;
+  predicted: number;
+}
+
+/** Draws a budget: every cause once, then every item from those very causes. Two runs from one stream are alike. */
+export function budgetDrawer(model: BudgetModel): (stream: UniformStream) => DrawnTotals {
+  const { causes, items, stream: point } = model;
+  const drawers = causes.map(causeDrawer);
+  const deviations = new Float64Array(causes.length);
+  const basics = new Float64Array(items.length);
+  return (uniform) => {
+    drawers.forEach((draw, place) => (deviations[place] = draw(uniform)));
+    fillSlots(point.slots, deviations);
+    const state = streamStateOf(point.input);
+    let basic = 0;
+    let predicted = 0;
+    for (let index = 0; index < items.length; index += 1) {
+      const item = items[index];
+      if (!item) continue;
+      let newtons = item.kind === "share" ? sharedNewtons(item, basics, deviations) : formulaNewtons(item);
+      for (const place of item.biases) newtons *= 1 + (deviations[place] ?? 0);
+      basics[index] = newtons;
+      basic += newtons;
+      predicted += newtons + Math.abs(newtons) * item.growthFraction;
+    }
+    return { basic, predicted };
+
+    function formulaNewtons(item: Extract<ModelItem, { kind: "formula" }>): number {
+      fillSlots(item.slots, deviations);
+      return item.force.newtons(state);
+    }
+  };
+}
+
+function sharedNewtons(
+  { fraction, fractionPlace, members }: Extract<ModelItem, { kind: "share" }>,
+  basics: Float64Array,
+  deviations: Float64Array,
+): number {
+  let sum = 0;
+  for (const member of members) sum += basics[member] ?? 0;
+  return sum * (fractionPlace === null ? fraction : fraction + (deviations[fractionPlace] ?? 0));
+}
+
+/**
+ * The deviation of a cause from its value: normal (JCGM 101:2008, 6.4.7), cut off where the quantity cannot be. Cut off
+ * means drawn from what is left of the distribution, which only shows where the uncertainty is a great part of the value.
+ */
+function causeDrawer({ value, standardUncertainty, lowest, highest }: Cause): (uniform: UniformStream) => number {
+  const below = normalCumulative((lowest - value) / standardUncertainty);
+  const within = normalCumulative((highest - value) / standardUncertainty) - below;
+  return (uniform) => {
+    const part = Math.min(below + within * uniform.nextUniform(), GREATEST_PART);
+    return standardUncertainty * normalQuantile(part);
+  };
+}
