@@ -36,6 +36,8 @@ export const test = base.extend<Fixtures, { application: RunningApplication }>({
   mails: async ({ application }, use) => use(() => caughtMails(application.mailAddress)),
 });
 
+export { expect };
+
 /** React has taken over the page: what is typed or pressed before would be lost. */
 export async function hydrated(page: Page): Promise<void> {
   await page.waitForFunction(() => Object.keys(document).some((key) => key.startsWith("__reactContainer")));
