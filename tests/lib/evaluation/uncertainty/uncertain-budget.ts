@@ -9,39 +9,26 @@ export function spread(value: number, standardUncertainty: number) {
   return { value, standardUncertainty };
 }
 
-export function plate(length: object, breadth: object, faces: number, more: object = {}) {
-  return {
-    name: "Plate",
-    order: 10,
-    ownerId: 1,
-    grade: "estimated",
-    method: "flat-plate-friction",
-    methodVersion: 1,
-    length,
-    breadth,
-    faces,
-    roughness: { value: 0 },
-    transition: "tripped",
-    frictionLine: "one-fifth-law",
-    ...more,
-  };
+/** An item by any method, estimated and of its first version. */
+export function item(method: string, fields: object) {
+  return { name: method, order: 10, ownerId: 1, grade: "estimated", method, methodVersion: 1, ...fields };
 }
 
-export function body(dragCoefficient: number, coefficientUncertainty: number | null, area: object, more: object = {}) {
-  const own = { method: "bluff-body", dragCoefficient, coefficientUncertainty, referenceArea: area };
-  return { ...common("Body"), ...own, ...more };
+export function plate(length: object, breadth: object, faces: number, more: object = {}) {
+  const line = { roughness: { value: 0 }, transition: "tripped", frictionLine: "one-fifth-law" };
+  return item("flat-plate-friction", { length, breadth, faces, ...line, ...more });
+}
+
+export function body(dragCoefficient: number, coefficientUncertainty: number | null, referenceArea: object) {
+  return item("bluff-body", { source: "Test", dragCoefficient, coefficientUncertainty, referenceArea });
 }
 
 export function fixed(force: object, more: object = {}) {
-  return { ...common("Fixed"), method: "fixed", force, ...more };
+  return item("fixed", { source: "Test", force, ...more });
 }
 
-export function share(fraction: number, of: string[], more: object = {}) {
-  return { ...common("Share"), method: "share", fraction, of, ofGroup: null, includeSavings: false, ...more };
-}
-
-function common(name: string) {
-  return { name, order: 10, ownerId: 1, grade: "estimated", methodVersion: 1, source: "Test" };
+export function share(fraction: number, of: string[], coefficientUncertainty: number | null) {
+  return item("share", { source: "Test", fraction, of, coefficientUncertainty });
 }
 
 export const CUSTOM = {
