@@ -2,8 +2,10 @@
 
 import { useRouter } from "next/navigation";
 import { type FormEvent, type ReactNode, type RefObject, useRef, useState } from "react";
+import { flushSync } from "react-dom";
 
 import type { ActionResult } from "../_server/action-result";
+import { answerOf } from "./answer-of";
 import { Button, type ButtonKind } from "./button";
 import { ModalSheet } from "./modal-sheet";
 import { Notice } from "./notice";
@@ -31,26 +33,28 @@ interface ConfirmDialogProps {
 export function ConfirmDialog(props: ConfirmDialogProps) {
   const { trigger, triggerKind, disabled, title, confirm, confirmKind = "primary", children } = props;
   const dialog = useRef<HTMLDialogElement>(null);
-  const { busy, answer, submit, clear } = useConfirmation(dialog, props);
+  const { opened, open, busy, answer, submit, clear } = useConfirmation(dialog, props);
   const refused = answer && !answer.ok ? answer : null;
   const faultOf: FaultOf = (path) => refused?.faults.find((fault) => fault.path === path)?.sentence;
 
   return (
     <>
-      <Button kind={triggerKind} disabled={disabled} aria-haspopup="dialog" onClick={() => dialog.current?.showModal()}>
+      <Button kind={triggerKind} disabled={disabled} aria-haspopup="dialog" onClick={open}>
         {trigger}
       </Button>
       <ModalSheet dialog={dialog} title={title} onClose={clear}>
-        <form onSubmit={submit} className="space-y-4">
-          {typeof children === "function" ? children(faultOf) : children}
-          {refused ? <Notice kind="refusal">{refused.sentence}</Notice> : null}
-          <div className="flex flex-wrap gap-2">
-            <Button type="submit" kind={confirmKind} busy={busy}>
-              {busy ? "One moment…" : confirm}
-            </Button>
-            <Button onClick={() => dialog.current?.close()}>Cancel</Button>
-          </div>
-        </form>
+        {opened ? (
+          <form onSubmit={submit} className="space-y-4">
+            {typeof children === "function" ? children(faultOf) : children}
+            {refused ? <Notice kind="refusal">{refused.sentence}</Notice> : null}
+            <div className="flex flex-wrap gap-2">
+              <Button type="submit" kind={confirmKind} busy={busy}>
+                {busy ? "One moment…" : confirm}
+              </Button>
+              <Button onClick={() => dialog.current?.close()}>Cancel</Button>
+            </div>
+          </form>
+        ) : null}
       </ModalSheet>
     </>
   );
@@ -61,18 +65,34 @@ function useConfirmation(
   { onConfirm, onDone }: Pick<ConfirmDialogProps, "onConfirm" | "onDone">,
 ) {
   const router = useRouter();
+  const [opened, setOpened] = useState(false);
   const [busy, setBusy] = useState(false);
   const [answer, setAnswer] = useState<ActionResult<unknown> | null>(null);
+
+  function open() {
+    // The content has to be there when the dialog looks for what to focus.
+    flushSync(() => setOpened(true));
+    dialog.current?.showModal();
+  }
+
+  // Closed unfinished, it keeps what was typed, but no password.
+  function clear() {
+    setAnswer(null);
+    for (const field of dialog.current?.querySelectorAll<HTMLInputElement>("input[type=password]") ?? []) {
+      field.value = "";
+    }
+  }
 
   async function submit(event: FormEvent<HTMLFormElement>) {
     event.preventDefault();
     if (busy) return;
     setBusy(true);
     try {
-      const result = await onConfirm(new FormData(event.currentTarget));
+      const result = await answerOf(onConfirm(new FormData(event.currentTarget)));
       setAnswer(result);
       if (!result.ok) return;
       dialog.current?.close();
+      setOpened(false);
       if (onDone) onDone();
       else router.refresh();
     } finally {
@@ -80,5 +100,5 @@ function useConfirmation(
     }
   }
 
-  return { busy, answer, submit, clear: () => setAnswer(null) };
+  return { opened, open, busy, answer, submit, clear };
 }

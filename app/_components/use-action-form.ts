@@ -6,6 +6,7 @@ import { type DefaultValues, type FieldPath, type FieldValues, get, useForm } fr
 import type { z } from "zod";
 
 import type { ActionResult } from "../_server/action-result";
+import { answerOf } from "./answer-of";
 
 interface ActionFormOptions<Input extends FieldValues, Output, Value> {
   schema: z.ZodType<Output, Input>;
@@ -26,7 +27,7 @@ export function useActionForm<Input extends FieldValues, Output, Value>(
   // The action parses again: what is sent is what was typed, not what this side made of it.
   const submit = form.handleSubmit(async () => {
     setRefusal(null);
-    const result = await action(form.getValues());
+    const result = await answerOf(action(form.getValues()));
     if (result.ok) return onDone(result.value);
 
     setRefusal(result.sentence);
