@@ -1,0 +1,100 @@
+import { z } from "zod";
+import {
+  drafted,
+  endSessions,
+  propose,
+  proposed,
+  saveDraft,
+  sheetBefore,
+  sign,
+  startDraft,
+} from "../support/http-acts";
+import { routeAnswer, valueOf } from "../support/http-answer";
+import { bluff, content, revising } from "../support/http-bodies";
+import { PRODUCT } from "../support/http-people";
+import { nobody, signInOverHttp } from "../support/http-person";
+import { test } from "../support/http-test";
+
+const SIGNED_OUT = "You are signed out. Sign in again in another tab, then try again here: nothing typed is lost.";
+
+test("who is signed out saves nothing, proposes nothing and signs nothing", async ({ application, as, refuses }) => {
+  const tansy = await as("tansy");
+  const change = content([revising("010", bluff(tansy.userId, 0.49))]);
+  const draft = await drafted(tansy, change);
+  const proposal = await proposed(tansy, change);
+  const shown = await sheetBefore(await as("ines"), proposal);
+  const stranger = nobody(application.address);
+
+  const sentence = "You are signed out. Sign in again.";
+  await refuses(() => saveDraft(stranger, { ...draft, content: change }), { code: "forbidden", status: 401, sentence });
+  await refuses(() => propose(stranger, draft), { code: "forbidden", sentence: SIGNED_OUT });
+  await refuses(() => sign(stranger, proposal, shown), { code: "forbidden", sentence: SIGNED_OUT });
+  await refuses(() => startDraft(stranger), { code: "forbidden", sentence: SIGNED_OUT });
+});
+
+test("a cookie that was signed out elsewhere is worth nothing", async ({ application, refuses }) => {
+  const odo = await signInOverHttp(application.address, "odo");
+  valueOf(await endSessions(odo), z.unknown());
+  await refuses(() => startDraft(odo), { code: "forbidden", sentence: SIGNED_OUT });
+});
+
+test("a write that another site sends is refused, and taken from a page of this address", async ({
+  application,
+  as,
+  refuses,
+}) => {
+  const tansy = await as("tansy");
+  const draft = await drafted(tansy, content([revising("010", bluff(tansy.userId, 0.49))]));
+  const sentence = "This request did not come from a page of this address.";
+  for (const headers of [
+    { origin: "https://elsewhere.example" },
+    { origin: "null" },
+    { "sec-fetch-site": "cross-site" },
+  ]) {
+    const refused = { code: "invalid", status: 403, sentence };
+    await refuses(() => propose(tansy, draft, { headers }), refused);
+    await refuses(() => saveDraft(tansy, { ...draft, content: content([]) }, { headers }), refused);
+  }
+  const own = { origin: application.address, "sec-fetch-site": "same-origin" };
+  valueOf(await propose(tansy, draft, { headers: own }), z.object({ round: z.literal(1) }));
+});
+
+test("a body of more than a megabyte is refused unread, and so is one that does not say how long it is", async ({
+  application,
+  as,
+  refuses,
+}) => {
+  const tansy = await as("tansy");
+  const draft = await drafted(tansy, content([]));
+  const sentence = "This is longer than one megabyte. Shorten it and send it again.";
+  const long = { ...content([]), reason: "x".repeat(1_100_000) };
+  await refuses(() => saveDraft(tansy, { ...draft, content: long }), { code: "invalid", status: 413, sentence });
+  await refuses(() => propose(tansy, draft, { key: "x".repeat(1_100_000) }), {
+    code: "invalid",
+    status: 413,
+    sentence,
+  });
+
+  const body = new Blob([JSON.stringify({ ...draft, content: content([]) })]).stream();
+  const unmeasured = async () =>
+    routeAnswer(
+      await fetch(`${application.address}/api/products/${PRODUCT}/drafts/${draft.proposalId}`, {
+        method: "PUT",
+        headers: { "content-type": "application/json", cookie: tansy.cookie },
+        body,
+        duplex: "half",
+      }),
+    );
+  await refuses(unmeasured, { code: "invalid", status: 413, sentence });
+});
+
+test("a draft of more than half a megabyte is refused in words", async ({ as, refuses }) => {
+  const tansy = await as("tansy");
+  const draft = await drafted(tansy, content([]));
+  const long = { ...content([]), reason: "x".repeat(600_000) };
+  await refuses(() => saveDraft(tansy, { ...draft, content: long }), {
+    code: "invalid",
+    status: 400,
+    sentence: "This is no JSON text, or it is too long.",
+  });
+});
