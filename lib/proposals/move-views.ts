@@ -3,7 +3,7 @@ import type { Capacity } from "@/lib/vocabulary/roles";
 import { isAllowed } from "@/policies/authorize";
 import { signingRights, type SigningRight } from "@/policies/signing-rights";
 import { canMove, isOpen } from "./moves";
-import { proposalQuestion } from "./proposal-record";
+import { hasPart, proposalQuestion } from "./proposal-record";
 import { isFilled, type RoundReview } from "./round-review";
 import type { MoveView, ProposalMove } from "./views";
 
@@ -48,7 +48,12 @@ export function moveViews(
     return: when(signs),
     disapprove: when(isProposed && hasRight(actor, "program_manager", review)),
     take_back: when(isProposed && review.approvals.some(({ signerId }) => signerId === actor.userId)),
-    object: when(isProposed && !signs && isAllowed(actor, { on: "Product", action: "object", productId })),
+    object: when(
+      isProposed &&
+        !signs &&
+        !hasPart(proposal, actor.userId) &&
+        isAllowed(actor, { on: "Product", action: "object", productId }),
+    ),
     remark: when(isSubmitted && isAllowed(actor, { on: "Product", action: "remark", productId })),
     name_reviewer: when(isProposed && isAllowed(actor, { on: "Product", action: "assign_reviewer", productId })),
   };
