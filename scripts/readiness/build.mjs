@@ -1,6 +1,7 @@
 // @ts-check
 import { existsSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
+import { buildMonteCarloWorker } from "./monte-carlo-worker.mjs";
 import { repositoryRoot } from "./repository-root.mjs";
 import { runInstalled } from "./run-program.mjs";
 import { sourceHash } from "./source-hash.mjs";
@@ -16,5 +17,6 @@ export async function ensureBuild() {
   rmSync(STAMP, { force: true });
   const code = await runInstalled("next/dist/bin/next", ["build"], { NODE_ENV: "production" });
   if (code !== 0) throw new Error("The application could not be built; the build says above why.");
+  await buildMonteCarloWorker();
   writeFileSync(STAMP, hash);
 }

@@ -1,0 +1,61 @@
+import path from "node:path";
+import { Worker } from "node:worker_threads";
+import type { MonteCarloOutcome } from "@/lib/evaluation/uncertainty/monte-carlo";
+import { MonteCarloMessage, type MonteCarloJob } from "./job";
+
+/** A run that takes longer has gone wrong: a hundred thousand draws of a large budget take some ten seconds. */
+const LONGEST_RUN_MS = 120_000;
+
+export interface RunOptions {
+  /** Told from time to time how many draws are done. */
+  onProgress?: (done: number) => void;
+  /** Stops the run. */
+  signal?: AbortSignal;
+  timeoutMs?: number;
+  /** The built thread; that of the built application where nothing is said. */
+  workerFile?: string;
+}
+
+/**
+ * Draws a budget on a thread of its own, so that requests are answered meanwhile. The thread is gone when this settles.
+ *
+ * @throws Error if the run takes too long or its thread fails; the signal's reason if it is stopped
+ */
+export async function runMonteCarlo(job: MonteCarloJob, options: RunOptions = {}): Promise<MonteCarloOutcome> {
+  options.signal?.throwIfAborted();
+  const worker = new Worker(options.workerFile ?? builtWorkerFile(), { workerData: job });
+  try {
+    return await outcomeOf(worker, options);
+  } finally {
+    await worker.terminate();
+  }
+}
+
+/** Beside the build that it belongs to. */
+function builtWorkerFile(): string {
+  return path.join(process.cwd(), ".next", "monte-carlo-worker.mjs");
+}
+
+function outcomeOf(
+  worker: Worker,
+  { onProgress, signal, timeoutMs = LONGEST_RUN_MS }: RunOptions,
+): Promise<MonteCarloOutcome> {
+  return new Promise<MonteCarloOutcome>((resolve, reject) => {
+    const timeout = setTimeout(() => reject(new Error(`The run took longer than ${timeoutMs} ms.`)), timeoutMs);
+    const stop = (): void => reject(signal?.reason);
+    signal?.addEventListener("abort", stop, { once: true });
+    const settled = (): void => {
+      clearTimeout(timeout);
+      signal?.removeEventListener("abort", stop);
+    };
+    worker.once("error", reject);
+    worker.once("exit", (code) => reject(new Error(`The thread ended with code ${code} before it had a result.`)));
+    worker.on("exit", settled);
+    worker.on("message", (raw: unknown) => {
+      const message = MonteCarloMessage.safeParse(raw);
+      if (!message.success) reject(message.error);
+      else if (message.data.type === "progress") onProgress?.(message.data.done);
+      else resolve(message.data.outcome);
+    });
+  });
+}
