@@ -4,7 +4,7 @@ import { issueContentHash, type IssueContent } from "@/lib/audit/issue-content-h
 import { lineRevisionHash } from "@/lib/audit/line-revision-hash";
 import { chainHead } from "@/lib/audit/write-entry";
 import type { BudgetResults, ItemResult } from "@/lib/evaluation/budget/results";
-import type { LineState } from "@/lib/evaluation/lines/line-state";
+import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { database } from "@/models/database";
 import { Issue } from "@/models/issue";
 import { Line } from "@/models/line";
@@ -12,6 +12,7 @@ import { LineRevision } from "@/models/line-revision";
 import { Result } from "@/models/result";
 import type { ProductRow } from "./load-budget";
 import { textsToStore, totalsToStore } from "./stored-results";
+import { uncertaintyToStore } from "./stored-uncertainty";
 
 export interface IssueToWrite {
   product: ProductRow;
@@ -21,6 +22,8 @@ export interface IssueToWrite {
   at: string;
   /** The lines that get a revision, as they then stand. */
   changedLines: readonly LineState[];
+  /** Every line as it then stands. */
+  state: BudgetState;
   /** Results of the newest issue; null for issue 1. */
   resultsBefore: BudgetResults | null;
   results: BudgetResults;
@@ -33,7 +36,7 @@ export interface WrittenIssue {
 }
 
 /**
- * Writes the next issue: revisions of the changed lines, the results that changed, totals and content hash. The caller
+ * Writes the next issue: revisions of the changed lines, the results that changed, totals, their uncertainty and content hash. The caller
  * has checked the change and puts number and content hash into the history entry of its act.
  */
 export async function writeIssue(issue: IssueToWrite, tx: Transaction): Promise<WrittenIssue> {
@@ -44,11 +47,12 @@ export async function writeIssue(issue: IssueToWrite, tx: Transaction): Promise<
   const revisions = issue.changedLines.map((line) => storedRevision(line, product.code));
   const rows = changedResults(issue.resultsBefore, results);
   const totals = canonicalJson(totalsToStore(results));
+  const uncertainty = canonicalJson(uncertaintyToStore(issue.state, results));
   const contentHash = issueContentHash({
     productCode: product.code,
     number,
     totals,
-    uncertainty: null,
+    uncertainty,
     revisions,
     results: rows,
   });
@@ -60,7 +64,7 @@ export async function writeIssue(issue: IssueToWrite, tx: Transaction): Promise<
       proposalId,
       madeAt,
       totals,
-      uncertainty: null,
+      uncertainty,
       contentHash,
       chainSequence: head.sequence,
       chainHash: head.hash,

@@ -42,7 +42,7 @@ export async function establishProduct(
     const { code, name, kind } = product;
     const state: BudgetState = { product: { code, name, kind }, lines };
     const results = evaluateBudget(state);
-    const issue = { product, proposalId: null, at, changedLines: lines, resultsBefore: null, results };
+    const issue = { product, proposalId: null, at, changedLines: lines, state, resultsBefore: null, results };
     const { number, contentHash } = await writeIssue(issue, tx);
     const canonicalText = establishmentText({ state, contentHash, signer: actor, at });
     const signed = { subjectType: "establishment", baselineId: null, meaning: ESTABLISHMENT_MEANING } as const;

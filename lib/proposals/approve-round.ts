@@ -12,6 +12,7 @@ export async function approveRound(context: ProposalAct, review: RoundReview): P
       proposalId: proposal.id,
       at: context.at,
       changedLines: onToday.change.changedLines,
+      state: onToday.change.after.state,
       resultsBefore: today.results,
       results: onToday.change.after.results,
     },

@@ -74,9 +74,10 @@ export async function establish(
         password: "not asked",
       });
       const { name, kind } = product;
-      const results = evaluateBudget({ product: { code, name, kind }, lines });
+      const state = { product: { code, name, kind }, lines };
+      const results = evaluateBudget(state);
       const issue = await writeIssue(
-        { product, proposalId: null, at: now, changedLines: lines, resultsBefore: null, results },
+        { product, proposalId: null, at: now, changedLines: lines, state, resultsBefore: null, results },
         tx,
       );
       const subject = { type: "issue", id: "1", label: `${code} issue 1` };
@@ -158,6 +159,7 @@ export async function approve(code: string, at: string, change: ApprovedChange):
         proposalId: proposal.id,
         at: now,
         changedLines,
+        state: after.state,
         resultsBefore: before.results,
         results: after.results,
       },

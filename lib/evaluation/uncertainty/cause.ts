@@ -1,5 +1,6 @@
 /** Where an uncertain quantity stands; `method` is the bias that a friction line or a method brings by itself. */
-export type CauseOrigin = "operating_point" | "terms" | "finish" | "item" | "method";
+export const CAUSE_ORIGINS = ["operating_point", "terms", "finish", "item", "method"] as const;
+export type CauseOrigin = (typeof CAUSE_ORIGINS)[number];
 
 /** One uncertain quantity, drawn once for all that depends on it. */
 export interface Cause {

@@ -44,6 +44,7 @@ function slopeOf(place: number, item: FormulaItem, model: BudgetModel, nominal: 
     if (!nominal) fillSlots(stream.slots, deviations);
   };
   const found = slope(cause, (value) => {
+    if (value < cause.lowest || value > cause.highest) return null;
     setTo(value);
     const here = nominal ?? streamStateOf(stream.input);
     const newtons = item.force.newtons(here);
