@@ -5,6 +5,7 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import type { RegisterEntry } from "@/lib/budget/views";
 import { formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { PRODUCT_KIND_NAMES } from "@/lib/vocabulary/lines";
+import { ROLE_NAMES } from "@/lib/vocabulary/roles";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
 /** All products that the reader may see, each with where it stands at its worst operating point. */
@@ -47,7 +48,9 @@ function RegisterRow({ entry: { product, roles, worst, openProposals } }: { entr
           {product.code}
         </Link>{" "}
         {product.name}
-        <span className="block text-xs text-ink-2">{roles.length > 0 ? roles.join(", ") : "no role of yours"}</span>
+        <span className="block text-xs text-ink-2">
+          {roles.length > 0 ? roles.map(roleName).join(", ") : "no role of yours"}
+        </span>
       </RowHead>
       <Cell label="Kind">{PRODUCT_KIND_NAMES[product.kind]}</Cell>
       <Cell numeric label="Issue">
@@ -71,4 +74,8 @@ function RegisterRow({ entry: { product, roles, worst, openProposals } }: { entr
       </Cell>
     </Row>
   );
+}
+
+function roleName(role: string): string {
+  return Object.entries(ROLE_NAMES).find(([key]) => key === role)?.[1] ?? role;
 }
