@@ -1,3 +1,4 @@
+import { expect } from "@playwright/test";
 import { z } from "zod";
 import {
   drafted,
@@ -13,6 +14,7 @@ import { routeAnswer, valueOf } from "../support/http-answer";
 import { bluff, content, revising } from "../support/http-bodies";
 import { PRODUCT } from "../support/http-people";
 import { nobody, signInOverHttp } from "../support/http-person";
+import { storedState } from "../support/http-tables";
 import { test } from "../support/http-test";
 
 const SIGNED_OUT = "You are signed out. Sign in again in another tab, then try again here: nothing typed is lost.";
@@ -38,6 +40,16 @@ test("a cookie that was signed out elsewhere is worth nothing", async ({ applica
   await refuses(() => startDraft(odo), { code: "forbidden", sentence: SIGNED_OUT });
 });
 
+test("a wrong password signs nobody in", async ({ application }) => {
+  const before = await storedState(application.dataFolder);
+  await expect(signInOverHttp(application.address, "odo", "not my password")).rejects.toThrow("odo was not signed in");
+  const after = await storedState(application.dataFolder);
+  expect(after.tables).toEqual(before.tables);
+  expect(after.history.slice(before.history.length)).toMatchObject([
+    { act: "sign_in", outcome: "refused", reason: "E-mail address or password is wrong." },
+  ]);
+});
+
 test("a write that another site sends is refused, and taken from a page of this address", async ({
   application,
   as,
@@ -46,11 +58,12 @@ test("a write that another site sends is refused, and taken from a page of this 
   const tansy = await as("tansy");
   const draft = await drafted(tansy, content([revising("010", bluff(tansy.userId, 0.49))]));
   const sentence = "This request did not come from a page of this address.";
-  for (const headers of [
+  const foreign: Record<string, string>[] = [
     { origin: "https://elsewhere.example" },
     { origin: "null" },
     { "sec-fetch-site": "cross-site" },
-  ]) {
+  ];
+  for (const headers of foreign) {
     const refused = { code: "invalid", status: 403, sentence };
     await refuses(() => propose(tansy, draft, { headers }), refused);
     await refuses(() => saveDraft(tansy, { ...draft, content: content([]) }, { headers }), refused);
@@ -75,16 +88,17 @@ test("a body of more than a megabyte is refused unread, and so is one that does 
     sentence,
   });
 
-  const body = new Blob([JSON.stringify({ ...draft, content: content([]) })]).stream();
-  const unmeasured = async () =>
-    routeAnswer(
-      await fetch(`${application.address}/api/products/${PRODUCT}/drafts/${draft.proposalId}`, {
-        method: "PUT",
-        headers: { "content-type": "application/json", cookie: tansy.cookie },
-        body,
-        duplex: "half",
-      }),
+  const unmeasured = async () => {
+    const stream = {
+      method: "PUT",
+      headers: { "content-type": "application/json", cookie: tansy.cookie },
+      body: new Blob([JSON.stringify({ ...draft, content: content([]) })]).stream(),
+      duplex: "half",
+    };
+    return routeAnswer(
+      await fetch(`${application.address}/api/products/${PRODUCT}/drafts/${draft.proposalId}`, stream),
     );
+  };
   await refuses(unmeasured, { code: "invalid", status: 413, sentence });
 });
 

@@ -1,4 +1,3 @@
-import { expect } from "@playwright/test";
 import { z } from "zod";
 import {
   drafted,
@@ -13,7 +12,7 @@ import {
 } from "../support/http-acts";
 import { valueOf } from "../support/http-answer";
 import { bluff, content, revising } from "../support/http-bodies";
-import { OTHER_PRODUCT, PRODUCT, type PersonName } from "../support/http-people";
+import { OTHER_PRODUCT } from "../support/http-people";
 import type { HttpPerson } from "../support/http-person";
 import { test } from "../support/http-test";
 
@@ -172,21 +171,5 @@ test.describe("wrong product", () => {
         recorded: { act: "save_draft", by: otto },
       },
     );
-  });
-
-  test("its pages show nothing of the budget", async ({ application, as }) => {
-    const read = async (name: PersonName, page: string) => {
-      const { cookie } = await as(name);
-      const response = await fetch(`${application.address}/products/${PRODUCT}/${page}`, { headers: { cookie } });
-      return { status: response.status, text: await response.text() };
-    };
-    const own = await read("tansy", "budget");
-    expect(own.status).toBe(200);
-    expect(own.text).toContain("Mirror");
-    for (const page of ["budget", "proposals", "history", "items/010"]) {
-      const { status, text } = await read("otto", page);
-      expect(status, page).toBe(403);
-      expect(text, page).not.toContain("Mirror");
-    }
   });
 });

@@ -71,12 +71,11 @@ export interface ShownSheet {
 }
 
 /** What stands before a signer: the two hashes that their page was sent with. */
-export async function sheetBefore({ address, cookie }: HttpPerson, { key }: SubmittedProposal): Promise<ShownSheet> {
-  const response = await fetch(`${address}/products/${PRODUCT}/proposals/${key}`, { headers: { cookie } });
-  const page = await response.text();
+export async function sheetBefore(person: HttpPerson, { key }: SubmittedProposal): Promise<ShownSheet> {
+  const page = await read(person, `/products/${PRODUCT}/proposals/${key}`);
   const hash = (field: string) => {
-    const [, value] = new RegExp(`\\\\"${field}\\\\":\\\\"([0-9a-f]{64})\\\\"`).exec(page) ?? [];
-    if (value === undefined) throw new Error(`The page of proposal ${key} (${response.status}) holds no ${field}.`);
+    const [, value] = new RegExp(`\\\\"${field}\\\\":\\\\"([0-9a-f]{64})\\\\"`).exec(page.text) ?? [];
+    if (value === undefined) throw new Error(`The page of proposal ${key} (${page.status}) holds no ${field}.`);
     return value;
   };
   return { roundHash: hash("roundHash"), textHash: hash("textHash") };
@@ -108,4 +107,10 @@ export function askForAction(person: HttpPerson, { proposalId, key }: SubmittedP
   const where = { proposalId, parentId: null, line: null, field: null };
   const remark = { ...where, text: "Name the gauge.", suggestion: null, asksForAction: true, key: formKey() };
   return callAction(person, { name: "addRemarkAction", page }, remark);
+}
+
+/** What a person is answered who asks for a page or a file. */
+export async function read({ address, cookie }: HttpPerson, page: string): Promise<{ status: number; text: string }> {
+  const response = await fetch(`${address}${page}`, { redirect: "manual", headers: { cookie } });
+  return { status: response.status, text: await response.text() };
 }

@@ -23,7 +23,7 @@ export function bluff(ownerId: number, dragCoefficient: number) {
   return { ...common(ownerId), name: "Mirror", source: "Test", ...own };
 }
 
-export function plate(ownerId: number, length: object) {
+export function plate(ownerId: number, length: { value?: number; entered?: string }) {
   const own = { method: "flat-plate-friction", length, breadth: { value: 1 }, faces: 1, roughness: { value: 0 } };
   return { ...common(ownerId), name: "Plate", ...own };
 }

@@ -9,13 +9,13 @@ export interface HttpPerson {
 }
 
 /** Signs in as the form does: with the token against forged requests, then name and password. */
-export async function signInOverHttp(address: string, name: PersonName): Promise<HttpPerson> {
+export async function signInOverHttp(address: string, name: PersonName, password = HTTP_PASSWORD): Promise<HttpPerson> {
   const jar = new Map<string, string>();
   const tokenAnswer = await fetch(`${address}/api/auth/csrf`);
   keepCookies(jar, tokenAnswer);
   const { csrfToken } = z.object({ csrfToken: z.string() }).parse(await tokenAnswer.json());
 
-  const typed = { csrfToken, email: emailOf(name), password: HTTP_PASSWORD, json: "true" };
+  const typed = { csrfToken, email: emailOf(name), password, json: "true" };
   const signedIn = await fetch(`${address}/api/auth/callback/credentials`, {
     method: "POST",
     redirect: "manual",

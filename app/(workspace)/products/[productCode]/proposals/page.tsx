@@ -11,6 +11,7 @@ import { proposalList } from "@/lib/proposals/queries";
 import type { ProposalListRow } from "@/lib/proposals/views";
 import { END_STATES } from "@/lib/vocabulary/proposals";
 
+import { readForPage } from "../_server/read-page";
 import { ProposalsTable } from "./_components/proposals-table";
 import { StartDraft } from "./_components/start-draft";
 
@@ -22,7 +23,8 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 
 export default async function ProposalsPage({ params }: Props) {
   const { productCode } = await params;
-  const list = await proposalList(await requireActor(), productCode);
+  const actor = await requireActor();
+  const list = await readForPage(() => proposalList(actor, productCode));
   if (!list) notFound();
   const { product, rows, mayStart, newestIssue } = list;
 

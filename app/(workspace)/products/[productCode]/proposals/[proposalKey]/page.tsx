@@ -9,6 +9,7 @@ import { requireActor } from "@/app/_server/session";
 import { proposalView } from "@/lib/proposals/queries";
 import type { ProposalView } from "@/lib/proposals/views";
 
+import { readForPage } from "../../_server/read-page";
 import { stateWords } from "../_components/state-words";
 import { ChangeSheet } from "./_components/change-sheet";
 import { ExportLinks } from "./_components/export-links";
@@ -27,7 +28,7 @@ export default async function ProposalPage({ params, searchParams }: Props) {
   const { productCode, proposalKey } = await params;
   const round = roundAsked((await searchParams).round);
   const actor = await requireActor();
-  const proposal = await proposalView(actor, productCode, proposalKey, round);
+  const proposal = await readForPage(() => proposalView(actor, productCode, proposalKey, round));
   if (!proposal) notFound();
 
   return (
