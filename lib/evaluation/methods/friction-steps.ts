@@ -116,7 +116,7 @@ function blasiusStep(reynolds: number, re: string, g: string, place: string): Wo
     `${g} = ${re} · C_F = 1.328 √${re}`,
     `1.328 · √${digits(reynolds)}`,
     blasiusFrictionIntegral(reynolds),
-    { source: "Blasius 1908", range: "Re 1e3 to 5e5" },
+    { source: "Blasius 1908", range: "Re 10³ to 5 × 10⁵" },
   );
 }
 

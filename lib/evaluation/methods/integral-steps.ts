@@ -33,7 +33,7 @@ export function integralSteps(
       "Re_x(λ) = ∫ λ² dRe_θ",
       `Re_x = ${digits(virtual)}, Re_k = ${digits(roughnessReynolds)}`,
       lambda,
-      { source: LINE.source, range: "Re 1e6 to 1e9" },
+      { source: LINE.source, range: "Re 10⁶ to 10⁹" },
     ),
     step(
       [`Friction integral at ${place}, ${LINE.title}`, g, "–"],

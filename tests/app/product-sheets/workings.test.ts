@@ -2,7 +2,6 @@ import { describe, expect, it } from "vitest";
 import { budgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { measuresOf } from "@/app/(workspace)/products/[productCode]/_sheet/measures";
 import { figureWorking } from "@/app/(workspace)/products/[productCode]/_workings/figure-working";
-import { powersOfTen } from "@/app/(workspace)/products/[productCode]/_workings/powers-of-ten";
 import { FIGURES, type Working } from "@/app/(workspace)/products/[productCode]/_workings/working";
 import type { LineRevisionView } from "@/lib/budget/views";
 import { formatNewtonsNumber } from "@/lib/units/format-newtons";
@@ -120,14 +119,5 @@ describe("a drag in other measures", () => {
     });
 
     expect(measures.map(({ name }) => name)).toEqual(["Drag area"]);
-  });
-});
-
-describe("powers of ten", () => {
-  it("are printed as on a sheet, and words with an e in them are left alone", () => {
-    expect(powersOfTen("100 · 1.46072e-5/25 and 4.1e6; Re 5e5 to 1e7")).toBe(
-      "100 · 1.46072 × 10⁻⁵/25 and 4.1 × 10⁶; Re 5 × 10⁵ to 1 × 10⁷",
-    );
-    expect(powersOfTen("item 010e of edge 3e")).toBe("item 010e of edge 3e");
   });
 });

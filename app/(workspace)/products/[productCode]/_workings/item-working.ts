@@ -2,14 +2,13 @@ import { methodInputOf } from "@/lib/evaluation/budget/method-input";
 import { shareMembers } from "@/lib/evaluation/budget/share-members";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
-import { workedSteps, type WorkedStep } from "@/lib/evaluation/methods/worked-steps";
+import { workedSteps } from "@/lib/evaluation/methods/worked-steps";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import { formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatExact, formatPercent, formatSignificant } from "@/lib/units/format-number";
 import { MATURITY_GRADE_NAMES } from "@/lib/vocabulary/grades";
 
 import type { BudgetSheet, ItemRow } from "../_sheet/budget-sheet";
-import { powersOfTen } from "./powers-of-ten";
 import type { Working, WorkingNote, WorkingStep, WorkingTerm } from "./working";
 
 /** How an item's basic estimate came about, step by step as a hand calculator can repeat it. */
@@ -83,7 +82,7 @@ export function itemNotes({ result, body }: ItemRow): WorkingNote[] {
   return result.notes.map((note) => ({
     code: note.code,
     severity: note.severity,
-    sentence: powersOfTen(noteSentence(note)),
+    sentence: noteSentence(note),
     justification: body.justifications.find(({ code }) => code === note.code)?.text ?? null,
   }));
 }
@@ -98,21 +97,7 @@ function methodSteps({ indexed, point }: BudgetSheet, { body, result }: ItemRow)
     return result.refused ? [] : [shareStep(body, result.basic)];
   }
   const steps = workedSteps(body.method, result.methodVersion, methodInputOf(body, indexed), point.stream);
-  return steps.map(printed);
-}
-
-function printed({ value, source, range, formula, withValues, ...texts }: WorkedStep): WorkingStep {
-  const text = texts.unit === "N" ? formatNewtonsNumber(value) : formatSignificant(value, 4);
-  const unit = texts.unit === "–" ? "" : texts.unit;
-  return {
-    ...texts,
-    unit,
-    formula: powersOfTen(formula),
-    withValues: powersOfTen(withValues),
-    value: text,
-    source: source ?? null,
-    range: range === undefined ? null : powersOfTen(range),
-  };
+  return steps.map(printedStep);
 }
 
 function shareStep(body: Extract<ItemBody, { method: "share" }>, basic: number): WorkingStep {

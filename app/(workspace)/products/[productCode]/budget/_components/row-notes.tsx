@@ -2,8 +2,6 @@ import { NoteMark } from "@/app/_components/note-mark";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import type { Note } from "@/lib/evaluation/notes/note";
 
-import { powersOfTen } from "../../_workings/powers-of-ten";
-
 /** Cautions and refusals stand in the row by what they say first; the whole sentence opens with the number. */
 export function RowNotes({ notes }: { notes: readonly Note[] }) {
   const grave = notes.filter(isGrave);
@@ -13,7 +11,7 @@ export function RowNotes({ notes }: { notes: readonly Note[] }) {
     <>
       {grave.map((note) => (
         <NoteMark key={note.code} severity={note.severity}>
-          <span title={powersOfTen(noteSentence(note))}>{powersOfTen(firstClause(noteSentence(note)))}</span>
+          <span title={noteSentence(note)}>{firstClause(noteSentence(note))}</span>
         </NoteMark>
       ))}
       {informing > 0 ? (
