@@ -14,7 +14,7 @@ import { runProgram } from "./run-program.mjs";
  */
 export async function runTypeScript(file, args, environment) {
   // Loaded late: the packages may just have been installed.
-  const { build } = await import("esbuild");
+  const { build, stop } = await import("esbuild");
   // Inside node_modules, so that the packages are found from there.
   const folder = path.join(repositoryRoot, "node_modules/.cache/leeboard");
   mkdirSync(folder, { recursive: true });
@@ -31,6 +31,8 @@ export async function runTypeScript(file, args, environment) {
       sourcemap: "inline",
       logLevel: "warning",
     });
+    // Its helper process would otherwise live as long as this one.
+    await stop();
     const conditions = ["--conditions=react-server", "--enable-source-maps"];
     return await runProgram(process.execPath, [...conditions, bundle, ...args], environment);
   } finally {
