@@ -9,6 +9,7 @@ import { formatExact, formatPercent, formatSignificant } from "@/lib/units/forma
 import { MATURITY_GRADE_NAMES } from "@/lib/vocabulary/grades";
 
 import type { BudgetSheet, ItemRow } from "../_sheet/budget-sheet";
+import { printedStep } from "./printed-step";
 import type { Working, WorkingNote, WorkingStep, WorkingTerm } from "./working";
 
 /** How an item's basic estimate came about, step by step as a hand calculator can repeat it. */

@@ -2,7 +2,6 @@ import type { WorkedStep } from "@/lib/evaluation/methods/worked-step";
 import { formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatSignificant } from "@/lib/units/format-number";
 
-import { powersOfTen } from "./powers-of-ten";
 import type { WorkingStep } from "./working";
 
 /** A worked step as it is printed. */
