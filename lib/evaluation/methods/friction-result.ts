@@ -31,7 +31,7 @@ export function frictionResult(friction: FrictionCase, stream: StreamState, newt
 
   const { layer, viscousLength, startReynolds, spanReynolds } = setup;
   const stretch = viscousLength * frictionBetween(layer, startReynolds, spanReynolds);
-  const { isThicknessBorrowed, ...quantities } = quantitiesAtEnd(setup, stream);
+  const { isThicknessBorrowed, ...quantities } = layerQuantitiesAt(setup, stream, setup.endReynolds);
   const answer: FrictionAnswer = {
     drag: newtonsPerMetre * stretch,
     ...quantities,
@@ -58,22 +58,23 @@ function refusalOf({ endReynolds, askedTransition }: FrictionSetup): Note | null
   return null;
 }
 
-function quantitiesAtEnd(setup: FrictionSetup, stream: StreamState) {
-  const { layer, endReynolds, viscousLength } = setup;
-  const frictionIntegral = layer.frictionIntegral(endReynolds);
-  const localCoefficient = layer.localCoefficient(endReynolds);
+/** What the layer is at one place, by Re from its start; Re > 0. */
+export function layerQuantitiesAt(setup: FrictionSetup, stream: StreamState, reynolds: number) {
+  const { layer, viscousLength } = setup;
+  const frictionIntegral = layer.frictionIntegral(reynolds);
+  const localCoefficient = layer.localCoefficient(reynolds);
   const momentumThickness = (frictionIntegral / 2) * viscousLength;
-  const frictionLineUsed = layer.lineAt(endReynolds);
+  const frictionLineUsed = layer.lineAt(reynolds);
   const roughnessReynolds = setup.roughnessReynolds * Math.sqrt(localCoefficient / 2);
   const { thickness, displacementThickness, isBorrowed } = layerThickness(
     frictionLineUsed,
     momentumThickness,
-    endReynolds,
+    reynolds,
     frictionIntegral / 2,
     setup.roughnessReynolds,
   );
   return {
-    reynolds: endReynolds,
+    reynolds,
     localCoefficient,
     frictionLineUsed,
     thickness,

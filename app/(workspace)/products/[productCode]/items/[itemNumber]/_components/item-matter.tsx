@@ -15,6 +15,7 @@ import { itemNotes } from "../../../_workings/item-working";
 import { AlternateLinesTable } from "./alternate-lines-table";
 import { AnswerTable } from "./answer-table";
 import { EvidenceTable } from "./evidence-table";
+import { ItemPictures } from "./item-pictures";
 import { ItemWorking } from "./item-working-section";
 import { type PointRow, ResultsTable } from "./results-table";
 
@@ -49,6 +50,7 @@ export function ItemMatter({ line, points, chosen, hrefOf, revisions, now }: Ite
       <SectionHeading>What the method gives</SectionHeading>
       <AnswerTable points={points} />
       <AlternateLinesTable shown={shown} />
+      <ItemPictures shown={shown} />
       <SectionHeading>Fields</SectionHeading>
       <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} />
       <SectionHeading>Evidence</SectionHeading>

@@ -1,0 +1,61 @@
+import { FigureWithTable } from "@/app/_components/figure-with-table";
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { MethodInput } from "@/lib/evaluation/document/schema";
+import type { StreamState } from "@/lib/evaluation/methods/stream-state";
+import { formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { formatSignificant } from "@/lib/units/format-number";
+import { formatResult } from "@/lib/units/format-quantity";
+
+import { dragAt, dragOverSpeed, dragOverSpeedLayout } from "./drag-over-speed";
+import { Plot } from "./plot";
+
+interface DragOverSpeedFigureProps {
+  input: MethodInput;
+  stream: StreamState;
+  name: string;
+}
+
+/** The drag of an item in the same fluid at other speeds. */
+export function DragOverSpeedFigure({ input, stream, name }: DragOverSpeedFigureProps) {
+  const drag = dragAt(input, stream);
+  if (drag === null) return null;
+  const points = dragOverSpeed(input, stream);
+  const isBroken = points.some((point) => point.drag === null);
+
+  return (
+    <FigureWithTable
+      summary={`Drag over speed: ${name} has ${formatNewtons(drag)} at ${formatResult(stream.speed, "m/s")}.`}
+      picture={<Plot layout={dragOverSpeedLayout(points, { speed: stream.speed, drag })} />}
+      caption={
+        <span>
+          Drag by the method over the speed of the operating point, in the same fluid.
+          {isBroken ? " Where the method refuses the item there is no line." : ""}
+        </span>
+      }
+      table={<SpeedTable input={input} stream={stream} name={name} />}
+    />
+  );
+}
+
+const SPEEDS_OF_TABLE = 16;
+
+function SpeedTable({ input, stream, name }: DragOverSpeedFigureProps) {
+  return (
+    <Table caption={`Drag of ${name} over speed`}>
+      <TableHead>
+        <Head unit="m/s">Speed</Head>
+        <Head numeric unit="N">
+          Drag
+        </Head>
+      </TableHead>
+      <tbody>
+        {dragOverSpeed(input, stream, SPEEDS_OF_TABLE).map(({ speed, drag }) => (
+          <Row key={speed}>
+            <RowHead>{formatSignificant(speed)}</RowHead>
+            <Cell numeric>{drag === null ? "refused" : formatNewtonsNumber(drag)}</Cell>
+          </Row>
+        ))}
+      </tbody>
+    </Table>
+  );
+}

@@ -1,0 +1,50 @@
+import type { MethodInput } from "@/lib/evaluation/document/schema";
+import { CURRENT_METHOD_VERSIONS, evaluateMethod } from "@/lib/evaluation/methods/method-registry";
+import type { StreamState } from "@/lib/evaluation/methods/stream-state";
+import { formatNewtons } from "@/lib/units/format-newtons";
+
+import { straightAxis } from "./axis";
+import { evenly, type PlotLayout } from "./plot-layout";
+
+export interface SpeedPoint {
+  /** m/s. */
+  speed: number;
+  /** N; null where the method refuses the item at that speed. */
+  drag: number | null;
+}
+
+const LEAST_PART = 0.1;
+const GREATEST_PART = 1.6;
+
+/** The item's drag in the same fluid at slower and faster speeds, by its own method. */
+export function dragOverSpeed(input: MethodInput, stream: StreamState, count = 46): SpeedPoint[] {
+  return evenly(LEAST_PART, GREATEST_PART, count).map((part) => {
+    const speed = stream.speed * part;
+    return { speed, drag: dragAt(input, { ...stream, speed, dynamicPressure: stream.dynamicPressure * part ** 2 }) };
+  });
+}
+
+export function dragAt(input: MethodInput, stream: StreamState): number | null {
+  const outcome = evaluateMethod(input.method, CURRENT_METHOD_VERSIONS[input.method], input, stream);
+  return outcome.outcome === "answer" ? outcome.answer.drag : null;
+}
+
+export function dragOverSpeedLayout(points: readonly SpeedPoint[], own: { speed: number; drag: number }): PlotLayout {
+  const answered = points.flatMap(({ speed, drag }) => (drag === null ? [] : [{ speed, drag }]));
+  const xAxis = straightAxis(points.map(({ speed }) => speed));
+  const yAxis = straightAxis([...answered, own].map(({ drag }) => drag * 1.06));
+  const place = ({ speed, drag }: { speed: number; drag: number }) => ({
+    x: xAxis.fraction(speed),
+    y: yAxis.fraction(drag),
+  });
+
+  return {
+    xTicks: xAxis.ticks,
+    yTicks: yAxis.ticks,
+    xTitle: "U, m/s",
+    yTitle: "N",
+    bands: [],
+    curves: [{ name: "drag", look: "own", points: answered.map(place), label: null }],
+    marks: [{ ...place(own), text: formatNewtons(own.drag) }],
+  };
+}

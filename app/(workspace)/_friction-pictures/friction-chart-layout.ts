@@ -1,0 +1,63 @@
+import { formatSignificant } from "@/lib/units/format-number";
+
+import { decadeAxis, powerOfTen, stepAxis } from "./axis";
+import type { ChartPoint, FrictionChart } from "./friction-chart";
+import type { PlotCurve, PlotLabel, PlotLayout, PlotPoint } from "./plot-layout";
+
+/** Coefficients that the lines themselves need; an item beyond them widens the chart. */
+const LEAST = 1e-3;
+const GREATEST = 1e-2;
+
+/** The friction chart on two logarithmic axes. */
+export function frictionChartLayout(chart: FrictionChart): PlotLayout {
+  const { own } = chart;
+  const xAxis = decadeAxis(Math.log10(chart.leastReynolds), 10);
+  const highest = Math.max(GREATEST, own.coefficient, chart.laminar[0]?.coefficient ?? 0);
+  const yAxis = stepAxis(Math.min(LEAST, own.coefficient), highest);
+  const place = ({ reynolds, coefficient }: ChartPoint): PlotPoint => ({
+    x: xAxis.fraction(reynolds),
+    y: yAxis.fraction(coefficient),
+  });
+  const drawn = (
+    name: string,
+    look: PlotCurve["look"],
+    points: readonly ChartPoint[],
+    label: Omit<PlotLabel, "x" | "y"> | null = null,
+    labelAt?: ChartPoint,
+  ): PlotCurve => ({
+    name,
+    look,
+    points: points.map(place),
+    label: label && labelAt ? { ...label, ...place(labelAt) } : null,
+  });
+  const above = (text: string, anchor: PlotLabel["anchor"] = "end") => ({ text, anchor, side: "above" as const });
+
+  return {
+    xTicks: xAxis.ticks,
+    yTicks: yAxis.ticks,
+    xTitle: "Re",
+    yTitle: "C_F",
+    bands: [],
+    curves: [
+      ...chart.family.map(({ lengthOverRoughness, points }) =>
+        drawn(
+          `L/k_s ${powerOfTen(Math.log10(lengthOverRoughness))}`,
+          "faint",
+          points,
+          above(`L/k_s ${powerOfTen(Math.log10(lengthOverRoughness))}`),
+          points.at(-1),
+        ),
+      ),
+      drawn("laminar", "dashed", chart.laminar, { text: "laminar", anchor: "start", side: "below" }, chart.laminar[2]),
+      drawn("laminar beyond its range", "dotted", chart.laminarBeyond),
+      drawn("mixed", "dashed", chart.mixed),
+      drawn("turbulent", "ink", chart.turbulent, above("turbulent"), lastBefore(chart.turbulent, 1e8)),
+      drawn("this item's layer", "own", chart.layer),
+    ],
+    marks: [{ ...place(own), text: `C_F ${formatSignificant(own.coefficient)}` }],
+  };
+}
+
+function lastBefore(points: readonly ChartPoint[], reynolds: number): ChartPoint | undefined {
+  return points.findLast((point) => point.reynolds <= reynolds);
+}

@@ -1,0 +1,21 @@
+import { FrictionPictures } from "@/app/(workspace)/_friction-pictures/friction-pictures";
+import { frictionSubject } from "@/app/(workspace)/_friction-pictures/friction-subject";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { methodInputOf } from "@/lib/evaluation/budget/method-input";
+
+import type { PointRow } from "./results-table";
+
+/** The pictures of a friction item at one operating point. */
+export function ItemPictures({ shown: { sheet, row } }: { shown: PointRow }) {
+  if (row.body.method === "share") return null;
+  const input = methodInputOf(row.body, sheet.indexed);
+  const { stream, operatingPoint } = sheet.point;
+  if (!frictionSubject(input, stream)) return null;
+
+  return (
+    <>
+      <SectionHeading>The layer at {operatingPoint} in pictures</SectionHeading>
+      <FrictionPictures input={input} stream={stream} name={`Item ${row.number}`} wide />
+    </>
+  );
+}
