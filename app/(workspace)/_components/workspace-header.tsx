@@ -24,6 +24,7 @@ export function WorkspaceHeader({ name, showAccounts, showHouseHistory }: Worksp
           Day sheet
         </HeaderLink>
         <HeaderLink href="/products">Products</HeaderLink>
+        <HeaderLink href="/trial">Trial</HeaderLink>
         {showAccounts ? <HeaderLink href="/administration">Administration</HeaderLink> : null}
         {showHouseHistory && !showAccounts ? (
           <HeaderLink href="/administration/history">House history</HeaderLink>

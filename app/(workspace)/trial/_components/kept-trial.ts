@@ -1,0 +1,27 @@
+import { Trial } from "../_trial/setting";
+
+/** Each person's own, so that nobody finds what another one typed in the same tab. */
+function keyOf(userId: number): string {
+  return `leeboard trial ${userId}`;
+}
+
+/** Keeps what is typed in this tab: a reload or a sign-out loses nothing. */
+export function keepTrial(userId: number, trial: Trial): void {
+  try {
+    window.sessionStorage.setItem(keyOf(userId), JSON.stringify(trial));
+  } catch (problem) {
+    // A full or forbidden store takes nothing from what stands on the page.
+    console.warn("This tab keeps no copy of the trial.", problem);
+  }
+}
+
+export function readTrial(userId: number): Trial | null {
+  const text = window.sessionStorage.getItem(keyOf(userId));
+  if (text === null) return null;
+  try {
+    const parsed = Trial.safeParse(JSON.parse(text));
+    return parsed.success ? parsed.data : null;
+  } catch {
+    return null;
+  }
+}

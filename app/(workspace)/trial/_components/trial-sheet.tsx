@@ -1,0 +1,81 @@
+"use client";
+
+import { useDeferredValue, useEffect, useMemo, useState } from "react";
+
+import { Button } from "@/app/_components/button";
+import { SectionHeading } from "@/app/_components/section-heading";
+import { useHydrated } from "@/app/_components/use-hydrated";
+
+import { readSetting } from "../_trial/read-setting";
+import { exampleTrial, type Side, SIDES, type Trial, type TrialSetting } from "../_trial/setting";
+import { ComparisonTable } from "./comparison-table";
+import { keepTrial, readTrial } from "./kept-trial";
+import { SettingForm } from "./setting-form";
+import { SettingResult } from "./setting-result";
+import { TurnIntoProposal } from "./turn-into-proposal";
+
+interface TrialSheetProps {
+  userId: number;
+  /** Where the person may start a proposal. */
+  products: readonly { code: string; name: string }[];
+}
+
+/** Two settings, what comes out of each, and what lies between them. */
+export function TrialSheet(props: TrialSheetProps) {
+  // What this tab keeps can only be read in the browser.
+  const hydrated = useHydrated();
+
+  return hydrated ? <TwoSettings {...props} /> : <p className="py-10 text-ink-2">Reading the trial…</p>;
+}
+
+function TwoSettings({ userId, products }: TrialSheetProps) {
+  const { trial, shown, replace, change } = useTrial(userId);
+  const { a, b } = useDeferredValue(trial);
+  const readings = { a: useMemo(() => readSetting(a), [a]), b: useMemo(() => readSetting(b), [b]) };
+
+  return (
+    <>
+      <div className="mb-4 flex flex-wrap gap-2 print:hidden">
+        <Button onClick={() => replace({ ...trial, b: trial.a })}>Copy A to B</Button>
+        <Button onClick={() => replace({ a: trial.b, b: trial.a })}>Exchange A and B</Button>
+        <Button onClick={() => replace(exampleTrial())}>Back to the example</Button>
+        <TurnIntoProposal setting={trial.b} isComputed={readings.b.result !== null} products={products} />
+      </div>
+      <div className="grid gap-x-10 gap-y-6 lg:grid-cols-2">
+        {SIDES.map((side) => (
+          <SettingForm
+            key={`${side} ${shown}`}
+            side={side}
+            setting={trial[side]}
+            onChange={(setting) => change(side, setting)}
+            faults={readings[side].faults}
+          />
+        ))}
+      </div>
+      <SectionHeading>What comes out</SectionHeading>
+      <ComparisonTable a={readings.a} b={readings.b} />
+      <div className="mt-2 grid gap-x-10 lg:grid-cols-2">
+        {SIDES.map((side) => (
+          <SettingResult key={side} side={side} result={readings[side].result} />
+        ))}
+      </div>
+    </>
+  );
+}
+
+function useTrial(userId: number) {
+  const [trial, setTrial] = useState<Trial>(() => readTrial(userId) ?? exampleTrial());
+  // Fields hold what is typed into them: a setting that comes from elsewhere needs fresh ones.
+  const [shown, setShown] = useState(0);
+  useEffect(() => keepTrial(userId, trial), [userId, trial]);
+
+  return {
+    trial,
+    shown,
+    change: (side: Side, setting: TrialSetting) => setTrial((old) => ({ ...old, [side]: setting })),
+    replace: (next: Trial) => {
+      setTrial(next);
+      setShown((times) => times + 1);
+    },
+  };
+}
