@@ -11,8 +11,8 @@ import type { ChangePasswordInput } from "./schema";
 /** Changes one's own password and ends every session made under the old one; answers the new epoch. */
 export async function changePassword(
   actor: Actor,
-  clock: Clock,
   { current, next }: ChangePasswordInput,
+  clock: Clock,
 ): Promise<{ sessionEpoch: number }> {
   const refusal = await wrongPassword(actor, current);
   const passwordHash = refusal ? "" : await hashPassword(next);

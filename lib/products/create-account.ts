@@ -10,8 +10,8 @@ import type { CreateAccountInput } from "./schema";
 /** Makes an account with its first password, which its owner changes. */
 export async function createAccount(
   actor: Actor,
-  clock: Clock,
   { email, name, password, isAdministrator }: CreateAccountInput,
+  clock: Clock,
 ): Promise<{ userId: number }> {
   const question = { on: "Installation", action: "create_account" } as const;
   // Hashing is slow, so that it is done before the transaction, and for nobody who would be refused.

@@ -10,8 +10,8 @@ import type { CreateProductInput } from "./schema";
 /** Makes a product without a budget: a program manager establishes it later. Its code is never given twice. */
 export function createProduct(
   actor: Actor,
-  clock: Clock,
   { code, name, kind, timeZone }: CreateProductInput,
+  clock: Clock,
 ): Promise<{ id: number; code: string }> {
   const subject = { type: "product", id: code, label: `${code} ${name}` };
   return performAct(actor, clock, { act: "create_product", chain: HOUSE_CHAIN, subject }, async (tx, record, at) => {

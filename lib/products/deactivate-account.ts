@@ -7,7 +7,7 @@ import { authorize } from "@/policies/authorize";
 import type { DeactivateAccountInput } from "./schema";
 
 /** Closes an account: its sessions end at once, its name and signatures stay. */
-export function deactivateAccount(actor: Actor, clock: Clock, input: DeactivateAccountInput): Promise<void> {
+export function deactivateAccount(actor: Actor, input: DeactivateAccountInput, clock: Clock): Promise<void> {
   return performAct(actor, clock, { act: "deactivate_account", chain: HOUSE_CHAIN }, async (tx, record) => {
     authorize(actor, { on: "Installation", action: "deactivate_account" });
     await deactivateUser(input, { tx, record });

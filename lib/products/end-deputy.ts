@@ -12,7 +12,7 @@ import { authorize } from "@/policies/authorize";
 import type { EndDeputyInput } from "./schema";
 
 /** Ends a deputyship before its last day. What was signed under it stays. */
-export async function endDeputy(actor: Actor, clock: Clock, { deputyshipId }: EndDeputyInput): Promise<void> {
+export async function endDeputy(actor: Actor, { deputyshipId }: EndDeputyInput, clock: Clock): Promise<void> {
   const chain = await inSnapshot((tx) => chainOf(deputyshipId, tx));
   return performAct(actor, clock, { act: "end_deputy", chain }, async (tx, record, at) => {
     const deputy = await Deputy.findByPk(deputyshipId, { transaction: tx });

@@ -12,7 +12,7 @@ import { authorize } from "@/policies/authorize";
 import type { EndRoleInput } from "./schema";
 
 /** Ends a role now. The row stays, with its dates; items that the person owns keep their owner until handed over. */
-export async function endRole(actor: Actor, clock: Clock, { membershipId, reason }: EndRoleInput): Promise<void> {
+export async function endRole(actor: Actor, { membershipId, reason }: EndRoleInput, clock: Clock): Promise<void> {
   const chain = await inSnapshot((tx) => chainOf(membershipId, tx));
   return performAct(actor, clock, { act: "end_role", chain }, async (tx, record, at) => {
     authorize(actor, { on: "Installation", action: "end_role" });

@@ -25,8 +25,8 @@ export interface EstablishedProduct {
 /** The one act without a second person: a program manager signs issue 1. */
 export async function establishProduct(
   actor: Actor,
-  clock: Clock,
   input: EstablishProductInput,
+  clock: Clock,
 ): Promise<EstablishedProduct> {
   const frame = { act: "establish_product", chain: input.productCode } as const;
   const wrongPassword = await passwordRefusal(actor.userId, input.password);

@@ -12,8 +12,8 @@ import type { GiveRoleInput } from "./schema";
 /** Gives a person a role in a product from now on. It stands in the product's history, where its auditors read it. */
 export function giveRole(
   actor: Actor,
-  clock: Clock,
   { productCode, userId, role, reason }: GiveRoleInput,
+  clock: Clock,
 ): Promise<{ membershipId: number }> {
   return performAct(actor, clock, { act: "give_role", chain: productCode }, async (tx, record, at) => {
     authorize(actor, { on: "Installation", action: "give_role" });

@@ -15,8 +15,8 @@ const MEANING = "Issue released as a baseline";
 /** Gives an issue a name, a purpose and a program manager's signature. It makes no issue of its own. */
 export async function makeBaseline(
   actor: Actor,
-  clock: Clock,
   { productCode, issue: number, name, purpose, password }: MakeBaselineInput,
+  clock: Clock,
 ): Promise<{ baselineId: number }> {
   const wrongPassword = await passwordRefusal(actor.userId, password);
   return performAct(actor, clock, { act: "make_baseline", chain: productCode }, async (tx, record, at) => {

@@ -12,8 +12,8 @@ import type { NameDeputyInput } from "./schema";
 /** Names who signs for the actor on a range of days of the product's calendar. The office is not passed on. */
 export function nameDeputy(
   actor: Actor,
-  clock: Clock,
   { productCode, deputyId, fromDay, untilDay }: NameDeputyInput,
+  clock: Clock,
 ): Promise<{ deputyshipId: number }> {
   return performAct(actor, clock, { act: "name_deputy", chain: productCode }, async (tx, record, at) => {
     const product = await productByCode(productCode, tx);

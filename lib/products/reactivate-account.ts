@@ -7,7 +7,7 @@ import { authorize } from "@/policies/authorize";
 import type { DeactivateAccountInput } from "./schema";
 
 /** Opens a closed account again, with the password it had. */
-export function reactivateAccount(actor: Actor, clock: Clock, input: DeactivateAccountInput): Promise<void> {
+export function reactivateAccount(actor: Actor, input: DeactivateAccountInput, clock: Clock): Promise<void> {
   return performAct(actor, clock, { act: "reactivate_account", chain: HOUSE_CHAIN }, async (tx, record) => {
     authorize(actor, { on: "Installation", action: "create_account" });
     await reactivateUser(input, { tx, record });

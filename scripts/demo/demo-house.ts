@@ -46,7 +46,7 @@ export async function openDemoHouse(filledAt: Date, openedDaysAgo: number): Prom
   for (const person of demoPersons()) {
     if (person === DEMO_ADMINISTRATOR) continue;
     const account = { ...DEMO_PEOPLE[person], password: DEMO_PASSWORD, isAdministrator: false };
-    ids.set(person, (await createAccount(administrator, house.clock, account)).userId);
+    ids.set(person, (await createAccount(administrator, account, house.clock)).userId);
   }
   return house;
 }

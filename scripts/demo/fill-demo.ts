@@ -24,11 +24,11 @@ export async function fillDemo(filledAt: Date): Promise<void> {
 
 async function openProduct(house: DemoHouse, product: CreateProductInput): Promise<void> {
   const administrator = await house.actor(DEMO_ADMINISTRATOR);
-  await createProduct(administrator, house.clock, product);
+  await createProduct(administrator, product, house.clock);
   for (const { person, roles } of DEMO_ROLES) {
     for (const role of roles) {
       const given = { productCode: product.code, userId: house.idOf(person), role, reason: "Demo." };
-      await giveRole(administrator, house.clock, given);
+      await giveRole(administrator, given, house.clock);
     }
   }
 }
@@ -40,5 +40,5 @@ async function establish(
 ): Promise<void> {
   const manager = await house.actor("lusia");
   const signed = { productCode, operatingPoint: { number: "OP-1", body: operatingPoint }, terms };
-  await establishProduct(manager, house.clock, { ...signed, password: DEMO_PASSWORD });
+  await establishProduct(manager, { ...signed, password: DEMO_PASSWORD }, house.clock);
 }

@@ -23,7 +23,7 @@ export async function person(
 /** Gives a role by its command, so that the history is whole, and answers the person as they are signed in afterwards. */
 export async function withRole(actor: Actor, productCode: string, role: Role): Promise<Actor> {
   const clock = () => new Date("2026-01-01T00:00:00.000Z");
-  await giveRole({ ...actor, isAdministrator: true }, clock, { productCode, userId: actor.userId, role, reason: "" });
+  await giveRole({ ...actor, isAdministrator: true }, { productCode, userId: actor.userId, role, reason: "" }, clock);
   const { id: productId } = await Product.findOne({ where: { code: productCode }, rejectOnEmpty: true });
   return { ...actor, memberships: [...actor.memberships, { productId, role }] };
 }

@@ -8,7 +8,7 @@ import { ChangePasswordInput } from "@/lib/accounts/schema";
 import { endSessions } from "@/lib/accounts/sign-out";
 
 export const changePasswordAction = defineAction(ChangePasswordInput, async (actor, input, clock) => {
-  await changePassword(actor, clock, input);
+  await changePassword(actor, input, clock);
 });
 
 export const endSessionsAction = defineAction(z.strictObject({}), (actor, _input, clock) => endSessions(actor, clock));

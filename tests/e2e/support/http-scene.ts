@@ -61,11 +61,11 @@ async function openAccounts(): Promise<void> {
 
 async function openProduct(code: string): Promise<void> {
   const administrator = await actor("ada");
-  await createProduct(administrator, clock, { code, name: `Test ${code}`, kind: "vehicle_fairing", timeZone: "UTC" });
+  await createProduct(administrator, { code, name: `Test ${code}`, kind: "vehicle_fairing", timeZone: "UTC" }, clock);
   for (const name of peopleNames()) {
     for (const role of rolesOf(name, code)) {
       const { userId } = await actor(name);
-      await giveRole(administrator, clock, { productCode: code, userId, role, reason: "Test." });
+      await giveRole(administrator, { productCode: code, userId, role, reason: "Test." }, clock);
     }
   }
 }
@@ -76,12 +76,16 @@ function rolesOf(name: PersonName, code: string): readonly Role[] {
 }
 
 async function establish(): Promise<void> {
-  await establishProduct(await actor("lusia"), clock, {
-    productCode: PRODUCT,
-    operatingPoint: { number: "OP-1", body: { ...newOperatingPoint(), ...point() } },
-    terms: { ...newTerms({ referenceOperatingPoint: "OP-1", reserveHundredths: RESERVE }) },
-    password: HTTP_PASSWORD,
-  });
+  await establishProduct(
+    await actor("lusia"),
+    {
+      productCode: PRODUCT,
+      operatingPoint: { number: "OP-1", body: { ...newOperatingPoint(), ...point() } },
+      terms: { ...newTerms({ referenceOperatingPoint: "OP-1", reserveHundredths: RESERVE }) },
+      password: HTTP_PASSWORD,
+    },
+    clock,
+  );
 }
 
 /**

@@ -142,7 +142,7 @@ describe("sessions", () => {
 
   it("end when the password is changed, and the new one is the password from then on", async () => {
     const next = "another good password";
-    expect(await changePassword(eva, clock, { current: PASSWORD, next, again: next })).toEqual({ sessionEpoch: 1 });
+    expect(await changePassword(eva, { current: PASSWORD, next, again: next }, clock)).toEqual({ sessionEpoch: 1 });
 
     await expect(from()).rejects.toMatchObject({ code: "wrong_password" });
     expect(await from(undefined, next)).toMatchObject({ sessionEpoch: 1 });
@@ -150,7 +150,7 @@ describe("sessions", () => {
 
   it("stay when the present password is wrong; the refusal is recorded at its field", async () => {
     const next = "another good password";
-    await expect(changePassword(eva, clock, { current: "x", next, again: next })).rejects.toMatchObject({
+    await expect(changePassword(eva, { current: "x", next, again: next }, clock)).rejects.toMatchObject({
       code: "wrong_password",
       faults: [{ path: "current" }],
     });

@@ -18,9 +18,9 @@ it("closes an account for every later request, and opens it again with another e
   const before = await actorById(tom.userId, NOW);
   const asked = { userId: tom.userId, reason: "Left the team." };
 
-  await deactivateAccount(admin, CLOCK, asked);
+  await deactivateAccount(admin, asked, CLOCK);
   expect(await actorById(tom.userId, NOW)).toBeNull();
-  await reactivateAccount(admin, CLOCK, { ...asked, reason: "Came back." });
+  await reactivateAccount(admin, { ...asked, reason: "Came back." }, CLOCK);
   const after = await actorById(tom.userId, NOW);
   expect(after?.actor).toEqual(before?.actor);
   expect(after?.sessionEpoch).toBeGreaterThan(before?.sessionEpoch ?? Number.NaN);
@@ -34,9 +34,9 @@ it("keeps the last administrator, and obeys nobody but an administrator", async 
   const admin = await person("Anke Post", { isAdministrator: true });
   const tom = await person("Tom Veer");
   const itself = { userId: admin.userId, reason: "By mistake." };
-  await expect(deactivateAccount(admin, CLOCK, itself)).rejects.toMatchObject({ code: "wrong_state" });
-  await expect(deactivateAccount(tom, CLOCK, itself)).rejects.toMatchObject({ code: "forbidden" });
-  await expect(reactivateAccount(tom, CLOCK, itself)).rejects.toMatchObject({ code: "forbidden" });
+  await expect(deactivateAccount(admin, itself, CLOCK)).rejects.toMatchObject({ code: "wrong_state" });
+  await expect(deactivateAccount(tom, itself, CLOCK)).rejects.toMatchObject({ code: "forbidden" });
+  await expect(reactivateAccount(tom, itself, CLOCK)).rejects.toMatchObject({ code: "forbidden" });
   await expect(accountsFor(tom)).rejects.toMatchObject({ code: "forbidden" });
   const accounts = await accountsFor(admin);
   expect(accounts.map(({ name, active }) => [name, active])).toEqual([

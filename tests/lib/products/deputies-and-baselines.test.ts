@@ -35,7 +35,7 @@ async function cast() {
 describe("a deputy", () => {
   it("stands in on the named days, both included, and no longer once ended", async () => {
     const { productId, lusia, tansy } = await cast();
-    const { deputyshipId } = await nameDeputy(lusia, CLOCK, { ...MAY, deputyId: tansy.userId });
+    const { deputyshipId } = await nameDeputy(lusia, { ...MAY, deputyId: tansy.userId }, CLOCK);
     const on = (day: string) => inSnapshot((tx) => deputiesOn(productId, day, tx));
     const named = [{ deputyId: tansy.userId, forUserId: lusia.userId }];
     expect([await on("2026-05-10"), await on("2026-05-11"), await on("2026-05-15"), await on("2026-05-16")]).toEqual([
@@ -44,8 +44,8 @@ describe("a deputy", () => {
       named,
       [],
     ]);
-    await expect(endDeputy(tansy, CLOCK, { deputyshipId })).rejects.toMatchObject({ code: "forbidden" });
-    await endDeputy(lusia, CLOCK, { deputyshipId });
+    await expect(endDeputy(tansy, { deputyshipId }, CLOCK)).rejects.toMatchObject({ code: "forbidden" });
+    await endDeputy(lusia, { deputyshipId }, CLOCK);
     expect(await on("2026-05-12")).toEqual([]);
     expect(await deputiesOf(tansy, "TF-2")).toMatchObject([
       { holder: { name: "Lusia Brand" }, deputy: { name: "Tansy Merle" }, endedAt: "2026-05-10T08:00:00.000Z" },
@@ -59,11 +59,11 @@ describe("a deputy", () => {
     const stranger = await person("Someone Else");
     const refusedAt = (path: string) => ({ code: "invalid", faults: [{ path }] });
     for (const deputyId of [lusia.userId, maud.userId, stranger.userId]) {
-      await expect(nameDeputy(lusia, CLOCK, { ...MAY, deputyId })).rejects.toMatchObject(refusedAt("deputyId"));
+      await expect(nameDeputy(lusia, { ...MAY, deputyId }, CLOCK)).rejects.toMatchObject(refusedAt("deputyId"));
     }
     const past = { ...MAY, fromDay: "2026-05-01", untilDay: "2026-05-09", deputyId: tansy.userId };
-    await expect(nameDeputy(lusia, CLOCK, past)).rejects.toMatchObject(refusedAt("untilDay"));
-    await expect(nameDeputy(tansy, CLOCK, { ...MAY, deputyId: lusia.userId })).rejects.toMatchObject({
+    await expect(nameDeputy(lusia, past, CLOCK)).rejects.toMatchObject(refusedAt("untilDay"));
+    await expect(nameDeputy(tansy, { ...MAY, deputyId: lusia.userId }, CLOCK)).rejects.toMatchObject({
       code: "forbidden",
     });
     expect(await Deputy.count()).toBe(0);
@@ -83,7 +83,7 @@ describe("a baseline", () => {
   it("gives an issue a name and a program manager's signature, and makes no issue", async () => {
     const { lusia } = await cast();
     const { contentHash } = await establish(lusia, "TF-2", "2026-05-01T08:00:00.000Z");
-    await makeBaseline(lusia, CLOCK, asked);
+    await makeBaseline(lusia, asked, CLOCK);
     const issues = await issuesOf(lusia, "TF-2");
     expect(issues).toMatchObject([
       { number: 1, baselines: [{ name: "Preliminary design", purpose: "Design review", signedBy: "Lusia Brand" }] },
@@ -96,12 +96,12 @@ describe("a baseline", () => {
   it("is refused to others, with a wrong password, for no issue, and under a name that is taken", async () => {
     const { lusia, tansy } = await cast();
     await establish(lusia, "TF-2", "2026-05-01T08:00:00.000Z");
-    await expect(makeBaseline(tansy, CLOCK, asked)).rejects.toMatchObject({ code: "forbidden" });
+    await expect(makeBaseline(tansy, asked, CLOCK)).rejects.toMatchObject({ code: "forbidden" });
     const wrong = { ...asked, password: "not my password" };
-    await expect(makeBaseline(lusia, CLOCK, wrong)).rejects.toMatchObject({ code: "wrong_password" });
-    await expect(makeBaseline(lusia, CLOCK, { ...asked, issue: 2 })).rejects.toMatchObject({ code: "not_found" });
+    await expect(makeBaseline(lusia, wrong, CLOCK)).rejects.toMatchObject({ code: "wrong_password" });
+    await expect(makeBaseline(lusia, { ...asked, issue: 2 }, CLOCK)).rejects.toMatchObject({ code: "not_found" });
     expect([await Baseline.count(), await Signature.count()]).toEqual([0, 0]);
-    await makeBaseline(lusia, CLOCK, asked);
-    await expect(makeBaseline(lusia, CLOCK, asked)).rejects.toMatchObject({ code: "duplicate" });
+    await makeBaseline(lusia, asked, CLOCK);
+    await expect(makeBaseline(lusia, asked, CLOCK)).rejects.toMatchObject({ code: "duplicate" });
   });
 });

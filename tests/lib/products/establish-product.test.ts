@@ -38,7 +38,7 @@ describe("establishing a product", () => {
   it("makes issue 1 with the signature of one program manager, and warns that there is only one", async () => {
     await product("TF-2");
     const lusia = await manager();
-    const established = await establishProduct(lusia, CLOCK, input());
+    const established = await establishProduct(lusia, input(), CLOCK);
 
     expect(established).toMatchObject({ issue: 1, warnings: [/one program manager/, /no reviewer/].map(matching) });
     const budget = await newestBudget("TF-2");
@@ -56,7 +56,7 @@ describe("establishing a product", () => {
 
   it("stands once in the history with the hash of its content, and the chain fits", async () => {
     await product("TF-2");
-    const { contentHash } = await establishProduct(await manager(), CLOCK, input());
+    const { contentHash } = await establishProduct(await manager(), input(), CLOCK);
     expect((await historyPage({ chain: "TF-2", act: "establish_product" })).rows).toMatchObject([
       { act: "establish_product", outcome: "done", capacity: "program_manager", now: { issue: 1, contentHash } },
     ]);
@@ -66,8 +66,8 @@ describe("establishing a product", () => {
   it("happens once: the second try is refused as a wrong state", async () => {
     await product("TF-2");
     const lusia = await manager();
-    await establishProduct(lusia, CLOCK, input());
-    await expect(establishProduct(lusia, CLOCK, input())).rejects.toMatchObject({ code: "wrong_state" });
+    await establishProduct(lusia, input(), CLOCK);
+    await expect(establishProduct(lusia, input(), CLOCK)).rejects.toMatchObject({ code: "wrong_state" });
     expect(await Issue.count()).toBe(1);
   });
 
@@ -77,7 +77,7 @@ describe("establishing a product", () => {
   ])("is refused with %s and leaves nothing behind", async (_name, wrong, code, entries) => {
     await product("TF-2");
     const lusia = await manager();
-    await expect(establishProduct(lusia, CLOCK, wrong)).rejects.toMatchObject({ code });
+    await expect(establishProduct(lusia, wrong, CLOCK)).rejects.toMatchObject({ code });
     expect([await Issue.count(), await LineRevision.count(), await Signature.count()]).toEqual([0, 0, 0]);
     const { rows } = await historyPage({ chain: "TF-2", act: "establish_product" });
     expect(rows.map(({ outcome }) => outcome)).toEqual(Array.from({ length: entries }, () => "refused"));
@@ -88,7 +88,7 @@ describe("establishing a product", () => {
     const reviewer = await withRole(await person("Ines Maat"), "TF-2", "reviewer");
     const admin = await person("Anke Post", { isAdministrator: true });
     for (const other of [reviewer, admin]) {
-      await expect(establishProduct(other, CLOCK, input())).rejects.toMatchObject({ code: "forbidden" });
+      await expect(establishProduct(other, input(), CLOCK)).rejects.toMatchObject({ code: "forbidden" });
     }
     expect(await Issue.count()).toBe(0);
   });
@@ -107,7 +107,7 @@ describe("the register", () => {
     await product("TF-2");
     await product("PD-7", "duct");
     const lusia = await manager();
-    await establishProduct(lusia, CLOCK, input());
+    await establishProduct(lusia, input(), CLOCK);
     const admin = await person("Anke Post", { isAdministrator: true });
 
     expect(await registerFor(lusia)).toMatchObject([
@@ -131,13 +131,13 @@ describe("an account", () => {
 
   it("is made by an administrator, once for an address", async () => {
     const admin = await person("Anke Post", { isAdministrator: true });
-    await createAccount(admin, CLOCK, asked);
-    await expect(createAccount(admin, CLOCK, asked)).rejects.toMatchObject({ code: "duplicate" });
+    await createAccount(admin, asked, CLOCK);
+    await expect(createAccount(admin, asked, CLOCK)).rejects.toMatchObject({ code: "duplicate" });
     expect((await historyPage({ chain: "house" })).rows.map(({ act }) => act)).toEqual(["create_account"]);
   });
 
   it("is refused to anybody else", async () => {
-    await expect(createAccount(await person("Tom Veer"), CLOCK, asked)).rejects.toMatchObject({ code: "forbidden" });
+    await expect(createAccount(await person("Tom Veer"), asked, CLOCK)).rejects.toMatchObject({ code: "forbidden" });
   });
 });
 

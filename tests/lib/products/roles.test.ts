@@ -20,7 +20,7 @@ const NEW = CreateProductInput.parse({ code: "TF-2", name: "Side fairing", kind:
 describe("a product", () => {
   it("is made by an administrator and stands in the history of the house", async () => {
     const admin = await person("Anke Post", { isAdministrator: true });
-    await createProduct(admin, MARCH, NEW);
+    await createProduct(admin, NEW, MARCH);
     expect(await Product.findAll({ raw: true })).toMatchObject([
       { code: "TF-2", createdAt: "2026-03-01T09:00:00.000Z" },
     ]);
@@ -31,8 +31,8 @@ describe("a product", () => {
 
   it("never takes a code twice: the sentence stands at the field, and no act was done", async () => {
     const admin = await person("Anke Post", { isAdministrator: true });
-    await createProduct(admin, MARCH, NEW);
-    await expect(createProduct(admin, MARCH, NEW)).rejects.toMatchObject({
+    await createProduct(admin, NEW, MARCH);
+    await expect(createProduct(admin, NEW, MARCH)).rejects.toMatchObject({
       code: "duplicate",
       faults: [{ path: "code" }],
     });
@@ -41,7 +41,7 @@ describe("a product", () => {
 
   it("is refused to anybody else, which the history keeps", async () => {
     const owner = await person("Tom Veer");
-    await expect(createProduct(owner, MARCH, NEW)).rejects.toMatchObject({ code: "forbidden" });
+    await expect(createProduct(owner, NEW, MARCH)).rejects.toMatchObject({ code: "forbidden" });
     expect(await Product.count()).toBe(0);
     expect((await historyPage({})).rows).toMatchObject([{ act: "create_product", outcome: "refused" }]);
   });
@@ -53,8 +53,8 @@ describe("a role", () => {
     const ines = await person("Ines Maat");
     const productId = await product("TF-2");
     const given = { productCode: "TF-2", userId: ines.userId, role: "reviewer", reason: "" } as const;
-    const { membershipId } = await giveRole(admin, MARCH, given);
-    await endRole(admin, at("2026-04-01T09:00:00.000Z"), { membershipId, reason: "Moved to another team." });
+    const { membershipId } = await giveRole(admin, given, MARCH);
+    await endRole(admin, { membershipId, reason: "Moved to another team." }, at("2026-04-01T09:00:00.000Z"));
 
     const rolesAt = (time: string) => inSnapshot((tx) => membersAt(productId, time, tx));
     expect(await rolesAt("2026-02-28T00:00:00.000Z")).toEqual([]);
@@ -66,7 +66,7 @@ describe("a role", () => {
       ["end_role", "Moved to another team."],
       ["give_role", null],
     ]);
-    await expect(endRole(admin, MARCH, { membershipId, reason: "Again." })).rejects.toMatchObject({
+    await expect(endRole(admin, { membershipId, reason: "Again." }, MARCH)).rejects.toMatchObject({
       code: "wrong_state",
     });
   });
@@ -76,9 +76,9 @@ describe("a role", () => {
     const ines = await person("Ines Maat");
     await product("TF-2");
     const given = { productCode: "TF-2", userId: ines.userId, role: "reviewer", reason: "" } as const;
-    await giveRole(admin, MARCH, given);
-    await expect(giveRole(admin, MARCH, given)).rejects.toMatchObject({ code: "duplicate" });
-    await expect(giveRole(admin, MARCH, { ...given, userId: 999 })).rejects.toMatchObject({ code: "not_found" });
+    await giveRole(admin, given, MARCH);
+    await expect(giveRole(admin, given, MARCH)).rejects.toMatchObject({ code: "duplicate" });
+    await expect(giveRole(admin, { ...given, userId: 999 }, MARCH)).rejects.toMatchObject({ code: "not_found" });
     expect(await Membership.count()).toBe(1);
   });
 
@@ -86,7 +86,7 @@ describe("a role", () => {
     const manager = await person("Lusia Brand");
     await product("TF-2");
     const asked = { productCode: "TF-2", userId: manager.userId, role: "program_manager", reason: "" } as const;
-    await expect(giveRole(manager, MARCH, asked)).rejects.toMatchObject({ code: "forbidden" });
+    await expect(giveRole(manager, asked, MARCH)).rejects.toMatchObject({ code: "forbidden" });
     expect(await Membership.count()).toBe(0);
     expect((await historyPage({ chain: "TF-2" })).rows).toMatchObject([{ act: "give_role", outcome: "refused" }]);
   });

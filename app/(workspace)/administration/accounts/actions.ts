@@ -8,13 +8,9 @@ import { deactivateAccount } from "@/lib/products/deactivate-account";
 import { reactivateAccount } from "@/lib/products/reactivate-account";
 import { CreateAccountInput, DeactivateAccountInput } from "@/lib/products/schema";
 
-export const createAccountAction = defineAction(CreateAccountInput, (actor, input, clock) =>
-  createAccount(actor, clock, input),
-);
+export const createAccountAction = defineAction(CreateAccountInput, createAccount);
 
-export const deactivateAccountAction = defineAction(DeactivateAccountInput, (actor, input, clock) =>
-  deactivateAccount(actor, clock, input),
-);
+export const deactivateAccountAction = defineAction(DeactivateAccountInput, deactivateAccount);
 
 const ReactivateAccountInput = DeactivateAccountInput.extend({
   reason: z
@@ -24,6 +20,4 @@ const ReactivateAccountInput = DeactivateAccountInput.extend({
     .pipe(DeactivateAccountInput.shape.reason),
 });
 
-export const reactivateAccountAction = defineAction(ReactivateAccountInput, (actor, input, clock) =>
-  reactivateAccount(actor, clock, input),
-);
+export const reactivateAccountAction = defineAction(ReactivateAccountInput, reactivateAccount);

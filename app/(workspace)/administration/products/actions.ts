@@ -4,6 +4,4 @@ import { defineAction } from "@/app/_server/define-action";
 import { createProduct } from "@/lib/products/create-product";
 import { CreateProductInput } from "@/lib/products/schema";
 
-export const createProductAction = defineAction(CreateProductInput, (actor, input, clock) =>
-  createProduct(actor, clock, input),
-);
+export const createProductAction = defineAction(CreateProductInput, createProduct);

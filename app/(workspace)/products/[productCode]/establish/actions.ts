@@ -4,6 +4,4 @@ import { defineAction } from "@/app/_server/define-action";
 import { establishProduct } from "@/lib/products/establish-product";
 import { EstablishProductInput } from "@/lib/products/schema";
 
-export const establishAction = defineAction(EstablishProductInput, (actor, input, clock) =>
-  establishProduct(actor, clock, input),
-);
+export const establishAction = defineAction(EstablishProductInput, establishProduct);
