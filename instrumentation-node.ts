@@ -1,8 +1,9 @@
 import { startDeliveryLoop } from "@/lib/mail/delivery-loop";
+import { startReminderLoop } from "@/lib/proposals/reminder-loop";
 import { openDatabase } from "@/models/database";
 import { migrateDatabase } from "@/models/migrations/migrate";
 
-/** Opens and migrates the database and begins to deliver mail. */
+/** Opens and migrates the database and begins to deliver mail and to remind. */
 export async function prepareServer(): Promise<void> {
   try {
     await openDatabase();
@@ -13,4 +14,5 @@ export async function prepareServer(): Promise<void> {
     process.exit(1);
   }
   startDeliveryLoop();
+  startReminderLoop();
 }

@@ -5,7 +5,7 @@ import type { Standing } from "@/lib/vocabulary/standing";
 
 const BETTER: Record<Standing, string> = {
   inside: "inside again",
-  into_the_reserve: "no longer over, still into the reserve",
+  into_the_reserve: "no longer over, but into the reserve",
   over: "over the limit",
 };
 const WORSE: Record<Standing, string> = {

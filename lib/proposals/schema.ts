@@ -108,16 +108,17 @@ export type SettleRemarkInput = z.infer<typeof SettleRemarkInput>;
 /** Exactly what the signer had before them: the round, and the text with its effect on today's issue. */
 const SheetShown = { proposalId: Id, roundHash: Hash, textHash: Hash };
 
+const ApprovalOfSheet = z.strictObject({
+  ...SheetShown,
+  decision: z.literal("approve"),
+  capacity: z.enum(CAPACITIES),
+  meaning: plainText(200, "Choose what your signature means."),
+  /** The person for whom a deputy signs; null in one's own right. */
+  deputyForId: Id.nullable(),
+});
+
 export const SignProposalInput = z.discriminatedUnion("decision", [
-  z.strictObject({
-    ...SheetShown,
-    decision: z.literal("approve"),
-    capacity: z.enum(CAPACITIES),
-    meaning: plainText(200, "Choose what your signature means."),
-    /** The person for whom a deputy signs; null in one's own right. */
-    deputyForId: Id.nullable(),
-    password: Password,
-  }),
+  ApprovalOfSheet.extend({ password: Password }),
   z.strictObject({
     ...SheetShown,
     decision: z.literal("disapprove"),
@@ -128,6 +129,13 @@ export const SignProposalInput = z.discriminatedUnion("decision", [
   }),
 ]);
 export type SignProposalInput = z.infer<typeof SignProposalInput>;
+
+/** Several sheets that were each opened, approved under one password. */
+export const SignSheetsInput = z.strictObject({
+  sheets: z.array(ApprovalOfSheet).min(1, "Choose a sheet.").max(20, "Sign at most 20 sheets at once."),
+  password: Password,
+});
+export type SignSheetsInput = z.infer<typeof SignSheetsInput>;
 
 export const ReturnProposalInput = z.strictObject({
   proposalId: Id,

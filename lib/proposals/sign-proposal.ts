@@ -26,18 +26,29 @@ export interface SignedProposal {
  */
 export async function signProposal(
   actor: Actor,
-  input: SignProposalInput,
+  { password, ...sheet }: SignProposalInput,
   clock: Clock = systemClock,
 ): Promise<SignedProposal> {
-  const wrongPassword = await passwordRefusal(actor.userId, input.password);
-  const act = input.decision === "approve" ? "approve_proposal" : "disapprove_proposal";
-  return actOnProposal(actor, clock, { act, proposalId: input.proposalId }, async (context) => {
-    const review = await openRound(actor, context, input);
+  return signSheet(actor, sheet, await passwordRefusal(actor.userId, password), clock);
+}
+
+export type SheetToSign = Omit<Approval, "password"> | Omit<Disapproval, "password">;
+
+/** One sheet, with what was found wrong with the password that was typed for it, if anything. */
+export function signSheet(
+  actor: Actor,
+  sheet: SheetToSign,
+  wrongPassword: Refusal | null,
+  clock: Clock,
+): Promise<SignedProposal> {
+  const act = sheet.decision === "approve" ? "approve_proposal" : "disapprove_proposal";
+  return actOnProposal(actor, clock, { act, proposalId: sheet.proposalId }, async (context) => {
+    const review = await openRound(actor, context, sheet);
     if (wrongPassword) throw wrongPassword;
-    if (input.roundHash !== review.round.hash) throw moved("A newer round was submitted in the meantime.");
-    return input.decision === "approve"
-      ? approve(actor, context, review, input)
-      : disapprove(actor, context, review, input);
+    if (sheet.roundHash !== review.round.hash) throw moved("A newer round was submitted in the meantime.");
+    return sheet.decision === "approve"
+      ? approve(actor, context, review, sheet)
+      : disapprove(actor, context, review, sheet);
   });
 }
 
@@ -48,7 +59,7 @@ async function approve(
   actor: Actor,
   context: ProposalAct,
   review: RoundReview,
-  { capacity, meaning, deputyForId, textHash }: Approval,
+  { capacity, meaning, deputyForId, textHash }: Omit<Approval, "password">,
 ): Promise<SignedProposal> {
   const { tx, at, record } = context;
   await demandApprovable(actor, review, { capacity, deputyForId }, tx);
@@ -79,7 +90,7 @@ async function disapprove(
   actor: Actor,
   context: ProposalAct,
   review: RoundReview,
-  { capacity, reason, deputyForId, textHash }: Disapproval,
+  { capacity, reason, deputyForId, textHash }: Omit<Disapproval, "password">,
 ): Promise<SignedProposal> {
   const { tx, at, record } = context;
   if (textHash !== review.textHash) throw moved("The effect on today's issue or what has to be signed moved.");

@@ -6,7 +6,7 @@ import { saveDraft } from "@/lib/proposals/save-draft";
 import { signProposal } from "@/lib/proposals/sign-proposal";
 import { startDraft } from "@/lib/proposals/start-draft";
 import { database } from "@/models/database";
-import { withDatabase } from "../../support/database";
+import { withDatabase } from "@/tests/support/database";
 import { adding, approval, approves, CODE, content, formKey, proposed, team } from "./review-cycle";
 
 withDatabase();

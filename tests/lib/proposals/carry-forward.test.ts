@@ -5,8 +5,8 @@ import { carryForward } from "@/lib/proposals/carry-forward";
 import { settlementView } from "@/lib/proposals/queries";
 import { OutboxMessage } from "@/models/outbox-message";
 import { Proposal } from "@/models/proposal";
-import { newestBudget } from "../../support/budget-on-file";
-import { withDatabase } from "../../support/database";
+import { newestBudget } from "@/tests/support/budget-on-file";
+import { withDatabase } from "@/tests/support/database";
 import { adding, approvedItems, approves, CODE, formKey, proposed, reviewOf, revising, team } from "./review-cycle";
 
 withDatabase();

@@ -3,8 +3,8 @@ import { historyPage } from "@/lib/audit/queries";
 import { verifyChain } from "@/lib/audit/verify-chain";
 import { OutboxMessage } from "@/models/outbox-message";
 import { Proposal } from "@/models/proposal";
-import { newestBudget } from "../../support/budget-on-file";
-import { withDatabase } from "../../support/database";
+import { newestBudget } from "@/tests/support/budget-on-file";
+import { withDatabase } from "@/tests/support/database";
 import { adding, approvedItems, approves, CODE, proposed, reviewOf, revising, team } from "./review-cycle";
 
 withDatabase();

@@ -6,8 +6,8 @@ import { shareDraft } from "@/lib/proposals/share-draft";
 import { startDraft } from "@/lib/proposals/start-draft";
 import { Proposal } from "@/models/proposal";
 import { Round } from "@/models/round";
-import { addItem, newestBudget } from "../../support/budget-on-file";
-import { withDatabase } from "../../support/database";
+import { addItem, newestBudget } from "@/tests/support/budget-on-file";
+import { withDatabase } from "@/tests/support/database";
 import {
   adding,
   approvedItems,

@@ -14,7 +14,7 @@ import { OutboxMessage } from "@/models/outbox-message";
 import { Proposal } from "@/models/proposal";
 import { Round } from "@/models/round";
 import { Signature } from "@/models/signature";
-import { withDatabase } from "../../support/database";
+import { withDatabase } from "@/tests/support/database";
 import {
   adding,
   approval,

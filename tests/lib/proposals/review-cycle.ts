@@ -13,9 +13,9 @@ import type { Actor } from "@/lib/vocabulary/actor";
 import type { Clock } from "@/lib/vocabulary/clock";
 import type { Capacity } from "@/lib/vocabulary/roles";
 import { inSnapshot } from "@/models/database";
-import { addItem, bluffItem, establish } from "../../support/budget-on-file";
-import { person, product, withRole } from "../../support/people";
-import { steppingClock } from "../../support/recorded-product";
+import { addItem, bluffItem, establish } from "@/tests/support/budget-on-file";
+import { person, product, withRole } from "@/tests/support/people";
+import { steppingClock } from "@/tests/support/recorded-product";
 
 export const CODE = "TF-2";
 export const PASSWORD = "north wind and spray";

@@ -9,7 +9,7 @@ import { saveDraft } from "@/lib/proposals/save-draft";
 import { shareDraft } from "@/lib/proposals/share-draft";
 import { startDraft } from "@/lib/proposals/start-draft";
 import { noteVisit } from "@/lib/proposals/visits";
-import { withDatabase } from "../../support/database";
+import { withDatabase } from "@/tests/support/database";
 import { adding, approvedItems, approves, CODE, content, formKey, proposed, revising, team } from "./review-cycle";
 
 withDatabase();

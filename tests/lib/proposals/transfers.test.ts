@@ -5,8 +5,8 @@ import { proposalView } from "@/lib/proposals/queries";
 import { saveDraft } from "@/lib/proposals/save-draft";
 import { startDraft } from "@/lib/proposals/start-draft";
 import { Round } from "@/models/round";
-import { newestBudget } from "../../support/budget-on-file";
-import { withDatabase } from "../../support/database";
+import { newestBudget } from "@/tests/support/budget-on-file";
+import { withDatabase } from "@/tests/support/database";
 import { adding, approvedItems, approves, CODE, content, formKey, PASSWORD, proposed, team } from "./review-cycle";
 
 withDatabase();
