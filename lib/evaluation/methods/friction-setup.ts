@@ -84,7 +84,10 @@ export function layerOf(
 }
 
 /** A trip keeps its place wherever the plate ends, so that a plate and its parts see one layer. */
-function transitionOf({ transition }: FrictionCase, reynoldsOf: (length: number) => number): Transition {
+export function transitionOf(
+  { transition }: Pick<FrictionCase, "transition">,
+  reynoldsOf: (length: number) => number,
+): Transition {
   switch (transition.kind) {
     case "natural":
       return { kind: "at", reynolds: numberOf(transition.criticalReynolds) };

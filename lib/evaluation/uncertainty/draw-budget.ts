@@ -22,7 +22,11 @@ export function budgetDrawer(model: BudgetModel): (stream: UniformStream) => Dra
   const deviations = new Float64Array(causes.length);
   const basics = new Float64Array(items.length);
   return (uniform) => {
-    drawers.forEach((draw, place) => (deviations[place] = draw(uniform)));
+    let place = 0;
+    for (const draw of drawers) {
+      deviations[place] = draw(uniform);
+      place += 1;
+    }
     fillSlots(point.slots, deviations);
     const state = streamStateOf(point.input);
     let basic = 0;

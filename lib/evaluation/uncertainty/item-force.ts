@@ -1,10 +1,7 @@
-import { frictionBetween } from "@/lib/aero/friction/friction-between";
-import { isBelow } from "@/lib/aero/friction/transition";
 import { numberOf, type UncertainNumber } from "../document/number-input";
 import type { InputOf, MethodInput } from "../document/schema";
-import { ADMITTED_REYNOLDS } from "../methods/friction-result";
-import { ductCase, frictionSetup, plateCase, type FrictionSetup } from "../methods/friction-setup";
-import { localStream, streamStateOf, type StreamState } from "../methods/stream-state";
+import { streamStateOf, type StreamState } from "../methods/stream-state";
+import { frictionStretch } from "./friction-stretch";
 
 /** The basic estimate of one item as a function of its input as that stands at the moment, without notes or workings. */
 export interface ItemForce {
@@ -54,41 +51,40 @@ function smooth(newtons: (stream: StreamState) => number): ItemForce {
 }
 
 function pressureAt({ dynamicPressure }: StreamState, ratio: number): number {
-  return dynamicPressure * ratio ** 2;
+  return dynamicPressure * ratio * ratio;
 }
 
 function plateForce(input: InputOf<"flat-plate-friction">): ItemForce {
-  const setup = (stream: StreamState): FrictionSetup =>
-    frictionSetup(plateCase(input), localStream(stream, numberOf(input.localSpeedRatio)));
+  const surface = frictionStretch(input);
+  const at = <T>(
+    stream: StreamState,
+    read: (speed: number, viscosity: number, length: number, runUp: number) => T,
+  ): T =>
+    read(
+      stream.speed * numberOf(input.localSpeedRatio),
+      stream.kinematicViscosity,
+      numberOf(input.length),
+      numberOf(input.runUp),
+    );
   return {
     newtons: (stream) => {
       const width = numberOf(input.faces) * numberOf(input.breadth) * numberOf(input.formFactor);
-      return pressureAt(stream, numberOf(input.localSpeedRatio)) * width * stretchOf(setup(stream));
+      return pressureAt(stream, numberOf(input.localSpeedRatio)) * width * at(stream, surface.metres);
     },
-    regime: (stream) => regimeOf(setup(stream)),
+    regime: (stream) => at(stream, surface.regime),
   };
 }
 
 function ductForce(input: InputOf<"duct-entry">, flowArea: UncertainNumber | null): ItemForce {
-  const setup = (stream: StreamState): FrictionSetup => frictionSetup(ductCase(input), stream);
+  const surface = frictionStretch(input);
   return {
-    newtons: (stream) => {
+    newtons: ({ speed, kinematicViscosity, dynamicPressure }) => {
       const width = numberOf(input.width);
       const height = numberOf(input.height);
-      const drag = stream.dynamicPressure * 2 * (width + height) * stretchOf(setup(stream));
+      const stretch = surface.metres(speed, kinematicViscosity, numberOf(input.length), 0);
+      const drag = dynamicPressure * 2 * (width + height) * stretch;
       return flowArea === null ? drag : (drag / (width * height)) * flowArea.value;
     },
-    regime: (stream) => regimeOf(setup(stream)),
+    regime: ({ speed, kinematicViscosity }) => surface.regime(speed, kinematicViscosity, numberOf(input.length), 0),
   };
-}
-
-/** F(x₀ + L) − F(x₀), m. */
-function stretchOf({ layer, viscousLength, startReynolds, spanReynolds, endReynolds }: FrictionSetup): number {
-  const { min, max } = ADMITTED_REYNOLDS;
-  if (isBelow(endReynolds, min) || isBelow(max, endReynolds)) return Number.NaN;
-  return viscousLength * frictionBetween(layer, startReynolds, spanReynolds);
-}
-
-function regimeOf({ layer, transition, startReynolds, endReynolds }: FrictionSetup): string {
-  return `${transition.kind}|${layer.pieceAt(startReynolds)}|${layer.pieceAt(endReynolds)}`;
 }

@@ -49,10 +49,10 @@ export function normalQuantile(p: number): number {
   return q < 0 ? -distance : distance;
 }
 
-function ratio([above, below]: readonly [Coefficients, Coefficients], r: number): number {
-  return polynomial(above, r) / polynomial(below, r);
+function ratio(fraction: readonly [Coefficients, Coefficients], r: number): number {
+  return polynomial(fraction[0], r) / polynomial(fraction[1], r);
 }
 
-function polynomial([c0, c1, c2, c3, c4, c5, c6, c7]: Coefficients, r: number): number {
-  return ((((((c7 * r + c6) * r + c5) * r + c4) * r + c3) * r + c2) * r + c1) * r + c0;
+function polynomial(c: Coefficients, r: number): number {
+  return ((((((c[7] * r + c[6]) * r + c[5]) * r + c[4]) * r + c[3]) * r + c[2]) * r + c[1]) * r + c[0];
 }

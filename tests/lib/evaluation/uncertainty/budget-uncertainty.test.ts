@@ -4,6 +4,8 @@ import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { streamStateOf } from "@/lib/evaluation/methods/stream-state";
 import { OWN_UNCERTAINTIES } from "@/lib/evaluation/methods/own-uncertainties";
 import { budgetUncertainty } from "@/lib/evaluation/uncertainty/budget-uncertainty";
+import { budgetDrawer } from "@/lib/evaluation/uncertainty/draw-budget";
+import { seededStream } from "@/lib/evaluation/uncertainty/xoshiro";
 import { sideFairing, signPanel, supplyDuct } from "@/tests/support/demo-budgets";
 import { expectRelative } from "@/tests/support/relative";
 import {
@@ -233,5 +235,31 @@ describe("the demo products", () => {
       turbulent * OWN_UNCERTAINTIES["one-fifth-law"].relative,
       1e-9,
     );
+  });
+});
+
+describe("uncertainties beyond all measure", () => {
+  const LINES = ["automatic", "one-fifth-law", "white", "ittc-1957", "momentum-integral", "fully-rough"];
+
+  it.each(LINES)("give numbers or are refused in the draws, and break nothing off: %s", (frictionLine) => {
+    const wild = (more: object) =>
+      plate(spread(1, 50), spread(1, 50), 1, {
+        roughness: spread(1e-5, 1e9),
+        transition: "natural",
+        frictionLine,
+        ...more,
+      });
+    const state = budget({
+      "010": wild({}),
+      "020": wild({ runUp: spread(0, 1e9) }),
+      "030": wild({ transition: "tripped", trippedAt: spread(0, 1e9) }),
+      "040": wild({ roughness: spread(frictionLine === "fully-rough" ? 1e-9 : 0, 1e9) }),
+    });
+    const result = uncertaintyOf(state);
+    expect(Number.isFinite(result.basic.standardUncertainty)).toBe(true);
+    const model = modelOf(state);
+    const draw = budgetDrawer(model);
+    const stream = seededStream(4);
+    for (let count = 0; count < 300; count += 1) expect(draw(stream).basic).toBeTypeOf("number");
   });
 });
