@@ -1,5 +1,5 @@
 import { drawModel } from "@/lib/evaluation/uncertainty/monte-carlo";
-import { budgetModel } from "@/lib/evaluation/uncertainty/budget-model";
+import { budgetModel, type BudgetModel } from "@/lib/evaluation/uncertainty/budget-model";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
 import { budgetState } from "@/tests/support/budget-state";
 
@@ -80,11 +80,17 @@ function boxMuller(): number {
   return Math.sqrt(-2 * Math.log(1 - Math.random())) * Math.cos(2 * Math.PI * Math.random());
 }
 
-function drawnSum(): number {
+function benchModel(): BudgetModel {
   const [point] = evaluateBudget(state).points;
   if (!point) throw new Error("the bench has no operating point");
   const model = budgetModel(state, point);
   if ("refused" in model) throw new Error("the bench has refused items");
+  return model;
+}
+
+const model = benchModel();
+
+function drawnSum(): number {
   const batches = drawModel(model, { draws: DRAWS, seed: 1 });
   for (let step = batches.next(); ; step = batches.next()) if (step.done) return step.value.basic.mean;
 }

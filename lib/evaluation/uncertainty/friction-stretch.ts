@@ -35,6 +35,7 @@ export function frictionStretch(surface: Surface): FrictionStretch {
   let last: KnownLayer | null = null;
 
   const layerAt = (speed: number, kinematicViscosity: number): KnownLayer => {
+    if (last && settled && isSmoothLine) return last;
     const roughness = numberOf(surface.roughness);
     const asked = settled ?? transitionOf(surface, (length) => (speed * length) / kinematicViscosity);
     const transition =
