@@ -56,7 +56,9 @@ function logarithmic(min: number, max: number): (value: number) => number {
   return (value) => Math.log(value / min) / Math.log(max / min);
 }
 
-/** "10⁷". */
+const SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
+
+/** "10⁷"; power 0 or greater. */
 export function powerOfTen(power: number): string {
-  return formatSignificant(10 ** power, 1).replace("1 × ", "");
+  return `10${String(power).replace(/\d/g, (digit) => SUPERSCRIPTS.charAt(Number(digit)))}`;
 }

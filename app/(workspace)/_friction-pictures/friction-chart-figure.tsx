@@ -55,7 +55,7 @@ function ChartTable({ chart, name }: { chart: FrictionChart; name: string }) {
         <Head numeric>Turbulent</Head>
         {chart.family.map(({ lengthOverRoughness }) => (
           <Head key={lengthOverRoughness} numeric>
-            <SymbolText symbol={`L/k_s ${powerOfTen(Math.log10(lengthOverRoughness))}`} />
+            <SymbolText symbol={`L/k_s ${powerOfTen(Math.round(Math.log10(lengthOverRoughness)))}`} />
           </Head>
         ))}
       </TableHead>

@@ -11,7 +11,7 @@ const GREATEST = 1e-2;
 /** The friction chart on two logarithmic axes. */
 export function frictionChartLayout(chart: FrictionChart): PlotLayout {
   const { own } = chart;
-  const xAxis = decadeAxis(Math.log10(chart.leastReynolds), 10);
+  const xAxis = decadeAxis(Math.round(Math.log10(chart.leastReynolds)), 10);
   const highest = Math.max(GREATEST, own.coefficient, chart.laminar[0]?.coefficient ?? 0);
   const yAxis = stepAxis(Math.min(LEAST, own.coefficient), highest);
   const place = ({ reynolds, coefficient }: ChartPoint): PlotPoint => ({
@@ -30,7 +30,9 @@ export function frictionChartLayout(chart: FrictionChart): PlotLayout {
     points: points.map(place),
     label: label && labelAt ? { ...label, ...place(labelAt) } : null,
   });
-  const above = (text: string, anchor: PlotLabel["anchor"] = "end") => ({ text, anchor, side: "above" as const });
+  // Lines fall from left to right: what ends below its point stands clear of them.
+  const above = (text: string) => ({ text, anchor: "end" as const, side: "above" as const });
+  const below = (text: string) => ({ text, anchor: "end" as const, side: "below" as const });
 
   return {
     xTicks: xAxis.ticks,
@@ -41,17 +43,17 @@ export function frictionChartLayout(chart: FrictionChart): PlotLayout {
     curves: [
       ...chart.family.map(({ lengthOverRoughness, points }) =>
         drawn(
-          `L/k_s ${powerOfTen(Math.log10(lengthOverRoughness))}`,
+          `L/k_s ${powerOfTen(Math.round(Math.log10(lengthOverRoughness)))}`,
           "faint",
           points,
-          above(`L/k_s ${powerOfTen(Math.log10(lengthOverRoughness))}`),
+          above(`L/k_s ${powerOfTen(Math.round(Math.log10(lengthOverRoughness)))}`),
           points.at(-1),
         ),
       ),
-      drawn("laminar", "dashed", chart.laminar, { text: "laminar", anchor: "start", side: "below" }, chart.laminar[2]),
+      drawn("laminar", "dashed", chart.laminar, below("laminar"), chart.laminar[4]),
       drawn("laminar beyond its range", "dotted", chart.laminarBeyond),
       drawn("mixed", "dashed", chart.mixed),
-      drawn("turbulent", "ink", chart.turbulent, above("turbulent"), lastBefore(chart.turbulent, 1e8)),
+      drawn("turbulent", "ink", chart.turbulent, below("turbulent"), lastBefore(chart.turbulent, 3e8)),
       drawn("this item's layer", "own", chart.layer),
     ],
     marks: [{ ...place(own), text: `C_F ${formatSignificant(own.coefficient)}` }],

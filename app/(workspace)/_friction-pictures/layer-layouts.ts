@@ -13,7 +13,12 @@ export function growthLayout(growth: LayerGrowth): PlotLayout {
   const { stations } = growth;
   const xAxis = straightAxis([growth.end]);
   const yAxis = straightAxis(stations.map(({ thickness }) => thickness * MILLIMETRES * 1.08));
-  const line = (name: string, look: PlotCurve["look"], value: (station: LayerStation) => number): PlotCurve => {
+  const line = (
+    name: string,
+    look: PlotCurve["look"],
+    side: "above" | "below",
+    value: (station: LayerStation) => number,
+  ): PlotCurve => {
     const points = stations.map((station) => ({
       x: xAxis.fraction(station.place),
       y: yAxis.fraction(value(station) * MILLIMETRES),
@@ -23,7 +28,7 @@ export function growthLayout(growth: LayerGrowth): PlotLayout {
       name,
       look,
       points,
-      label: last ? { x: 0.985, y: last.y, text: name, anchor: "end", side: "above" } : null,
+      label: last ? { x: 0.985, y: last.y, text: name, anchor: "end", side } : null,
     };
   };
 
@@ -34,9 +39,9 @@ export function growthLayout(growth: LayerGrowth): PlotLayout {
     yTitle: "mm",
     bands: bandsOf(growth, xAxis),
     curves: [
-      line("θ", "dashed", (station) => station.momentumThickness),
-      line("δ*", "ink", (station) => station.displacementThickness),
-      line("δ", "own", (station) => station.thickness),
+      line("θ", "dashed", "below", (station) => station.momentumThickness),
+      line("δ*", "ink", "above", (station) => station.displacementThickness),
+      line("δ", "own", "above", (station) => station.thickness),
     ],
     marks: [],
   };

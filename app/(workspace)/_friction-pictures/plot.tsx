@@ -4,9 +4,9 @@ import { percent } from "../products/[productCode]/_pictures/scale";
 import type { PlotBand, PlotCurve, PlotLabel, PlotLayout, PlotMark, PlotPoint } from "./plot-layout";
 
 const HEIGHT = 250;
-/** Room above for words, below for the numbers of the x axis. */
+/** Room above for words, below for the numbers of the x axis and what they are. */
 const HEAD = 20;
-const FOOT = 24;
+const FOOT = 34;
 
 const LOOKS: Record<PlotCurve["look"], { className: string; width: number; dash?: string }> = {
   own: { className: "stroke-water", width: 2.5 },
@@ -64,14 +64,16 @@ function Rules({ layout: { xTicks, yTicks, xTitle } }: { layout: PlotLayout }) {
           <text
             x={percent(tick.at)}
             y={HEAD + HEIGHT + 16}
-            textAnchor={tick.at < 0.03 ? "start" : tick.at > 0.85 ? "end" : "middle"}
+            textAnchor={tick.at < 0.03 ? "start" : tick.at > 0.97 ? "end" : "middle"}
             className="fill-ink-2 text-2xs"
           >
             {tick.label}
-            {tick === xTicks.at(-1) ? <tspan dx="6">{xTitle}</tspan> : null}
           </text>
         </g>
       ))}
+      <text x="100%" y={HEAD + HEIGHT + 31} textAnchor="end" className="fill-ink-2 text-2xs">
+        {xTitle}
+      </text>
       <line x1="0" x2="100%" y1={y(0)} y2={y(0)} className="stroke-ink" />
       <line x1="0" x2="0" y1={y(1)} y2={y(0)} className="stroke-ink" />
     </>

@@ -10,7 +10,6 @@ import { DIMENSIONS, type DimensionName } from "@/lib/units/dimensions";
 import { formatQuantity } from "@/lib/units/format-quantity";
 
 import { asList, asRecord, type Body, type Json } from "./body";
-import type { EditorNames } from "./editor-names";
 import type { FieldInputProps } from "./field-input-props";
 import { ListInput } from "./list-input";
 import { NumberInput } from "./number-input";

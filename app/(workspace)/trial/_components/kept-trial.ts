@@ -5,13 +5,13 @@ function keyOf(userId: number): string {
   return `leeboard trial ${userId}`;
 }
 
-/** Keeps what is typed in this tab: a reload or a sign-out loses nothing. */
-export function keepTrial(userId: number, trial: Trial): void {
+/** Keeps what is typed in this tab, so that a reload or a sign-out loses nothing; false where the tab may keep nothing. */
+export function keepTrial(userId: number, trial: Trial): boolean {
   try {
     window.sessionStorage.setItem(keyOf(userId), JSON.stringify(trial));
-  } catch (problem) {
-    // A full or forbidden store takes nothing from what stands on the page.
-    console.warn("This tab keeps no copy of the trial.", problem);
+    return true;
+  } catch {
+    return false;
   }
 }
 

@@ -1,8 +1,9 @@
 "use client";
 
-import { useDeferredValue, useEffect, useMemo, useState } from "react";
+import { useDeferredValue, useMemo, useState } from "react";
 
 import { Button } from "@/app/_components/button";
+import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { useHydrated } from "@/app/_components/use-hydrated";
 
@@ -29,7 +30,7 @@ export function TrialSheet(props: TrialSheetProps) {
 }
 
 function TwoSettings({ userId, products }: TrialSheetProps) {
-  const { trial, shown, replace, change } = useTrial(userId);
+  const { trial, isKept, shown, replace, change } = useTrial(userId);
   const { a, b } = useDeferredValue(trial);
   const readings = { a: useMemo(() => readSetting(a), [a]), b: useMemo(() => readSetting(b), [b]) };
 
@@ -41,6 +42,11 @@ function TwoSettings({ userId, products }: TrialSheetProps) {
         <Button onClick={() => replace(exampleTrial())}>Back to the example</Button>
         <TurnIntoProposal setting={trial.b} isComputed={readings.b.result !== null} products={products} />
       </div>
+      {isKept ? null : (
+        <div className="mb-4">
+          <Notice kind="caution">This tab may keep nothing: a reload would lose what is typed here.</Notice>
+        </div>
+      )}
       <div className="grid gap-x-10 gap-y-6 lg:grid-cols-2">
         {SIDES.map((side) => (
           <SettingForm
@@ -65,16 +71,21 @@ function TwoSettings({ userId, products }: TrialSheetProps) {
 
 function useTrial(userId: number) {
   const [trial, setTrial] = useState<Trial>(() => readTrial(userId) ?? exampleTrial());
+  const [isKept, setKept] = useState(true);
   // Fields hold what is typed into them: a setting that comes from elsewhere needs fresh ones.
   const [shown, setShown] = useState(0);
-  useEffect(() => keepTrial(userId, trial), [userId, trial]);
+  const take = (next: Trial) => {
+    setTrial(next);
+    setKept(keepTrial(userId, next));
+  };
 
   return {
     trial,
+    isKept,
     shown,
-    change: (side: Side, setting: TrialSetting) => setTrial((old) => ({ ...old, [side]: setting })),
+    change: (side: Side, setting: TrialSetting) => take({ ...trial, [side]: setting }),
     replace: (next: Trial) => {
-      setTrial(next);
+      take(next);
       setShown((times) => times + 1);
     },
   };
