@@ -35,9 +35,9 @@ test("who is signed out saves nothing, proposes nothing and signs nothing", asyn
 });
 
 test("a cookie that was signed out elsewhere is worth nothing", async ({ application, refuses }) => {
-  const odo = await signInOverHttp(application.address, "odo");
-  valueOf(await endSessions(odo), z.unknown());
-  await refuses(() => startDraft(odo), { code: "forbidden", sentence: SIGNED_OUT });
+  const wanda = await signInOverHttp(application.address, "wanda");
+  valueOf(await endSessions(wanda), z.unknown());
+  await refuses(() => startDraft(wanda), { code: "forbidden", sentence: SIGNED_OUT });
 });
 
 test("a wrong password signs nobody in", async ({ application }) => {

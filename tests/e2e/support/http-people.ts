@@ -1,4 +1,7 @@
-/** Who acts in the tests over HTTP, with roles in product HT-1; `otto` holds every role, but in HT-2. */
+/**
+ * Who acts in the tests over HTTP, with roles in product HT-1. `wanda` ends her sessions, which nobody else's tests
+ * would survive; `otto` holds every role, but in HT-2.
+ */
 export const HTTP_PEOPLE = {
   ada: { printedName: "Ada Administrator", roles: [] },
   tansy: { printedName: "Tansy Owner", roles: ["component_owner"] },
@@ -9,6 +12,7 @@ export const HTTP_PEOPLE = {
   lusia: { printedName: "Lusia Manager", roles: ["program_manager"] },
   fenno: { printedName: "Fenno Manager", roles: ["program_manager"] },
   maud: { printedName: "Maud Auditor", roles: ["auditor"] },
+  wanda: { printedName: "Wanda Leaver", roles: ["component_owner"] },
   otto: { printedName: "Otto Elsewhere", roles: [] },
 } as const;
 
