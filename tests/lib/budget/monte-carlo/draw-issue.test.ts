@@ -2,10 +2,11 @@ import { mkdtempSync, rmSync } from "node:fs";
 import os from "node:os";
 import path from "node:path";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import { drawIssue, DrawIssueInput } from "@/lib/budget/monte-carlo/draw-issue";
+import { drawIssue, DrawIssueInput, monteCarloInputHash } from "@/lib/budget/monte-carlo/draw-issue";
 import { buildMonteCarloWorker } from "@/scripts/readiness/monte-carlo-worker.mjs";
 import { addItem, approve, establish, fixedItem } from "@/tests/support/budget-on-file";
 import { withDatabase } from "@/tests/support/database";
+import { sideFairing, signPanel } from "@/tests/support/demo-budgets";
 import { person, product, withRole } from "@/tests/support/people";
 
 withDatabase();
@@ -46,11 +47,14 @@ describe("drawing an issue", () => {
 
     const again = await drawIssue(ines, { ...INPUT, issue: 2 }, { workerFile });
     expect(again).toEqual(drawn);
-    const others = [{ seed: 6 }, { draws: 4001 }, { issue: 1 }];
-    for (const other of others) {
-      const { inputHash } = await drawIssue(ines, { ...INPUT, ...other }, { workerFile });
-      expect(inputHash).not.toBe(drawn.inputHash);
-    }
+  });
+
+  it("hashes everything that was drawn from", () => {
+    const job = { state: sideFairing(), operatingPoint: "OP-1", draws: 4000, seed: 5 };
+    const others = [job, { ...job, seed: 6 }, { ...job, draws: 4001 }, { ...job, operatingPoint: "OP-2" }];
+    const hashes = [...others, { ...job, state: signPanel() }].map(monteCarloInputHash);
+    expect(new Set(hashes).size).toBe(5);
+    expect(monteCarloInputHash({ ...job, state: sideFairing() })).toBe(hashes[0]);
   });
 
   it("is refused to strangers, and for a point or an issue that is not there", async () => {
