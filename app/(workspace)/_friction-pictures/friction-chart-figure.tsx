@@ -1,8 +1,8 @@
 import { FigureWithTable } from "@/app/_components/figure-with-table";
+import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { formatSignificant } from "@/lib/units/format-number";
 
-import { SymbolText } from "../products/[productCode]/_components/symbol-text";
 import { powerOfTen } from "./axis";
 import { type ChartPoint, type FrictionChart, frictionChart } from "./friction-chart";
 import { frictionChartLayout } from "./friction-chart-layout";

@@ -1,9 +1,9 @@
 import { FigureWithTable } from "@/app/_components/figure-with-table";
+import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { formatResult, formatThickness } from "@/lib/units/format-quantity";
 import { formatSignificant } from "@/lib/units/format-number";
 
-import { SymbolText } from "../products/[productCode]/_components/symbol-text";
 import type { FrictionSubject } from "./friction-subject";
 import { type LayerGrowth, layerGrowth, type LayerStation } from "./layer-growth";
 import { growthLayout, shearLayout } from "./layer-layouts";

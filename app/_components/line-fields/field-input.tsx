@@ -3,8 +3,10 @@
 import { CheckField } from "@/app/_components/check-field";
 import { ChoiceField } from "@/app/_components/choice-field";
 import { QuantityField } from "@/app/_components/quantity-field";
+import { SymbolText } from "@/app/_components/symbol-text";
 import { TextArea } from "@/app/_components/text-area";
 import { TextField } from "@/app/_components/text-field";
+import type { FieldSpec } from "@/lib/evaluation/lines/field-spec";
 import { parseQuantity } from "@/lib/units/parse-quantity";
 import { DIMENSIONS, type DimensionName } from "@/lib/units/dimensions";
 import { formatQuantity } from "@/lib/units/format-quantity";
@@ -22,7 +24,7 @@ export function FieldInput(props: FieldInputProps) {
   const { type } = spec;
   const texts = {
     id,
-    label: spec.symbol ? `${spec.label}, ${spec.symbol}` : spec.label,
+    label: labelOf(spec),
     hint: spec.help,
     optional: spec.optional,
     error: faultAt(path),
@@ -89,6 +91,16 @@ export function FieldInput(props: FieldInputProps) {
         />
       );
   }
+}
+
+function labelOf({ label, symbol }: FieldSpec) {
+  if (!symbol) return label;
+
+  return (
+    <>
+      {label}, <SymbolText symbol={symbol} />
+    </>
+  );
 }
 
 const renderField = (props: FieldInputProps) => <FieldInput {...props} />;

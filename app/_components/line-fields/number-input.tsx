@@ -20,6 +20,12 @@ interface NumberInputProps extends FieldTexts {
 /** A number as it is typed; shown in per cent or newtons where it is stored otherwise. */
 export function NumberInput({ type, value, onChange, id, ...texts }: NumberInputProps) {
   const [typed, setTyped] = useState(() => shown(type, value));
+  const [seen, setSeen] = useState(value);
+  // What comes from elsewhere (a choice that sets it, the other copy of a draft) takes the place of what was typed.
+  if (value !== seen) {
+    setSeen(value);
+    if ((value ?? null) !== stored(type, typed)) setTyped(shown(type, value));
+  }
   const parsed = typed.trim() === "" ? null : parseNumber(typed);
   const unit = unitOf(type);
 

@@ -1,7 +1,7 @@
 "use client";
 
+import { SymbolText } from "@/app/_components/symbol-text";
 import { ANSWER_FIELDS } from "@/app/(workspace)/products/[productCode]/_sheet/answer-rows";
-import { SymbolText } from "@/app/(workspace)/products/[productCode]/_components/symbol-text";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { MethodAnswer } from "@/lib/evaluation/methods/method-answer";
 import { formatNewtons } from "@/lib/units/format-newtons";
@@ -31,7 +31,7 @@ export function ComparisonTable({ a, b }: ComparisonTableProps) {
         {newtons === null ? "No difference to tell until both settings give a drag." : `From A to B ${newtons}`}
         {percent === null ? "" : `, ${percent} of A`}
       </p>
-      <Table caption="What the two settings give" narrow="scroll">
+      <Table caption="What the two settings give" narrow="stack">
         <TableHead>
           <Head>Quantity</Head>
           <Head numeric>A</Head>
@@ -40,21 +40,33 @@ export function ComparisonTable({ a, b }: ComparisonTableProps) {
         </TableHead>
         <tbody>
           <Row band>
-            <RowHead>
+            <RowHead label="Quantity">
               Drag <SymbolText symbol="D" />
             </RowHead>
-            <Cell numeric>{dragText(a, drags.a)}</Cell>
-            <Cell numeric>{dragText(b, drags.b)}</Cell>
-            <Cell numeric>{newtons === null ? "–" : [newtons, percent].filter(Boolean).join(" · ")}</Cell>
+            <Cell numeric label="A">
+              {dragText(a, drags.a)}
+            </Cell>
+            <Cell numeric label="B">
+              {dragText(b, drags.b)}
+            </Cell>
+            <Cell numeric label="From A to B">
+              {newtons === null ? "–" : [newtons, percent].filter(Boolean).join(" · ")}
+            </Cell>
           </Row>
           {rows.map(({ name, symbol, texts: [textA, textB] }) => (
             <Row key={name}>
-              <RowHead>
+              <RowHead label="Quantity">
                 {name} <SymbolText symbol={symbol} />
               </RowHead>
-              <Cell numeric>{textA ?? "–"}</Cell>
-              <Cell numeric>{textB ?? "–"}</Cell>
-              <Cell numeric>{textA === textB ? "same" : ""}</Cell>
+              <Cell numeric label="A">
+                {textA ?? "–"}
+              </Cell>
+              <Cell numeric label="B">
+                {textB ?? "–"}
+              </Cell>
+              <Cell numeric label="From A to B">
+                {textA === textB ? "same" : ""}
+              </Cell>
             </Row>
           ))}
         </tbody>

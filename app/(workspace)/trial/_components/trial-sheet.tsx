@@ -8,7 +8,7 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import { useHydrated } from "@/app/_components/use-hydrated";
 
 import { readSetting } from "../_trial/read-setting";
-import { exampleTrial, type Side, SIDES, type Trial, type TrialSetting } from "../_trial/setting";
+import { exampleTrial, SIDES, type Trial } from "../_trial/setting";
 import { ComparisonTable } from "./comparison-table";
 import { keepTrial, readTrial } from "./kept-trial";
 import { SettingForm } from "./setting-form";
@@ -30,16 +30,16 @@ export function TrialSheet(props: TrialSheetProps) {
 }
 
 function TwoSettings({ userId, products }: TrialSheetProps) {
-  const { trial, isKept, shown, replace, change } = useTrial(userId);
+  const { trial, isKept, take } = useTrial(userId);
   const { a, b } = useDeferredValue(trial);
   const readings = { a: useMemo(() => readSetting(a), [a]), b: useMemo(() => readSetting(b), [b]) };
 
   return (
     <>
       <div className="mb-4 flex flex-wrap gap-2 print:hidden">
-        <Button onClick={() => replace({ ...trial, b: trial.a })}>Copy A to B</Button>
-        <Button onClick={() => replace({ a: trial.b, b: trial.a })}>Exchange A and B</Button>
-        <Button onClick={() => replace(exampleTrial())}>Back to the example</Button>
+        <Button onClick={() => take({ ...trial, b: trial.a })}>Copy A to B</Button>
+        <Button onClick={() => take({ a: trial.b, b: trial.a })}>Exchange A and B</Button>
+        <Button onClick={() => take(exampleTrial())}>Back to the example</Button>
         <TurnIntoProposal setting={trial.b} isComputed={readings.b.result !== null} products={products} />
       </div>
       {isKept ? null : (
@@ -50,10 +50,10 @@ function TwoSettings({ userId, products }: TrialSheetProps) {
       <div className="grid gap-x-10 gap-y-6 lg:grid-cols-2">
         {SIDES.map((side) => (
           <SettingForm
-            key={`${side} ${shown}`}
+            key={side}
             side={side}
             setting={trial[side]}
-            onChange={(setting) => change(side, setting)}
+            onChange={(setting) => take({ ...trial, [side]: setting })}
             faults={readings[side].faults}
           />
         ))}
@@ -72,21 +72,10 @@ function TwoSettings({ userId, products }: TrialSheetProps) {
 function useTrial(userId: number) {
   const [trial, setTrial] = useState<Trial>(() => readTrial(userId) ?? exampleTrial());
   const [isKept, setKept] = useState(true);
-  // Fields hold what is typed into them: a setting that comes from elsewhere needs fresh ones.
-  const [shown, setShown] = useState(0);
   const take = (next: Trial) => {
     setTrial(next);
     setKept(keepTrial(userId, next));
   };
 
-  return {
-    trial,
-    isKept,
-    shown,
-    change: (side: Side, setting: TrialSetting) => take({ ...trial, [side]: setting }),
-    replace: (next: Trial) => {
-      take(next);
-      setShown((times) => times + 1);
-    },
-  };
+  return { trial, isKept, take };
 }

@@ -2,9 +2,9 @@ import Link from "next/link";
 import type { Route } from "next";
 
 import { NoteMark } from "@/app/_components/note-mark";
+import { SymbolText } from "@/app/_components/symbol-text";
 
 import type { Working, WorkingNote, WorkingStep, WorkingTerm } from "../_workings/working";
-import { SymbolText } from "./symbol-text";
 
 interface WorkingViewProps {
   working: Working;

@@ -3,12 +3,12 @@ import Link from "next/link";
 import { Fragment } from "react";
 
 import { RevisionLetter } from "@/app/_components/revision-letter";
+import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Row, RowHead } from "@/app/_components/table";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
 
-import { SymbolText } from "../../_components/symbol-text";
-import type { ItemRow } from "../../_sheet/budget-sheet";
-import { keyFigures } from "../../_sheet/key-figures";
+import type { ItemRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { keyFigures } from "@/app/(workspace)/products/[productCode]/_sheet/key-figures";
 import { FigureCells } from "./figure-cells";
 import { NoteCount, RowNotes } from "./row-notes";
 

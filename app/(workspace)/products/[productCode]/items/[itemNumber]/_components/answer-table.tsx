@@ -1,7 +1,7 @@
+import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 
-import { SymbolText } from "../../../_components/symbol-text";
-import { ANSWER_FIELDS } from "../../../_sheet/answer-rows";
+import { ANSWER_FIELDS } from "@/app/(workspace)/products/[productCode]/_sheet/answer-rows";
 import type { PointRow } from "./results-table";
 
 /** Everything the method gives, side by side at every operating point. */
