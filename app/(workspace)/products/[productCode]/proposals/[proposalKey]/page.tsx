@@ -9,7 +9,7 @@ import { requireActor } from "@/app/_server/session";
 import { proposalView } from "@/lib/proposals/queries";
 import type { ProposalView } from "@/lib/proposals/views";
 
-import { readForPage } from "../../_server/read-page";
+import { readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
 import { stateWords } from "../_components/state-words";
 import { ChangeSheet } from "./_components/change-sheet";
 import { ExportLinks } from "./_components/export-links";
