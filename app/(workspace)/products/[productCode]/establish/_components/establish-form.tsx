@@ -20,13 +20,6 @@ interface EstablishFormProps {
   product: { code: string; kind: ProductKind; timeZone: string };
 }
 
-/** What the parts of the form need: the typed texts, how to change one, what is wrong with one. */
-export interface EstablishFieldsProps {
-  values: EstablishValues;
-  change: (field: EstablishField, text: string) => void;
-  faults: EstablishFaults;
-}
-
 /** The first issue of a budget, signed by a program manager. */
 export function EstablishForm({ product }: EstablishFormProps) {
   const router = useRouter();

@@ -11,6 +11,13 @@ import type { EstablishField, EstablishValues } from "./establish-values";
 
 export type EstablishFaults = Partial<Record<EstablishField, string>>;
 
+/** What the parts of the form need: the typed texts, how to change one, what is wrong with one. */
+export interface EstablishFieldsProps {
+  values: EstablishValues;
+  change: (field: EstablishField, text: string) => void;
+  faults: EstablishFaults;
+}
+
 export interface ReadEstablishment {
   /** Everything but the password, which is typed when it is signed. */
   input: Omit<z.input<typeof EstablishProductInput>, "password">;

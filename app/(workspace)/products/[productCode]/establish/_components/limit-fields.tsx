@@ -2,7 +2,7 @@
 
 import { QuantityField } from "@/app/_components/quantity-field";
 
-import type { EstablishFieldsProps } from "./establish-form";
+import type { EstablishFieldsProps } from "./establish-input";
 
 /** The promise, and the part of it that the program manager holds back. */
 export function LimitFields({ values, change, faults }: EstablishFieldsProps) {

@@ -5,7 +5,7 @@ import { QuantityField } from "@/app/_components/quantity-field";
 import { TextField } from "@/app/_components/text-field";
 import { FLUID_CHOICES } from "@/lib/evaluation/lines/fluids";
 
-import type { EstablishFieldsProps } from "./establish-form";
+import type { EstablishFieldsProps } from "./establish-input";
 
 const STATE_FIELDS = [
   {

@@ -6,7 +6,7 @@ import { TextField } from "@/app/_components/text-field";
 import { MATURITY_GRADE_NAMES } from "@/lib/vocabulary/grades";
 import type { ProductKind } from "@/lib/vocabulary/lines";
 
-import type { EstablishFieldsProps } from "./establish-form";
+import type { EstablishFieldsProps } from "./establish-input";
 import { GROWTH_FIELDS } from "./establish-values";
 
 /** Growth by maturity grade, and the areas and counts in which drag is read. */
