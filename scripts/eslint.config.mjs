@@ -9,11 +9,6 @@ const NO_DEFAULT_EXPORT = {
   selector: "ExportDefaultDeclaration",
   message: "Export by name: only files that Next reads by convention and tool configurations export a default.",
 };
-const NO_RELATIVE_CLIMB = {
-  selector: "ImportDeclaration[source.value=/^\\.\\.\\u002F\\.\\.\\u002F/]",
-  message: "Use the @/ alias instead of climbing more than one folder.",
-};
-
 /** Files whose default export Next or a tool looks for. */
 const DEFAULT_EXPORT_FILES = [
   "app/**/{page,layout,loading,error,not-found,forbidden,unauthorized,global-error,template,default}.tsx",
@@ -33,7 +28,7 @@ const lintConfig = [
   {
     rules: {
       "max-lines": ["error", { max: 300 }],
-      "no-restricted-syntax": ["error", NO_REEXPORT, NO_DEFAULT_EXPORT, NO_RELATIVE_CLIMB],
+      "no-restricted-syntax": ["error", NO_REEXPORT, NO_DEFAULT_EXPORT],
       "@typescript-eslint/no-explicit-any": "error",
       "@typescript-eslint/no-unused-vars": ["error", { ignoreRestSiblings: true }],
       "@typescript-eslint/no-unused-expressions": "error",
@@ -64,7 +59,7 @@ const lintConfig = [
   },
   {
     files: DEFAULT_EXPORT_FILES,
-    rules: { "no-restricted-syntax": ["error", NO_REEXPORT, NO_RELATIVE_CLIMB] },
+    rules: { "no-restricted-syntax": ["error", NO_REEXPORT] },
   },
   {
     // What a script says to the person at the terminal is its output.
