@@ -12,8 +12,8 @@ import {
   sheetAddress,
 } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { staveInput } from "@/app/(workspace)/products/[productCode]/_sheet/stave-input";
-import { budgetState, line } from "../../support/budget-state";
-import { SIGN_PANEL, sideFairing, signPanel } from "../../support/demo-budgets";
+import { budgetState, line } from "@/tests/support/budget-state";
+import { SIGN_PANEL, sideFairing, signPanel } from "@/tests/support/demo-budgets";
 import { frozenBudget } from "./frozen-budget";
 
 function sheetOf(state: ReturnType<typeof signPanel>): BudgetSheet {

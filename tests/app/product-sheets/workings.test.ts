@@ -5,7 +5,7 @@ import { figureWorking } from "@/app/(workspace)/products/[productCode]/_working
 import { FIGURES, type Working } from "@/app/(workspace)/products/[productCode]/_workings/working";
 import type { LineRevisionView } from "@/lib/budget/views";
 import { formatNewtonsNumber } from "@/lib/units/format-newtons";
-import { sideFairing, supplyDuct } from "../../support/demo-budgets";
+import { sideFairing, supplyDuct } from "@/tests/support/demo-budgets";
 import { frozenBudget } from "./frozen-budget";
 
 function sheetOf(state: ReturnType<typeof sideFairing>, at = "OP-1") {

@@ -55,20 +55,33 @@ function DimensionLabel({ dimension, start, end, scale, y }: DimensionLabelProps
   } as const;
   const { x, anchor, dx, dy } = place[dimension.label];
 
+  const words = { x, y: y + dy, dx, textAnchor: anchor };
+
   return (
-    <text
-      x={x}
-      y={y + dy}
-      dx={dx}
-      textAnchor={anchor}
-      strokeWidth={dimension.label === "on" ? 12 : 4}
-      strokeLinejoin="round"
-      className="fill-ink stroke-sheet text-sm font-semibold [paint-order:stroke]"
-    >
-      {dimension.value}
-      <tspan dx="4" className="fill-ink-2 font-normal">
-        {dimension.word}
+    <g className="text-sm font-semibold">
+      <text
+        {...words}
+        strokeWidth={dimension.label === "on" ? 12 : 4}
+        strokeLinejoin="round"
+        className="fill-sheet stroke-sheet"
+      >
+        <DimensionWords dimension={dimension} />
+      </text>
+      <text {...words} className="fill-ink">
+        <DimensionWords dimension={dimension} />
+      </text>
+    </g>
+  );
+}
+
+/** Drawn twice: once as the gap in the line, then the words themselves, so that neither eats the other. */
+function DimensionWords({ dimension: { value, word } }: { dimension: PlacedDimension }) {
+  return (
+    <>
+      {value}
+      <tspan dx="4" className="font-normal">
+        {word}
       </tspan>
-    </text>
+    </>
   );
 }

@@ -16,7 +16,14 @@ const ROW_STEP = 38;
 /** One total to scale: items solid in order, growth hatched at their end, posts for limit and reserve, a ruler, dimensions. */
 export function Stave({ input }: { input: StaveInput }) {
   const layout = staveLayout(input);
-  const rows = dimensionRows(input).map((row) => placeDimensions(layout.scale, row));
+  const rows = dimensionRows(input)
+    .map((row) =>
+      placeDimensions(
+        layout.scale,
+        row.filter(({ from, to }) => from !== to),
+      ),
+    )
+    .filter((row) => row.length > 0);
   const { scale } = layout;
 
   return (

@@ -1,7 +1,7 @@
 import { EmptyNote } from "@/app/_components/empty-note";
 
-import type { BudgetSheet } from "../../_sheet/budget-sheet";
-import { chosenRows, type SheetQuery } from "../../_sheet/sheet-filter";
+import type { BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { chosenRows, type SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { BudgetTable } from "./budget-table";
 import { FilterForm } from "./filter-form";
 

@@ -1,7 +1,11 @@
 import { Head, Table, TableHead } from "@/app/_components/table";
 
-import type { BudgetRow, BudgetSheet } from "../../_sheet/budget-sheet";
-import { sheetAddress, type SheetQuery, type SortKey } from "../../_sheet/sheet-filter";
+import type { BudgetRow, BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import {
+  sheetAddress,
+  type SheetQuery,
+  type SortKey,
+} from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { GroupTableRow } from "./group-table-row";
 import { ItemTableRow } from "./item-table-row";
 import { TotalRows } from "./total-rows";

@@ -3,7 +3,7 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import type { AllocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { formatHundredths } from "@/lib/units/format-newtons";
 
-import { WorkingNumber } from "../../_components/workings-provider";
+import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 
 /** Allocations, unallocated and reserve against the limit: the sum that must hold after every act. */
 export function ConservationLine({ sums }: { sums: AllocationsView }) {
@@ -41,8 +41,8 @@ export function ConservationLine({ sums }: { sums: AllocationsView }) {
       {sums.isConserved ? null : (
         <div className="mt-3">
           <Notice kind="refusal">
-            These do not add up to the limit, or a group's members hold more than its ceiling. Nothing that was approved
-            can bring that about: tell the administrator.
+            These do not add up to the limit, or the members of a group hold more than its ceiling. Nothing that was
+            approved can bring that about: tell the administrator.
           </Notice>
         </div>
       )}

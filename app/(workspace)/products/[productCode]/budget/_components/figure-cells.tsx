@@ -1,10 +1,10 @@
 import { Cell } from "@/app/_components/table";
 import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
 
-import { WorkingNumber } from "../../_components/workings-provider";
-import { AllocationBar } from "../../_pictures/allocation-bar";
-import type { BudgetRow } from "../../_sheet/budget-sheet";
-import { isOver } from "../../_sheet/sheet-filter";
+import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
+import { AllocationBar } from "@/app/(workspace)/products/[productCode]/_pictures/allocation-bar";
+import type { BudgetRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { isOver } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 
 const SUMS = [
   { figure: "basic", label: "Basic estimate" },

@@ -3,7 +3,7 @@ import Link from "next/link";
 
 import { Button } from "@/app/_components/button";
 
-import { sheetAddress, type SheetQuery } from "../../_sheet/sheet-filter";
+import { sheetAddress, type SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 
 interface FilterFormProps {
   path: string;

@@ -1,7 +1,7 @@
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { Cell, Row, RowHead } from "@/app/_components/table";
 
-import type { GroupRow } from "../../_sheet/budget-sheet";
+import type { GroupRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { FigureCells } from "./figure-cells";
 
 /** A group ahead of what it holds: sums over it and its subgroups. */

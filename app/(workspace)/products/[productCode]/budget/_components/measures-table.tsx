@@ -2,8 +2,8 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { formatHundredths, formatNewtons } from "@/lib/units/format-newtons";
 
-import type { BudgetSheet } from "../../_sheet/budget-sheet";
-import { measuresOf } from "../../_sheet/measures";
+import type { BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { measuresOf } from "@/app/(workspace)/products/[productCode]/_sheet/measures";
 
 /** The total and its limit in the measures of the trade; newtons are what is kept. */
 export function MeasuresTable({ sheet: { budget, indexed, point } }: { sheet: BudgetSheet }) {

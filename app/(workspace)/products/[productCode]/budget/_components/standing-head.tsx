@@ -3,7 +3,7 @@ import { standingSentence } from "@/lib/evaluation/budget/standing-sentence";
 import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatPercent } from "@/lib/units/format-number";
 
-import { WorkingNumber } from "../../_components/workings-provider";
+import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 
 /** Where the total stands, in one sentence; the figures behind it open their workings. */
 export function StandingHead({ point }: { point: PointResult }) {

@@ -3,9 +3,9 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import { standingSentence } from "@/lib/evaluation/budget/standing-sentence";
 import { formatHundredths, formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
 
-import { Stave } from "../../_pictures/stave";
-import type { BudgetSheet, ItemRow } from "../../_sheet/budget-sheet";
-import { staveInput } from "../../_sheet/stave-input";
+import { Stave } from "@/app/(workspace)/products/[productCode]/_pictures/stave";
+import type { BudgetSheet, ItemRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { staveInput } from "@/app/(workspace)/products/[productCode]/_sheet/stave-input";
 
 /** The stave of an operating point with the same numbers as a table behind it. */
 export function StaveFigure({ sheet }: { sheet: BudgetSheet }) {

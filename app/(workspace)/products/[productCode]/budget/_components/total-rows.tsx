@@ -3,7 +3,7 @@ import type { PointResult } from "@/lib/evaluation/budget/results";
 import { formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { toHundredths } from "@/lib/units/rounding";
 
-import { WorkingNumber } from "../../_components/workings-provider";
+import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 
 const FIGURES = ["basic", "growth", "predicted"] as const;
 

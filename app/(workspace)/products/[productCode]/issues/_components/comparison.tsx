@@ -6,9 +6,9 @@ import type { ComparedLine, IssueComparison } from "@/lib/budget/views";
 import { formatNewtons, formatNewtonsChange } from "@/lib/units/format-newtons";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
-import { ChangedFields } from "../../_components/revisions-table";
-import { bridgeLayout } from "../../_pictures/bridge-layout";
-import { BridgePicture } from "../../_pictures/bridge-picture";
+import { ChangedFields } from "@/app/(workspace)/products/[productCode]/_components/revisions-table";
+import { bridgeLayout } from "@/app/(workspace)/products/[productCode]/_pictures/bridge-layout";
+import { BridgePicture } from "@/app/(workspace)/products/[productCode]/_pictures/bridge-picture";
 
 interface ComparisonProps {
   comparison: IssueComparison;

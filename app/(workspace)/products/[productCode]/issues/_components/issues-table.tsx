@@ -7,7 +7,7 @@ import type { IssueFacts, TrendIssue } from "@/lib/budget/views";
 import { formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
-import { approvedBy, proposedBy } from "../../_components/sheet-fields";
+import { approvedBy, proposedBy } from "@/app/(workspace)/products/[productCode]/_components/sheet-fields";
 
 interface IssuesTableProps {
   issues: readonly IssueFacts[];

@@ -4,7 +4,7 @@ import type { TrendIssue } from "@/lib/budget/views";
 import type { TermsBody } from "@/lib/evaluation/lines/terms-body";
 import { formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
 
-import { TrendPicture } from "../../_pictures/trend-picture";
+import { TrendPicture } from "@/app/(workspace)/products/[productCode]/_pictures/trend-picture";
 
 interface TrendFigureProps {
   trend: readonly TrendIssue[];

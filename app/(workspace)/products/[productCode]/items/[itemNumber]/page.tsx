@@ -10,12 +10,12 @@ import type { BudgetAt } from "@/lib/budget/views";
 import { findLine } from "@/lib/evaluation/budget/indexed-state";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
 
-import { AsStoodBanner } from "../../_components/as-stood-banner";
-import { budgetFields } from "../../_components/sheet-fields";
-import { ServiceWindCaution } from "../../_components/service-wind-caution";
-import { pageBudget, readForPage } from "../../_server/read-page";
-import { budgetSheet, pointOf } from "../../_sheet/budget-sheet";
-import { sheetAddress, SheetQuery } from "../../_sheet/sheet-filter";
+import { AsStoodBanner } from "@/app/(workspace)/products/[productCode]/_components/as-stood-banner";
+import { budgetFields } from "@/app/(workspace)/products/[productCode]/_components/sheet-fields";
+import { ServiceWindCaution } from "@/app/(workspace)/products/[productCode]/_components/service-wind-caution";
+import { pageBudget, readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
+import { budgetSheet, pointOf } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { sheetAddress, SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { ItemMatter } from "./_components/item-matter";
 import { RetiredItem } from "./_components/retired-item";
 import type { PointRow } from "./_components/results-table";

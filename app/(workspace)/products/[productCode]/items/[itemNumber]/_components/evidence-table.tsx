@@ -2,7 +2,7 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import { dayText } from "@/app/_components/utc-text";
 import type { EvidenceCitation } from "@/lib/evaluation/lines/items/item-common";
 
-import { evidenceAge } from "../../../_sheet/evidence-age";
+import { evidenceAge } from "@/app/(workspace)/products/[productCode]/_sheet/evidence-age";
 
 interface EvidenceTableProps {
   evidence: readonly EvidenceCitation[];

@@ -8,10 +8,10 @@ import { fieldRows } from "@/lib/evaluation/lines/field-rows";
 import type { LineOf } from "@/lib/evaluation/lines/line-state";
 import { nameBookOf } from "@/lib/evaluation/lines/name-book";
 
-import { FieldTable } from "../../../_components/field-table";
-import { RevisionsTable } from "../../../_components/revisions-table";
-import { WorkingNotes } from "../../../_components/working-view";
-import { itemNotes } from "../../../_workings/item-working";
+import { FieldTable } from "@/app/(workspace)/products/[productCode]/_components/field-table";
+import { RevisionsTable } from "@/app/(workspace)/products/[productCode]/_components/revisions-table";
+import { WorkingNotes } from "@/app/(workspace)/products/[productCode]/_components/working-view";
+import { itemNotes } from "@/app/(workspace)/products/[productCode]/_workings/item-working";
 import { AlternateLinesTable } from "./alternate-lines-table";
 import { AnswerTable } from "./answer-table";
 import { EvidenceTable } from "./evidence-table";

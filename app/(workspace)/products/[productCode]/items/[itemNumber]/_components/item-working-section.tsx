@@ -1,5 +1,9 @@
-import { WorkingSteps, WorkingTerms } from "../../../_components/working-view";
-import { basicWorking, growthWorking, predictedWorking } from "../../../_workings/item-working";
+import { WorkingSteps, WorkingTerms } from "@/app/(workspace)/products/[productCode]/_components/working-view";
+import {
+  basicWorking,
+  growthWorking,
+  predictedWorking,
+} from "@/app/(workspace)/products/[productCode]/_workings/item-working";
 import type { PointRow } from "./results-table";
 
 /** The whole calculation of an item at one operating point, from its fields to the predicted value. */

@@ -2,8 +2,8 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatPercent } from "@/lib/units/format-number";
 
-import type { BudgetSheet, ItemRow } from "../../../_sheet/budget-sheet";
-import { isOver } from "../../../_sheet/sheet-filter";
+import type { BudgetSheet, ItemRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { isOver } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 
 export interface PointRow {
   sheet: BudgetSheet;

@@ -3,7 +3,7 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import type { LineRevisionView } from "@/lib/budget/views";
 import type { LineOf } from "@/lib/evaluation/lines/line-state";
 
-import { RevisionsTable } from "../../../_components/revisions-table";
+import { RevisionsTable } from "@/app/(workspace)/products/[productCode]/_components/revisions-table";
 
 interface RetiredItemProps {
   line: LineOf<"item">;

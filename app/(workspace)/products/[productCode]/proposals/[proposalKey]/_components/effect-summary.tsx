@@ -3,7 +3,7 @@ import type { EffectView, PointEffectView } from "@/lib/proposals/views";
 import { formatNewtons, formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
-import { StavePair } from "../../../_pictures/stave-pair";
+import { StavePair } from "@/app/(workspace)/products/[productCode]/_pictures/stave-pair";
 
 interface EffectSummaryProps {
   effect: EffectView;
