@@ -72,7 +72,8 @@ function signingMove(actor: Actor, capacity: Capacity, review: RoundReview, unse
   if (!needed || isFilled(needed, approvals, round)) return HIDDEN;
   if (approvals.some(({ signerId }) => signerId === actor.userId)) return HIDDEN;
   const barred = signing.barred.find(({ userId }) => userId === actor.userId);
-  if (barred) return holdsRole ? refused(`Nobody signs their own change: you are barred ${barred.because}.`) : HIDDEN;
+  // Told also to who could not sign anyway: an owner asks why others sign what is theirs.
+  if (barred) return refused(`Nobody signs their own change: you are barred ${barred.because}.`);
   if (!hasRight(actor, capacity, review)) {
     const named = signing.namedReviewerId === null ? null : review.people.get(signing.namedReviewerId);
     return holdsRole && named ? refused(`${named} is named as the reviewer here.`) : HIDDEN;

@@ -25,7 +25,10 @@ export function returnProposal(actor: Actor, input: ReturnProposalInput, clock: 
     record({
       capacity,
       was: { state: proposal.state },
-      now: { state, round: review.round.number, signature: signature.hash },
+      now: {
+        ...{ state, round: review.round.number, signature: signature.hash },
+        ...(signature.deputyForName ? { deputyFor: signature.deputyForName } : {}),
+      },
       reason,
     });
     await mailDecided(actor, context, "returned");

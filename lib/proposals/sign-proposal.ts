@@ -69,7 +69,8 @@ async function approve(
   const signature = await writeSignature(actor, review, words, at, tx);
   const approvals = [...review.approvals, { capacity }];
   const missing = review.required.filter((required) => !isFilled(required, approvals, review.round));
-  const signed = { round: review.round.number, signature: signature.hash, meaning };
+  const { hash, deputyForName: deputyFor } = signature;
+  const signed = { round: review.round.number, signature: hash, meaning, ...(deputyFor ? { deputyFor } : {}) };
   if (missing.length > 0) {
     record({ capacity, now: signed });
     await mailSigned(actor, context, { capacity, signatureId: signature.id, missing });
@@ -97,7 +98,9 @@ async function disapprove(
   const words = { decision: "disapprove", capacity, meaning: null, reason, deputyForId, takesBackId: null } as const;
   const signature = await writeSignature(actor, review, words, at, tx);
   await endProposal(context, "disapprove");
-  const now = { state: "disapproved", round: review.round.number, signature: signature.hash };
+  const { hash, deputyForName: deputyFor } = signature;
+  const standing = { state: "disapproved", round: review.round.number, signature: hash };
+  const now = { ...standing, ...(deputyFor ? { deputyFor } : {}) };
   record({ capacity, was: { state: "proposed" }, now, reason });
   await mailDecided(actor, context, "disapproved");
   return { state: "disapproved", issue: null };

@@ -68,8 +68,8 @@ export async function writeRound(actor: Actor, context: ProposalAct, submission:
     act,
     subject: subjectOf(numbered),
     was: { state: proposal.state, round: proposal.round },
-    now: { state, round, baseIssue: base.issue, hash },
-    reason: title,
+    now: { state, round, baseIssue: base.issue, hash, title },
+    reason,
     ...submission.details,
     ...(signsBySubmitting ? { capacity: "program_manager" } : {}),
   });

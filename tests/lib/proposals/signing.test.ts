@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { historyPage } from "@/lib/audit/queries";
 import { nameReviewer } from "@/lib/proposals/name-reviewer";
 import { proposalView } from "@/lib/proposals/queries";
 import { remindSigners } from "@/lib/proposals/remind-signers";
@@ -206,6 +207,9 @@ describe("deputies", () => {
       printedName: "Odo Owner",
       deputyForName: "Ines Reviewer",
     });
+    expect((await historyPage({ chain: CODE, act: "approve_proposal" })).rows).toMatchObject([
+      { printedName: "Odo Owner", capacity: "reviewer", now: { deputyFor: "Ines Reviewer" } },
+    ]);
     expect(await approves(lusia, proposalId, "program_manager", clock)).toMatchObject({ state: "approved" });
   });
 
