@@ -40,7 +40,7 @@ export async function runningApplication(template: string): Promise<RunningAppli
   }
 }
 
-function freePort(): Promise<number> {
+export function freePort(): Promise<number> {
   return new Promise((resolve, reject) => {
     const probe = createServer();
     probe.once("error", reject);

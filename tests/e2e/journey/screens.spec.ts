@@ -1,0 +1,89 @@
+import AxeBuilder from "@axe-core/playwright";
+import { type Page } from "@playwright/test";
+import { type DemoPerson } from "@/scripts/demo/people";
+import { hydrated } from "../support/leeboard-test";
+import { test } from "./support/journey-test";
+import { expect } from "./support/patient-expect";
+
+const WIDTHS = [1280, 390];
+const RULES = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"];
+
+const SHARED = ["/", "/products", "/account", "/products/TF2/budget", "/products/TF2/proposals"];
+const READING = [
+  "/products/TF2/proposals/5",
+  "/products/TF2/items/030",
+  "/products/TF2/operating-points",
+  "/products/TF2/issues",
+  "/products/TF2/people",
+];
+const OTHERS = ["/products/PD7/budget?point=OP-2", "/products/GS4/budget", "/products/GS4/items/010"];
+
+/** Each role with the sheets that it opens; what only one role sees stands with that role. */
+const ROUNDS: readonly { person: DemoPerson; paths: readonly string[] }[] = [
+  { person: "tansy", paths: [...SHARED, ...READING, "/products/TF2/proposals/5/edit"] },
+  { person: "ines", paths: [...SHARED, ...READING] },
+  { person: "lusia", paths: [...SHARED, ...READING, ...OTHERS, "/products/TF2/issues?from=2&to=3"] },
+  { person: "maud", paths: [...SHARED, ...READING, "/products/TF2/history", "/products/TF2/budget?issue=3"] },
+  {
+    person: "wilmot",
+    paths: [
+      ...["/", "/products", "/account", "/administration/accounts", "/administration/products"],
+      ...["/administration/roles?product=TF2", "/administration/history"],
+    ],
+  },
+];
+
+test.describe.configure({ timeout: 420_000 });
+
+for (const { person, paths } of ROUNDS) {
+  test(`every sheet of ${person} stands, is quiet and can be read by everyone`, async ({ pageOf }) => {
+    const page = await pageOf(person);
+    const complaints = complaintsOf(page);
+    for (const path of paths) {
+      await page.setViewportSize({ width: WIDTHS[0] ?? 1280, height: 900 });
+      const response = await page.goto(path);
+      expect(response?.status(), path).toBe(200);
+      await hydrated(page);
+      await expect(page, path).toHaveTitle(/\S.*Leeboard/);
+      await expect(page.getByRole("heading", { level: 1 }), path).toBeVisible();
+      for (const width of WIDTHS) {
+        await page.setViewportSize({ width, height: 900 });
+        expect.soft(await overhang(page), `${path} at ${width} px scrolls sideways`).toBeLessThanOrEqual(0);
+        expect.soft(await violations(page), `${path} at ${width} px`).toEqual([]);
+      }
+    }
+    expect(complaints).toEqual([]);
+  });
+}
+
+test("a sheet that is not one's own says so plainly", async ({ pageOf }) => {
+  const page = await pageOf("tansy");
+  for (const [path, status] of [
+    ["/administration/accounts", 403],
+    ["/products/NONE-1/budget", 404],
+    ["/products/TF2/items/999", 404],
+  ] as const) {
+    const response = await page.goto(path);
+    expect(response?.status(), path).toBe(status);
+    await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
+  }
+});
+
+/** Errors of the console, uncaught ones and what the content security policy blocked. */
+function complaintsOf(page: Page): string[] {
+  const complaints: string[] = [];
+  page.on("console", (message) => {
+    if (message.type() === "error") complaints.push(`${page.url()}: ${message.text()}`);
+  });
+  page.on("pageerror", (error) => complaints.push(`${page.url()}: ${error.message}`));
+  return complaints;
+}
+
+function overhang(page: Page): Promise<number> {
+  return page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+}
+
+async function violations(page: Page): Promise<string[]> {
+  const { violations: found } = await new AxeBuilder({ page }).withTags(RULES).analyze();
+  return found.map(({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(" ")).join(", ")}`);
+}
