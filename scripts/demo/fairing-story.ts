@@ -1,8 +1,11 @@
 import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
+import { makeBaseline } from "@/lib/products/make-baseline";
+import { nameDeputy } from "@/lib/products/name-deputy";
 import type { DemoHouse } from "./demo-house";
 import { FAIRING_GROUPS, FAIRING_ITEMS } from "./fairing-items";
 import { degreesCelsius, metresPerSecond, squareMetres } from "./item-draft";
 import { added, citation, firstSheet, fromItem, revised } from "./line-edits";
+import { DEMO_PASSWORD } from "./people";
 import { FAIRING } from "./products";
 import { proposalActs, type ProposalActs } from "./proposal-acts";
 
@@ -14,12 +17,14 @@ export async function tellFairingStory(house: DemoHouse): Promise<void> {
   await bookFirstSheet(house, acts);
   await raiseSpeed(house, acts);
   await thinOutBrackets(house, acts);
+  await releasePreliminaryDesign(house);
   await joinPanels(house, acts);
   await raiseNoseCap(house, acts);
   await roundTrim(house, acts);
   await askInsideItem(house, acts);
   await addColdPoint(house, acts);
   await leaveDraft(house, acts);
+  await nameHolidayDeputy(house);
 }
 
 async function bookFirstSheet(house: DemoHouse, acts: ProposalActs): Promise<void> {
@@ -79,6 +84,18 @@ async function thinOutBrackets(house: DemoHouse, acts: ProposalActs): Promise<vo
   await acts.approve("ines", "reviewer", proposal);
   house.at(72, "08:50");
   await acts.approve("lusia", "program_manager", proposal);
+}
+
+async function releasePreliminaryDesign(house: DemoHouse): Promise<void> {
+  house.at(68, "16:00");
+  const released = {
+    productCode: CODE,
+    issue: 5,
+    name: "Preliminary design",
+    purpose: "The budget on which the tools for the panels are ordered.",
+  };
+  const signed = { ...released, password: DEMO_PASSWORD };
+  await makeBaseline(await house.actor("lusia"), signed, house.clock);
 }
 
 async function joinPanels(house: DemoHouse, acts: ProposalActs): Promise<void> {
@@ -198,4 +215,11 @@ async function leaveDraft(house: DemoHouse, acts: ProposalActs): Promise<void> {
     reason: "Eight of the sixteen latches can be sunk.",
     edits: [await revised(CODE, "item", "090", { referenceArea: squareMetres(0.0096) })],
   });
+}
+
+/** Next week's absence: the deputy is a reviewer themselves, and signs for the manager where nothing bars them. */
+async function nameHolidayDeputy(house: DemoHouse): Promise<void> {
+  house.at(1, "16:30");
+  const named = { productCode: CODE, deputyId: house.idOf("bram"), fromDay: house.day(-7), untilDay: house.day(-14) };
+  await nameDeputy(await house.actor("lusia"), named, house.clock);
 }
