@@ -186,7 +186,7 @@ describe("quantities at the end of the layer", () => {
 
   it.each([
     [0.000999, /^Re 999 .* outside every friction line/],
-    [10001, /^Re 1.00e10 .* outside every friction line/],
+    [10001, /^Re 1\.00 × 10¹⁰ .* outside every friction line/],
   ])("refuses a layer that ends at %f m", (length, sentence) => {
     expect(refusalOf(PLAIN, plate({ length }))).toMatch(sentence);
     expect(answerOf(PLAIN, plate({ length: 0.001 })).reynolds).toBeCloseTo(1000, 6);
