@@ -1,16 +1,21 @@
+import { z } from "zod";
+
 import { DraftContent } from "@/lib/proposals/schema";
+
+/** What was typed, and the saved state of the draft that it was typed on. */
+export const Backup = z.object({ lockVersion: z.int(), content: DraftContent });
+export type Backup = z.output<typeof Backup>;
 
 /** What this device keeps of a draft until the server has it. */
 function keyOf(proposalId: number): string {
   return `leeboard draft ${proposalId}`;
 }
 
-export function keepBackup(proposalId: number, content: DraftContent): void {
+export function keepBackup(proposalId: number, backup: Backup): void {
   try {
-    window.localStorage.setItem(keyOf(proposalId), JSON.stringify(content));
-  } catch (problem) {
-    // A full or forbidden store loses only the second copy; the server's is on its way.
-    console.warn("This device keeps no copy of the draft.", problem);
+    window.localStorage.setItem(keyOf(proposalId), JSON.stringify(backup));
+  } catch {
+    // A full or forbidden store loses only the second copy; the server's is on its way, and is said to be.
   }
 }
 
@@ -18,11 +23,11 @@ export function dropBackup(proposalId: number): void {
   window.localStorage.removeItem(keyOf(proposalId));
 }
 
-export function readBackup(proposalId: number): DraftContent | null {
+export function readBackup(proposalId: number): Backup | null {
   const text = window.localStorage.getItem(keyOf(proposalId));
   if (text === null) return null;
   try {
-    const parsed = DraftContent.safeParse(JSON.parse(text));
+    const parsed = Backup.safeParse(JSON.parse(text));
     return parsed.success ? parsed.data : null;
   } catch {
     return null;

@@ -2,11 +2,12 @@
 
 import { useCallback, useEffect, useRef, useState } from "react";
 
+import { sameValue } from "@/lib/proposals/same-value";
 import type { SavedDraft } from "@/lib/proposals/save-draft";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 
-import { dropBackup, keepBackup, readBackup } from "./draft-backup";
+import { type Backup, dropBackup, keepBackup, readBackup } from "./draft-backup";
 
 export type SaveState =
   | { state: "saved"; at: string }
@@ -20,69 +21,108 @@ export type SaveState =
 const PAUSE_MS = 700;
 const RETRY_MS = 5000;
 
-/** Keeps a draft: on the server a moment after the last keystroke, and on this device until the server has it. */
-export function useSavedDraft(draft: DraftView) {
-  const [content, setContentState] = useState<DraftContent>(draft.content);
-  const [save, setSave] = useState<SaveState>({ state: "saved", at: draft.savedAt });
+/** What is typed and the saved state that it stands on, both kept on this device as well. */
+function useTypedContent({ proposalId, ...draft }: DraftView) {
+  const [content, setContent] = useState<DraftContent>(draft.content);
   const [lockVersion, setLockVersion] = useState(draft.lockVersion);
   const newest = useRef(content);
   const lock = useRef(lockVersion);
 
-  const setContent = useCallback(
-    (change: (content: DraftContent) => DraftContent) => {
-      const next = change(newest.current);
+  const type = useCallback(
+    (next: DraftContent) => {
       newest.current = next;
-      keepBackup(draft.proposalId, next);
-      setContentState(next);
-      setSave((now) => (now.state === "moved" ? now : { state: "waiting" }));
+      keepBackup(proposalId, { lockVersion: lock.current, content: next });
+      setContent(next);
     },
-    [draft.proposalId],
+    [proposalId],
+  );
+  const adopt = useCallback(
+    (version: number) => {
+      lock.current = version;
+      setLockVersion(version);
+      keepBackup(proposalId, { lockVersion: version, content: newest.current });
+    },
+    [proposalId],
   );
 
-  const adopt = useCallback((version: number) => {
-    lock.current = version;
-    setLockVersion(version);
-  }, []);
+  const current = useCallback(() => ({ lockVersion: lock.current, content: newest.current }), []);
+
+  return { content, lockVersion, current, type, adopt };
+}
+
+/** Keeps a draft: on the server a moment after the last keystroke, and on this device until the server has it. */
+export function useSavedDraft(draft: DraftView) {
+  const { content, lockVersion, current, type, adopt } = useTypedContent(draft);
+  const [save, setSave] = useState<SaveState>({ state: "saved", at: draft.savedAt });
+
+  const setContent = useCallback(
+    (change: (content: DraftContent) => DraftContent) => {
+      type(change(current().content));
+      setSave((now) => (now.state === "moved" ? now : { state: "waiting" }));
+    },
+    [current, type],
+  );
 
   const send = useCallback(async () => {
-    const sent = newest.current;
+    const sent = current();
     setSave({ state: "saving" });
-    const answer = await putDraft(draft, lock.current, sent);
+    const answer = await putDraft(draft, sent.lockVersion, sent.content);
     if (answer.state === "stored") {
       adopt(answer.lockVersion);
-      if (newest.current !== sent) return setSave({ state: "waiting" });
+      if (current().content !== sent.content) return setSave({ state: "waiting" });
       dropBackup(draft.proposalId);
       return setSave({ state: "saved", at: answer.at });
     }
     setSave(answer);
-  }, [adopt, draft]);
+  }, [adopt, current, draft]);
 
-  useEffect(() => {
-    if (save.state !== "waiting" && !(save.state === "failed" && save.triesAgain)) return;
-    const timer = setTimeout(() => void send(), save.state === "waiting" ? PAUSE_MS : RETRY_MS);
-    return () => clearTimeout(timer);
-  }, [save, send]);
+  useSending(save, send);
 
-  // What a lost connection or a sign-out left on this device is taken up again.
-  useEffect(() => {
-    const kept = readBackup(draft.proposalId);
-    if (kept) setContent(() => kept);
-  }, [draft.proposalId, setContent]);
+  const takeUp = useCallback(
+    (kept: Backup) => {
+      adopt(kept.lockVersion);
+      setContent(() => kept.content);
+    },
+    [adopt, setContent],
+  );
+  useKeptBackup(draft, takeUp);
 
   const settle = useCallback(
     (whose: "mine" | "theirs", stored: DraftView) => {
       adopt(stored.lockVersion);
       if (whose === "theirs") {
-        newest.current = stored.content;
+        type(stored.content);
         dropBackup(draft.proposalId);
-        setContentState(stored.content);
         setSave({ state: "saved", at: stored.savedAt });
       } else setSave({ state: "waiting" });
     },
-    [adopt, draft.proposalId],
+    [adopt, draft.proposalId, type],
   );
 
   return { content, setContent, save, lockVersion, settle, saveNow: send };
+}
+
+/**
+ * What a lost connection or a sign-out left on this device is taken up again, on the saved state that it was typed on:
+ * what a co-editor saved meanwhile is shown, not overwritten.
+ */
+function useKeptBackup(draft: DraftView, takeUp: (kept: Backup) => void): void {
+  useEffect(() => {
+    const kept = readBackup(draft.proposalId);
+    if (!kept) return;
+    // The server had it, only its answer was lost.
+    if (sameValue(kept.content, draft.content)) return dropBackup(draft.proposalId);
+    takeUp(kept);
+  }, [draft, takeUp]);
+}
+
+/** Sends a moment after the last keystroke, and again after what may pass. */
+function useSending(save: SaveState, send: () => Promise<void>): void {
+  useEffect(() => {
+    if (save.state !== "waiting" && !(save.state === "failed" && save.triesAgain)) return;
+    const timer = setTimeout(() => void send(), save.state === "waiting" ? PAUSE_MS : RETRY_MS);
+    return () => clearTimeout(timer);
+  }, [save, send]);
 }
 
 type Answer = { state: "stored"; lockVersion: number; at: string } | Extract<SaveState, { state: "failed" | "moved" }>;
