@@ -1,4 +1,6 @@
-import type { ReactNode } from "react";
+import { Children, type ReactNode } from "react";
+
+import { SymbolText } from "./symbol-text";
 
 export type NoteSeverity = "information" | "caution" | "refusal";
 
@@ -20,7 +22,7 @@ export function NoteMark({ severity, children, code }: NoteMarkProps) {
         {MARKS[severity]}
       </span>
       <span className="sr-only">{severity}: </span>
-      {children}
+      {Children.map(children, (part) => (typeof part === "string" ? <SymbolText symbol={part} /> : part))}
       {code ? <span className="ml-1.5 font-code text-xs">{code}</span> : null}
     </span>
   );

@@ -46,13 +46,13 @@ function PointEffectTable({ point, items }: { point: PointEffect; items: readonl
           <th scope="col" className="py-1 text-left font-medium">
             Predicted, N
           </th>
-          <th scope="col" className="py-1 text-right font-medium">
+          <th scope="col" className="py-1 pl-3 text-right font-medium">
             Was
           </th>
-          <th scope="col" className="py-1 text-right font-medium">
+          <th scope="col" className="py-1 pl-3 text-right font-medium">
             To be
           </th>
-          <th scope="col" className="py-1 text-right font-medium">
+          <th scope="col" className="py-1 pl-3 text-right font-medium">
             Effect
           </th>
         </tr>
@@ -65,11 +65,11 @@ function PointEffectTable({ point, items }: { point: PointEffect; items: readonl
           <th scope="row" className="py-1 text-left">
             Total
           </th>
-          <td className="text-right">{point.was ? formatNewtonsNumber(point.was.predicted) : "–"}</td>
-          <td className="text-right" data-testid={`total-${point.operatingPoint}`}>
+          <td className="pl-3 text-right">{point.was ? formatNewtonsNumber(point.was.predicted) : "–"}</td>
+          <td className="pl-3 text-right" data-testid={`total-${point.operatingPoint}`}>
             {point.now ? formatNewtonsNumber(point.now.predicted) : "–"}
           </td>
-          <td className="text-right">{formatNewtonsChangeNumber(point.predictedDelta)}</td>
+          <td className="pl-3 text-right">{formatNewtonsChangeNumber(point.predictedDelta)}</td>
         </tr>
         <StandingRow point={point} />
       </tbody>
@@ -85,9 +85,9 @@ function StandingRow({ point: { was, now } }: { point: PointEffect }) {
       <th scope="row" className="py-1 text-left font-normal text-ink-2">
         Margin to limit
       </th>
-      <td className="text-right">{was ? formatNewtonsNumber(was.margin) : "–"}</td>
-      <td className="text-right">{now ? formatNewtonsNumber(now.margin) : "–"}</td>
-      <td className={`text-right ${now?.standing === "over" ? "font-semibold text-signal" : ""}`}>
+      <td className="pl-3 text-right">{was ? formatNewtonsNumber(was.margin) : "–"}</td>
+      <td className="pl-3 text-right">{now ? formatNewtonsNumber(now.margin) : "–"}</td>
+      <td className={`pl-3 text-right ${now?.standing === "over" ? "font-semibold text-signal" : ""}`}>
         {text[0] === text[1] ? text[0] : text.join(" → ")}
       </td>
     </tr>
@@ -114,9 +114,13 @@ function ItemEffectRow({ effect }: { effect: ItemEffect }) {
           </NoteMark>
         ))}
       </th>
-      <td className="py-1 text-right">{predictedWas === null ? "–" : formatNewtonsNumber(predictedWas)}</td>
-      <td className="py-1 text-right">{predictedNow === null ? "–" : formatNewtonsNumber(predictedNow)}</td>
-      <td className="py-1 text-right">{formatNewtonsChangeNumber(predictedDelta)}</td>
+      <td className="py-1 pl-3 text-right whitespace-nowrap">
+        {predictedWas === null ? "–" : formatNewtonsNumber(predictedWas)}
+      </td>
+      <td className="py-1 pl-3 text-right whitespace-nowrap">
+        {predictedNow === null ? "–" : formatNewtonsNumber(predictedNow)}
+      </td>
+      <td className="py-1 pl-3 text-right whitespace-nowrap">{formatNewtonsChangeNumber(predictedDelta)}</td>
     </tr>
   );
 }
