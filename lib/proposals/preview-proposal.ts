@@ -66,7 +66,7 @@ export function previewProposal(
   };
 }
 
-export function routingOf(
+function routingOf(
   before: BudgetAtIssue,
   { edits, transfers }: Change,
   { after }: PreviewedChange,

@@ -6,12 +6,12 @@ import { markdownText, plainText, sentenceText } from "./texts";
 const MAX_EDITS = 200;
 const MAX_TRANSFERS = 100;
 
-export const LineNumber = z
+const LineNumber = z
   .string()
   .trim()
   .regex(/^[A-Z0-9][A-Z0-9-]{0,11}$/, "Use capital letters, digits and hyphens, at most 12, for example 010.");
 
-export const ProductCode = z.string().regex(/^[A-Z0-9][A-Z0-9-]{1,11}$/, "This is no product code.");
+const ProductCode = z.string().regex(/^[A-Z0-9][A-Z0-9-]{1,11}$/, "This is no product code.");
 
 /** One render of a form has one key: sent twice, it acts once. */
 export const IdempotencyKey = z.string().regex(/^[A-Za-z0-9_-]{8,80}$/, "Reload the page and try again.");
@@ -31,7 +31,7 @@ export const DraftEdit = z.strictObject({
 });
 export type DraftEdit = z.infer<typeof DraftEdit>;
 
-export const TransferHolder = z
+const TransferHolder = z
   .strictObject({ kind: z.enum(["item", "group", "unallocated"]), number: LineNumber.nullable() })
   .refine((holder) => (holder.kind === "unallocated") === (holder.number === null), "Name an item or a group.");
 

@@ -169,22 +169,20 @@ export interface MoveView {
   because: string | null;
 }
 
-export const PROPOSAL_MOVES = [
-  "edit",
-  "share",
-  "propose",
-  "withdraw",
-  "carry_forward",
-  "sign_as_reviewer",
-  "sign_as_program_manager",
-  "return",
-  "disapprove",
-  "take_back",
-  "object",
-  "remark",
-  "name_reviewer",
-] as const;
-export type ProposalMove = (typeof PROPOSAL_MOVES)[number];
+export type ProposalMove =
+  | "edit"
+  | "share"
+  | "propose"
+  | "withdraw"
+  | "carry_forward"
+  | "sign_as_reviewer"
+  | "sign_as_program_manager"
+  | "return"
+  | "disapprove"
+  | "take_back"
+  | "object"
+  | "remark"
+  | "name_reviewer";
 
 export interface ProductView {
   id: number;
