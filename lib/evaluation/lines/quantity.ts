@@ -9,7 +9,7 @@ export interface Quantity {
 
 const LARGEST = 1e12;
 /** What must be greater than 0 and lies below this is taken for a slip. */
-const SMALLEST_POSITIVE = 1e-12;
+export const SMALLEST_POSITIVE = 1e-12;
 
 const anyNumber = z
   .number("Give a number.")

@@ -1,6 +1,6 @@
 import { z } from "zod";
 import type { Choice, FieldSpec } from "../field-spec";
-import { nonNegativeQuantity, positiveNumber, roughnessQuantity } from "../quantity";
+import { nonNegativeQuantity, positiveNumber, roughnessQuantity, SMALLEST_POSITIVE } from "../quantity";
 import { lineNumber } from "../text-schemas";
 
 export const FRICTION_LINES = [
@@ -63,7 +63,7 @@ export function demandOneRoughness(
   const both = body.finish !== null && body.roughness !== null;
   const none = body.finish === null && body.roughness === null;
   if (!both && !none) {
-    if (isFullyRough(body.frictionLine) && body.roughness?.value === 0) {
+    if (isFullyRough(body.frictionLine) && body.roughness && body.roughness.value < SMALLEST_POSITIVE) {
       const message = "A fully rough line needs a roughness greater than 0.";
       context.addIssue({ code: "custom", path: ["roughness"], message });
     }
