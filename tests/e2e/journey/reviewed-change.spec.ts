@@ -267,6 +267,7 @@ test("it is returned, revised and signed twice: the next issue has what was prev
   so.total = await previewedTotal(tansy);
   expect(await propose(tansy)).toBe(so.number);
   await expect(tansy.getByText(/proposed, round 2/).first()).toBeVisible();
+  await expect(tansy.getByText(/^Nobody signs their own change: you are barred as its proposer/)).toBeVisible();
   await expect(tansy.getByRole("button", { name: /^Sign as/ })).toHaveCount(0);
 
   await open(ines, path);

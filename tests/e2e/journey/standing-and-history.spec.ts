@@ -17,7 +17,7 @@ test("a program manager disapproves a proposal, and the budget stays as it was",
   const page = await pageOf("fenno");
   const before = await newestIssue(page, CODE);
   await open(page, `/products/${CODE}/proposals`);
-  const link = page.getByRole("row", { name: /Wheel-aperture trim/ }).getByRole("link");
+  const link = page.getByRole("row", { name: /Wheel-aperture trim with a radius/ }).getByRole("link");
   const label = await link.innerText();
   await open(page, (await link.getAttribute("href")) ?? "");
   await decide(page, {
@@ -98,7 +98,7 @@ test("the auditor reads who did what, goes back to an issue, and proves the chai
   await expect(entry.locator("time")).toHaveAttribute("datetime", /^\d{4}-\d\d-\d\dT[\d:.]+Z$/);
   await expect(entry.locator("td[data-label=Was]")).toContainText("proposed");
   await expect(entry.locator("td[data-label=Now]")).toContainText("approved");
-  await maud.getByLabel("Act", { exact: true }).selectOption({ label: "Sign: disapprove" });
+  await maud.locator("select[name=act]").selectOption({ label: "Sign: disapprove" });
   await maud.getByRole("button", { name: "Show", exact: true }).click();
   await expect(maud.locator("td[data-label=Reason]").first()).toContainText("The mould is not paid for.");
 
