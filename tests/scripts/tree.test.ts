@@ -14,7 +14,7 @@ const entries = FOLDERS.flatMap((folder) =>
 
 /** Kebab-case, with the marks Next gives a meaning to in folders of app: [parameter], (group), _private. */
 const KEBAB = /^[a-z0-9]+(-[a-z0-9]+)*(\.[a-z0-9-]+)*$/;
-const ROUTE_FOLDER = /^(\[(\.\.\.)?[a-zA-Z]+\]|\([a-z-]+\)|_[a-z]+)$/;
+const ROUTE_FOLDER = /^(\[(\.\.\.)?[a-zA-Z]+\]|\([a-z-]+\)|_[a-z-]+)$/;
 
 describe("the tree", () => {
   it("names files and folders in kebab-case", () => {
