@@ -1,5 +1,0 @@
-import { LoadingSheet } from "@/app/_components/loading-sheet";
-
-export default function Loading() {
-  return <LoadingSheet what="the item" />;
-}
