@@ -5,14 +5,16 @@ import { useRouter } from "next/navigation";
 import { useRef, useState } from "react";
 import useSWR from "swr";
 
+import { startDraftAction } from "@/app/(workspace)/_drafts/actions";
+import { putDraft } from "@/app/(workspace)/_drafts/put-draft";
 import type { ActionResult } from "@/app/_server/action-result";
 import { ChoiceField } from "@/app/_components/choice-field";
 import { ConfirmDialog } from "@/app/_components/confirm-dialog";
 import { nextNumber } from "@/app/_components/line-fields/editor-names";
 import { TextField } from "@/app/_components/text-field";
 import type { DraftEdit } from "@/lib/proposals/schema";
+import type { FieldFault } from "@/lib/vocabulary/refusal";
 
-import { saveDraftAction, startDraftAction } from "../actions";
 import { newItemEdit, revisedItemEdit, TrialTargets } from "../_trial/proposal-edit";
 import type { TrialSetting } from "../_trial/setting";
 
@@ -139,12 +141,14 @@ async function makeDraft(
 
   const { proposalId } = started.value;
   const content = { title, reason: "", neededBy: null, edits: [edit], transfers: [] };
-  const saved = await saveDraftAction({ proposalId, lockVersion: 0, content });
-  return saved.ok ? { ok: true, value: proposalId } : saved;
+  const saved = await putDraft({ productCode, proposalId, lockVersion: 0, content });
+  if (saved.state === "failed") return refused(saved.sentence, saved.faults);
+  // Tried again on one key after its answer was lost: the draft is there, and its editor shows what it holds.
+  return { ok: true, value: proposalId };
 }
 
-function refused(sentence: string): ActionResult<never> {
-  return { ok: false, code: "wrong_state", sentence, faults: [] };
+function refused(sentence: string, faults: readonly FieldFault[] = []): ActionResult<never> {
+  return { ok: false, code: "wrong_state", sentence, faults };
 }
 
 function targetsAddress(productCode: string): string {

@@ -4,10 +4,9 @@ import type { Route } from "next";
 import { useRouter } from "next/navigation";
 import { useRef, useState } from "react";
 
+import { startDraftAction } from "@/app/(workspace)/_drafts/actions";
 import { ConfirmDialog } from "@/app/_components/confirm-dialog";
 import { TextField } from "@/app/_components/text-field";
-
-import { startDraftAction } from "../actions";
 
 /** Asks for a title and goes on to the editor. */
 export function StartDraft({ productCode }: { productCode: string }) {

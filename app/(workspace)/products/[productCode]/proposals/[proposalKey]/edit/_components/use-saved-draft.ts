@@ -2,8 +2,8 @@
 
 import { useCallback, useEffect, useRef, useState } from "react";
 
+import { type DraftAnswer, putDraft } from "@/app/(workspace)/_drafts/put-draft";
 import { sameValue } from "@/lib/proposals/same-value";
-import type { SavedDraft } from "@/lib/proposals/save-draft";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 
@@ -13,10 +13,8 @@ export type SaveState =
   | { state: "saved"; at: string }
   | { state: "waiting" }
   | { state: "saving" }
-  /** Not saved, with the sentence why; what was typed is kept on this device. */
-  | { state: "failed"; sentence: string; faults: readonly { path: string; sentence: string }[]; triesAgain: boolean }
-  /** Somebody else saved meanwhile. */
-  | { state: "moved"; stored: DraftView };
+  /** What was typed is kept on this device. */
+  | Extract<DraftAnswer, { state: "failed" | "moved" }>;
 
 const PAUSE_MS = 700;
 const RETRY_MS = 5000;
@@ -65,8 +63,9 @@ export function useSavedDraft(draft: DraftView) {
 
   const send = useCallback(async () => {
     const sent = current();
+    const { productCode, proposalId } = draft;
     setSave({ state: "saving" });
-    const answer = await putDraft(draft, sent.lockVersion, sent.content);
+    const answer = await putDraft({ productCode, proposalId, ...sent });
     if (answer.state === "stored") {
       adopt(answer.lockVersion);
       if (current().content !== sent.content) return setSave({ state: "waiting" });
@@ -123,34 +122,4 @@ function useSending(save: SaveState, send: () => Promise<void>): void {
     const timer = setTimeout(() => void send(), save.state === "waiting" ? PAUSE_MS : RETRY_MS);
     return () => clearTimeout(timer);
   }, [save, send]);
-}
-
-type Answer = { state: "stored"; lockVersion: number; at: string } | Extract<SaveState, { state: "failed" | "moved" }>;
-
-async function putDraft(draft: DraftView, lockVersion: number, content: DraftContent): Promise<Answer> {
-  let response: Response;
-  try {
-    response = await fetch(`/api/products/${draft.productCode}/drafts/${draft.proposalId}`, {
-      method: "PUT",
-      headers: { "content-type": "application/json" },
-      body: JSON.stringify({ proposalId: draft.proposalId, lockVersion, content }),
-    });
-  } catch {
-    return { state: "failed", sentence: "no connection to the server", faults: [], triesAgain: true };
-  }
-  const answer: SavedDraft | Problem = await response.json();
-  if ("outcome" in answer) {
-    return answer.outcome === "saved"
-      ? { state: "stored", lockVersion: answer.lockVersion, at: answer.savedAt }
-      : { state: "moved", stored: answer.stored };
-  }
-
-  // What is refused as it stands is refused again: only a sign-out or a fault of the server may pass.
-  const triesAgain = response.status === 401 || response.status >= 500;
-  return { state: "failed", sentence: answer.sentence, faults: answer.faults, triesAgain };
-}
-
-interface Problem {
-  sentence: string;
-  faults: { path: string; sentence: string }[];
 }
