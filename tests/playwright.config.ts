@@ -5,8 +5,8 @@ export default defineConfig({
   testMatch: "**/*.spec.ts",
   outputDir: "../test-results/browser",
   globalSetup: "./e2e/support/global-setup.ts",
-  // One application with one database: the tests of a file build on each other's acts no more than people do.
-  workers: 1,
+  // Each worker has an application and a database of its own; a file's tests build on each other's acts as people do.
+  workers: 2,
   fullyParallel: false,
   retries: 0,
   timeout: 180_000,

@@ -20,10 +20,19 @@ const OTHERS = ["/products/PD7/budget?point=OP-2", "/products/GS4/budget", "/pro
 
 /** Each role with the sheets that it opens; what only one role sees stands with that role. */
 const ROUNDS: readonly { person: DemoPerson; paths: readonly string[] }[] = [
-  { person: "tansy", paths: [...SHARED, ...READING, "/products/TF2/proposals/5/edit"] },
+  { person: "tansy", paths: [...SHARED, ...READING, "/trial", "/products/TF2/proposals/5/edit"] },
   { person: "ines", paths: [...SHARED, ...READING] },
   { person: "lusia", paths: [...SHARED, ...READING, ...OTHERS, "/products/TF2/issues?from=2&to=3"] },
-  { person: "maud", paths: [...SHARED, ...READING, "/products/TF2/history", "/products/TF2/budget?issue=3"] },
+  {
+    person: "maud",
+    paths: [
+      ...SHARED,
+      ...READING,
+      "/products/TF2/history",
+      "/products/TF2/budget?issue=3",
+      "/products/TF2/issues/3/recomputed",
+    ],
+  },
   {
     person: "wilmot",
     paths: [
@@ -33,7 +42,8 @@ const ROUNDS: readonly { person: DemoPerson; paths: readonly string[] }[] = [
   },
 ];
 
-test.describe.configure({ timeout: 180_000 });
+// Nothing here changes anything, so that any worker can take any sheet.
+test.describe.configure({ mode: "parallel", timeout: 180_000 });
 
 for (const { person, paths } of ROUNDS) {
   for (const path of paths) {
@@ -48,6 +58,7 @@ for (const { person, paths } of ROUNDS) {
         for (const width of WIDTHS) {
           await page.setViewportSize({ width, height: 900 });
           expect.soft(await overhang(page), `pixels beyond ${width}`).toBeLessThanOrEqual(0);
+          if (!isReadByRulesAt(width, path, person)) continue;
           expect.soft(await violations(page), `at ${width} px`).toEqual([]);
         }
       });
@@ -68,6 +79,12 @@ test("a sheet that is not one's own says so plainly", async ({ pageOf }) => {
     await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
   }
 });
+
+/** Reading a page by the rules takes seconds: at every width for the first who opens it, at the widest for the others. */
+function isReadByRulesAt(width: number, path: string, person: DemoPerson): boolean {
+  const first = ROUNDS.find(({ paths }) => paths.includes(path))?.person;
+  return width === Math.max(...WIDTHS) || person === first;
+}
 
 /** Errors of the console, uncaught ones and what the content security policy blocked. */
 async function complaintsDuring(page: Page, work: () => Promise<void>): Promise<string[]> {

@@ -4,79 +4,15 @@ import { approvedMoves } from "@/lib/budget/approved-moves";
 import { compareIssues, issuesPatch } from "@/lib/budget/compare-issues";
 import { lineHistory } from "@/lib/budget/line-history";
 import { budgetAt, issuesOf, trendOf } from "@/lib/budget/queries";
-import { recomputeIssue } from "@/lib/budget/recompute-issue";
-import type { LineEdit } from "@/lib/evaluation/budget/edits";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
-import type { Actor } from "@/lib/vocabulary/actor";
 import { database, inSnapshot, inTransaction } from "@/models/database";
 import { Result } from "@/models/result";
-import {
-  addItem,
-  approve,
-  bluffItem,
-  establish,
-  fixedItem,
-  newestBudget,
-  shareItem,
-} from "@/tests/support/budget-on-file";
+import { addItem, approve, bluffItem, establish, fixedItem, newestBudget } from "@/tests/support/budget-on-file";
 import { withDatabase } from "@/tests/support/database";
-import { person, product, withRole } from "@/tests/support/people";
+import { person } from "@/tests/support/people";
+import { cast, close, ISSUE_1, ISSUE_2, ISSUE_3, Q, revise, threeIssues } from "@/tests/support/three-issues";
 
 withDatabase();
-
-const ISSUE_1 = "2026-03-01T09:00:00.000Z";
-const ISSUE_2 = "2026-03-10T09:00:00.000Z";
-const ISSUE_3 = "2026-03-20T09:00:00.000Z";
-const MASS_UNITS = 287.05287;
-/** Ideal gas at 15 °C and 101 325 Pa (ISO 2533), q = ½ρU² at 25 m/s, Pa. */
-const Q = 0.5 * (101325 / (MASS_UNITS * 288.15)) * 25 ** 2;
-
-interface Cast {
-  tansy: Actor;
-  ines: Actor;
-  lusia: Actor;
-}
-
-async function cast(): Promise<Cast> {
-  await product("TF-2");
-  return {
-    tansy: await withRole(await person("Tansy Merle"), "TF-2", "component_owner"),
-    ines: await withRole(await person("Ines Maat"), "TF-2", "reviewer"),
-    lusia: await withRole(await person("Lusia Brand"), "TF-2", "program_manager"),
-  };
-}
-
-const revise = (number: string, baseLetter: string, body: object): LineEdit => ({
-  operation: "revise",
-  kind: "item",
-  number,
-  baseLetter,
-  body,
-});
-
-/** Issue 2 adds 010 and a share of it, issue 3 makes 010 smaller and of a better grade. */
-async function threeIssues({ tansy, ines, lusia }: Cast): Promise<void> {
-  await establish(lusia, "TF-2", ISSUE_1);
-  await approve("TF-2", ISSUE_2, {
-    proposer: tansy,
-    signers: [
-      [ines, "reviewer"],
-      [lusia, "program_manager"],
-    ],
-    edits: [
-      addItem("010", bluffItem(tansy.userId, 0.5, 0.2)),
-      addItem("020", shareItem(tansy.userId, 0.1, ["010"], { order: 20 })),
-    ],
-    title: "Mirrors and their gaps",
-  });
-  const evidence = [{ document: "7731", revision: "C", date: "2026-03-15" }];
-  await approve("TF-2", ISSUE_3, {
-    proposer: tansy,
-    signers: [[ines, "reviewer"]],
-    edits: [revise("010", "–", bluffItem(tansy.userId, 0.4, 0.2, { grade: "layout", evidence }))],
-    title: "Smaller mirrors",
-  });
-}
 
 describe("a budget as it stands and as it stood", () => {
   it("is read from its issue: every line at its letter, every result as it was frozen", async () => {
@@ -185,23 +121,6 @@ describe("writing an issue", () => {
     });
     expect((await verifyChain("TF-2")).faults).toMatchObject([{ code: "content", where: "issue 2" }]);
   });
-
-  it("recomputes to what it stored, and tells the number that does not", async () => {
-    const people = await cast();
-    await threeIssues(people);
-    const { id } = (await budgetAt(people.ines, "TF-2", "newest")).product;
-    const recomputed = (issue: number) => inSnapshot((tx) => recomputeIssue(id, issue, tx));
-    for (const issue of [1, 2, 3]) expect(await recomputed(issue)).toEqual([]);
-    await inTransaction(async (tx) => {
-      await database.query("DROP TRIGGER results_never_changes", { transaction: tx });
-      await database.query("UPDATE results SET growth = growth * (1 + 1e-9) WHERE issue = 3", { transaction: tx });
-    });
-    const differences = await recomputed(3);
-    expect(differences.map(({ item, quantity }) => [item, quantity])).toEqual([
-      ["010", "growth"],
-      ["020", "growth"],
-    ]);
-  });
 });
 
 describe("what issues tell together", () => {
@@ -283,8 +202,3 @@ describe("what issues tell together", () => {
     ]);
   });
 });
-
-/** To a part in 10⁹: what is stored keeps 12 digits. */
-function close(value: number): unknown {
-  return expect.closeTo(value, 9 - Math.ceil(Math.log10(Math.abs(value))));
-}

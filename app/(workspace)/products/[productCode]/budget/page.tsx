@@ -9,6 +9,7 @@ import { abilityFor, covers } from "@/policies/ability";
 
 import { AsStoodBanner } from "../_components/as-stood-banner";
 import { NotEstablished } from "../_components/not-established";
+import { PointChoice } from "../_components/point-choice";
 import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
 import { WorkingsProvider } from "../_components/workings-provider";
@@ -21,7 +22,6 @@ import { BudgetItems } from "./_components/budget-items";
 import { ConservationLine } from "./_components/conservation-line";
 import { MeasuresTable } from "./_components/measures-table";
 import { NewerIssue } from "./_components/newer-issue";
-import { PointChoice } from "./_components/point-choice";
 import { RetiredLines } from "./_components/retired-lines";
 import { StandingHead } from "./_components/standing-head";
 import { StaveFigure } from "./_components/stave-figure";

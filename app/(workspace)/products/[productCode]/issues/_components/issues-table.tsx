@@ -52,6 +52,12 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode }: Issu
                 <span className="block font-code text-2xs text-ink-2" title={issue.contentHash}>
                   {issue.contentHash.slice(0, 12)}
                 </span>
+                <Link
+                  className="link text-xs print:hidden"
+                  href={`/products/${productCode}/issues/${issue.number}/recomputed?point=${operatingPoint}` as Route}
+                >
+                  Recompute<span className="sr-only"> issue {issue.number}</span>
+                </Link>
               </RowHead>
               <Cell>
                 <UtcTime at={issue.at} />

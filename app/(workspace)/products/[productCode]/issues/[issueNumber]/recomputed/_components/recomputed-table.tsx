@@ -1,0 +1,67 @@
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { RecomputedItem, RecomputedPoint } from "@/lib/budget/recomputed-today";
+import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+import { formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
+
+/** Predicted values of one operating point: as signed, as the same versions give them today, and by the newest. */
+export function RecomputedTable({ point }: { point: RecomputedPoint }) {
+  const { items, total } = point;
+
+  return (
+    <Table caption={`Predicted values at ${point.operatingPoint}, kept and recomputed`}>
+      <TableHead>
+        <Head>Item</Head>
+        <Head>Method, version</Head>
+        <Head numeric unit="N">
+          As signed
+        </Head>
+        <Head numeric unit="N">
+          Today, same version
+        </Head>
+        <Head numeric unit="N">
+          Difference
+        </Head>
+        <Head>Newest version</Head>
+        <Head numeric unit="N">
+          By the newest
+        </Head>
+      </TableHead>
+      <tbody>
+        {items.map((item) => (
+          <ItemRow key={item.item} {...item} />
+        ))}
+        <Row band>
+          <RowHead>Sum</RowHead>
+          <Cell />
+          <Cell numeric>{formatNewtonsNumber(total.frozen)}</Cell>
+          <Cell numeric>{formatNewtonsNumber(total.today)}</Cell>
+          <Cell numeric>{formatNewtonsChangeNumber(total.today - total.frozen)}</Cell>
+          <Cell />
+          <Cell numeric>{formatNewtonsNumber(total.newest)}</Cell>
+        </Row>
+      </tbody>
+    </Table>
+  );
+}
+
+function ItemRow({ item, name, method, version, newestVersion, frozen, today, newest }: RecomputedItem) {
+  return (
+    <Row>
+      <RowHead>
+        {item} {name}
+      </RowHead>
+      <Cell>
+        {ITEM_METHODS[method].label}, {version}
+      </Cell>
+      <Cell numeric>{formatNewtonsNumber(frozen)}</Cell>
+      <Cell numeric>{newtonsOrRefused(today)}</Cell>
+      <Cell numeric>{today === null ? "–" : formatNewtonsChangeNumber(today - frozen)}</Cell>
+      <Cell>{newestVersion === version ? "the same" : newestVersion}</Cell>
+      <Cell numeric>{newtonsOrRefused(newest)}</Cell>
+    </Row>
+  );
+}
+
+function newtonsOrRefused(newtons: number | null): string {
+  return newtons === null ? "refused" : formatNewtonsNumber(newtons);
+}
