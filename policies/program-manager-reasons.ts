@@ -38,6 +38,8 @@ const STATE_FIELDS: readonly string[] = [
   "staticTemperature",
   "staticPressure",
   "pressureAltitude",
+  "relativeHumidity",
+  "humidityUncertainty",
   "density",
   "dynamicViscosity",
   "speed",

@@ -83,6 +83,7 @@ const RANGE_NOTES: readonly NoteCode[] = [
   "reynolds-outside-line-range",
   "roughness-ratio-outside-range",
   "mach-above-limit",
+  "humid-air-outside-range",
   "measured-reynolds-differs",
 ];
 

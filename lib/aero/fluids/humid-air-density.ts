@@ -1,4 +1,10 @@
+import type { Range } from "../range";
+
 const ZERO_CELSIUS = 273.15;
+
+/** Where CIPM-2007 is stated: T [K] and p [Pa]. */
+export const CIPM_TEMPERATURES: Range = { min: 288.15, max: 300.15 };
+export const CIPM_PRESSURES: Range = { min: 6e4, max: 1.1e5 };
 
 /**
  * Density of moist air (CIPM-2007).
@@ -21,14 +27,17 @@ export function humidAirDensity(
   relativeHumidity: number,
   carbonDioxide = 0.0004,
 ): number {
-  const vapour =
-    (relativeHumidity *
-      enhancementFactor(staticTemperature, staticPressure) *
-      saturationVapourPressure(staticTemperature)) /
-    staticPressure;
+  const vapour = vapourFraction(staticTemperature, staticPressure, relativeHumidity);
   const ratio = (3.48374 + 1.4446 * (carbonDioxide - 0.0004)) * 1e-3;
   const compressibility = compressibilityFactor(staticTemperature, staticPressure, vapour);
   return ((ratio * staticPressure) / (compressibility * staticTemperature)) * (1 - 0.378 * vapour);
+}
+
+/** x_v = h f(p, t) p_sv(T)/p, mole fraction of vapour [-]; CIPM-2007, A1.3. */
+export function vapourFraction(temperature: number, pressure: number, relativeHumidity: number): number {
+  return (
+    (relativeHumidity * enhancementFactor(temperature, pressure) * saturationVapourPressure(temperature)) / pressure
+  );
 }
 
 /** p_sv(T) = exp(A T² + B T + C + D/T) [Pa], T in K; CIPM-2007, A1.1. */

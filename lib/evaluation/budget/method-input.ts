@@ -1,5 +1,5 @@
 import type { NumberInput } from "../document/number-input";
-import type { FluidInput, InputOf, MethodInput, TransitionInput } from "../document/schema";
+import type { FluidInput, InputOf, MethodInput, StreamInput, TransitionInput } from "../document/schema";
 import type { Fluid } from "../lines/fluids";
 import type { ItemBody } from "../lines/item-body";
 import type { FrictionLineChoice } from "../lines/items/friction-fields";
@@ -54,8 +54,10 @@ export function methodInputOf(body: EvaluatedBody, state: IndexedState): MethodI
 }
 
 /** What the formulas of a fluid read. */
-export function streamInputOf(point: OperatingPointBody): FluidInput {
-  return fluidInput({ ...point });
+export function streamInputOf(point: OperatingPointBody): StreamInput {
+  const input = fluidInput({ ...point });
+  if (input.fluid !== "air" || point.relativeHumidity === null) return input;
+  return { ...input, relativeHumidity: withSpread(point.relativeHumidity, point.humidityUncertainty) };
 }
 
 function flatPlateInput(

@@ -13,7 +13,7 @@ import {
   TransitionInput,
 } from "./method-schemas";
 import { METHOD_NAMES } from "../methods/method-name";
-import { oneOfMessage, textField } from "./number-input";
+import { type NumberInput, oneOfMessage, textField } from "./number-input";
 import { OperatingPointInput, StreamPointInput } from "./operating-point-schema";
 
 export { OperatingPointInput, StreamPointInput, TransitionInput };
@@ -71,9 +71,12 @@ export const EvaluationDocument = z
   )
   .superRefine(checkDocumentRules, { when: () => true });
 
-export type { NumberInput } from "./number-input";
+export type { NumberInput };
 export type FluidInput = z.infer<typeof StreamPointInput>;
 export type StreamPointInput = FluidInput;
+/** The same, where air may be humid: an operating point of a budget can say so, a document cannot. */
+export type StreamInput =
+  Exclude<FluidInput, { fluid: "air" }> | (Extract<FluidInput, { fluid: "air" }> & { relativeHumidity?: NumberInput });
 export type OperatingPointInput = z.infer<typeof OperatingPointInput>;
 export type TransitionInput = z.infer<typeof TransitionInput>;
 export type MethodInput = z.infer<typeof MethodInput>;

@@ -2,7 +2,14 @@ import { z } from "zod";
 import type { FieldSpec } from "./field-spec";
 import { FLUID_STATE_FIELDS, fluidStateFaults } from "./fluid-state";
 import { FLUID_CHOICES, FLUIDS } from "./fluids";
-import { nonNegativeNumber, positiveQuantity, signedQuantity } from "./quantity";
+import { humidityFaults } from "./humidity-faults";
+import {
+  coefficientUncertainty,
+  fractionNumber,
+  nonNegativeNumber,
+  positiveQuantity,
+  signedQuantity,
+} from "./quantity";
 import { hundredths, requiredText } from "./text-schemas";
 
 export const OperatingPointBody = z
@@ -15,13 +22,16 @@ export const OperatingPointBody = z
     pressureAltitude: signedQuantity.nullable().default(null),
     density: positiveQuantity.nullable().default(null),
     dynamicViscosity: positiveQuantity.nullable().default(null),
+    /** null: dry air. */
+    relativeHumidity: fractionNumber.nullable().default(null),
+    humidityUncertainty: coefficientUncertainty,
     speed: positiveQuantity,
     hoursPerYear: nonNegativeNumber.max(8784, "A year has at most 8784 hours.").nullable().default(null),
     /** null: the limit of the reference operating point. */
     limitHundredths: hundredths.min(1, "Must be greater than 0.").nullable().default(null),
   })
   .superRefine((body, context) => {
-    for (const { field, sentence } of fluidStateFaults(body)) {
+    for (const { field, sentence } of [...fluidStateFaults(body), ...humidityFaults(body)]) {
       context.addIssue({ code: "custom", path: [field], message: sentence });
     }
   });
@@ -58,6 +68,23 @@ export const OPERATING_POINT_FIELDS: readonly FieldSpec[] = [
     symbol: "h",
     help: "In place of the pressure: height in the standard atmosphere.",
     type: { type: "quantity", dimension: "altitude" },
+    optional: true,
+    shownWhen: AIR_ONLY,
+  },
+  {
+    key: "relativeHumidity",
+    label: "Relative humidity",
+    symbol: "h",
+    help: "Leave it empty for dry air. Density by CIPM-2007, stated for 15 to 27 °C and 600 to 1100 hPa.",
+    type: { type: "fraction" },
+    optional: true,
+    shownWhen: AIR_ONLY,
+  },
+  {
+    key: "humidityUncertainty",
+    label: "Standard uncertainty of the humidity",
+    help: "As a fraction: 0.05 is five points of relative humidity.",
+    type: { type: "number" },
     optional: true,
     shownWhen: AIR_ONLY,
   },
@@ -99,6 +126,8 @@ export const OPERATING_POINT_STATE_FIELDS: readonly (keyof OperatingPointBody)[]
   "fluid",
   "fluidVersion",
   ...FLUID_STATE_FIELDS,
+  "relativeHumidity",
+  "humidityUncertainty",
   "speed",
 ];
 
@@ -112,6 +141,8 @@ export function newOperatingPoint() {
     pressureAltitude: null,
     density: null,
     dynamicViscosity: null,
+    relativeHumidity: null,
+    humidityUncertainty: null,
     speed: null,
     hoursPerYear: null,
     limitHundredths: null,

@@ -1,6 +1,9 @@
-/** Whether two bodies say the same, whatever the order of their keys. A key without a value is none. */
+/**
+ * Whether two bodies say the same, whatever the order of their keys. A key without a value is none, as is one of null: a
+ * body stored before its field was made says what an empty field says.
+ */
 export function sameBody(one: unknown, other: unknown): boolean {
-  if (Object.is(one, other)) return true;
+  if (Object.is(one ?? null, other ?? null)) return true;
   if (Array.isArray(one) || Array.isArray(other)) return sameList(one, other);
   if (typeof one !== "object" || typeof other !== "object" || one === null || other === null) return false;
 
@@ -14,5 +17,5 @@ function sameList(one: unknown, other: unknown): boolean {
 }
 
 function entriesOf(body: object): ReadonlyMap<string, unknown> {
-  return new Map<string, unknown>(Object.entries(body).filter(([, value]) => value !== undefined));
+  return new Map<string, unknown>(Object.entries(body).filter(([, value]) => value !== undefined && value !== null));
 }

@@ -1,6 +1,6 @@
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
-import { machNotes } from "./mach-note";
+import { streamNotes } from "./stream-notes";
 import type { MethodOutcome } from "./method-answer";
 import { localStream, type StreamState } from "./stream-state";
 
@@ -10,6 +10,6 @@ export function evaluateDragArea(input: InputOf<"drag-area">, stream: StreamStat
   const drag = local.dynamicPressure * numberOf(input.dragArea);
   return {
     outcome: "answer",
-    answer: { drag, dragArea: drag / stream.dynamicPressure, notes: machNotes(local) },
+    answer: { drag, dragArea: drag / stream.dynamicPressure, notes: streamNotes(local) },
   };
 }

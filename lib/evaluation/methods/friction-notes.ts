@@ -10,7 +10,7 @@ import type { Note, NoteValues } from "../notes/note";
 import { makeNote } from "../notes/note-catalogue";
 import type { FrictionAnswer } from "./friction-answer";
 import type { FrictionCase, FrictionSetup } from "./friction-setup";
-import { machNotes } from "./mach-note";
+import { streamNotes } from "./stream-notes";
 import type { StreamState } from "./stream-state";
 
 interface FrictionFacts {
@@ -28,7 +28,7 @@ export function frictionNotes(facts: FrictionFacts): Note[] {
     ...rangeNotes(facts),
     ...laminarNotes(facts),
     ...roughnessNotes(facts),
-    ...machNotes(facts.stream),
+    ...streamNotes(facts.stream),
     ...(facts.friction.frictionLine === "automatic" ? automaticNotes(facts) : namedLineNotes(facts)),
     ...(facts.isThicknessBorrowed
       ? [makeNote("thickness-by-wall-and-wake", { line: facts.answer.frictionLineUsed })]

@@ -1,6 +1,6 @@
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
-import { machNotes } from "./mach-note";
+import { streamNotes } from "./stream-notes";
 import type { MethodOutcome } from "./method-answer";
 import { localStream, type StreamState } from "./stream-state";
 
@@ -9,5 +9,5 @@ export function evaluateLossCoefficient(input: InputOf<"loss-coefficient">, stre
   const local = localStream(stream, numberOf(input.localSpeedRatio));
   const pressureLoss = numberOf(input.lossCoefficient) * local.dynamicPressure;
   const drag = pressureLoss * numberOf(input.flowArea);
-  return { outcome: "answer", answer: { drag, pressureLoss, notes: machNotes(local) } };
+  return { outcome: "answer", answer: { drag, pressureLoss, notes: streamNotes(local) } };
 }

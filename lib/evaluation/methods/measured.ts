@@ -1,7 +1,7 @@
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
 import { makeNote } from "../notes/note-catalogue";
-import { machNotes } from "./mach-note";
+import { streamNotes } from "./stream-notes";
 import type { MethodOutcome } from "./method-answer";
 import { streamStateOf, type StreamState } from "./stream-state";
 
@@ -19,7 +19,7 @@ export function evaluateMeasured(input: InputOf<"measured">, stream: StreamState
     answer: {
       drag,
       dragArea: drag / stream.dynamicPressure,
-      notes: [...machNotes(stream), ...(differs ? [makeNote("measured-reynolds-differs", { ratio })] : [])],
+      notes: [...streamNotes(stream), ...(differs ? [makeNote("measured-reynolds-differs", { ratio })] : [])],
     },
   };
 }

@@ -1,10 +1,11 @@
+import { airCondition } from "@/lib/aero/fluids/air-condition";
 import { dryAir } from "@/lib/aero/fluids/dry-air";
 import type { FluidState } from "@/lib/aero/fluids/fluid-state";
 import { freshWater } from "@/lib/aero/fluids/fresh-water";
+import { humidAir } from "@/lib/aero/fluids/humid-air";
 import { seaWater } from "@/lib/aero/fluids/sea-water";
-import { standardAtmosphere } from "@/lib/aero/fluids/standard-atmosphere";
-import { numberOf } from "../document/number-input";
-import type { FluidInput } from "../document/schema";
+import { numberOf, type NumberInput } from "../document/number-input";
+import type { StreamInput } from "../document/schema";
 
 /** What every method needs to know of an operating point, SI. */
 export interface StreamState extends FluidState {
@@ -14,10 +15,12 @@ export interface StreamState extends FluidState {
   dynamicPressure: number;
   /** U, m/s. */
   speed: number;
+  /** T [K] and p [Pa] at which the formula of humid air was used; only where it was. */
+  humidAirAt?: { staticTemperature: number; staticPressure: number };
 }
 
 /** The stream of an operating point by its fluid's formulas. */
-export function streamStateOf(point: FluidInput): StreamState {
+export function streamStateOf(point: StreamInput): StreamState {
   const fluid = fluidStateOf(point);
   const speed = numberOf(point.speed);
   return {
@@ -28,7 +31,7 @@ export function streamStateOf(point: FluidInput): StreamState {
   };
 }
 
-function fluidStateOf(point: FluidInput): FluidState {
+function fluidStateOf(point: StreamInput): Pick<StreamState, keyof FluidState | "humidAirAt"> {
   switch (point.fluid) {
     case "air":
       return airState(point);
@@ -41,16 +44,18 @@ function fluidStateOf(point: FluidInput): FluidState {
   }
 }
 
-function airState(point: Extract<FluidInput, { fluid: "air" }>): FluidState {
-  const standard =
-    point.pressureAltitude === undefined ? undefined : standardAtmosphere(numberOf(point.pressureAltitude));
-  const temperature =
-    point.staticTemperature === undefined ? standard?.staticTemperature : numberOf(point.staticTemperature);
-  const pressure = point.staticPressure === undefined ? standard?.staticPressure : numberOf(point.staticPressure);
-  if (temperature === undefined || pressure === undefined) {
-    throw new RangeError("air needs staticTemperature with staticPressure, or pressureAltitude");
-  }
-  return dryAir(temperature, pressure);
+function airState(point: Extract<StreamInput, { fluid: "air" }>): Pick<StreamState, keyof FluidState | "humidAirAt"> {
+  const told = (field: NumberInput | undefined) => (field === undefined ? undefined : numberOf(field));
+  const condition = airCondition({
+    staticTemperature: told(point.staticTemperature),
+    staticPressure: told(point.staticPressure),
+    pressureAltitude: told(point.pressureAltitude),
+  });
+  if (!condition) throw new RangeError("air needs staticTemperature with staticPressure, or pressureAltitude");
+  const { staticTemperature, staticPressure } = condition;
+  if (point.relativeHumidity === undefined) return dryAir(staticTemperature, staticPressure);
+  const state = humidAir(staticTemperature, staticPressure, numberOf(point.relativeHumidity));
+  return { ...state, humidAirAt: condition };
 }
 
 /** The stream as a part of a body sees it whose local speed is `ratio` times that of the operating point. */

@@ -1,3 +1,5 @@
+import { CIPM_PRESSURES, CIPM_TEMPERATURES } from "@/lib/aero/fluids/humid-air-density";
+import type { Range } from "@/lib/aero/range";
 import { figure } from "./figure";
 import { lineTitle } from "./line-title";
 import type { NoteValues } from "./note";
@@ -59,6 +61,17 @@ export const CAUTIONS = {
       `lower the speed.`,
     (values) => valueOf(values, "mach") / valueOf(values, "limit"),
   ),
+  "humid-air-outside-range": caution(
+    ({ staticTemperature, staticPressure }) =>
+      `The density of humid air (CIPM-2007) is stated for 15 to 27 °C and 600 to 1100 hPa; here it is used at ` +
+      `${figure(inCelsius(staticTemperature))} °C and ${figure(number(staticPressure) / 100)} hPa. Leave the humidity empty ` +
+      `for dry air, or say why it still holds.`,
+    (values) =>
+      Math.max(
+        1 + distanceOutside(valueOf(values, "staticTemperature"), CIPM_TEMPERATURES),
+        1 + distanceOutside(valueOf(values, "staticPressure"), CIPM_PRESSURES),
+      ),
+  ),
   "measured-reynolds-differs": caution(
     ({ ratio }) =>
       `Re here is ${figure(ratio)} times that of the test, more than twofold apart: the drag area may have changed. Measure ` +
@@ -81,6 +94,15 @@ function factorOutside(values: NoteValues, name: string): number {
   const value = valueOf(values, name);
   const min = valueOf(values, "min");
   return value < min ? min / value : value / valueOf(values, "max");
+}
+
+/** How far beyond the nearer end, in widths of the range. */
+function distanceOutside(value: number, { min, max }: Range): number {
+  return Math.max(min - value, value - max, 0) / (max - min);
+}
+
+function inCelsius(kelvin: number | string | undefined): number {
+  return number(kelvin) - 273.15;
 }
 
 function number(value: number | string | undefined): number {

@@ -19,6 +19,7 @@ export const NOTE_CODES = [
   "fully-rough-line-on-smoother-surface",
   "layers-meet-in-duct",
   "mach-above-limit",
+  "humid-air-outside-range",
   "measured-reynolds-differs",
   "fresh-leading-edge-behind",
   "same-surface-twice",

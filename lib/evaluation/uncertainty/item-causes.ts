@@ -28,11 +28,11 @@ export function inputCause(item: string, body: EvaluatedBody, path: string): Cau
   return { origin: "item", name: item, field, ...limits };
 }
 
-/** Between what a quantity can lie: a saving takes away, an altitude has either sign, everything else is 0 or greater. */
+/** Between what a quantity can lie: a saving takes away, an altitude has either sign, humidity ends at 1, all else is 0 or greater. */
 export function limitsOf(path: string, saving: boolean): Pick<Cause, "lowest" | "highest"> {
   if (path === "pressureAltitude") return { lowest: -Infinity, highest: Infinity };
   if (saving && (path === "force" || path === "dragArea")) return { lowest: -Infinity, highest: 0 };
-  return { lowest: 0, highest: Infinity };
+  return { lowest: 0, highest: path === "relativeHumidity" ? 1 : Infinity };
 }
 
 /** The uncertain lengths that make the run-up of a plate behind others: each is one cause with that plate's own. */

@@ -118,6 +118,7 @@ describe("a proposal that other approvals overtake", () => {
   it.each([
     ["fluid", { fluid: "fresh-water", staticPressure: null }],
     ["temperature", { staticTemperature: { value: 258.15 } }],
+    ["humidity", { relativeHumidity: 0.5 }],
     ["speed", { speed: { value: 30 } }],
   ])("is overtaken by another %s of any operating point", (_, change) => {
     expect(overtakenReasons(base, withRevised("OP-1", "operating_point", change), edit020)).toEqual([

@@ -8,7 +8,7 @@ import { WorkingNotes, WorkingSteps } from "@/app/(workspace)/products/[productC
 import { printedStep } from "@/app/(workspace)/products/[productCode]/_workings/printed-step";
 import type { Note } from "@/lib/evaluation/notes/note";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
-import { formatPercent } from "@/lib/units/format-number";
+import { formatPercent, formatSignificant } from "@/lib/units/format-number";
 
 import type { TrialResult } from "../_trial/read-setting";
 import type { Side } from "../_trial/setting";
@@ -29,12 +29,13 @@ export const SettingResult = memo(function SettingResult({ side, result }: Setti
       </section>
     );
   }
-  const { outcome, input, stream, alternates, steps } = result;
+  const { outcome, input, stream, sources, alternates, steps } = result;
   const notes = outcome.outcome === "answer" ? outcome.answer.notes : [outcome.note];
 
   return (
     <section aria-label={`Result of ${letter}`} className="mt-5 min-w-0">
       <PartHeading>{letter}</PartHeading>
+      <StreamFacts stream={stream} sources={sources} />
       <WorkingNotes notes={notes.map(printedNote)} />
       {input && input.method !== "fixed" ? (
         <FrictionPictures input={input} stream={stream} name={`Setting ${letter}`} />
@@ -64,6 +65,22 @@ export const SettingResult = memo(function SettingResult({ side, result }: Setti
     </section>
   );
 });
+
+/** What follows from the stream as typed, and by which formulas. */
+function StreamFacts({ stream, sources }: Pick<TrialResult, "stream" | "sources">) {
+  const values = [
+    `ρ ${formatSignificant(stream.density, 4)} kg/m³`,
+    `μ ${formatSignificant(stream.dynamicViscosity, 4)} Pa·s`,
+    `ν ${formatSignificant(stream.kinematicViscosity, 4)} m²/s`,
+    `q ${formatSignificant(stream.dynamicPressure, 4)} Pa`,
+  ];
+
+  return (
+    <p className="mb-2 text-sm text-ink-2">
+      {values.join(", ")}. {sources.map(({ symbol, source }) => `${symbol} by ${source}`).join("; ")}.
+    </p>
+  );
+}
 
 function PartHeading({ children }: { children: string }) {
   return <h3 className="mb-2 border-b border-ink pb-1 text-base">{children}</h3>;

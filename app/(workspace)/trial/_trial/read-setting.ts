@@ -5,6 +5,7 @@ import { type EvaluatedBody, methodInputOf, streamInputOf } from "@/lib/evaluati
 import type { MethodInput } from "@/lib/evaluation/document/schema";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
 import { parseBody } from "@/lib/evaluation/lines/parse-body";
+import { type StreamSource, streamSources } from "@/lib/evaluation/lines/stream-sources";
 import { newTerms } from "@/lib/evaluation/lines/terms-body";
 import { type AlternateLines, alternateLines } from "@/lib/evaluation/methods/alternate-lines";
 import { evaluateMethod, type MethodOutcome } from "@/lib/evaluation/methods/method-registry";
@@ -19,6 +20,7 @@ import type { TrialSetting } from "./setting";
 /** A setting that can be computed, with everything that its sheet shows. */
 export interface TrialResult {
   stream: StreamState;
+  sources: StreamSource[];
   /** null for a share, which has no stream of its own. */
   input: MethodInput | null;
   outcome: MethodOutcome;
@@ -48,8 +50,8 @@ export function readSetting(setting: TrialSetting): TrialReading {
   if (point.content.kind !== "operating_point" || item.content.kind !== "item") return { result: null, faults };
 
   const { body } = item.content;
-  const stream = streamStateOf(streamInputOf(point.content.body));
-  if (body.method === "share") return { result: shareResult(body.fraction, membersSumOf(setting), stream), faults };
+  const flow = { stream: streamStateOf(streamInputOf(point.content.body)), sources: streamSources(point.content.body) };
+  if (body.method === "share") return { result: shareResult(body.fraction, membersSumOf(setting), flow), faults };
   const state = stateWith(body);
   const problems = itemProblems(state, {}).flatMap(({ causes }) => causes);
   const own = problems.filter(({ kind, number }) => kind === "item" && number === NUMBER);
@@ -57,7 +59,7 @@ export function readSetting(setting: TrialSetting): TrialReading {
     const told = own.map(({ path, sentence }) => ({ path: path.replace(/^body\./, ""), sentence }));
     return { result: null, faults: below("item", told) };
   }
-  return { result: resultOf(body, state, stream), faults };
+  return { result: resultOf(body, state, flow), faults };
 }
 
 /** What a budget asks besides, and a trial doesn't, filled in for computing alone. */
@@ -88,7 +90,9 @@ function membersFaults(setting: TrialSetting): FieldFault[] {
   return membersSumOf(setting) === null ? [{ path: "membersSum", sentence: "Give a value." }] : [];
 }
 
-function shareResult(fraction: number, membersSum: number | null, stream: StreamState): TrialResult {
+type Flow = Pick<TrialResult, "stream" | "sources">;
+
+function shareResult(fraction: number, membersSum: number | null, flow: Flow): TrialResult {
   const drag = fraction * (membersSum ?? 0);
   const step: WorkedStep = {
     quantity: "Share of the members",
@@ -99,7 +103,7 @@ function shareResult(fraction: number, membersSum: number | null, stream: Stream
     unit: "N",
   };
   return {
-    stream,
+    ...flow,
     input: null,
     outcome: { outcome: "answer", answer: { drag, notes: [] } },
     steps: [step],
@@ -107,10 +111,11 @@ function shareResult(fraction: number, membersSum: number | null, stream: Stream
   };
 }
 
-function resultOf(body: EvaluatedBody, state: IndexedState, stream: StreamState): TrialResult {
+function resultOf(body: EvaluatedBody, state: IndexedState, flow: Flow): TrialResult {
   const input = methodInputOf(body, state);
+  const { stream } = flow;
   return {
-    stream,
+    ...flow,
     input,
     outcome: evaluateMethod(body.method, body.methodVersion, input, stream),
     steps: workedSteps(body.method, body.methodVersion, input, stream),

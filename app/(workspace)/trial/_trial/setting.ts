@@ -44,6 +44,7 @@ const LEFT_TO_THE_PROPOSAL = [
   "runUpFollows",
   "includeSavings",
   "coefficientUncertainty",
+  "humidityUncertainty",
   "name",
   "hoursPerYear",
   "limitHundredths",

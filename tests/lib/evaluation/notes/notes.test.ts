@@ -156,6 +156,8 @@ describe("the note catalogue", () => {
     thickness: 0.1,
     shorterSide: 0.1,
     mach: 0.6,
+    staticTemperature: 312.15,
+    staticPressure: 1e5,
     limit: 0.3,
     ratio: 4,
     behind: "010",
@@ -195,6 +197,8 @@ describe("the note catalogue", () => {
     expect(noteExcess(makeNote("laminar-above-critical", values))).toBe(2);
     expect(noteExcess(makeNote("roughness-above-admissible", values))).toBe(2);
     expect(noteExcess(makeNote("mach-above-limit", values))).toBe(2);
+    // 12 K beyond a range of 12 K.
+    expect(noteExcess(makeNote("humid-air-outside-range", values))).toBe(2);
     expect(noteExcess(makeNote("measured-reynolds-differs", { ratio: 0.25 }))).toBe(2);
     expect(noteExcess(makeNote("fully-rough-line-on-smoother-surface", values))).toBe(2);
     expect(noteExcess(makeNote("layers-meet-in-duct", values))).toBe(2);

@@ -5,6 +5,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
+import { indexState } from "@/lib/evaluation/budget/indexed-state";
 import { type FieldRow, fieldRows } from "@/lib/evaluation/lines/field-rows";
 import { nameBookOf } from "@/lib/evaluation/lines/name-book";
 import { abilityFor, covers } from "@/policies/ability";
@@ -18,6 +19,7 @@ import { pageBudget, pageProduct } from "../_server/read-page";
 import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
 import { FinishTable } from "./_components/finish-table";
 import { PointsTable } from "./_components/points-table";
+import { StreamSourcesList } from "./_components/stream-sources-list";
 
 type Props = PageProps<"/products/[productCode]/operating-points">;
 
@@ -41,6 +43,11 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
   const base = `/products/${product.code}`;
   const names = nameBookOf(budget.state, new Map(budget.people.map(({ id, name }) => [id, name])));
   const terms = budget.state.lines.find(({ kind }) => kind === "terms");
+  const { operatingPoints } = indexState(budget.state);
+  const pointsInForce = budget.results.points.flatMap(({ operatingPoint: number }) => {
+    const body = operatingPoints.get(number);
+    return body ? [{ number, body }] : [];
+  });
   const termsRows = terms ? fieldRows(terms, names) : [];
 
   return (
@@ -53,6 +60,7 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
         <AsStoodBanner budget={budget} newestHref={`${base}/operating-points`} />
         <ServiceWindCaution kind={product.kind} />
         <PointsTable budget={budget} budgetHref={(point) => sheetAddress(`${base}/budget`, query, { point })} />
+        <StreamSourcesList points={pointsInForce} />
         <SectionHeading aside={terms ? `revision ${terms.letter}` : null}>Terms</SectionHeading>
         <FieldTable rows={termsRows.filter((row) => !isReviewRule(row))} caption="Terms" />
         <SectionHeading aside="a program manager signs too on what is said yes to">Review rules</SectionHeading>

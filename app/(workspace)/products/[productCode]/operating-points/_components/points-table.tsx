@@ -10,7 +10,7 @@ import { standingSentence } from "@/lib/evaluation/budget/standing-sentence";
 import { FLUID_CHOICES } from "@/lib/evaluation/lines/fluids";
 import type { OperatingPointBody } from "@/lib/evaluation/lines/operating-point-body";
 import { formatHundredths } from "@/lib/units/format-newtons";
-import { formatExact, formatSignificant } from "@/lib/units/format-number";
+import { formatExact, formatPercent, formatSignificant } from "@/lib/units/format-number";
 import { formatQuantity } from "@/lib/units/format-quantity";
 
 /** Derived numbers of a stream are printed to four digits, so that a hand calculation can start from them. */
@@ -110,12 +110,13 @@ function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
 
 /** "Air", "15 °C", "101 325 Pa". */
 function stateText(body: OperatingPointBody): string[] {
-  const { staticTemperature, staticPressure, pressureAltitude, density, dynamicViscosity } = body;
+  const { staticTemperature, staticPressure, pressureAltitude, relativeHumidity, density, dynamicViscosity } = body;
   return [
     FLUID_CHOICES.find(({ value }) => value === body.fluid)?.label ?? body.fluid,
     ...(staticTemperature ? [formatQuantity(staticTemperature.value, "temperature")] : []),
     ...(staticPressure ? [formatQuantity(staticPressure.value, "pressure")] : []),
     ...(pressureAltitude ? [`at ${formatQuantity(pressureAltitude.value, "altitude")}`] : []),
+    ...(relativeHumidity === null ? [] : [`${formatPercent(relativeHumidity)} relative humidity`]),
     ...(density ? [`ρ ${formatQuantity(density.value, "density")}`] : []),
     ...(dynamicViscosity ? [`μ ${formatQuantity(dynamicViscosity.value, "viscosity")}`] : []),
     ...(body.hoursPerYear === null ? [] : [`${formatExact(body.hoursPerYear)} hours a year`]),
