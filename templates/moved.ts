@@ -21,6 +21,12 @@ export interface ReminderFacts extends ProposalFacts {
   neededBy: string;
 }
 
+export interface AheadChangedFacts extends ProposalFacts {
+  issue: number;
+  /** "020 Mid panels, outer, behind 010" */
+  behind: string[];
+}
+
 /** To the signer of an earlier round: their signature no longer counts, and what moved since. */
 export function superseded(frame: MailFrame, facts: SupersededFacts): MailText {
   const { label, proposerName, signedRound, round, moved } = facts;
@@ -51,5 +57,17 @@ export function reminder(frame: MailFrame, facts: ReminderFacts): MailText {
     sentences: [
       `${label} by ${proposerName} was needed by ${neededBy} and still waits for signatures. It stays proposed until somebody signs or returns it.`,
     ],
+  });
+}
+
+/** To the owner of a plate: another that lies ahead of it has changed, and the layer that arrives with it. */
+export function aheadChanged(frame: MailFrame, facts: AheadChangedFacts): MailText {
+  const { label, issue, behind } = facts;
+  return proposalNotice(frame, facts, {
+    subject: `${label} changed a plate ahead of yours: issue ${issue}`,
+    sentences: [
+      `${label} took effect as issue ${issue} and changed a plate that lies ahead of an item of yours. Look whether your run-up still holds:`,
+    ],
+    listing: behind,
   });
 }

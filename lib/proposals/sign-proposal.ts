@@ -7,6 +7,7 @@ import { actOnProposal, type ProposalAct } from "./act-on-proposal";
 import { approveRound } from "./approve-round";
 import { demandApprovable } from "./demand-approvable";
 import { openRound } from "./open-round";
+import { mailDownstream } from "./mail-downstream";
 import { mailApproved, mailDecided, mailSigned } from "./mails";
 import { mailOthers } from "./mail-others";
 import { isFilled, type RoundReview } from "./round-review";
@@ -83,6 +84,9 @@ async function approve(
     now: { ...signed, state: "approved", issue: issue.number, contentHash: issue.contentHash },
   });
   await mailApproved(actor, context, { issue: issue.number, approvals: review.approvals });
+  const { after, changedLines } = review.onToday.change;
+  const changedItems = changedLines.filter(({ kind }) => kind === "item").map(({ number }) => number);
+  await mailDownstream(context, { issue: issue.number, state: after.state, changedItems });
   await mailOthers(context);
   return { state: "approved", issue: issue.number };
 }

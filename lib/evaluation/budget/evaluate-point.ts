@@ -99,8 +99,26 @@ function toResult(
   const answer = roundAnswer(outcome.answer);
   const basic = roundStored(basicEstimate(outcome.answer, state));
   const growth = roundStored(Math.abs(basic) * growthFraction);
-  const notes = [...answer.notes, ...lineNotes(item, body, places).map(roundNote)];
+  const fromOthers = lineNotes(item, body, places).map((note) =>
+    withOnePlateValue(note, body, { basic, point, state }),
+  );
+  const notes = [...answer.notes, ...fromOthers.map(roundNote)];
   return { ...head, basic, growth, predicted: roundStored(basic + growth), answer, notes, refused: null };
+}
+
+/** A plate that starts anew with another ahead of it: what it has, beside what it would have as the rest of one plate. */
+function withOnePlateValue(
+  note: Note,
+  body: ItemBody,
+  { basic, point, state }: { basic: number; point: PointToEvaluate; state: IndexedState },
+): Note {
+  const { runUp } = note.values;
+  if (body.method !== "flat-plate-friction" || typeof runUp !== "number") return note;
+
+  const onward = methodInputOf({ ...body, runUpFollows: false, runUp: { ...body.runUp, value: runUp } }, state);
+  const outcome = evaluateMethod(body.method, body.methodVersion, onward, point.stream);
+  if (outcome.outcome === "refused") return note;
+  return { ...note, values: { ...note.values, alone: basic, onePlate: basicEstimate(outcome.answer, state) } };
 }
 
 /** In a duct a loss counts on the flow area of the product, whatever the item's own section, so that pascals add up. */

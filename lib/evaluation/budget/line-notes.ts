@@ -1,46 +1,96 @@
 import type { ItemBody } from "../lines/item-body";
 import { makeNote } from "../notes/note-catalogue";
-import type { Note } from "../notes/note";
+import type { Note, NoteValues } from "../notes/note";
+import { runUpBehind } from "./run-up";
 import { compareNumbers } from "./sheet-order";
 
 type Items = ReadonlyMap<string, ItemBody>;
 
-/** Items by the place that they say they are in. */
-export type Places = ReadonlyMap<string, readonly string[]>;
-
-export function placesOf(items: Items): Places {
-  const places = new Map<string, string[]>();
-  for (const [item, body] of items) {
-    const place = placeOf(body);
-    if (place === null) continue;
-    const others = places.get(place);
-    if (others) others.push(item);
-    else places.set(place, [item]);
-  }
-  return places;
+/** Items by the places that they say they are in. */
+export interface Places {
+  items: Items;
+  itemsAt: ReadonlyMap<string, readonly string[]>;
 }
 
-/** Notes that come from how items stand to one another; the method of one item alone cannot know them. */
-export function lineNotes(item: string, body: ItemBody, places: Places): Note[] {
-  if (body.method !== "flat-plate-friction") return [];
+export function placesOf(items: Items): Places {
+  const itemsAt = new Map<string, string[]>();
+  for (const [item, body] of items) {
+    for (const place of placesOfItem(body)) {
+      const others = itemsAt.get(place);
+      if (others) others.push(item);
+      else itemsAt.set(place, [item]);
+    }
+  }
+  return { items, itemsAt };
+}
 
-  const { liesBehind, runUpFollows, runUp } = body;
-  const startsAnew = liesBehind !== null && !runUpFollows && runUp.value === 0;
+/**
+ * Notes that come from how items stand to one another; the method of one item alone cannot know them. Where a plate
+ * starts anew though another lies ahead of it, the note carries the run-up that it would have as the rest of one plate.
+ */
+export function lineNotes(item: string, body: ItemBody, places: Places): Note[] {
   return [
-    ...(startsAnew ? [makeNote("fresh-leading-edge-behind", { behind: liesBehind })] : []),
-    ...twinsOf(item, body, places).map((other) => makeNote("same-surface-twice", { other })),
+    ...freshEdgeNotes(body, places),
+    ...twinsOf(item, body, places).map((other) => twinNote(body, other, places)),
   ];
 }
 
-function twinsOf(item: string, body: ItemBody, places: Places): string[] {
-  const inPlace = places.get(placeOf(body) ?? "") ?? [];
-  return inPlace.filter((other) => other !== item).sort(compareNumbers);
+function freshEdgeNotes(body: ItemBody, { items }: Places): Note[] {
+  if (body.method !== "flat-plate-friction") return [];
+  const { liesBehind, runUpFollows, runUp } = body;
+  if (liesBehind === null || runUpFollows || runUp.value !== 0) return [];
+  return [makeNote("fresh-leading-edge-behind", { behind: liesBehind, ...runUpValue(liesBehind, items) })];
 }
 
-/** Plates that agree in everything that places them are most likely the same surface, entered twice. */
-function placeOf(body: ItemBody): string | null {
-  if (body.method !== "flat-plate-friction") return null;
+/** Butted plates that each start anew: what the second would have behind the first is told with the note. */
+function twinNote(body: ItemBody, other: string, { items }: Places): Note {
+  const startsAnew = body.method === "flat-plate-friction" && body.liesBehind === null && body.runUp.value === 0;
+  const named: NoteValues = body.surface === "" ? {} : { surface: body.surface };
+  return makeNote("same-surface-twice", { other, ...named, ...(startsAnew ? runUpValue(other, items) : {}) });
+}
+
+function runUpValue(ahead: string, items: Items): { runUp?: number } {
+  const runUp = runUpBehind(ahead, items);
+  return runUp === null ? {} : { runUp };
+}
+
+function twinsOf(item: string, body: ItemBody, { items, itemsAt }: Places): string[] {
+  const others = new Set(placesOfItem(body).flatMap((place) => itemsAt.get(place) ?? []));
+  return [...others]
+    .filter((other) => other !== item && !isNamedApart(body, items.get(other)))
+    .filter((other) => !liesInLine(item, other, items) && !liesInLine(other, item, items))
+    .sort(compareNumbers);
+}
+
+/** Two that name different surfaces or streams are not the same one, however alike they are. */
+function isNamedApart({ surface, stream }: ItemBody, other: ItemBody | undefined): boolean {
+  if (other === undefined || surface === "" || other.surface === "") return false;
+  return alike(surface) !== alike(other.surface) || alike(stream) !== alike(other.stream);
+}
+
+/** One of them lies behind the other, over however many plates: they cover stretches of their own. */
+function liesInLine(item: string, other: string, items: Items): boolean {
+  const passed = new Set<string>();
+  for (let current: string | null = item; current !== null && !passed.has(current);) {
+    if (current === other) return true;
+    passed.add(current);
+    const body = items.get(current);
+    current = body?.method === "flat-plate-friction" ? body.liesBehind : null;
+  }
+  return false;
+}
+
+/** Items are in one place that name one surface in one stream, and plates that agree in everything that places them. */
+function placesOfItem(body: ItemBody): string[] {
+  const { surface, stream } = body;
+  const named = surface === "" ? [] : [JSON.stringify(["named", alike(surface), alike(stream)])];
+  if (body.method !== "flat-plate-friction") return named;
+
   const { group, length, breadth, faces, liesBehind, runUp, localSpeedRatio, finish, roughness } = body;
   const sizes = [length.value, breadth.value, faces, runUp.value, localSpeedRatio, roughness?.value];
-  return JSON.stringify([group, liesBehind, finish, ...sizes]);
+  return [...named, JSON.stringify(["sized", group, liesBehind, finish, ...sizes])];
+}
+
+function alike(name: string): string {
+  return name.toLocaleLowerCase("en").replaceAll(/\s+/g, " ");
 }

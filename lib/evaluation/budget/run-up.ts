@@ -23,3 +23,9 @@ export function runUpOf(plate: Plate, items: Items): number {
   }
   return length + current.runUp.value;
 }
+
+/** Wetted length ahead of whatever lay behind that item, m; null where it is no plate. */
+export function runUpBehind(ahead: string, items: Items): number | null {
+  const plate = items.get(ahead);
+  return plate?.method === "flat-plate-friction" ? runUpOf(plate, items) + plate.length.value : null;
+}

@@ -1,5 +1,6 @@
 import { CIPM_PRESSURES, CIPM_TEMPERATURES } from "@/lib/aero/fluids/humid-air-density";
 import type { Range } from "@/lib/aero/range";
+import { formatNewtons } from "@/lib/units/format-newtons";
 import { figure } from "./figure";
 import { lineTitle } from "./line-title";
 import type { NoteValues } from "./note";
@@ -79,16 +80,23 @@ export const CAUTIONS = {
     (values) => Math.max(valueOf(values, "ratio"), 1 / valueOf(values, "ratio")) / 2,
   ),
   "fresh-leading-edge-behind": caution(
-    ({ behind }) =>
-      `The plate lies behind item ${figure(behind)} and claims a fresh leading edge: friction reads high, blockage low. Let ` +
-      `the run-up follow that item, or say why the layer starts anew.`,
+    (values) =>
+      `The plate lies behind item ${figure(values.behind)} and claims a fresh leading edge: friction reads high, blockage ` +
+      `low.${onePlate(values)} Let the run-up follow that item, or say why the layer starts anew.`,
   ),
   "same-surface-twice": caution(
-    ({ other }) =>
-      `Item ${figure(other)} stands on the same surface: its drag may be counted twice. Retire one of the two, or say how the ` +
-      `surface is shared.`,
+    (values) =>
+      `Item ${figure(values.other)} stands on the same surface${values.surface === undefined ? "" : ` (${values.surface})`}: ` +
+      `its drag may be counted twice.${onePlate(values)} Retire one of the two, let one lie behind the other, or say how ` +
+      `the surface is shared.`,
   ),
 } satisfies Partial<Record<NoteCode, NoteMeaning>>;
+
+/** What the plate has by itself and as the rest of one plate, where the note carries both. */
+function onePlate({ alone, onePlate: asOne }: NoteValues): string {
+  if (typeof alone !== "number" || typeof asOne !== "number") return "";
+  return ` By itself it has ${formatNewtons(alone)}, as the rest of one plate ${formatNewtons(asOne)}.`;
+}
 
 function factorOutside(values: NoteValues, name: string): number {
   const value = valueOf(values, name);

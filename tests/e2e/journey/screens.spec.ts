@@ -48,7 +48,8 @@ test.describe.configure({ mode: "parallel", timeout: 180_000 });
 for (const { person, paths } of ROUNDS) {
   for (const path of paths) {
     test(`${path} stands, is quiet and can be read by everyone, as ${person} sees it`, async ({ pageOf }) => {
-      const page = await pageOf(person);
+      // A page of its own: its width and its console are nobody else's.
+      const page = await (await pageOf(person)).context().newPage();
       const complaints = await complaintsDuring(page, async () => {
         const response = await page.goto(path);
         expect(response?.status()).toBe(200);
@@ -62,6 +63,7 @@ for (const { person, paths } of ROUNDS) {
           expect.soft(await violations(page), `at ${width} px`).toEqual([]);
         }
       });
+      await page.close();
       expect(complaints).toEqual([]);
     });
   }

@@ -30,6 +30,8 @@ export const itemCommonShape = {
   methodVersion: z.int().positive(),
   evidence: z.array(EvidenceCitation).max(20, "At most 20 citations.").default([]),
   justifications: z.array(Justification).max(40, "At most 40 justifications.").default([]),
+  surface: optionalText(80).default(""),
+  stream: optionalText(80).default(""),
   basis: optionalText(500).default(""),
 };
 
@@ -54,6 +56,20 @@ export const ITEM_LEADING_FIELDS: readonly FieldSpec[] = [
 ];
 
 export const ITEM_CLOSING_FIELDS: readonly FieldSpec[] = [
+  {
+    key: "surface",
+    label: "Surface it covers",
+    help: "The same name on two items says that both stand on it: each is told so, since it may be counted twice.",
+    type: { type: "text", longest: 80 },
+    optional: true,
+  },
+  {
+    key: "stream",
+    label: "Stream along it",
+    help: "Tells the two sides of one surface apart, for example “outer” and “inner”.",
+    type: { type: "text", longest: 80 },
+    optional: true,
+  },
   {
     key: "basis",
     label: "Why it is booked here",
@@ -112,6 +128,8 @@ export function newItemCommon({ ownerId, order, group }: NewItem) {
     methodVersion: 1,
     evidence: [],
     justifications: [],
+    surface: "",
+    stream: "",
     basis: "",
   };
 }
