@@ -116,7 +116,7 @@ function allowProposing(can: Can, actor: Actor, productId: number): void {
 /** What every member may but an auditor. Who lost the role that a proposal needs can still read and withdraw it. */
 function allowTakingPart(can: Can, actor: Actor, productId: number): void {
   const own = { productId, proposerId: actor.userId };
-  can(["remark", "object"], "Product", { productId });
+  can(["remark", "object", "run_monte_carlo"], "Product", { productId });
   can("settle", "Remark", { productId, authorId: actor.userId });
   can(["read", "withdraw"], "Draft", own);
   can("read", "Draft", { productId, isEditor: true });

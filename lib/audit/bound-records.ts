@@ -38,6 +38,7 @@ const BOUND_TABLES: readonly BoundTable[] = [
     product: OF_PROPOSAL,
   },
   { type: "baseline", table: "baselines", columns: "t.*", product: "t.product_id" },
+  { type: "monte_carlo_run", table: "monte_carlo_runs", columns: "t.*", product: "t.product_id" },
   {
     type: "attachment",
     table: "attachments",

@@ -7,6 +7,7 @@ import { authorize } from "@/policies/authorize";
 import { endOfDay } from "./calendar";
 import { issueFactsOf } from "./issue-facts";
 import { loadBudget, newestIssue, productByCode, type ProductRow } from "./load-budget";
+import { loadUncertainty } from "./load-uncertainty";
 import { namesOf } from "./members";
 import { parseTotals, type StoredPoint } from "./stored-results";
 import type { BudgetAt, IssueFacts, ProductFacts, TrendIssue, TrendPoint } from "./views";
@@ -24,8 +25,9 @@ export function budgetAt(actor: Actor, productCode: string, asOf: AsOf): Promise
     const issue = facts.find((each) => each.number === number);
     if (!issue) throw new Refusal("not_found", `There is no issue ${number} of this budget.`);
     const people = await namesOf(product.id, tx);
+    const uncertainty = await loadUncertainty(product.id, number, tx);
     const allocations = allocationsView(state, results);
-    return { product: productFacts(product, facts), issue, state, results, allocations, people };
+    return { product: productFacts(product, facts), issue, state, results, uncertainty, allocations, people };
   });
 }
 

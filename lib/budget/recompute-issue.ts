@@ -2,19 +2,15 @@ import type { Transaction } from "sequelize";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
 import type { BudgetResults, ItemResult } from "@/lib/evaluation/budget/results";
 import { loadBudget } from "./load-budget";
+import { loadUncertainty } from "./load-uncertainty";
+import { uncertaintyDifferences } from "./recompute-uncertainty";
+import { agree, type RecomputedDifference } from "./recomputed-difference";
+import { uncertaintyToStore } from "./stored-uncertainty";
 
-/** Two numbers are the same to this part of the greater one. */
-const TOLERANCE = 1e-10;
-
-export interface RecomputedDifference {
-  operatingPoint: string;
-  item: string;
-  quantity: string;
-  stored: number;
-  recomputed: number;
-}
-
-/** Recomputes an issue with the versions that its lines name; answers every number that differs from the stored one. */
+/**
+ * Recomputes an issue with the versions that its lines name, its results and their uncertainty to first order; answers
+ * every number that differs from the stored one.
+ */
 export async function recomputeIssue(
   productId: number,
   issue: number,
@@ -22,6 +18,12 @@ export async function recomputeIssue(
 ): Promise<RecomputedDifference[]> {
   const { state, results } = await loadBudget(productId, issue, tx);
   const again = evaluateBudget(state);
+  const frozen = await loadUncertainty(productId, issue, tx);
+  const uncertainty = frozen ? uncertaintyDifferences(frozen, uncertaintyToStore(state, again)) : [];
+  return [...resultDifferences(results, again), ...uncertainty];
+}
+
+function resultDifferences(results: BudgetResults, again: BudgetResults): RecomputedDifference[] {
   return results.points.flatMap((point, index) => {
     const other = again.points[index];
     const key = { operatingPoint: point.operatingPoint };
@@ -48,10 +50,6 @@ function differences(stored: Record<string, number>, recomputed: Record<string, 
       recomputed: recomputed[quantity] ?? Number.NaN,
     }))
     .filter((pair) => !agree(pair.stored, pair.recomputed));
-}
-
-function agree(one: number, other: number): boolean {
-  return Math.abs(one - other) <= TOLERANCE * Math.max(Math.abs(one), Math.abs(other));
 }
 
 /** Every number of a result, those of the method's answer by name; notes by how often each code stands there. */

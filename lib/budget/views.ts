@@ -4,6 +4,7 @@ import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import type { LineKind, ProductKind } from "@/lib/vocabulary/lines";
 import type { Capacity, Role } from "@/lib/vocabulary/roles";
 import type { Standing } from "@/lib/vocabulary/standing";
+import type { StoredUncertainty } from "./stored-uncertainty";
 
 export interface PersonName {
   id: number;
@@ -44,6 +45,8 @@ export interface BudgetAt {
   issue: IssueFacts;
   state: BudgetState;
   results: BudgetResults;
+  /** To first order, as the issue froze it; null where it keeps nothing of it. */
+  uncertainty: StoredUncertainty | null;
   /** At the reference operating point of this issue. */
   allocations: AllocationsView;
   people: PersonName[];

@@ -31,6 +31,7 @@ export const ACT_NAMES = {
   disapprove_proposal: "Sign: disapprove",
   take_back_approval: "Take back approval",
   make_baseline: "Make baseline",
+  run_monte_carlo: "Run Monte Carlo",
   add_attachment: "Add file",
   void_attachment: "Void file",
   export_records: "Export records",

@@ -6,6 +6,7 @@ import { issues } from "./0003-issues";
 import { signaturesAndRemarks } from "./0004-signatures-and-remarks";
 import { historyAndOutbox } from "./0005-history-and-outbox";
 import { closings } from "./0006-closings";
+import { monteCarloRuns } from "./0007-monte-carlo-runs";
 import type { Migration } from "./migration";
 
 /** A static list: a folder that is read at run time would be missing from the built application. */
@@ -16,6 +17,7 @@ const MIGRATIONS: readonly Migration[] = [
   signaturesAndRemarks,
   historyAndOutbox,
   closings,
+  monteCarloRuns,
 ];
 
 /** Brings the open database to the newest schema, each step in a transaction of its own; answers what it ran. */

@@ -108,6 +108,7 @@ const TABLE: [string, Question, string][] = [
   ["start a draft", product("start_draft"), PROPOSING],
   ["make a remark", product("remark"), TAKING_PART],
   ["object", product("object"), TAKING_PART],
+  ["run Monte Carlo", product("run_monte_carlo"), TAKING_PART],
   ["name the reviewer", product("assign_reviewer"), "manager"],
   ["name a deputy", product("name_deputy"), "reviewer manager"],
   ["revise an item of one's own", line("revise", "item", ME), PROPOSING],

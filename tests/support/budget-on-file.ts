@@ -58,7 +58,7 @@ export async function establish(
   manager: Actor,
   code: string,
   at: string,
-  { limit = 10000, reserve = 1000 }: { limit?: number; reserve?: number } = {},
+  { limit = 10000, reserve = 1000, point = {} }: { limit?: number; reserve?: number; point?: object } = {},
 ): Promise<WrittenIssue> {
   const frame = { act: "establish_product", chain: code } as const;
   return performAct(
@@ -69,7 +69,7 @@ export async function establish(
       const product = await productByCode(code, tx);
       const lines = firstIssueLines(product.kind, {
         productCode: code,
-        operatingPoint: { number: "OP-1", body: firstPoint(limit) },
+        operatingPoint: { number: "OP-1", body: { ...firstPoint(limit), ...point } },
         terms: newTerms({ referenceOperatingPoint: "OP-1", reserveHundredths: reserve }),
         password: "not asked",
       });

@@ -1,5 +1,10 @@
 import { z } from "zod";
-import { FEWEST_DRAWS, MOST_DRAWS, type MonteCarloOutcome } from "@/lib/evaluation/uncertainty/monte-carlo";
+import {
+  FEWEST_DRAWS,
+  MOST_DRAWS,
+  type MonteCarloOutcome,
+  type MonteCarloResult,
+} from "@/lib/evaluation/uncertainty/monte-carlo";
 import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { parseBody } from "@/lib/evaluation/lines/parse-body";
 import { LINE_KINDS, PRODUCT_KINDS } from "@/lib/vocabulary/lines";
@@ -41,18 +46,20 @@ export const MonteCarloJob: z.ZodType<MonteCarloJob> = z.object({
 
 const head = { operatingPoint: z.string() };
 
+export const MonteCarloNumbers: z.ZodType<MonteCarloResult> = z.object({
+  ...head,
+  draws: z.int(),
+  seed: z.int(),
+  refusedDraws: z.int(),
+  basic: z.object({ mean: z.number(), standardDeviation: z.number(), low95: z.number(), high95: z.number() }),
+  predicted: z.object({ mean: z.number(), standardDeviation: z.number() }),
+  basicExceedsLimit: z.number(),
+  predictedExceedsLimit: z.number(),
+});
+
 const Outcome: z.ZodType<MonteCarloOutcome> = z.union([
   z.object({ ...head, refused: z.array(z.string()) }),
-  z.object({
-    ...head,
-    draws: z.int(),
-    seed: z.int(),
-    refusedDraws: z.int(),
-    basic: z.object({ mean: z.number(), standardDeviation: z.number(), low95: z.number(), high95: z.number() }),
-    predicted: z.object({ mean: z.number(), standardDeviation: z.number() }),
-    basicExceedsLimit: z.number(),
-    predictedExceedsLimit: z.number(),
-  }),
+  MonteCarloNumbers,
 ]);
 
 /** What the other thread tells while it draws and at its end. */

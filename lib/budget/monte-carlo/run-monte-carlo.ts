@@ -1,6 +1,7 @@
 import path from "node:path";
 import { Worker } from "node:worker_threads";
 import type { MonteCarloOutcome } from "@/lib/evaluation/uncertainty/monte-carlo";
+import { Refusal } from "@/lib/vocabulary/refusal";
 import { MonteCarloMessage, type MonteCarloJob } from "./job";
 
 /** A run that takes longer has gone wrong: a hundred thousand draws of a large budget take some ten seconds. */
@@ -19,7 +20,7 @@ export interface RunOptions {
 /**
  * Draws a budget on a thread of its own, so that requests are answered meanwhile. The thread is gone when this settles.
  *
- * @throws Error if the run takes too long or its thread fails; the signal's reason if it is stopped
+ * @throws Refusal if the run takes too long; Error if its thread fails; the signal's reason if it is stopped
  */
 export async function runMonteCarlo(job: MonteCarloJob, options: RunOptions = {}): Promise<MonteCarloOutcome> {
   options.signal?.throwIfAborted();
@@ -36,12 +37,16 @@ function builtWorkerFile(): string {
   return path.join(process.cwd(), ".next", "monte-carlo-worker.mjs");
 }
 
+function tooLong(ms: number): string {
+  return `The run took longer than ${ms / 1000} s and was given up. Ask for fewer draws.`;
+}
+
 function outcomeOf(
   worker: Worker,
   { onProgress, signal, timeoutMs = LONGEST_RUN_MS }: RunOptions,
 ): Promise<MonteCarloOutcome> {
   return new Promise<MonteCarloOutcome>((resolve, reject) => {
-    const timeout = setTimeout(() => reject(new Error(`The run took longer than ${timeoutMs} ms.`)), timeoutMs);
+    const timeout = setTimeout(() => reject(new Refusal("evaluation_refused", tooLong(timeoutMs))), timeoutMs);
     const stop = (): void => reject(signal?.reason);
     signal?.addEventListener("abort", stop, { once: true });
     const settled = (): void => {

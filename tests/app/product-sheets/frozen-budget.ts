@@ -1,3 +1,4 @@
+import { uncertaintyToStore } from "@/lib/budget/stored-uncertainty";
 import type { BudgetAt } from "@/lib/budget/views";
 import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
@@ -19,6 +20,7 @@ export function frozenBudget(state: BudgetState): BudgetAt {
     },
     state,
     results,
+    uncertainty: uncertaintyToStore(state, results),
     allocations: allocationsView(state, results),
     people: [{ id: 1, name: "Tansy Brackenholt" }],
   };

@@ -1,7 +1,10 @@
 import { describe, expect, it } from "vitest";
 import { verifyChain } from "@/lib/audit/verify-chain";
+import { budgetAt } from "@/lib/budget/queries";
+import { recomputeIssue } from "@/lib/budget/recompute-issue";
 import { uncertaintyAt } from "@/lib/budget/uncertainty-at";
 import { OWN_UNCERTAINTIES } from "@/lib/evaluation/methods/own-uncertainties";
+import { inSnapshot } from "@/models/database";
 import { addItem, approve, bluffItem, establish, fixedItem } from "@/tests/support/budget-on-file";
 import { withDatabase } from "@/tests/support/database";
 import { forge } from "@/tests/support/forge";
@@ -64,6 +67,24 @@ describe("the uncertainty of an issue", () => {
     await forge("UPDATE issues SET uncertainty = json_set(uncertainty, '$.points[0].basicExceedsLimit', 0.5)");
     const found = (await verifyChain("TF-2")).faults.filter(({ code }) => code === "content");
     expect(found.map(({ where }) => where)).toEqual(["issue 1", "issue 2"]);
+  });
+
+  it("comes out again when its issue is recomputed, and a number that was altered is told", async () => {
+    const { ines } = await mirrorAndLamp();
+    const { product: read } = await budgetAt(ines, "TF-2", "newest");
+    const recomputed = () => inSnapshot((tx) => recomputeIssue(read.id, 2, tx));
+    expect(await recomputed()).toEqual([]);
+
+    const altered = (path: string, sql: string) =>
+      forge(`UPDATE issues SET uncertainty = json_set(uncertainty, '${path}', ${sql}) WHERE number = 2`);
+    await altered("$.points[0].basic.low95", "json_extract(uncertainty, '$.points[0].basic.low95') + 1e-6");
+    await altered("$.points[0].predictedExceedsLimit", "0.5");
+    expect((await recomputed()).map(({ quantity }) => quantity)).toEqual([
+      "uncertainty.basic.low95",
+      "uncertainty.predictedExceedsLimit",
+    ]);
+    await altered("$.points[0].causes[0].key", "'item:010:other'");
+    expect((await recomputed()).map(({ quantity }) => quantity)).toContain("uncertainty.item:010:other.share");
   });
 
   it("is read by members only", async () => {
