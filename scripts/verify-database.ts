@@ -2,7 +2,8 @@
 import { existsSync } from "node:fs";
 import { QueryTypes } from "sequelize";
 import { verifyChain } from "@/lib/audit/verify-chain";
-import { recomputeIssue, type RecomputedDifference } from "@/lib/budget/recompute-issue";
+import { recomputeIssue } from "@/lib/budget/recompute-issue";
+import type { RecomputedDifference } from "@/lib/budget/recomputed-difference";
 import { HOUSE_CHAIN } from "@/lib/vocabulary/acts";
 import { closeDatabase, database, databaseFile, inSnapshot, openDatabase } from "@/models/database";
 

@@ -9,7 +9,8 @@ import type { Actor } from "@/lib/vocabulary/actor";
 import { inSnapshot } from "@/models/database";
 import { loadBudget } from "./load-budget";
 import { readableProduct } from "./queries";
-import { recomputeIssue, type RecomputedDifference } from "./recompute-issue";
+import { recomputeIssue } from "./recompute-issue";
+import type { RecomputedDifference } from "./recomputed-difference";
 
 /** Newtons of an item as they were frozen, as the same versions give them today, and by the newest version. */
 export interface RecomputedItem {

@@ -1,4 +1,4 @@
-import type { RecomputedDifference } from "@/lib/budget/recompute-issue";
+import type { RecomputedDifference } from "@/lib/budget/recomputed-difference";
 
 /** The verdict on a whole issue, all its operating points. */
 export function differencesSentence(differences: readonly RecomputedDifference[]): string {
