@@ -16,7 +16,12 @@ const READING = [
   "/products/TF2/issues",
   "/products/TF2/people",
 ];
-const OTHERS = ["/products/PD7/budget?point=OP-2", "/products/GS4/budget", "/products/GS4/items/010"];
+const OTHERS = [
+  "/products/PD7/budget?point=OP-2",
+  "/products/PD7/growth",
+  "/products/GS4/budget",
+  "/products/GS4/items/010",
+];
 
 /** Each role with the sheets that it opens; what only one role sees stands with that role. */
 const ROUNDS: readonly { person: DemoPerson; paths: readonly string[] }[] = [

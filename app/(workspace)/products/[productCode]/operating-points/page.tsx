@@ -1,4 +1,5 @@
-import type { Metadata } from "next";
+import type { Metadata, Route } from "next";
+import Link from "next/link";
 
 import { requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
@@ -63,6 +64,11 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
         <StreamSourcesList points={pointsInForce} />
         <SectionHeading aside={terms ? `revision ${terms.letter}` : null}>Terms</SectionHeading>
         <FieldTable rows={termsRows.filter((row) => !isReviewRule(row))} caption="Terms" />
+        <p className="mt-2 text-sm print:hidden">
+          <Link className="link" href={`${base}/growth` as Route}>
+            Estimate-to-test growth, and what growth table it suggests
+          </Link>
+        </p>
         <SectionHeading aside="a program manager signs too on what is said yes to">Review rules</SectionHeading>
         <FieldTable rows={termsRows.filter(isReviewRule).map(shortRule)} caption="Review rules" />
         <SectionHeading>Finishes</SectionHeading>
