@@ -80,19 +80,25 @@ interface FieldRowProps {
 }
 
 function FieldRow({ proposalId, line, row, mayRemark }: FieldRowProps) {
+  // What stays as it is takes one line on a narrow screen, so that what changes is found.
+  const wideOnly = row.changed ? "" : "max-sm:!hidden";
+
   return (
     <Row>
       <RowHead label="Field" className={`text-ink-2 ${row.changed ? "change-bar" : ""}`}>
         {row.label}
         {row.changed ? <span className="sr-only">, changed</span> : null}
       </RowHead>
-      <Cell label="Was" className="whitespace-pre-line text-ink-2">
+      <Cell label="Was" className={`whitespace-pre-line text-ink-2 ${wideOnly}`}>
         <ValueText value={row.was} unit={row.unit} />
       </Cell>
-      <Cell label="To be" className={`whitespace-pre-line ${row.changed ? "font-semibold" : ""}`}>
+      <Cell
+        label={row.changed ? "To be" : "Stays"}
+        className={`whitespace-pre-line ${row.changed ? "font-semibold" : ""}`}
+      >
         <ValueText value={row.toBe} unit={row.unit} />
       </Cell>
-      <Cell label="Effect" numeric className="text-water">
+      <Cell label="Effect" numeric className={`text-water ${wideOnly}`}>
         {row.effect === null ? "" : formatNewtonsChangeNumber(row.effect)}
       </Cell>
       <Cell className="max-sm:!flex">
