@@ -15,6 +15,7 @@ import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
 import { pageBudget, pageProduct, readForPage } from "../_server/read-page";
 import { pointOf } from "../_sheet/budget-sheet";
+import { Baselines } from "./_components/baselines";
 import { Comparison } from "./_components/comparison";
 import { IssueForms } from "./_components/issue-forms";
 import { IssuesTable } from "./_components/issues-table";
@@ -75,6 +76,11 @@ export default async function IssuesPage({ params, searchParams }: Props) {
           operatingPoint={operatingPoint}
         />
         {comparison ? <Comparison comparison={comparison} operatingPoint={operatingPoint} /> : null}
+        <Baselines
+          productCode={product.code}
+          issues={issues}
+          maySign={covers(abilityFor(actor), { on: "Product", action: "make_baseline", productId: product.id })}
+        />
         <SectionHeading>All issues</SectionHeading>
         <IssuesTable issues={issues} trend={trend} operatingPoint={operatingPoint} productCode={product.code} />
       </Sheet>

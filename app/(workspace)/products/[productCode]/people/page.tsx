@@ -8,10 +8,12 @@ import { Sheet } from "@/app/_components/sheet";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { TitleBlock } from "@/app/_components/title-block";
 import { UtcTime } from "@/app/_components/utc-time";
-import { establishWarnings, membershipsOf, type MembershipView } from "@/lib/products/queries";
+import { deputiesOf, establishWarnings, membershipsOf, type MembershipView } from "@/lib/products/queries";
 import { ROLE_NAMES } from "@/lib/vocabulary/roles";
+import { abilityFor, covers } from "@/policies/ability";
 
 import { pageProduct, readForPage } from "../_server/read-page";
+import { DeputiesSection } from "./_components/deputies-section";
 
 type Props = PageProps<"/products/[productCode]/people">;
 
@@ -22,13 +24,21 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function PeoplePage({ params }: Props) {
   const { productCode } = await params;
   const [actor, product] = await Promise.all([requireActor(), pageProduct(productCode)]);
-  const [memberships, warnings] = await readForPage(() =>
-    Promise.all([membershipsOf(actor, productCode), establishWarnings(actor, productCode, new Date().toISOString())]),
+  const [memberships, warnings, deputies] = await readForPage(() =>
+    Promise.all([
+      membershipsOf(actor, productCode),
+      establishWarnings(actor, productCode, new Date().toISOString()),
+      deputiesOf(actor, productCode),
+    ]),
   );
+  const mayName = covers(abilityFor(actor), { on: "Product", action: "name_deputy", productId: product.id });
 
   return (
     <>
-      <PageHeading title="People" subtitle={`${product.code} · ${product.name} · who holds and held which role`} />
+      <PageHeading
+        title="People"
+        subtitle={`${product.code} · ${product.name} · who holds and held which role, and who stands in`}
+      />
       <Sheet
         titleBlock={
           <TitleBlock
@@ -49,6 +59,13 @@ export default async function PeoplePage({ params }: Props) {
         ) : (
           <PeopleTable memberships={memberships} />
         )}
+        <DeputiesSection
+          product={product}
+          deputies={deputies}
+          memberships={memberships}
+          readerId={actor.userId}
+          mayName={mayName}
+        />
       </Sheet>
     </>
   );
