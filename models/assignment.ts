@@ -11,6 +11,8 @@ export class Assignment extends Model<InferAttributes<Assignment>, InferCreation
   declare namedById: number;
   declare namedAt: string;
   declare endedAt: CreationOptional<string | null>;
+  /** Why this person was named in another's place; null where nobody had been named. */
+  declare reason: CreationOptional<string | null>;
 }
 
 Assignment.init(
@@ -22,6 +24,7 @@ Assignment.init(
     namedById: DataTypes.INTEGER,
     namedAt: DataTypes.TEXT,
     endedAt: DataTypes.TEXT,
+    reason: DataTypes.TEXT,
   },
   { sequelize: database, modelName: "Assignment", tableName: "assignments" },
 );

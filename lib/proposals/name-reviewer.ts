@@ -4,7 +4,7 @@ import { Refusal } from "@/lib/vocabulary/refusal";
 import { Assignment } from "@/models/assignment";
 import { authorize } from "@/policies/authorize";
 import { signingRights } from "@/policies/signing-rights";
-import { actOnProposal } from "./act-on-proposal";
+import { actOnProposal, type ProposalAct } from "./act-on-proposal";
 import { budgetReader } from "./budget-reader";
 import { mailProposed } from "./mails";
 import { canMove, wrongStateSentence } from "./moves";
@@ -12,10 +12,13 @@ import { roundOf } from "./round-record";
 import { reviewRound } from "./round-review";
 import type { NameReviewerInput } from "./schema";
 
-/** A program manager names the one reviewer who fills the capacity, or opens it to all reviewers again. */
+/**
+ * A program manager names the one reviewer who fills the capacity, or opens it to all reviewers again. Who takes the
+ * place of one who was named, and is away, is named with a reason.
+ */
 export function nameReviewer(
   actor: Actor,
-  { proposalId, userId }: NameReviewerInput,
+  { proposalId, userId, reason }: NameReviewerInput,
   clock: Clock = systemClock,
 ): Promise<void> {
   return actOnProposal(actor, clock, { act: "name_reviewer", proposalId }, async (context) => {
@@ -34,23 +37,39 @@ export function nameReviewer(
       throw new Refusal("invalid", sentence, [{ path: "userId", sentence }]);
     }
 
-    await Assignment.update(
-      { endedAt: at },
-      { where: { proposalId: proposal.id, capacity: "reviewer", endedAt: null }, transaction: tx },
-    );
-    if (userId !== null) {
-      const named = {
-        proposalId: proposal.id,
-        capacity: "reviewer",
-        userId,
-        namedById: actor.userId,
-        namedAt: at,
-      } as const;
-      await Assignment.create(named, { transaction: tx });
+    const isReplaced = signing.namedReviewerId !== null;
+    if (isReplaced && reason.length < 3) {
+      const sentence = "Say in a sentence why it is no longer the reviewer who was named.";
+      throw new Refusal("invalid", sentence, [{ path: "reason", sentence }]);
     }
+
+    await replaceNamed(actor, { proposalId, userId, reason: isReplaced ? reason : null, at }, tx);
     const nameOf = (id: number | null) => (id === null ? null : (people.get(id) ?? ""));
-    record({ was: { reviewer: nameOf(signing.namedReviewerId) }, now: { reviewer: nameOf(userId) } });
+    record({
+      was: { reviewer: nameOf(signing.namedReviewerId) },
+      now: { reviewer: nameOf(userId) },
+      ...(reason === "" ? {} : { reason }),
+    });
     const { routing } = await reviewRound(proposal, round, budgets, { at, tx });
     await mailProposed(actor, context, { routing, round });
   });
+}
+
+interface Naming {
+  proposalId: number;
+  userId: number | null;
+  reason: string | null;
+  at: string;
+}
+
+async function replaceNamed(
+  actor: Actor,
+  { proposalId, userId, reason, at }: Naming,
+  tx: ProposalAct["tx"],
+): Promise<void> {
+  const capacity = "reviewer";
+  await Assignment.update({ endedAt: at }, { where: { proposalId, capacity, endedAt: null }, transaction: tx });
+  if (userId === null) return;
+  const named = { proposalId, capacity, userId, namedById: actor.userId, namedAt: at, reason } as const;
+  await Assignment.create(named, { transaction: tx });
 }

@@ -1,6 +1,7 @@
 import type { Transaction } from "sequelize";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { ROLE_NAMES } from "@/lib/vocabulary/roles";
+import { Assignment } from "@/models/assignment";
 import { Issue } from "@/models/issue";
 import type { BudgetReader } from "./budget-reader";
 import { unsettledRequests } from "./demand-approvable";
@@ -55,6 +56,7 @@ export async function proposalViewOf(
     approvedAsIssue: madeIssue,
     ...changeShown(review, remarks),
     effectToday: onIssue === undefined || madeIssue !== null ? effectOn(review) : null,
+    namedBecause: await whyNamed(proposal.id, tx),
     objections: await objectionViews(proposal, roundNumbers, tx),
     remarks,
     moves: moveViews(actor, asOf, await unsettledRequests(proposal.id, tx)),
@@ -126,4 +128,12 @@ async function approvedAsIssue({ id, state }: ProposalRecord, tx: Transaction): 
   if (state !== "approved") return null;
   const issue = await Issue.findOne({ where: { proposalId: id }, transaction: tx });
   return issue?.number ?? null;
+}
+
+async function whyNamed(proposalId: number, tx: Transaction): Promise<string | null> {
+  const named = await Assignment.findOne({
+    where: { proposalId, capacity: "reviewer", endedAt: null },
+    transaction: tx,
+  });
+  return named?.reason ?? null;
 }

@@ -1,4 +1,5 @@
 import type { RoutedCapacity } from "@/policies/approval-routing";
+import { signingRights } from "@/policies/signing-rights";
 import { isFilled, type RoundReview } from "./round-review";
 import type { SignatureRecord } from "./signature-records";
 import type { CapacityView, PersonView, RoutingView, SignatureView } from "./views";
@@ -45,6 +46,9 @@ function capacityView(
     filledBy: filled ? (counting.find((each) => each.capacity === capacity.capacity) ?? null) : null,
     maySign: free.map(({ userId, printedName }) => ({ id: userId, name: printedName })),
     named: named === null ? null : personOf(people, named),
+    couldName: signingRights(capacity.capacity, { ...signing, namedReviewerId: null })
+      .filter(({ deputyFor }) => deputyFor === null)
+      .map(({ userId, printedName }) => ({ id: userId, name: printedName })),
     missing: filled ? null : capacity.missing,
   };
 }

@@ -159,7 +159,12 @@ export const RaiseObjectionInput = z.strictObject({
 });
 export type RaiseObjectionInput = z.infer<typeof RaiseObjectionInput>;
 
-export const NameReviewerInput = z.strictObject({ proposalId: Id, userId: Id.nullable() });
+export const NameReviewerInput = z.strictObject({
+  proposalId: Id,
+  userId: Id.nullable(),
+  /** Asked for where somebody was named before, for example because they are away. */
+  reason: plainText(500).default(""),
+});
 export type NameReviewerInput = z.infer<typeof NameReviewerInput>;
 
 export const SettlementChoice = z.strictObject({

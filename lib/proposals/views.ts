@@ -124,6 +124,8 @@ export interface CapacityView {
   /** Who may sign it now; empty and `missing` says which role is missing. */
   maySign: PersonView[];
   named: PersonView | null;
+  /** Whom a program manager could name for it: who is free to sign in their own right. */
+  couldName: PersonView[];
   missing: string | null;
 }
 
@@ -258,6 +260,8 @@ export interface ProposalView {
   blocked: string | null;
   overtaken: string[];
   routing: RoutingView | null;
+  /** Why the named reviewer took the place of another; null where nobody was replaced. */
+  namedBecause: string | null;
   signatures: SignatureView[];
   objections: ObjectionView[];
   remarks: RemarkView[];

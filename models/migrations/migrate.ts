@@ -7,6 +7,7 @@ import { signaturesAndRemarks } from "./0004-signatures-and-remarks";
 import { historyAndOutbox } from "./0005-history-and-outbox";
 import { closings } from "./0006-closings";
 import { monteCarloRuns } from "./0007-monte-carlo-runs";
+import { namedAndAddressed } from "./0009-named-and-addressed";
 import type { Migration } from "./migration";
 
 /** A static list: a folder that is read at run time would be missing from the built application. */
@@ -18,6 +19,7 @@ const MIGRATIONS: readonly Migration[] = [
   historyAndOutbox,
   closings,
   monteCarloRuns,
+  namedAndAddressed,
 ];
 
 /** Brings the open database to the newest schema, each step in a transaction of its own; answers what it ran. */

@@ -155,14 +155,37 @@ describe("signing", () => {
     const { tansy, ines, elske, lusia, clock } = people;
     await approvedItems(people, [adding("010", tansy.userId, 0.5)]);
     const small = await proposed(tansy, clock, { edits: [revising("010", "–", tansy.userId, 0.49)] });
-    await expect(nameReviewer(ines, { proposalId: small, userId: elske.userId }, clock)).rejects.toMatchObject({
-      code: "forbidden",
-    });
-    await nameReviewer(lusia, { proposalId: small, userId: elske.userId }, clock);
+    const elskeAlone = { proposalId: small, userId: elske.userId, reason: "" };
+    await expect(nameReviewer(ines, elskeAlone, clock)).rejects.toMatchObject({ code: "forbidden" });
+    await nameReviewer(lusia, elskeAlone, clock);
     await expect(approves(ines, small, "reviewer", clock)).rejects.toMatchObject({ code: "forbidden" });
     expect((await proposalView(ines, CODE, "2", undefined, clock))?.moves.return.allowed).toBe(true);
-    await nameReviewer(lusia, { proposalId: small, userId: null }, clock);
+    await nameReviewer(lusia, { proposalId: small, userId: null, reason: "Elske is ill" }, clock);
     expect(await approves(ines, small, "reviewer", clock)).toMatchObject({ state: "approved" });
+  });
+
+  it("names another reviewer for one who is away with a reason, which stands on the sheet and in the history", async () => {
+    const people = await team();
+    const { tansy, ines, elske, lusia, clock } = people;
+    const proposalId = await proposed(tansy, clock, { edits: [adding("010", tansy.userId, 0.5)] });
+    await nameReviewer(lusia, { proposalId, userId: elske.userId, reason: "" }, clock);
+    const instead = { proposalId, userId: ines.userId, reason: "" };
+    await expect(nameReviewer(lusia, instead, clock)).rejects.toMatchObject({
+      code: "invalid",
+      faults: [{ path: "reason" }],
+    });
+    await nameReviewer(lusia, { ...instead, reason: "Elske is away until May" }, clock);
+
+    const sheet = await proposalView(ines, CODE, "1", undefined, clock);
+    expect(sheet?.namedBecause).toBe("Elske is away until May");
+    expect(sheet?.routing?.capacities[0]).toMatchObject({
+      named: { name: "Ines Reviewer" },
+      couldName: [{ name: "Elske Reviewer" }, { name: "Ines Reviewer" }],
+    });
+    expect((await historyPage({ chain: CODE })).rows[0]).toMatchObject({
+      act: "name_reviewer",
+      reason: "Elske is away until May",
+    });
   });
 });
 

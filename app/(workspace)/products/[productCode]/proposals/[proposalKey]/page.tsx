@@ -41,7 +41,11 @@ export default async function ProposalPage({ params, searchParams }: Props) {
       <Sheet
         titleBlock={<TitleBlock fields={titleFields(proposal)} />}
         foot={
-          <SignOffTable routing={proposal.routing} signatures={proposal.signatures}>
+          <SignOffTable
+            routing={proposal.routing}
+            namedBecause={proposal.namedBecause}
+            signatures={proposal.signatures}
+          >
             <ProposalMoves proposal={proposal} readerId={actor.userId} />
           </SignOffTable>
         }

@@ -15,13 +15,15 @@ const DECISION_WORDS: Record<Decision, string> = {
 
 interface SignOffTableProps {
   routing: RoutingView | null;
+  /** Why the named reviewer took the place of another. */
+  namedBecause: string | null;
   signatures: readonly SignatureView[];
   /** Buttons of who reads it, below the table. */
   children: ReactNode;
 }
 
 /** Who must sign and why, who signed, when, in which meaning; earlier rounds stay visible. */
-export function SignOffTable({ routing, signatures, children }: SignOffTableProps) {
+export function SignOffTable({ routing, namedBecause, signatures, children }: SignOffTableProps) {
   const open = routing?.capacities.filter(({ required, filledBy }) => required && !filledBy) ?? [];
 
   return (
@@ -43,7 +45,7 @@ export function SignOffTable({ routing, signatures, children }: SignOffTableProp
             <SignedRow key={signature.id} signature={signature} reasons={reasonsFor(routing, signature)} />
           ))}
           {open.map((capacity) => (
-            <OpenRow key={capacity.capacity} capacity={capacity} />
+            <OpenRow key={capacity.capacity} capacity={capacity} namedBecause={namedBecause} />
           ))}
           {signatures.length === 0 && open.length === 0 ? (
             <Row>
@@ -94,11 +96,21 @@ function SignedRow({ signature, reasons }: { signature: SignatureView; reasons: 
   );
 }
 
-function OpenRow({ capacity }: { capacity: CapacityView }) {
+interface OpenRowProps {
+  capacity: CapacityView;
+  namedBecause: string | null;
+}
+
+function OpenRow({ capacity, namedBecause }: OpenRowProps) {
   return (
     <Row>
       <RowHead label="Capacity">{ROLE_NAMES[capacity.capacity]}</RowHead>
-      <Cell label="Name">{capacity.missing ?? mayText(capacity)}</Cell>
+      <Cell label="Name">
+        {capacity.missing ?? mayText(capacity)}
+        {capacity.named && namedBecause ? (
+          <span className="block text-sm text-ink-2">named anew: {namedBecause}</span>
+        ) : null}
+      </Cell>
       <Cell label="Because">
         <Reasons reasons={capacity.reasons} />
       </Cell>
