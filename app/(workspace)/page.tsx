@@ -20,11 +20,12 @@ import { WaitingTable } from "./_components/day-sheet/waiting-table";
 
 export const metadata: Metadata = { title: "Day sheet" };
 
-export default async function DaySheetPage() {
+export default async function DaySheetPage({ searchParams }: PageProps<"/">) {
+  const order = (await searchParams).by === "margin" ? "margin" : "needed";
   const actor = await requireActor();
   // Before reading: what changed is told since the visit before this one.
   await noteVisit(actor);
-  const [sheet, toEstablish] = await Promise.all([daySheet(actor), productsToEstablish(actor)]);
+  const [sheet, toEstablish] = await Promise.all([daySheet(actor, systemClock, order), productsToEstablish(actor)]);
   const today = systemClock().toISOString().slice(0, 10);
 
   return (
@@ -50,8 +51,15 @@ export default async function DaySheetPage() {
             : state its limit and operating point and sign its first issue.
           </p>
         ))}
+        {sheet.waitsForMe.filter(({ isSignature }) => isSignature).length > 1 ? (
+          <p className="mb-2 print:hidden">
+            <Link className="link" href={"/sign" as Route}>
+              Sign several sheets with one password…
+            </Link>
+          </p>
+        ) : null}
         {toEstablish.length === 0 || sheet.waitsForMe.length > 0 ? (
-          <WaitingTable entries={sheet.waitsForMe} today={today} />
+          <WaitingTable entries={sheet.waitsForMe} today={today} order={order} />
         ) : null}
         <SectionHeading>You wait for</SectionHeading>
         <AwaitedTable entries={sheet.iWaitFor} today={today} />

@@ -3,12 +3,14 @@
 import { useRouter } from "next/navigation";
 import { type FormEvent, type ReactNode, type RefObject, useRef, useState } from "react";
 import { flushSync } from "react-dom";
+import { useSWRConfig } from "swr";
 
 import type { ActionResult } from "../_server/action-result";
 import { answerOf } from "./answer-of";
 import { Button, type ButtonKind } from "./button";
 import { ModalSheet } from "./modal-sheet";
 import { Notice } from "./notice";
+import { WAITING_ADDRESS } from "./waiting-address";
 
 /** Looks up the sentence at a field. */
 export type FaultOf = (path: string) => string | undefined;
@@ -65,6 +67,7 @@ function useConfirmation(
   { onConfirm, onDone }: Pick<ConfirmDialogProps, "onConfirm" | "onDone">,
 ) {
   const router = useRouter();
+  const { mutate } = useSWRConfig();
   const [opened, setOpened] = useState(false);
   const [busy, setBusy] = useState(false);
   const [answer, setAnswer] = useState<ActionResult<unknown> | null>(null);
@@ -93,6 +96,7 @@ function useConfirmation(
       if (!result.ok) return;
       dialog.current?.close();
       setOpened(false);
+      void mutate(WAITING_ADDRESS);
       if (onDone) onDone();
       else router.refresh();
     } finally {

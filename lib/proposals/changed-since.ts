@@ -1,7 +1,19 @@
-import type { Transaction } from "sequelize";
+import { Op, type Transaction } from "sequelize";
 import { issueFactsOf } from "@/lib/budget/issue-facts";
 import type { ProductRow } from "@/lib/budget/load-budget";
+import { Issue } from "@/models/issue";
 import type { DaySheetView } from "./workspace-views";
+
+/** The newest issue that stood at a person's last visit; null on the first one, or where there was none yet. */
+export async function issueSeenAt(
+  productId: number,
+  lastSeenAt: string | null,
+  tx: Transaction,
+): Promise<number | null> {
+  if (lastSeenAt === null) return null;
+  const where = { productId, madeAt: { [Op.lte]: lastSeenAt } };
+  return Issue.max<number | null, Issue>("number", { where, transaction: tx });
+}
 
 const FIRST_VISIT_DAYS = 14;
 const DAY = 86_400_000;

@@ -22,15 +22,23 @@ export interface ListedProposal {
   row: ProposalListRow;
 }
 
+interface Listing {
+  at: string;
+  budgets: BudgetReader;
+  tx: Transaction;
+  /** Leaves out what has come to its end. */
+  onlyOpen?: boolean;
+}
+
 /** What the reader may see of a product's proposals, newest first. */
 export async function listedProposals(
   actor: Actor,
   productId: number,
   people: ReadonlyMap<number, string>,
-  { at, budgets, tx }: { at: string; budgets: BudgetReader; tx: Transaction },
+  { at, budgets, tx, onlyOpen = false }: Listing,
 ): Promise<ListedProposal[]> {
-  const visible = (await proposalsOf(productId, tx)).filter((proposal) =>
-    isAllowed(actor, proposalQuestion(proposal, actor, "read")),
+  const visible = (await proposalsOf(productId, tx)).filter(
+    (proposal) => (!onlyOpen || isOpen(proposal.state)) && isAllowed(actor, proposalQuestion(proposal, actor, "read")),
   );
   const listed: ListedProposal[] = [];
   for (const proposal of visible.reverse()) {

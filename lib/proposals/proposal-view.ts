@@ -113,10 +113,10 @@ function transferViews({ round, onToday }: RoundReview): TransferView[] {
 }
 
 function roundView(
-  { number, baseIssue, submittedAt, submittedById, hash }: RoundRecord,
+  { id, number, baseIssue, submittedAt, submittedById, hash }: RoundRecord,
   { people }: RoundReview,
 ): RoundView {
-  return { round: number, baseIssue, submittedAt, submittedBy: personOf(people, submittedById), hash };
+  return { roundId: id, round: number, baseIssue, submittedAt, submittedBy: personOf(people, submittedById), hash };
 }
 
 /** What was decided is shown on the issue that it was applied to; anything else that ended on its base. */

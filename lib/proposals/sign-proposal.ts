@@ -35,17 +35,17 @@ export async function signProposal(
 
 export type SheetToSign = Omit<Approval, "password"> | Omit<Disapproval, "password">;
 
-/** One sheet, with what was found wrong with the password that was typed for it, if anything. */
+/** One sheet, with what was found before to stand against it, if anything: a wrong password, a sheet not opened. */
 export function signSheet(
   actor: Actor,
   sheet: SheetToSign,
-  wrongPassword: Refusal | null,
+  objection: Refusal | null,
   clock: Clock,
 ): Promise<SignedProposal> {
   const act = sheet.decision === "approve" ? "approve_proposal" : "disapprove_proposal";
   return actOnProposal(actor, clock, { act, proposalId: sheet.proposalId }, async (context) => {
     const review = await openRound(actor, context, sheet);
-    if (wrongPassword) throw wrongPassword;
+    if (objection) throw objection;
     if (sheet.roundHash !== review.round.hash) throw moved("A newer round was submitted in the meantime.");
     return sheet.decision === "approve"
       ? approve(actor, context, review, sheet)

@@ -2,6 +2,8 @@ import { passwordRefusal } from "@/lib/users/password-refusal";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal, type RefusalCode } from "@/lib/vocabulary/refusal";
+import { inSnapshot } from "@/models/database";
+import { openedTexts } from "./looked-at";
 import type { SignSheetsInput } from "./schema";
 import { signSheet, type SignedProposal } from "./sign-proposal";
 
@@ -21,15 +23,22 @@ export async function signSheets(
   clock: Clock = systemClock,
 ): Promise<SignedSheets> {
   const wrongPassword = await passwordRefusal(actor.userId, password);
+  const hashes = sheets.map(({ textHash }) => textHash);
+  const opened = await inSnapshot((tx) => openedTexts(actor.userId, hashes, tx));
   const answer: SignedSheets = { signed: [], refused: [] };
   for (const sheet of sheets) {
-    const { proposalId } = sheet;
+    const { proposalId, textHash } = sheet;
     try {
-      answer.signed.push({ proposalId, ...(await signSheet(actor, sheet, wrongPassword, clock)) });
+      const objection = wrongPassword ?? (opened.has(textHash) ? null : notOpened());
+      answer.signed.push({ proposalId, ...(await signSheet(actor, sheet, objection, clock)) });
     } catch (problem) {
       if (!(problem instanceof Refusal) || problem === wrongPassword) throw problem;
       answer.refused.push({ proposalId, code: problem.code, sentence: problem.message });
     }
   }
   return answer;
+}
+
+function notOpened(): Refusal {
+  return new Refusal("moved", "Open this sheet and read it before you sign it together with others.");
 }

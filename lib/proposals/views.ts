@@ -218,6 +218,7 @@ export interface ProposalListRow {
 }
 
 export interface RoundView {
+  roundId: number;
   round: number;
   baseIssue: number;
   submittedAt: string;

@@ -2,6 +2,7 @@ import type { LineKind } from "@/lib/vocabulary/lines";
 import type { ProposalState } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
 import type { Standing } from "@/lib/vocabulary/standing";
+import type { MarginEffect } from "./margin-share";
 import type { DraftContent } from "./schema";
 import type { LineReference, PersonView } from "./views";
 
@@ -63,8 +64,12 @@ export interface DaySheetEntry {
   title: string;
   /** "Sign as reviewer", "Answer remark R2", "Carry forward to issue 14". */
   what: string;
+  /** An approval that the reader may give now. */
+  isSignature: boolean;
   since: string;
   neededBy: string | null;
+  /** What it does to today's margin; null of what has not been submitted. */
+  margin: MarginEffect | null;
 }
 
 export interface DaySheetItem {
@@ -77,6 +82,8 @@ export interface DaySheetItem {
   allocationHundredths: number | null;
   over: boolean;
   cautions: number;
+  /** What became of it since the last visit; null where nothing moved. Without a letter then: it is new. */
+  since: { letterWas: string | null; predictedDelta: number | null; allocationDelta: number | null } | null;
 }
 
 export interface DaySheetView {

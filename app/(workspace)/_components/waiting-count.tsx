@@ -4,6 +4,8 @@ import Link from "next/link";
 import useSWR from "swr";
 import { z } from "zod";
 
+import { WAITING_ADDRESS } from "@/app/_components/waiting-address";
+
 const Waiting = z.object({ count: z.int().min(0) });
 
 async function readWaiting(address: string): Promise<number | null> {
@@ -12,9 +14,9 @@ async function readWaiting(address: string): Promise<number | null> {
   return answer.ok ? Waiting.parse(await answer.json()).count : null;
 }
 
-/** How much waits for the reader; read anew when they come back to the window. */
+/** How much waits for the reader; read anew while the page stands, after what they do, and when they come back to it. */
 export function WaitingCount() {
-  const { data } = useSWR("/api/waiting", readWaiting, { refreshInterval: 60_000 });
+  const { data } = useSWR(WAITING_ADDRESS, readWaiting, { refreshInterval: 10_000 });
   if (!data) return null;
 
   return (

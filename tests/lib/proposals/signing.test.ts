@@ -6,7 +6,6 @@ import { remindSigners } from "@/lib/proposals/remind-signers";
 import { saveDraft } from "@/lib/proposals/save-draft";
 import { shareDraft } from "@/lib/proposals/share-draft";
 import { signProposal } from "@/lib/proposals/sign-proposal";
-import { signSheets } from "@/lib/proposals/sign-sheets";
 import { inTransaction } from "@/models/database";
 import { Deputy } from "@/models/deputy";
 import { OutboxMessage } from "@/models/outbox-message";
@@ -185,32 +184,6 @@ describe("signing", () => {
     expect((await historyPage({ chain: CODE })).rows[0]).toMatchObject({
       act: "name_reviewer",
       reason: "Elske is away until May",
-    });
-  });
-});
-
-describe("several sheets under one password", () => {
-  it("are signed one by one; one that moved meanwhile is told apart and keeps no other from its signature", async () => {
-    const people = await team();
-    const { tansy, ines, clock } = people;
-    const items = [adding("010", tansy.userId, 0.5), adding("020", tansy.userId, 0.3)];
-    await approvedItems(people, items);
-    const needsBoth = await proposed(tansy, clock, { edits: [adding("030", tansy.userId, 0.1)] });
-    const small = await proposed(tansy, clock, { edits: [revising("010", "–", tansy.userId, 0.49)] });
-    const smaller = await proposed(tansy, clock, { edits: [revising("020", "–", tansy.userId, 0.29)] });
-    const sheets = [];
-    for (const proposalId of [needsBoth, small, smaller]) {
-      const { password, ...sheet } = await approval(proposalId, "reviewer", clock);
-      expect(password).toBe(PASSWORD);
-      sheets.push(sheet);
-    }
-    await expect(signSheets(ines, { sheets, password: "no" }, clock)).rejects.toMatchObject({ code: "wrong_password" });
-    expect(await signSheets(ines, { sheets, password: PASSWORD }, clock)).toMatchObject({
-      signed: [
-        { proposalId: needsBoth, state: "proposed", issue: null },
-        { proposalId: small, state: "approved", issue: 3 },
-      ],
-      refused: [{ proposalId: smaller, code: "moved" }],
     });
   });
 });

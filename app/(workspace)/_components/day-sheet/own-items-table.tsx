@@ -5,7 +5,7 @@ import { EmptyNote } from "@/app/_components/empty-note";
 import { NoteMark } from "@/app/_components/note-mark";
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { formatHundredths, formatNewtonsChange, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { toHundredths } from "@/lib/units/rounding";
 import type { DaySheetItem } from "@/lib/proposals/workspace-views";
 
@@ -30,6 +30,7 @@ export function OwnItemsTable({ items }: { items: readonly DaySheetItem[] }) {
         <Head numeric unit="N">
           Margin
         </Head>
+        <Head>Since you last looked</Head>
       </TableHead>
       <tbody>
         {items.map((item) => (
@@ -70,6 +71,32 @@ function OwnItemRow({ item }: { item: DaySheetItem }) {
           : formatHundredths(allocationHundredths - toHundredths(predicted))}
         {over ? " over" : ""}
       </Cell>
+      <Cell label="Since">
+        <Since item={item} />
+      </Cell>
     </Row>
+  );
+}
+
+/** What became of an item between the last visit and today. */
+function Since({ item: { since, letter } }: { item: DaySheetItem }) {
+  if (since === null) return <span className="text-ink-2">unchanged</span>;
+  if (since.letterWas === null) return <>new</>;
+  const { letterWas, predictedDelta, allocationDelta } = since;
+
+  return (
+    <>
+      {letterWas === letter ? null : (
+        <span className="block">
+          <RevisionLetter letter={letterWas} /> became <RevisionLetter letter={letter} />
+        </span>
+      )}
+      {predictedDelta === null || toHundredths(predictedDelta) === 0 ? null : (
+        <span className="block">predicted {formatNewtonsChange(predictedDelta)}</span>
+      )}
+      {allocationDelta === null || toHundredths(allocationDelta) === 0 ? null : (
+        <span className="block">allocation {formatNewtonsChange(allocationDelta)}</span>
+      )}
+    </>
   );
 }

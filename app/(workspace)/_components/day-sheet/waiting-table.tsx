@@ -5,16 +5,20 @@ import { EmptyNote } from "@/app/_components/empty-note";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { UtcTime } from "@/app/_components/utc-time";
 import { dayText } from "@/app/_components/utc-text";
+import { marginShare } from "@/lib/proposals/margin-share";
+import type { WaitingOrder } from "@/lib/proposals/waiting-order";
 import type { DaySheetEntry } from "@/lib/proposals/workspace-views";
+import { formatNewtons } from "@/lib/units/format-newtons";
 
 interface WaitingTableProps {
   entries: readonly DaySheetEntry[];
   /** Day of today, as 2026-05-31: what was needed by an earlier day says so. */
   today: string;
+  order: WaitingOrder;
 }
 
 /** What the reader is asked to do, the most pressing first. */
-export function WaitingTable({ entries, today }: WaitingTableProps) {
+export function WaitingTable({ entries, today, order }: WaitingTableProps) {
   if (entries.length === 0) {
     return (
       <EmptyNote title="Nothing waits for you.">
@@ -29,7 +33,12 @@ export function WaitingTable({ entries, today }: WaitingTableProps) {
         <Head>What to do</Head>
         <Head>Proposal</Head>
         <Head>Since</Head>
-        <Head>Needed by</Head>
+        <Head sortHref="/" sorted={order === "needed" ? "ascending" : undefined}>
+          Needed by
+        </Head>
+        <Head sortHref="/?by=margin" sorted={order === "margin" ? "descending" : undefined}>
+          Takes of the margin
+        </Head>
       </TableHead>
       <tbody>
         {entries.map((entry) => (
@@ -48,6 +57,9 @@ export function WaitingTable({ entries, today }: WaitingTableProps) {
             <Cell label="Needed by">
               <NeededBy day={entry.neededBy} today={today} />
             </Cell>
+            <Cell label="Margin">
+              <MarginTaken margin={entry.margin} />
+            </Cell>
           </Row>
         ))}
       </tbody>
@@ -57,6 +69,24 @@ export function WaitingTable({ entries, today }: WaitingTableProps) {
 
 export function proposalPath({ productCode, key }: { productCode: string; key: string }): Route {
   return `/products/${productCode}/proposals/${key}` as Route;
+}
+
+/** What a change takes of the margin to the limit where the budget stands worst with it. */
+function MarginTaken({ margin }: { margin: DaySheetEntry["margin"] }) {
+  if (margin === null) return <span className="text-ink-2">–</span>;
+  const share = marginShare(margin);
+  if (share === 0) return <span className="text-ink-2">nothing</span>;
+  if (!Number.isFinite(share)) return <strong className="font-semibold">none is left</strong>;
+
+  return (
+    <span className="whitespace-nowrap">
+      {formatPercent(share)} of {formatNewtons(margin.marginWas)}
+    </span>
+  );
+}
+
+function formatPercent(share: number): string {
+  return share < 0.01 ? "under 1\u2009%" : `${Math.round(share * 100)}\u2009%`;
 }
 
 export function NeededBy({ day, today }: { day: string | null; today: string }) {
