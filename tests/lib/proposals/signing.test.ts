@@ -20,7 +20,6 @@ import {
   approves,
   CODE,
   content,
-  PASSWORD,
   proposed,
   reviewOf,
   revising,
