@@ -4,6 +4,7 @@ import { newGroup } from "@/lib/evaluation/lines/group-body";
 import type { MethodName } from "@/lib/evaluation/lines/item-body";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
 import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
+import { lineName } from "@/lib/evaluation/lines/name-book";
 import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
 import { METHOD_NAMES } from "@/lib/evaluation/methods/method-name";
 import type { DraftEdit } from "@/lib/proposals/schema";
@@ -21,6 +22,14 @@ export function reviseEdit(line: LineState, operation: "revise" | "retire" | "re
 
 export function addEdit(kind: NewLineKind, number: string, state: BudgetState, ownerId: number): DraftEdit {
   return { operation: "add", kind, number, baseLetter: null, body: asRecord(template(kind, state, ownerId)) };
+}
+
+/** A new line with the fields of another. An item's evidence and grade are its own: the copy starts as an estimate. */
+export function copyEdit(line: LineState, kind: NewLineKind, number: string, ownerId: number): DraftEdit {
+  const body = asRecord(line.body);
+  const name = `${lineName(line).slice(0, 110)}, copy`;
+  const own: Body = kind === "item" ? { ownerId, grade: "estimated", evidence: [], justifications: [] } : {};
+  return { operation: "add", kind, number, baseLetter: null, body: { ...body, name, ...own } };
 }
 
 function template(kind: NewLineKind, state: BudgetState, ownerId: number): object {

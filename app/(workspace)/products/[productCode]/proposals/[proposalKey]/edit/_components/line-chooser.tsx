@@ -5,7 +5,7 @@ import { useState } from "react";
 import { Button } from "@/app/_components/button";
 import { ChoiceField } from "@/app/_components/choice-field";
 import { nextNumber } from "@/app/_components/line-fields/editor-names";
-import { addEdit, type NewLineKind, reviseEdit } from "@/app/_components/line-fields/new-edit";
+import { addEdit, copyEdit, type NewLineKind, reviseEdit } from "@/app/_components/line-fields/new-edit";
 import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { lineName } from "@/lib/evaluation/lines/name-book";
 import type { DraftEdit } from "@/lib/proposals/schema";
@@ -41,8 +41,11 @@ export function LineChooser({ state, edits, me, onAdd }: LineChooserProps) {
           ) : (
             <>
               <Button onClick={() => onAdd(reviseEdit(line, "revise"))}>Revise it</Button>
-              {line.kind === "terms" ? null : (
-                <Button onClick={() => onAdd(reviseEdit(line, "retire"))}>Retire it</Button>
+              {line.kind === "terms" || line.kind === "allocations" ? null : (
+                <>
+                  <Button onClick={() => onAdd(reviseEdit(line, "retire"))}>Retire it</Button>
+                  <Button onClick={() => onAdd(copied(line, line.kind, { state, edits, me }))}>Copy it</Button>
+                </>
               )}
             </>
           )}
@@ -59,17 +62,24 @@ function AddButtons({ state, edits, me, onAdd }: LineChooserProps) {
   return (
     <div className="flex flex-wrap gap-2">
       {kinds.map((kind) => (
-        <Button
-          key={kind}
-          onClick={() => {
-            const taken = [...state.lines, ...edits].filter((line) => line.kind === kind).map(({ number }) => number);
-            onAdd(addEdit(kind, nextNumber(kind, taken), state, me.userId));
-          }}
-        >
+        <Button key={kind} onClick={() => onAdd(addEdit(kind, freeNumber(kind, state, edits), state, me.userId))}>
           Add {kind === "item" || kind === "operating_point" ? "an" : "a"} {LINE_KIND_NAMES[kind].toLowerCase()}
         </Button>
       ))}
     </div>
+  );
+}
+
+type Editing = Omit<LineChooserProps, "onAdd">;
+
+function copied(line: LineState, kind: NewLineKind, { state, edits, me }: Editing): DraftEdit {
+  return copyEdit(line, kind, freeNumber(kind, state, edits), me.userId);
+}
+
+function freeNumber(kind: NewLineKind, state: BudgetState, edits: readonly DraftEdit[]): string {
+  return nextNumber(
+    kind,
+    [...state.lines, ...edits].filter((line) => line.kind === kind).map(({ number }) => number),
   );
 }
 
