@@ -96,9 +96,11 @@ function kelvin(value: number, scale: string): number {
   return scale === "tempF" ? (value + 459.67) / 1.8 : value;
 }
 
-/** The package calls both viscosities by one name. */
+/** The package calls both viscosities by one name, and many kinds (s², say) by none, whatever its types promise. */
 function kindOf(quantity: Qty): string {
-  return quantity.isCompatible("m2/s") ? "kinematic_viscosity" : quantity.kind();
+  if (quantity.isCompatible("m2/s")) return "kinematic_viscosity";
+  const kind: string | undefined = quantity.kind();
+  return kind ?? "";
 }
 
 function quantityIn(unit: string): Qty | null {

@@ -29,13 +29,16 @@ export interface FrictionLayer {
 export function frictionLayer(line: FrictionLine, roughnessReynolds: number, transition: Transition): FrictionLayer {
   if (transition.kind === "never") return LAMINAR_LAYER;
   const turbulent = line.turbulentLayer(roughnessReynolds);
-  const lineOf = (reynolds: number): FrictionLineName | "blasius" =>
-    reynolds < turbulent.blasiusBelow ? "blasius" : line.name;
-  if (transition.kind === "from-start") {
-    return { ...turbulent, frictionIntegral: (re) => (re > 0 ? turbulent.frictionIntegral(re) : 0), lineAt: lineOf };
-  }
-  return withLaminarStretch(turbulent, transition.reynolds, lineOf);
+  if (transition.kind === "from-start") return fromStart(line.name, turbulent);
+  const last = line.surface === "smooth" ? LAST_MIXED.get(turbulent) : undefined;
+  if (last?.transitionReynolds === transition.reynolds) return last.layer;
+  const layer = withLaminarStretch(line.name, turbulent, transition.reynolds);
+  if (line.surface === "smooth") LAST_MIXED.set(turbulent, { transitionReynolds: transition.reynolds, layer });
+  return layer;
 }
+
+/** Of a smooth line the layer depends on its transition alone, and most plates of a budget have one and the same. */
+const LAST_MIXED = new WeakMap<TurbulentLayer, { transitionReynolds: number; layer: FrictionLayer }>();
 
 const LAMINAR_LAYER: FrictionLayer = {
   frictionIntegral: blasiusFrictionIntegral,
@@ -44,10 +47,19 @@ const LAMINAR_LAYER: FrictionLayer = {
   pieceAt: () => "laminar",
 };
 
+function fromStart(name: FrictionLineName, turbulent: TurbulentLayer): FrictionLayer {
+  return {
+    frictionIntegral: (reynolds) => (reynolds > 0 ? turbulent.frictionIntegral(reynolds) : 0),
+    localCoefficient: turbulent.localCoefficient,
+    lineAt: (reynolds) => (turbulent.isBlasiusAt(reynolds) ? "blasius" : name),
+    pieceAt: turbulent.pieceAt,
+  };
+}
+
 function withLaminarStretch(
+  name: FrictionLineName,
   turbulent: TurbulentLayer,
   transitionReynolds: number,
-  lineOf: (reynolds: number) => FrictionLineName | "blasius",
 ): FrictionLayer {
   const laminar = blasiusFrictionIntegral(transitionReynolds);
   const { shift, excess } = continuation(turbulent, transitionReynolds, laminar);
@@ -57,7 +69,7 @@ function withLaminarStretch(
       isLaminar(reynolds) ? blasiusFrictionIntegral(reynolds) : turbulent.frictionIntegral(reynolds + shift) - excess,
     localCoefficient: (reynolds) =>
       isLaminar(reynolds) ? blasiusLocalCoefficient(reynolds) : turbulent.localCoefficient(reynolds + shift),
-    lineAt: (reynolds) => (isLaminar(reynolds) ? "blasius" : lineOf(reynolds + shift)),
+    lineAt: (reynolds) => (isLaminar(reynolds) || turbulent.isBlasiusAt(reynolds + shift) ? "blasius" : name),
     pieceAt: (reynolds) => (isLaminar(reynolds) ? "laminar" : turbulent.pieceAt(reynolds + shift)),
   };
 }
@@ -68,7 +80,7 @@ function continuation(
   transitionReynolds: number,
   laminar: number,
 ): { shift: number; excess: number } {
-  if (transitionReynolds <= turbulent.blasiusBelow) return { shift: 0, excess: 0 };
+  if (turbulent.isBlasiusAt(transitionReynolds)) return { shift: 0, excess: 0 };
   if (turbulent.reynoldsOf) return { shift: turbulent.reynoldsOf(laminar) - transitionReynolds, excess: 0 };
   return { shift: 0, excess: turbulent.frictionIntegral(transitionReynolds) - laminar };
 }

@@ -24,8 +24,9 @@ export interface FrictionLine {
 
 /** A layer that is turbulent from its start. All functions take Re = U x/ν > 0. */
 export interface TurbulentLayer {
-  /** Below this Re, F is Blasius's; 0 where the line has no Blasius part. */
-  blasiusBelow: number;
+  /** Below this Re, F is Blasius's; 0 where the line has no Blasius part. May be dear: `isBlasiusAt` is not. */
+  readonly blasiusBelow: number;
+  isBlasiusAt(reynolds: number): boolean;
   /** Re·C_F = F U/ν = 2 Re_θ. */
   frictionIntegral(reynolds: number): number;
   /** d(Re·C_F)/dRe = dF/dx. */

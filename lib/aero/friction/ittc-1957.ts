@@ -30,6 +30,7 @@ export function ittc1957Local(reynolds: number): number {
 
 const LAYER = {
   blasiusBelow: 0,
+  isBlasiusAt: () => false,
   frictionIntegral: (reynolds: number) =>
     reynolds < JOIN ? JOIN_SCALE * blasiusFrictionIntegral(reynolds) : reynolds * ittc1957Mean(reynolds),
   localCoefficient: (reynolds: number) =>

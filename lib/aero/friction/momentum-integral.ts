@@ -32,21 +32,31 @@ export const MOMENTUM_INTEGRAL: FrictionLine = {
   turbulentLayer: momentumIntegralLayer,
 };
 
+/** The smooth layer's crossing lies just below; roughness lowers it. */
+const HIGHEST_CROSSING = 21_354;
+
 function momentumIntegralLayer(roughnessReynolds: number): TurbulentLayer {
   const r = ROUGHNESS_COEFFICIENT * roughnessReynolds;
-  const blasiusBelow = crossingWithBlasius(r);
+  let crossing: number | null = null;
+  // Found on demand: hardly any layer ends so near its start.
+  const crossingOnce = (): number => (crossing ??= crossingWithBlasius(r));
+  const isBlasiusAt = (reynolds: number): boolean => reynolds < HIGHEST_CROSSING && reynolds < crossingOnce();
   return {
-    blasiusBelow,
+    get blasiusBelow() {
+      return crossingOnce();
+    },
+    isBlasiusAt,
     frictionIntegral: (reynolds) =>
-      reynolds < blasiusBelow
-        ? blasiusFrictionIntegral(reynolds)
-        : 2 * reynoldsThetaAt(stateAtReynolds(reynolds, r), r),
+      isBlasiusAt(reynolds) ? blasiusFrictionIntegral(reynolds) : 2 * reynoldsThetaAt(stateAtReynolds(reynolds, r), r),
     localCoefficient: (reynolds) =>
-      reynolds < blasiusBelow ? blasiusLocalCoefficient(reynolds) : localCoefficientAt(stateAtReynolds(reynolds, r)),
-    pieceAt: (reynolds) => (reynolds < blasiusBelow ? "blasius" : "momentum-integral"),
+      isBlasiusAt(reynolds) ? blasiusLocalCoefficient(reynolds) : localCoefficientAt(stateAtReynolds(reynolds, r)),
+    pieceAt: (reynolds) => (isBlasiusAt(reynolds) ? "blasius" : "momentum-integral"),
     reynoldsOf: (frictionIntegral) => {
-      const atCrossing = blasiusFrictionIntegral(blasiusBelow);
-      if (frictionIntegral <= atCrossing) return (blasiusBelow * frictionIntegral ** 2) / atCrossing ** 2;
+      const atCrossing = blasiusFrictionIntegral(HIGHEST_CROSSING);
+      if (frictionIntegral <= atCrossing && frictionIntegral <= blasiusFrictionIntegral(crossingOnce())) {
+        // Blasius's F grows with the root of Re.
+        return crossingOnce() * (frictionIntegral / blasiusFrictionIntegral(crossingOnce())) ** 2;
+      }
       return reynoldsAt(stateAtReynoldsTheta(frictionIntegral / 2, r), r);
     },
   };

@@ -18,6 +18,7 @@ export function roughLine({ mean, local, ...line }: RoughLineSpec): FrictionLine
     const end = HELD_BELOW_LENGTH_OVER_ROUGHNESS * roughnessReynolds;
     return {
       blasiusBelow: 0,
+      isBlasiusAt: () => false,
       frictionIntegral: (reynolds) => reynolds * (reynolds < end ? held : mean(reynolds / roughnessReynolds)),
       localCoefficient: (reynolds) => (reynolds < end ? held : local(reynolds / roughnessReynolds)),
       pieceAt: (reynolds) => (reynolds < end ? "held" : line.name),

@@ -14,6 +14,7 @@ export function smoothLine({ mean, local, ...line }: SmoothLineSpec): FrictionLi
   const blasiusBelow = crossingWithBlasius(mean);
   const layer = {
     blasiusBelow,
+    isBlasiusAt: (reynolds: number) => reynolds < blasiusBelow,
     frictionIntegral: (reynolds: number) =>
       reynolds < blasiusBelow ? blasiusFrictionIntegral(reynolds) : reynolds * mean(reynolds),
     localCoefficient: (reynolds: number) =>

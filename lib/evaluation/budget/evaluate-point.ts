@@ -89,21 +89,35 @@ function toResult(
   outcome: MethodOutcome,
   { point, state, places }: Evaluation,
 ): ItemResult {
+  const { operatingPoint } = point;
+  const { methodVersion } = body;
   const growthFraction = state.terms.growthTable[body.grade];
-  const head = { item, operatingPoint: point.operatingPoint, methodVersion: body.methodVersion, growthFraction };
   if (outcome.outcome === "refused") {
     const refused = roundNote(outcome.note);
-    return { ...head, basic: 0, growth: 0, predicted: 0, answer: null, notes: [refused], refused };
+    const nothing = { basic: 0, growthFraction, growth: 0, predicted: 0, answer: null };
+    return { item, operatingPoint, methodVersion, ...nothing, notes: [refused], refused };
   }
 
   const answer = roundAnswer(outcome.answer);
   const basic = roundStored(basicEstimate(outcome.answer, state));
   const growth = roundStored(Math.abs(basic) * growthFraction);
+  const predicted = roundStored(basic + growth);
   const fromOthers = lineNotes(item, body, places).map((note) =>
     withOnePlateValue(note, body, { basic, point, state }),
   );
   const notes = [...answer.notes, ...fromOthers.map(roundNote)];
-  return { ...head, basic, growth, predicted: roundStored(basic + growth), answer, notes, refused: null };
+  return {
+    item,
+    operatingPoint,
+    methodVersion,
+    basic,
+    growthFraction,
+    growth,
+    predicted,
+    answer,
+    notes,
+    refused: null,
+  };
 }
 
 /** A plate that starts anew with another ahead of it: what it has, beside what it would have as the rest of one plate. */

@@ -6,22 +6,26 @@ import { compareNumbers } from "./sheet-order";
 
 type Items = ReadonlyMap<string, ItemBody>;
 
-/** Items by the places that they say they are in. */
+/** The places that items say they are in, and who else says so. */
 export interface Places {
   items: Items;
+  placesOf: ReadonlyMap<string, readonly string[]>;
   itemsAt: ReadonlyMap<string, readonly string[]>;
 }
 
 export function placesOf(items: Items): Places {
+  const placesOf = new Map<string, readonly string[]>();
   const itemsAt = new Map<string, string[]>();
   for (const [item, body] of items) {
-    for (const place of placesOfItem(body)) {
+    const places = placesOfItem(body);
+    placesOf.set(item, places);
+    for (const place of places) {
       const others = itemsAt.get(place);
       if (others) others.push(item);
       else itemsAt.set(place, [item]);
     }
   }
-  return { items, itemsAt };
+  return { items, placesOf, itemsAt };
 }
 
 /**
@@ -54,10 +58,12 @@ function runUpValue(ahead: string, items: Items): { runUp?: number } {
   return runUp === null ? {} : { runUp };
 }
 
-function twinsOf(item: string, body: ItemBody, { items, itemsAt }: Places): string[] {
-  const others = new Set(placesOfItem(body).flatMap((place) => itemsAt.get(place) ?? []));
-  return [...others]
-    .filter((other) => other !== item && !isNamedApart(body, items.get(other)))
+function twinsOf(item: string, body: ItemBody, { items, placesOf, itemsAt }: Places): string[] {
+  const shared = (placesOf.get(item) ?? []).flatMap((place) => itemsAt.get(place) ?? []);
+  const others = shared.filter((other) => other !== item);
+  if (others.length === 0) return [];
+  return [...new Set(others)]
+    .filter((other) => !isNamedApart(body, items.get(other)))
     .filter((other) => !liesInLine(item, other, items) && !liesInLine(other, item, items))
     .sort(compareNumbers);
 }

@@ -1,6 +1,6 @@
 import { roundStored } from "@/lib/units/rounding";
 import type { MethodAnswer } from "../methods/method-answer";
-import type { Note } from "../notes/note";
+import type { Note, NoteValues } from "../notes/note";
 
 type NumericField = {
   [Field in keyof MethodAnswer]-?: MethodAnswer[Field] extends number | undefined ? Field : never;
@@ -28,28 +28,27 @@ const NUMERIC: Record<NumericField, true> = {
   standardUncertainty: true,
 };
 
+const NUMERIC_FIELDS: readonly NumericField[] = Object.keys(NUMERIC).filter(isNumericField);
+
 /** An answer as it is stored and hashed: 12 significant digits everywhere. */
 export function roundAnswer(answer: MethodAnswer): MethodAnswer {
   const rounded: MethodAnswer = { ...answer, notes: answer.notes.map(roundNote) };
-  for (const field of numericFields()) {
+  for (const field of NUMERIC_FIELDS) {
     const value = rounded[field];
     if (value !== undefined) rounded[field] = roundStored(value);
   }
   return rounded;
 }
 
-export function roundNote(note: Note): Note {
-  const values = Object.entries(note.values).map(([name, value]) => [
-    name,
-    typeof value === "number" ? roundStored(value) : value,
-  ]);
-  return { ...note, values: Object.fromEntries(values) };
+export function roundNote({ code, severity, values }: Note): Note {
+  const rounded: NoteValues = { ...values };
+  for (const name of Object.keys(rounded)) {
+    const value = rounded[name];
+    if (typeof value === "number") rounded[name] = roundStored(value);
+  }
+  return { code, severity, values: rounded };
 }
 
 function isNumericField(name: string): name is NumericField {
   return name in NUMERIC;
-}
-
-function numericFields(): NumericField[] {
-  return Object.keys(NUMERIC).filter(isNumericField);
 }

@@ -14,8 +14,9 @@ type Tree = Pick<IndexedState, "items" | "groups">;
 export function sheetOrder(tree: Tree): SheetRow[] {
   const children = new Map<string | null, (Entry & { parent: string | null })[]>();
   for (const entry of entriesOf(tree)) {
-    const siblings = children.get(entry.parent) ?? [];
-    children.set(entry.parent, [...siblings, entry]);
+    const siblings = children.get(entry.parent);
+    if (siblings) siblings.push(entry);
+    else children.set(entry.parent, [entry]);
   }
   return rowsBelow(null, 0, children);
 }

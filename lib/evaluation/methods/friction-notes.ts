@@ -24,16 +24,17 @@ interface FrictionFacts {
 
 /** Everything that is to be said of a layer's friction. */
 export function frictionNotes(facts: FrictionFacts): Note[] {
-  return [
-    ...rangeNotes(facts),
-    ...laminarNotes(facts),
-    ...roughnessNotes(facts),
-    ...streamNotes(facts.stream),
-    ...(facts.friction.frictionLine === "automatic" ? automaticNotes(facts) : namedLineNotes(facts)),
-    ...(facts.isThicknessBorrowed
-      ? [makeNote("thickness-by-wall-and-wake", { line: facts.answer.frictionLineUsed })]
-      : []),
-  ];
+  const notes: Note[] = [];
+  addRangeNotes(facts, notes);
+  addLaminarNotes(facts, notes);
+  addRoughnessNotes(facts, notes);
+  notes.push(...streamNotes(facts.stream));
+  if (facts.friction.frictionLine === "automatic") addAutomaticNotes(facts, notes);
+  else addNamedLineNotes(facts, notes);
+  if (facts.isThicknessBorrowed) {
+    notes.push(makeNote("thickness-by-wall-and-wake", { line: facts.answer.frictionLineUsed }));
+  }
+  return notes;
 }
 
 /** Laminar because it was asked to be, not because the critical Re is not reached. */
@@ -47,12 +48,11 @@ function isLaminarAtEnd({ transition, endReynolds }: FrictionSetup): boolean {
   return transition.kind === "never";
 }
 
-function rangeNotes(facts: FrictionFacts): Note[] {
+function addRangeNotes(facts: FrictionFacts, notes: Note[]): void {
   const { friction, setup, answer } = facts;
-  if (isHeldLaminar(facts)) return [];
+  if (isHeldLaminar(facts)) return;
   const reynolds = setup.endReynolds;
   const asked = friction.frictionLine;
-  const notes: Note[] = [];
   const { min, max } = asked === "automatic" ? AUTOMATIC_RANGE : FRICTION_LINES[asked].reynoldsRange;
   if (isBelow(reynolds, min) || isBelow(max, reynolds)) {
     notes.push(makeNote("reynolds-outside-line-range", { line: asked, reynolds, min, max }));
@@ -65,7 +65,6 @@ function rangeNotes(facts: FrictionFacts): Note[] {
     if (Number.isFinite(ratioRange.max)) values.max = ratioRange.max;
     notes.push(makeNote("roughness-ratio-outside-range", values));
   }
-  return notes;
 }
 
 /** x/k_s at the end; nothing on a surface without roughness, or with so little that the ratio has no number. */
@@ -74,10 +73,9 @@ function lengthOverRoughnessOf({ runUp, length, roughness }: FrictionCase): numb
   return Number.isFinite(ratio) ? ratio : undefined;
 }
 
-function laminarNotes({ friction, setup }: FrictionFacts): Note[] {
+function addLaminarNotes({ friction, setup }: FrictionFacts, notes: Note[]): void {
   const { transition, endReynolds } = setup;
-  if (transition.kind === "from-start") return [];
-  const notes: Note[] = [];
+  if (transition.kind === "from-start") return;
   const laminarReynolds = transition.kind === "at" ? Math.min(transition.reynolds, endReynolds) : endReynolds;
   if (isBelow(BLASIUS_RANGE.max, laminarReynolds)) {
     notes.push(makeNote("laminar-above-critical", { laminarReynolds, criticalReynolds: BLASIUS_RANGE.max }));
@@ -85,21 +83,18 @@ function laminarNotes({ friction, setup }: FrictionFacts): Note[] {
   if (transition.kind === "never" && friction.runUp > 0) {
     notes.push(makeNote("laminar-behind-body", { runUp: friction.runUp }));
   }
-  return notes;
 }
 
-function roughnessNotes(facts: FrictionFacts): Note[] {
+function addRoughnessNotes(facts: FrictionFacts, notes: Note[]): void {
   const { friction, setup, answer } = facts;
   const { roughness, frictionLine: line } = friction;
-  const { admissibleRoughness } = setup;
-  const heights = { roughness, admissibleRoughness };
-  const notes: Note[] = [];
+  const heights = { roughness, admissibleRoughness: setup.admissibleRoughness };
   if (!setup.isSmoothEnough && isHeldLaminar(facts)) notes.push(makeNote("laminar-on-rough-surface", heights));
   if (line === "automatic") {
     if (setup.transition.kind === "from-start" && setup.askedTransition.kind === "at") {
       notes.push(makeNote("roughness-turbulent-from-start", heights));
     }
-    return notes;
+    return;
   }
   const { surface } = FRICTION_LINES[line];
   if (surface === "smooth" && !setup.isSmoothEnough && !isHeldLaminar(facts)) {
@@ -110,29 +105,22 @@ function roughnessNotes(facts: FrictionFacts): Note[] {
     const verdict = answer.roughnessVerdict ?? "smooth";
     notes.push(makeNote("fully-rough-line-on-smoother-surface", { line, verdict, roughnessReynolds }));
   }
-  return notes;
 }
 
-function namedLineNotes({ friction, setup, answer }: FrictionFacts): Note[] {
+function addNamedLineNotes({ friction, setup, answer }: FrictionFacts, notes: Note[]): void {
   const line = friction.frictionLine;
-  if (line === "automatic" || answer.frictionLineUsed !== "blasius" || isLaminarAtEnd(setup)) return [];
+  if (line === "automatic" || answer.frictionLineUsed !== "blasius" || isLaminarAtEnd(setup)) return;
   const crossing = FRICTION_LINES[line].turbulentLayer(setup.roughnessReynolds).blasiusBelow;
-  return [makeNote("blasius-below-crossing", { line, reynolds: setup.endReynolds, crossing })];
+  notes.push(makeNote("blasius-below-crossing", { line, reynolds: setup.endReynolds, crossing }));
 }
 
-function automaticNotes(facts: FrictionFacts): Note[] {
+function addAutomaticNotes(facts: FrictionFacts, notes: Note[]): void {
   const { friction, setup, answer } = facts;
   const { frictionLineUsed: line, roughnessReynolds } = answer;
   const lengthOverRoughness = lengthOverRoughnessOf(friction);
-  const notes = [
-    makeNote("automatic-choice", {
-      line,
-      reason: automaticReason(facts),
-      reynolds: setup.endReynolds,
-      roughnessReynolds,
-      ...(lengthOverRoughness === undefined ? {} : { lengthOverRoughness }),
-    }),
-  ];
+  const values: NoteValues = { line, reason: automaticReason(facts), reynolds: setup.endReynolds, roughnessReynolds };
+  if (lengthOverRoughness !== undefined) values.lengthOverRoughness = lengthOverRoughness;
+  notes.push(makeNote("automatic-choice", values));
   if (line === "fully-rough" && setup.isSmoothEnough) {
     notes.push(makeNote("rough-line-governs-smooth-surface", { ratio: setup.roughnessReynolds }));
   }
@@ -143,7 +131,6 @@ function automaticNotes(facts: FrictionFacts): Note[] {
     );
   }
   if (answer.roughnessVerdict === "between" && !isLaminarAtEnd(setup)) notes.push(betweenNote(facts));
-  return notes;
 }
 
 function automaticReason({ setup, answer }: FrictionFacts): string {

@@ -29,19 +29,35 @@ export function frictionResult(friction: FrictionCase, stream: StreamState, newt
   const note = refusalOf(setup);
   if (note) return { outcome: "refused", note };
 
-  const { layer, viscousLength, startReynolds, spanReynolds } = setup;
-  const stretch = viscousLength * frictionBetween(layer, startReynolds, spanReynolds);
-  const { isThicknessBorrowed, ...quantities } = layerQuantitiesAt(setup, stream, setup.endReynolds);
+  const at = layerQuantitiesAt(setup, stream, setup.endReynolds);
+  const stretch = stretchOf(setup, at.momentumThickness);
+  // Field by field: copying whole objects costs more than the formulas.
   const answer: FrictionAnswer = {
     drag: newtonsPerMetre * stretch,
-    ...quantities,
+    reynolds: at.reynolds,
+    localCoefficient: at.localCoefficient,
+    frictionLineUsed: at.frictionLineUsed,
+    thickness: at.thickness,
+    displacementThickness: at.displacementThickness,
+    momentumThickness: at.momentumThickness,
+    wallShearStress: at.wallShearStress,
+    admissibleRoughness: at.admissibleRoughness,
+    roughnessReynolds: at.roughnessReynolds,
+    roughnessVerdict: at.roughnessVerdict,
     meanCoefficient: stretch / friction.length,
     notes: [],
   };
   const transitionAt = transitionPlace(friction, setup);
   if (transitionAt !== undefined) answer.transitionAt = transitionAt;
+  const { isThicknessBorrowed } = at;
   answer.notes = frictionNotes({ friction, setup, answer, newtonsPerMetre, isThicknessBorrowed, stream });
   return { outcome: "answer", setup, answer };
+}
+
+/** F(x₀ + L) − F(x₀) [m]; F is 0 at the start of a layer and 2θ at its end. */
+function stretchOf({ layer, viscousLength, startReynolds, spanReynolds }: FrictionSetup, endTheta: number): number {
+  if (startReynolds === 0) return 2 * endTheta;
+  return viscousLength * frictionBetween(layer, startReynolds, spanReynolds);
 }
 
 function refusalOf({ endReynolds, askedTransition }: FrictionSetup): Note | null {

@@ -36,17 +36,21 @@ export interface FrictionSetup {
 }
 
 export function plateCase(input: InputOf<"flat-plate-friction">): FrictionCase {
-  return { ...surfaceOf(input), length: numberOf(input.length), runUp: numberOf(input.runUp) };
+  return frictionCase(input, numberOf(input.runUp));
 }
 
 export function ductCase(input: InputOf<"duct-entry">): FrictionCase {
-  return { ...surfaceOf(input), length: numberOf(input.length), runUp: 0 };
+  return frictionCase(input, 0);
 }
 
-function surfaceOf(
-  input: InputOf<"flat-plate-friction" | "duct-entry">,
-): Pick<FrictionCase, "roughness" | "transition" | "frictionLine"> {
-  return { roughness: numberOf(input.roughness), transition: input.transition, frictionLine: input.frictionLine };
+function frictionCase(input: InputOf<"flat-plate-friction" | "duct-entry">, runUp: number): FrictionCase {
+  return {
+    length: numberOf(input.length),
+    runUp,
+    roughness: numberOf(input.roughness),
+    transition: input.transition,
+    frictionLine: input.frictionLine,
+  };
 }
 
 /** Sets a friction case up in the stream that the surface sees. */

@@ -27,14 +27,15 @@ export const CURRENT_METHOD_VERSIONS: Record<MethodName, number> = {
 
 type Evaluator = (input: MethodInput, stream: StreamState) => MethodOutcome;
 
-const EVALUATORS: ReadonlyMap<string, Evaluator> = new Map([
-  ["flat-plate-friction/1", ofMethod("flat-plate-friction", evaluateFlatPlateFriction)],
-  ["duct-entry/1", ofMethod("duct-entry", evaluateDuctEntry)],
-  ["loss-coefficient/1", ofMethod("loss-coefficient", evaluateLossCoefficient)],
-  ["bluff-body/1", ofMethod("bluff-body", evaluateBluffBody)],
-  ["drag-area/1", ofMethod("drag-area", evaluateDragArea)],
-  ["measured/1", ofMethod("measured", evaluateMeasured)],
-  ["fixed/1", ofMethod("fixed", evaluateFixed)],
+/** By method, then by version. */
+const EVALUATORS: ReadonlyMap<string, ReadonlyMap<number, Evaluator>> = new Map([
+  ["flat-plate-friction", new Map([[1, ofMethod("flat-plate-friction", evaluateFlatPlateFriction)]])],
+  ["duct-entry", new Map([[1, ofMethod("duct-entry", evaluateDuctEntry)]])],
+  ["loss-coefficient", new Map([[1, ofMethod("loss-coefficient", evaluateLossCoefficient)]])],
+  ["bluff-body", new Map([[1, ofMethod("bluff-body", evaluateBluffBody)]])],
+  ["drag-area", new Map([[1, ofMethod("drag-area", evaluateDragArea)]])],
+  ["measured", new Map([[1, ofMethod("measured", evaluateMeasured)]])],
+  ["fixed", new Map([[1, ofMethod("fixed", evaluateFixed)]])],
 ]);
 
 /**
@@ -48,7 +49,7 @@ export function evaluateMethod(
   input: MethodInput,
   stream: StreamState,
 ): MethodOutcome {
-  const evaluate = EVALUATORS.get(`${method}/${version}`);
+  const evaluate = EVALUATORS.get(method)?.get(version);
   if (!evaluate) throw new RangeError(`no method ${method} of version ${version}`);
   return evaluate(input, stream);
 }

@@ -23,12 +23,17 @@ export interface StreamState extends FluidState {
 export function streamStateOf(point: StreamInput): StreamState {
   const fluid = fluidStateOf(point);
   const speed = numberOf(point.speed);
-  return {
-    ...fluid,
-    kinematicViscosity: fluid.dynamicViscosity / fluid.density,
-    dynamicPressure: 0.5 * fluid.density * speed ** 2,
+  const { density, dynamicViscosity, speedOfSound, humidAirAt } = fluid;
+  const state: StreamState = {
+    density,
+    dynamicViscosity,
+    kinematicViscosity: dynamicViscosity / density,
+    dynamicPressure: 0.5 * density * speed ** 2,
     speed,
   };
+  if (speedOfSound !== undefined) state.speedOfSound = speedOfSound;
+  if (humidAirAt !== undefined) state.humidAirAt = humidAirAt;
+  return state;
 }
 
 function fluidStateOf(point: StreamInput): Pick<StreamState, keyof FluidState | "humidAirAt"> {
@@ -60,5 +65,6 @@ function airState(point: Extract<StreamInput, { fluid: "air" }>): Pick<StreamSta
 
 /** The stream as a part of a body sees it whose local speed is `ratio` times that of the operating point. */
 export function localStream(stream: StreamState, ratio: number): StreamState {
+  if (ratio === 1) return stream;
   return { ...stream, speed: stream.speed * ratio, dynamicPressure: stream.dynamicPressure * ratio ** 2 };
 }

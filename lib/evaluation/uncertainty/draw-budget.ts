@@ -18,15 +18,11 @@ export interface DrawnTotals {
 /** Draws a budget: every cause once, then every item from those very causes. Two runs from one stream are alike. */
 export function budgetDrawer(model: BudgetModel): (stream: UniformStream) => DrawnTotals {
   const { causes, items, stream: point } = model;
-  const drawers = causes.map(causeDrawer);
+  const drawCauses = causeDrawer(causes);
   const deviations = new Float64Array(causes.length);
   const basics = new Float64Array(items.length);
   return (uniform) => {
-    let place = 0;
-    for (const draw of drawers) {
-      deviations[place] = draw(uniform);
-      place += 1;
-    }
+    drawCauses(uniform, deviations);
     fillSlots(point.slots, deviations);
     const state = streamStateOf(point.input);
     let basic = 0;
@@ -60,14 +56,22 @@ function sharedNewtons(
 }
 
 /**
- * The deviation of a cause from its value: normal (JCGM 101:2008, 6.4.7), cut off where the quantity cannot be. Cut off
- * means drawn from what is left of the distribution, which only shows where the uncertainty is a great part of the value.
+ * Writes the deviation of every cause from its value: normal (JCGM 101:2008, 6.4.7), cut off where the quantity cannot be.
+ * Cut off means drawn from what is left of the distribution, which only shows where the uncertainty is a great part of the
+ * value. All causes in one loop: a function of each would box every number that it gives.
  */
-function causeDrawer({ value, standardUncertainty, lowest, highest }: Cause): (uniform: UniformStream) => number {
-  const below = normalCumulative((lowest - value) / standardUncertainty);
-  const within = normalCumulative((highest - value) / standardUncertainty) - below;
-  return (uniform) => {
-    const part = Math.min(below + within * uniform.nextUniform(), GREATEST_PART);
-    return standardUncertainty * normalQuantile(part);
+function causeDrawer(causes: readonly Cause[]): (uniform: UniformStream, deviations: Float64Array) => void {
+  const spread = Float64Array.from(causes, ({ standardUncertainty }) => standardUncertainty);
+  const below = Float64Array.from(causes, (cause) => partBelow(cause, cause.lowest));
+  const within = Float64Array.from(causes, (cause) => partBelow(cause, cause.highest) - partBelow(cause, cause.lowest));
+  return (uniform, deviations) => {
+    for (let place = 0; place < spread.length; place += 1) {
+      const part = Math.min((below[place] ?? 0) + (within[place] ?? 0) * uniform.nextUniform(), GREATEST_PART);
+      deviations[place] = (spread[place] ?? 0) * normalQuantile(part);
+    }
   };
+}
+
+function partBelow({ value, standardUncertainty }: Cause, limit: number): number {
+  return normalCumulative((limit - value) / standardUncertainty);
 }

@@ -53,6 +53,8 @@ export function frictionStretch(surface: Surface): FrictionStretch {
       const end = (speed * (runUp + length)) / kinematicViscosity;
       if (!isAdmitted(end)) return Number.NaN;
       const { layer } = layerAt(speed, kinematicViscosity);
+      // F is 0 at the start of a layer.
+      if (runUp === 0) return (kinematicViscosity / speed) * layer.frictionIntegral(end);
       const start = (speed * runUp) / kinematicViscosity;
       return (kinematicViscosity / speed) * frictionBetween(layer, start, (speed * length) / kinematicViscosity);
     },

@@ -56,22 +56,21 @@ function pressureAt({ dynamicPressure }: StreamState, ratio: number): number {
 
 function plateForce(input: InputOf<"flat-plate-friction">): ItemForce {
   const surface = frictionStretch(input);
-  const at = <T>(
-    stream: StreamState,
-    read: (speed: number, viscosity: number, length: number, runUp: number) => T,
-  ): T =>
-    read(
-      stream.speed * numberOf(input.localSpeedRatio),
-      stream.kinematicViscosity,
-      numberOf(input.length),
-      numberOf(input.runUp),
-    );
   return {
-    newtons: (stream) => {
+    newtons: ({ speed, kinematicViscosity, dynamicPressure }) => {
+      const ratio = numberOf(input.localSpeedRatio);
       const width = numberOf(input.faces) * numberOf(input.breadth) * numberOf(input.formFactor);
-      return pressureAt(stream, numberOf(input.localSpeedRatio)) * width * at(stream, surface.metres);
+      const length = numberOf(input.length);
+      const runUp = numberOf(input.runUp);
+      return dynamicPressure * ratio * ratio * width * surface.metres(speed * ratio, kinematicViscosity, length, runUp);
     },
-    regime: (stream) => at(stream, surface.regime),
+    regime: ({ speed, kinematicViscosity }) =>
+      surface.regime(
+        speed * numberOf(input.localSpeedRatio),
+        kinematicViscosity,
+        numberOf(input.length),
+        numberOf(input.runUp),
+      ),
   };
 }
 

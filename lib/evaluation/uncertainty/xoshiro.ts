@@ -17,16 +17,20 @@ export interface UniformStream {
  * @param state four words, not all 0
  */
 export function xoshiro(state: readonly [number, number, number, number]): UniformStream {
-  let [s0, s1, s2, s3] = state;
+  // In an array of words: variables that a function keeps would be boxed anew at every step.
+  const words = Int32Array.from(state);
   const nextWord = (): number => {
+    const s0 = words[0] ?? 0;
+    const s1 = words[1] ?? 0;
+    const s2 = words[2] ?? 0;
+    const s3 = words[3] ?? 0;
     const word = Math.imul(rotate(Math.imul(s1, 5), 7), 9) >>> 0;
-    const shifted = s1 << 9;
-    s2 ^= s0;
-    s3 ^= s1;
-    s1 ^= s2;
-    s0 ^= s3;
-    s2 ^= shifted;
-    s3 = rotate(s3, 11);
+    const third = s2 ^ s0;
+    const fourth = s3 ^ s1;
+    words[0] = s0 ^ fourth;
+    words[1] = s1 ^ third;
+    words[2] = third ^ (s1 << 9);
+    words[3] = rotate(fourth, 11);
     return word;
   };
   // 26 bits of each, and half a step so that neither 0 nor 1 comes out: with 53 bits the half would be rounded away.

@@ -38,6 +38,30 @@ describe("newtons on a sheet", () => {
     );
   });
 
+  it("rounds to the double nearest to twelve decimal digits, whatever way it goes there", () => {
+    const byText = (value: number): number => Number(value.toPrecision(12));
+    const sized = fc
+      .tuple(fc.double({ min: 0.1, max: 1, noNaN: true }), fc.integer({ min: -14, max: 16 }), fc.constantFrom(1, -1))
+      .map(([digits, power, sign]) => sign * digits * 10 ** power);
+    // Twelve digits and a half, a hair above it and a hair below.
+    const halves = fc
+      .tuple(
+        fc.integer({ min: 1e11, max: 1e12 - 1 }),
+        fc.integer({ min: -2, max: 2 }),
+        fc.integer({ min: -22, max: 4 }),
+      )
+      .map(([digits, hair, power]) => Number(`${digits}.${5000 + hair}e${power}`));
+    const powers = fc
+      .integer({ min: -12, max: 14 })
+      .chain((power) => fc.constantFrom(0.5, 0.999999999999999, 1, 1.0000000000005).map((x) => x * 10 ** power));
+    fc.assert(
+      fc.property(fc.oneof(sized, halves, powers), (value) => {
+        expect(roundStored(value)).toBe(byText(value));
+      }),
+      { numRuns: 5000 },
+    );
+  });
+
   it("keep twelve significant digits before they are stored", () => {
     expect(roundStored(Math.PI * 1e5)).toBe(314159.265359);
     expect(roundStored(1 / 3)).toBe(0.333333333333);

@@ -56,6 +56,7 @@ const READ: [typed: string, dimension: DimensionName, si: number][] = [
 
 const REFUSED: [typed: string, dimension: DimensionName, sentence: string][] = [
   ["3 kg", "length", "kg is a mass; a length is needed, for example 8.2 m."],
+  ["5 s2", "length", "s2 is something else; a length is needed, for example 8.2 m."],
   ["5 m/s2", "speed", "m/s2 is an acceleration; a speed is needed, for example 90 km/h."],
   [
     "1.5e-5 m2/s",

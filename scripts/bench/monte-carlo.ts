@@ -2,6 +2,7 @@ import { drawModel } from "@/lib/evaluation/uncertainty/monte-carlo";
 import { budgetModel, type BudgetModel } from "@/lib/evaluation/uncertainty/budget-model";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
 import { budgetState } from "@/tests/support/budget-state";
+import { bestTimes } from "./processor-time";
 
 const DRAWS = 10_000;
 const ITEMS = 200;
@@ -95,17 +96,7 @@ function drawnSum(): number {
   for (let step = batches.next(); ; step = batches.next()) if (step.done) return step.value.basic.mean;
 }
 
-/** Seconds of processor that each takes, the best of a few rounds: other programs on the machine do not count. */
-export function monteCarloTimes(): { bare: number; drawn: number } {
-  return { bare: bestOf(bareLoop), drawn: bestOf(drawnSum) };
-}
-
-function bestOf(subject: () => number): number {
-  const times = Array.from({ length: ROUNDS }, () => {
-    const before = process.cpuUsage();
-    if (!Number.isFinite(subject())) throw new Error("a subject gave no number");
-    const { user, system } = process.cpuUsage(before);
-    return (user + system) / 1e6;
-  });
-  return Math.min(...times);
+/** Milliseconds of processor that each takes. */
+export function monteCarloTimes() {
+  return bestTimes({ bare: bareLoop, drawn: drawnSum }, ROUNDS);
 }
