@@ -2,6 +2,7 @@ import { type NextRequest, NextResponse } from "next/server";
 
 import { contentSecurityPolicy } from "@/app/_server/content-security-policy";
 import { bodyTooLong, isForeignWrite } from "@/app/_server/request-limits";
+import { DOWNLOAD_POLICY, isDownload, NO_CONTENT_POLICY, securityHeaders } from "@/app/_server/security-headers";
 
 /** Stands before every page and route: refuses what no page of ours sends, and gives each answer its nonce. */
 export function proxy(request: NextRequest): NextResponse {
@@ -9,7 +10,9 @@ export function proxy(request: NextRequest): NextResponse {
   if (bodyTooLong(request)) return refusal(413, "This is longer than one megabyte. Shorten it and send it again.");
 
   const nonce = Buffer.from(crypto.getRandomValues(new Uint8Array(16))).toString("base64");
-  const policy = contentSecurityPolicy(nonce, process.env.NODE_ENV === "development");
+  const policy = isDownload(request.nextUrl.pathname)
+    ? DOWNLOAD_POLICY
+    : contentSecurityPolicy(nonce, process.env.NODE_ENV === "development");
   const headers = new Headers(request.headers);
   headers.set("x-nonce", nonce);
   // Where a sign-in leads back to.
@@ -19,22 +22,17 @@ export function proxy(request: NextRequest): NextResponse {
   return harden(NextResponse.next({ request: { headers } }), policy);
 }
 
-export const config = { matcher: ["/((?!_next/static|_next/image|favicon.ico|icon.svg).*)"] };
+/** All but what is fixed, and files on their way in: here a body is cut, while their own route counts it as it comes. */
+export const config = {
+  matcher: ["/((?!_next/static|_next/image|favicon.ico|icon.svg|api/products/[^/]+/files$).*)"],
+};
 
 function refusal(status: number, sentence: string): NextResponse {
-  const policy = "default-src 'none'; frame-ancestors 'none'";
-
-  return harden(NextResponse.json({ code: "invalid", sentence, faults: [] }, { status }), policy);
+  return harden(NextResponse.json({ code: "invalid", sentence, faults: [] }, { status }), NO_CONTENT_POLICY);
 }
 
 function harden(response: NextResponse, policy: string): NextResponse {
-  response.headers.set("content-security-policy", policy);
-  // "no-referrer" would make a browser send "Origin: null" with forms, which are then refused.
-  response.headers.set("referrer-policy", "same-origin");
-  response.headers.set("x-content-type-options", "nosniff");
-  response.headers.set("x-frame-options", "DENY");
-  response.headers.set("cross-origin-opener-policy", "same-origin");
-  response.headers.set("permissions-policy", "camera=(), microphone=(), geolocation=()");
+  for (const [name, value] of Object.entries(securityHeaders(policy))) response.headers.set(name, value);
 
   return response;
 }

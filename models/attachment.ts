@@ -5,12 +5,14 @@ import { database } from "./database";
 export class Attachment extends Model<InferAttributes<Attachment>, InferCreationAttributes<Attachment>> {
   declare id: CreationOptional<number>;
   declare productId: number;
-  declare ownerType: string;
+  /** In a working copy until a round cites it, or beside a submitted proposal. */
+  declare ownerType: "working_copy" | "proposal";
   declare ownerId: number;
   declare name: string;
   declare mediaType: string;
   declare size: number;
   declare sha256: string;
+  declare sourceDate: string;
   declare addedById: number;
   declare addedAt: string;
   declare voidedById: CreationOptional<number | null>;
@@ -28,6 +30,7 @@ Attachment.init(
     mediaType: DataTypes.TEXT,
     size: DataTypes.INTEGER,
     sha256: DataTypes.TEXT,
+    sourceDate: DataTypes.TEXT,
     addedById: DataTypes.INTEGER,
     addedAt: DataTypes.TEXT,
     voidedById: DataTypes.INTEGER,

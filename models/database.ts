@@ -10,6 +10,8 @@ interface Store {
   sequelize: Sequelize;
   inWrite: AsyncLocalStorage<true>;
   tail: Promise<unknown>;
+  /** The file that is open, or that will be. */
+  file: string;
 }
 
 declare global {
@@ -22,9 +24,10 @@ export function databaseFile(): string {
 }
 
 function createStore(): Store {
+  const file = databaseFile();
   const sequelize = new Sequelize({
     dialect: "sqlite",
-    storage: databaseFile(),
+    storage: file,
     logging: false,
     typeValidation: true,
     transactionType: Transaction.TYPES.IMMEDIATE,
@@ -33,7 +36,7 @@ function createStore(): Store {
   });
   prepareConnections(sequelize);
   guardWrites(sequelize);
-  return { sequelize, inWrite: new AsyncLocalStorage(), tail: Promise.resolve() };
+  return { sequelize, inWrite: new AsyncLocalStorage(), tail: Promise.resolve(), file };
 }
 
 const store = (globalThis.__leeboardDatabase ??= createStore());
@@ -44,7 +47,13 @@ export const database = store.sequelize;
 export async function openDatabase(file: string = databaseFile()): Promise<void> {
   mkdirSync(path.dirname(file), { recursive: true });
   pointAt(database, file);
+  store.file = file;
   await database.query("PRAGMA journal_mode = WAL", { type: QueryTypes.SELECT });
+}
+
+/** The folder of the open database: files are kept beside it. */
+export function dataFolder(): string {
+  return path.dirname(store.file);
 }
 
 /** Waits for the last write and closes every connection; `openDatabase` may follow, also with another file. */

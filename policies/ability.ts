@@ -54,6 +54,10 @@ export function covers(ability: AppAbility, question: Question): boolean {
       const { productId, holderId } = question;
       return ability.can(question.action, subject("Deputyship", { productId, holderId }));
     }
+    case "File": {
+      const { productId, addedById } = question;
+      return ability.can(question.action, subject("File", { productId, addedById }));
+    }
     case "Remark": {
       const { productId, authorId, hasPart } = question;
       return ability.can(question.action, subject("Remark", { productId, authorId, hasPart }));
@@ -95,6 +99,7 @@ const BY_ROLE: Record<Role, (can: Can, actor: Actor, productId: number) => void>
     can(["establish", "make_baseline", "assign_reviewer", "name_deputy"], "Product", { productId });
     can(["sign_as_program_manager", "disapprove"], "Round", { productId });
     can("settle", "Remark", { productId, hasPart: false });
+    can("void", "File", { productId });
     allowTakingPart(can, actor, productId);
   },
   // Reads with every member's rights and the house's history besides; changes nothing, drafts excepted from view.
@@ -116,7 +121,8 @@ function allowProposing(can: Can, actor: Actor, productId: number): void {
 /** What every member may but an auditor. Who lost the role that a proposal needs can still read and withdraw it. */
 function allowTakingPart(can: Can, actor: Actor, productId: number): void {
   const own = { productId, proposerId: actor.userId };
-  can(["remark", "object", "run_monte_carlo"], "Product", { productId });
+  can(["remark", "object", "run_monte_carlo", "add_file"], "Product", { productId });
+  can("void", "File", { productId, addedById: actor.userId });
   can("settle", "Remark", { productId, authorId: actor.userId });
   can(["read", "withdraw"], "Draft", own);
   can("read", "Draft", { productId, isEditor: true });

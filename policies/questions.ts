@@ -18,6 +18,7 @@ export type Question =
   | { on: "Round"; action: RoundAction; productId: number; asDeputy: boolean }
   | { on: "Signature"; action: "take_back"; productId: number; signerId: number }
   | { on: "Deputyship"; action: "end"; productId: number; holderId: number }
+  | { on: "File"; action: "void"; productId: number; addedById: number }
   | { on: "Remark"; action: "settle"; productId: number; authorId: number; hasPart: boolean };
 
 export const INSTALLATION_ACTIONS = [
@@ -42,6 +43,7 @@ export const PRODUCT_ACTIONS = [
   "start_draft",
   "remark",
   "object",
+  "add_file",
   "assign_reviewer",
   "name_deputy",
 ] as const;
@@ -90,6 +92,7 @@ const SENTENCES: Record<Exclude<Question["on"], "Line">, Record<string, string>>
     start_draft: "Only a component owner or a program manager of this product may start a proposal.",
     remark: "Only a component owner, a reviewer or a program manager of this product may make a remark.",
     object: "Only a component owner, a reviewer or a program manager of this product may object.",
+    add_file: "Only a component owner, a reviewer or a program manager of this product may add a file.",
     assign_reviewer: `${PROGRAM_MANAGER} may name the reviewer of a proposal.`,
     name_deputy: "Only a reviewer or a program manager of this product may name a deputy.",
   },
@@ -117,6 +120,7 @@ const SENTENCES: Record<Exclude<Question["on"], "Line">, Record<string, string>>
   },
   Signature: { take_back: "Only who gave an approval may take it back." },
   Deputyship: { end: "Only who named a deputy may end it." },
+  File: { void: "Only who added a file, or a program manager of this product, may void it." },
   Remark: {
     settle: "Only who raised a request for action may settle it, or a program manager who has no part in the proposal.",
   },

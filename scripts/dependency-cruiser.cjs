@@ -40,7 +40,7 @@ function packageStaysIn(name, home, packages) {
   };
 }
 
-const DOMAIN = ["^lib/(vocabulary|units|aero|evaluation|audit|users)/", "^models/", "^policies/"];
+const DOMAIN = ["^lib/(vocabulary|units|aero|evaluation|audit|users|evidence)/", "^models/", "^policies/"];
 
 /** @type {import("dependency-cruiser").IConfiguration} */
 module.exports = {
@@ -95,6 +95,7 @@ module.exports = {
       ["^lib/(vocabulary|audit|users)/", "^models/", "^policies/"],
       "acts on accounts, each recorded",
     ),
+    onlyOwn("lib/evidence", ["^lib/vocabulary/", "^models/"], "files on the disk know no domain"),
     onlyOwn("lib/budget", DOMAIN, "reads and issues of a budget"),
     onlyOwn("lib/products", [...DOMAIN, "^lib/(budget|mail)/"], "products and roles"),
     onlyOwn("lib/proposals", [...DOMAIN, "^lib/(budget|mail)/"], "the review cycle"),
@@ -103,7 +104,7 @@ module.exports = {
       comment: "A folder of lib that no rule above places: give it one.",
       severity: "error",
       from: {
-        path: "^lib/(?!(vocabulary|units|aero|evaluation|audit|mail|users|accounts|budget|products|proposals)/)",
+        path: "^lib/(?!(vocabulary|units|aero|evaluation|audit|mail|users|accounts|evidence|budget|products|proposals)/)",
       },
       to: {},
     },

@@ -14,6 +14,13 @@ export function isForeignWrite(request: Request): boolean {
   return hostOf(origin) !== request.headers.get("host");
 }
 
+/** A read that another site's page made the browser do. */
+export function isForeignRead(request: Request): boolean {
+  const site = request.headers.get("sec-fetch-site");
+
+  return site !== null && site !== "same-origin" && site !== "none";
+}
+
 /** A body that says it is longer than anything a page of ours sends, or does not say how long it is. */
 export function bodyTooLong(request: Request): boolean {
   if (READING.has(request.method)) return false;

@@ -24,6 +24,7 @@ const STATUS: Record<RefusalCode, number> = {
   justification_missing: 422,
   evidence_missing: 422,
   duplicate: 409,
+  too_large: 413,
   too_many_attempts: 429,
 };
 
@@ -84,7 +85,7 @@ function resultResponse(result: ActionResult<unknown>): Response {
   return problem(STATUS[code], { code, sentence, faults });
 }
 
-function signedOut(): Response {
+export function signedOut(): Response {
   return problem(401, { code: "forbidden", sentence: "You are signed out. Sign in again.", faults: [] });
 }
 

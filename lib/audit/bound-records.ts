@@ -42,7 +42,8 @@ const BOUND_TABLES: readonly BoundTable[] = [
   {
     type: "attachment",
     table: "attachments",
-    columns: "t.id, t.owner_type, t.owner_id, t.name, t.media_type, t.size, t.sha256, t.added_by_id, t.added_at",
+    columns: `t.id, t.owner_type, t.owner_id, t.name, t.media_type, t.size, t.sha256, t.source_date, t.added_by_id,
+      t.added_at`,
     product: "t.product_id",
   },
   {

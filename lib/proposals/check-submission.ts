@@ -4,12 +4,13 @@ import type { LoadedBudget } from "@/lib/budget/load-budget";
 import { membersAt } from "@/lib/budget/members";
 import { termsOf } from "@/lib/evaluation/budget/indexed-state";
 import type { Actor } from "@/lib/vocabulary/actor";
-import { Refusal } from "@/lib/vocabulary/refusal";
+import { Refusal, type FieldFault } from "@/lib/vocabulary/refusal";
 import type { Member } from "@/policies/signing-rights";
 import type { ProposalAct } from "./act-on-proposal";
 import { actorsOf, authorizeChange } from "./authorize-change";
 import { budgetReader } from "./budget-reader";
 import { stampedJustifications } from "./change-checks";
+import { fileFaults } from "./file-faults";
 import { overtakenReasons } from "./overtaken";
 import { previewProposal, type ProposalPreview } from "./preview-proposal";
 import type { ProposalRecord } from "./proposal-record";
@@ -34,6 +35,7 @@ export async function checkedSubmission(actor: Actor, { tx, at, proposal }: Prop
   authorizeChange(actor, [actor, ...actorsOf(proposal.productId, editors)], { ...proposal, state: base.state }, stored);
   refuseOvertaken(overtakenReasons(drafted.state, base.state, stored.edits));
   refuseUnexplained(proposal);
+  refuseFaults(await fileFaults(actor, { ...proposal, edits: stored.edits, base: base.state }, tx));
 
   const isManager = members.some(({ userId, roles }) => userId === actor.userId && roles.includes("program_manager"));
   const preview = await previewOf(stored, base, members, { at, isManager, tx });
@@ -79,6 +81,10 @@ function refuseUnexplained({ title, reason }: ProposalRecord): void {
     ...(title.length >= 3 ? [] : [{ path: "title", sentence: "Give the proposal a title." }]),
     ...(reason.length >= 3 ? [] : [{ path: "reason", sentence: "Say why the change is needed." }]),
   ];
+  refuseFaults(faults);
+}
+
+function refuseFaults(faults: readonly FieldFault[]): void {
   const [first] = faults;
   if (first) throw new Refusal("invalid", first.sentence, faults);
 }

@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { EDIT_OPERATIONS, LINE_KINDS } from "@/lib/vocabulary/lines";
 import { CAPACITIES } from "@/lib/vocabulary/roles";
-import { markdownText, plainText, sentenceText } from "./texts";
+import { fileName, markdownText, plainText, sentenceText } from "./texts";
 
 const MAX_EDITS = 200;
 const MAX_TRANSFERS = 100;
@@ -185,3 +185,19 @@ export const CarryForwardInput = z.strictObject({
   key: IdempotencyKey,
 });
 export type CarryForwardInput = z.infer<typeof CarryForwardInput>;
+
+/** The file itself comes as the request's body. */
+export const AddFileInput = z.strictObject({
+  productCode: ProductCode,
+  proposalId: Id,
+  place: z.enum(["working_copy", "proposal"], "Reload the page and try again."),
+  name: fileName(160),
+  sourceDate: z.iso.date("Give the date of the document first, for example 2026-03-31."),
+});
+export type AddFileInput = z.infer<typeof AddFileInput>;
+
+export const VoidFileInput = z.strictObject({
+  fileId: Id,
+  reason: sentenceText(500, "Say in a sentence why nobody should rely on it."),
+});
+export type VoidFileInput = z.infer<typeof VoidFileInput>;

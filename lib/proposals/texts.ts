@@ -52,3 +52,22 @@ export function markdownText(sentence?: string) {
     .refine((value) => markdownNesting(value) <= MAX_NESTING, `Nest lists and quotes at most ${MAX_NESTING} deep.`);
   return sentence === undefined ? text : text.refine((value) => value.length >= 3, sentence);
 }
+
+/** Control characters, and marks that turn the reading direction so that "fdp.exe" reads as "exe.pdf". */
+const DISGUISING = /[\p{Cc}\p{Zl}\p{Zp}\u200b-\u200f\u202a-\u202e\u2060-\u2069\ufeff]/gu;
+
+/** A file's own name, without the folders that some browsers send along. */
+export function fileName(max: number) {
+  return z
+    .string("Name the file.")
+    .transform((name) => name.replace(DISGUISING, "").split(/[\\/]/).at(-1) ?? "")
+    .transform((name) => name.normalize("NFC").trim())
+    .pipe(
+      z
+        .string()
+        .min(1, "Name the file.")
+        .max(max, `Keep the file's name to ${max} characters.`)
+        .refine((name) => !LONE_SURROGATE.test(name), "Remove the broken character from the file's name.")
+        .refine((name) => !/^\.+$/.test(name), "Name the file."),
+    );
+}

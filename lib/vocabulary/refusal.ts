@@ -14,6 +14,7 @@ export type RefusalCode =
   | "justification_missing"
   | "evidence_missing"
   | "duplicate"
+  | "too_large"
   | "too_many_attempts";
 
 /** Refusals that say something about right, state or independence stand in the history; faults of typing do not. */

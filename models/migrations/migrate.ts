@@ -7,6 +7,7 @@ import { signaturesAndRemarks } from "./0004-signatures-and-remarks";
 import { historyAndOutbox } from "./0005-history-and-outbox";
 import { closings } from "./0006-closings";
 import { monteCarloRuns } from "./0007-monte-carlo-runs";
+import { datedFiles } from "./0008-dated-files";
 import { namedAndAddressed } from "./0009-named-and-addressed";
 import type { Migration } from "./migration";
 
@@ -19,6 +20,7 @@ const MIGRATIONS: readonly Migration[] = [
   historyAndOutbox,
   closings,
   monteCarloRuns,
+  datedFiles,
   namedAndAddressed,
 ];
 

@@ -86,6 +86,8 @@ const settle = (authorId: number, hasPart: boolean): Question => ({
   hasPart,
 });
 
+const voidFile = (addedById: number): Question => ({ on: "File", action: "void", productId: HERE, addedById });
+
 const MEMBERS = "owner reviewer manager auditor";
 const TAKING_PART = "owner reviewer manager";
 const PROPOSING = "owner manager";
@@ -109,6 +111,9 @@ const TABLE: [string, Question, string][] = [
   ["make a remark", product("remark"), TAKING_PART],
   ["object", product("object"), TAKING_PART],
   ["run Monte Carlo", product("run_monte_carlo"), TAKING_PART],
+  ["add a file", product("add_file"), TAKING_PART],
+  ["void an own file", voidFile(ME), TAKING_PART],
+  ["void another's file", voidFile(OTHER), "manager"],
   ["name the reviewer", product("assign_reviewer"), "manager"],
   ["name a deputy", product("name_deputy"), "reviewer manager"],
   ["revise an item of one's own", line("revise", "item", ME), PROPOSING],

@@ -1,4 +1,4 @@
-import { copyFileSync, mkdtempSync, rmSync } from "node:fs";
+import { copyFileSync, mkdirSync, mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { afterAll, afterEach, beforeAll, beforeEach } from "vitest";
@@ -20,7 +20,10 @@ export function withDatabase(): void {
 
   beforeEach(async () => {
     tests += 1;
-    const file = path.join(folder, `test-${tests}.sqlite`);
+    // A folder of its own as well: files are kept beside the database.
+    const own = path.join(folder, `test-${tests}`);
+    mkdirSync(own);
+    const file = path.join(own, "leeboard.sqlite");
     copyFileSync(template(), file);
     await openDatabase(file);
   });

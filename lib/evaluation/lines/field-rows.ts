@@ -47,7 +47,7 @@ function listRows(label: string, type: ListType, path: string, value: unknown, n
   return value.map((entry: unknown, index) => {
     const values = valuesOf(entry);
     const keys = (type.keyedBy ?? []).map((key) => String(values.get(key)));
-    const columns = type.of.filter((column) => !type.keyedBy?.includes(column.key));
+    const columns = type.of.filter((column) => !type.keyedBy?.includes(column.key) && isPresent(column, values));
     const printed = columns.map((column) => ({ column, ...fieldText(column.type, values.get(column.key), names) }));
     const name = keys.length > 0 ? keys.join(" ") : String(index + 1);
     return {
@@ -56,6 +56,11 @@ function listRows(label: string, type: ListType, path: string, value: unknown, n
       ...entryText(printed),
     };
   });
+}
+
+/** A citation without a file says nothing of files. */
+function isPresent({ key, type }: FieldSpec, values: ReadonlyMap<string, unknown>): boolean {
+  return type.type !== "file" || (values.get(key) ?? null) !== null;
 }
 
 /** An entry with one column keeps its unit apart; several columns are printed side by side. */

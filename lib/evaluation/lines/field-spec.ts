@@ -30,6 +30,8 @@ export type FieldType =
   | { type: "references"; to: LineKind }
   | { type: "person" }
   | { type: "date" }
+  /** A file by its name and the SHA-256 of its content; without one the field is missing. */
+  | { type: "file" }
   /** `keyedBy`: the columns that name an entry, so that it keeps its name when others come and go. */
   | { type: "list"; entry: string; of: readonly FieldSpec[]; keyedBy?: readonly string[] }
   | { type: "record"; of: readonly FieldSpec[] };

@@ -37,6 +37,8 @@ export function fieldText(type: FieldType, value: unknown, names: NameBook): Fie
       return { text: typeof value === "number" ? (names.person(value) ?? `person ${value}`) : String(value) };
     case "reference":
       return { text: named(String(value), names.line(type.to, String(value))) };
+    case "file":
+      return { text: fileText(value) };
     case "references":
       return { text: referencesText(value, (number) => named(number, names.line(type.to, number))) };
     default:
@@ -81,6 +83,12 @@ function named(number: string, name: string | null): string {
 function referencesText(value: unknown, print: (number: string) => string): string {
   if (!Array.isArray(value) || value.length === 0) return NOTHING;
   return value.map((number) => print(String(number))).join(", ");
+}
+
+/** The beginning of the hash tells two files of one name apart. */
+function fileText(value: unknown): string {
+  if (typeof value !== "object" || value === null || !("name" in value) || !("sha256" in value)) return NOTHING;
+  return `file ${String(value.name)} (SHA-256 ${String(value.sha256).slice(0, 12)}…)`;
 }
 
 function asTyped(value: unknown): FieldText {

@@ -1,12 +1,13 @@
 import { recomputeIssue } from "@/lib/budget/recompute-issue";
 import { inSnapshot } from "@/models/database";
 import { conservationFaults } from "./conservation";
+import { fileContentFaults } from "./files";
 import { historyFaults } from "./history";
 import { chainLinkFaults, endStateFaults, issueNumberFaults, revisionLetterFaults } from "./numbering";
 import { rows } from "./rows";
 import { approvalFaults, independenceFaults } from "./signing";
 
-/** Everything that speaks against the nine invariants of the open database, each as a sentence that begins with its number. */
+/** Everything that speaks against the ten invariants of the open database, each as a sentence that begins with its number. */
 export async function invariantFaults(): Promise<string[]> {
   return [
     ...(await issueNumberFaults()),
@@ -18,6 +19,7 @@ export async function invariantFaults(): Promise<string[]> {
     ...(await approvalFaults()),
     ...(await recomputationFaults()),
     ...(await historyFaults()),
+    ...(await fileContentFaults()),
   ];
 }
 

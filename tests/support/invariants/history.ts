@@ -8,6 +8,7 @@ const TABLES: Record<string, string> = {
   objection: "objections",
   comment: "comments",
   baseline: "baselines",
+  attachment: "attachments",
   membership: "memberships",
 };
 

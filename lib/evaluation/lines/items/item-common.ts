@@ -4,10 +4,19 @@ import type { FieldSpec } from "../field-spec";
 import { nonNegativeNumber, signedNumber } from "../quantity";
 import { calendarDate, lineNumber, optionalText, requiredText } from "../text-schemas";
 
+/** A file that the product holds, by its content: the hash of whatever cites it covers every byte of it. */
+export const CitedFile = z.strictObject({
+  name: requiredText("Name the file.", 160),
+  sha256: z.string("Choose the file again.").regex(/^[0-9a-f]{64}$/, "Choose the file again."),
+});
+export type CitedFile = z.output<typeof CitedFile>;
+
+/** Without a file the field is missing, as in every citation from before there were files. */
 export const EvidenceCitation = z.strictObject({
   document: requiredText("Name the document.", 120),
   revision: requiredText("Say which revision; a dash where it has none.", 40),
   date: calendarDate,
+  file: CitedFile.optional(),
 });
 export type EvidenceCitation = z.output<typeof EvidenceCitation>;
 
@@ -80,7 +89,7 @@ export const ITEM_CLOSING_FIELDS: readonly FieldSpec[] = [
   {
     key: "evidence",
     label: "Evidence",
-    help: "Document, revision and date.",
+    help: "Document, revision and date, with the file where there is one.",
     type: {
       type: "list",
       entry: "Citation",
@@ -88,6 +97,7 @@ export const ITEM_CLOSING_FIELDS: readonly FieldSpec[] = [
         { key: "document", label: "Document", type: { type: "text", longest: 120 } },
         { key: "revision", label: "Revision", type: { type: "text", longest: 40 } },
         { key: "date", label: "Date", type: { type: "date" } },
+        { key: "file", label: "File", type: { type: "file" }, optional: true },
       ],
     },
     optional: true,
