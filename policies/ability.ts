@@ -96,15 +96,16 @@ const BY_ROLE: Record<Role, (can: Can, actor: Actor, productId: number) => void>
     can(["add", "revise", "retire", "reinstate"], "Line", { productId });
     can("ask", "Transfer", { productId });
     can("withdraw", "Proposal", { productId });
-    can(["establish", "make_baseline", "assign_reviewer", "name_deputy"], "Product", { productId });
+    can(["establish", "make_baseline", "assign_reviewer", "name_deputy", "read_lookings"], "Product", { productId });
     can(["sign_as_program_manager", "disapprove"], "Round", { productId });
     can("settle", "Remark", { productId, hasPart: false });
     can("void", "File", { productId });
     allowTakingPart(can, actor, productId);
   },
   // Reads with every member's rights and the house's history besides; changes nothing, drafts excepted from view.
-  auditor: (can) => {
+  auditor: (can, _actor, productId) => {
     can("read_house_history", "Installation");
+    can("read_lookings", "Product", { productId });
   },
 };
 

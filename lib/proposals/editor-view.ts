@@ -8,10 +8,11 @@ import { Refusal } from "@/lib/vocabulary/refusal";
 import { inSnapshot } from "@/models/database";
 import { authorize } from "@/policies/authorize";
 import { draftViewOf } from "./draft-view";
+import { heldFiles } from "./file-views";
 import { isOpen, wrongStateSentence } from "./moves";
 import type { BudgetAtIssue, RoutingContext } from "./preview-proposal";
 import { proposalByKey, proposalQuestion } from "./proposal-record";
-import type { PersonView } from "./views";
+import type { FileView, PersonView } from "./views";
 import type { DraftView } from "./workspace-views";
 
 /** All that the editor of a proposal computes with, so that it previews what the server will decide. */
@@ -22,6 +23,8 @@ export interface EditorView {
   people: PersonView[];
   /** Persons who may own an item here. */
   owners: PersonView[];
+  /** Files that a citation can name without a second upload. */
+  files: FileView[];
   routing: RoutingContext;
   me: { userId: number; isProgramManager: boolean };
 }
@@ -53,6 +56,7 @@ export function editorView(
       owners: members
         .filter(({ roles }) => roles.includes("component_owner"))
         .map(({ userId, printedName }) => ({ id: userId, name: printedName })),
+      files: await heldFiles(actor, proposal.productId, tx),
       routing: {
         rules,
         earlierMoves: await approvedMoves(proposal.productId, at, rules.programManagerOn.windowDays, tx),

@@ -55,6 +55,7 @@ export function moveViews(
         isAllowed(actor, { on: "Product", action: "object", productId }),
     ),
     remark: when(isSubmitted && isAllowed(actor, { on: "Product", action: "remark", productId })),
+    add_file: when(isSubmitted && isAllowed(actor, { on: "Product", action: "add_file", productId })),
     name_reviewer: when(isProposed && isAllowed(actor, { on: "Product", action: "assign_reviewer", productId })),
   };
 }

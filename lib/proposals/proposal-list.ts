@@ -12,7 +12,7 @@ import { roundsOf, type RoundRecord } from "./round-record";
 import { reviewRound, type RoundReview } from "./round-review";
 import { routingView } from "./routing-views";
 import { storedChange } from "./working-copy";
-import type { ProposalListRow } from "./views";
+import type { ProposalListRow } from "./workspace-views";
 
 /** A proposal with its current round, judged on today's issue where it is open. */
 export interface ListedProposal {

@@ -6,6 +6,7 @@ import { Issue } from "@/models/issue";
 import type { BudgetReader } from "./budget-reader";
 import { unsettledRequests } from "./demand-approvable";
 import { effectView } from "./effect-views";
+import { evidenceViewOf } from "./evidence-views";
 import { lineViews } from "./line-views";
 import { isOpen } from "./moves";
 import { deputyRights, moveViews } from "./move-views";
@@ -55,6 +56,7 @@ export async function proposalViewOf(
     rounds: rounds.map((each) => roundView(each, review)),
     approvedAsIssue: madeIssue,
     ...changeShown(review, remarks),
+    evidence: await evidenceViewOf(actor, review, tx),
     effectToday: onIssue === undefined || madeIssue !== null ? effectOn(review) : null,
     namedBecause: await whyNamed(proposal.id, tx),
     objections: await objectionViews(proposal, roundNumbers, tx),

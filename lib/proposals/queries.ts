@@ -16,8 +16,8 @@ import { roundOf } from "./round-record";
 import { reviewRound } from "./round-review";
 import { settlementViewOf } from "./settlement-view";
 import { unsubmittedRound } from "./unsubmitted-round";
-import type { ProductView, ProposalListRow, ProposalView } from "./views";
-import type { SettlementView } from "./workspace-views";
+import type { ProductView, ProposalView } from "./views";
+import type { ProposalListRow, SettlementView } from "./workspace-views";
 
 export interface ProposalListView {
   product: ProductView;

@@ -201,3 +201,6 @@ export const VoidFileInput = z.strictObject({
   reason: sentenceText(500, "Say in a sentence why nobody should rely on it."),
 });
 export type VoidFileInput = z.infer<typeof VoidFileInput>;
+
+export const OpenLineHistoryInput = z.strictObject({ proposalId: Id, kind: z.enum(LINE_KINDS), number: LineNumber });
+export type OpenLineHistoryInput = z.infer<typeof OpenLineHistoryInput>;

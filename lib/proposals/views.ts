@@ -184,6 +184,7 @@ export type ProposalMove =
   | "take_back"
   | "object"
   | "remark"
+  | "add_file"
   | "name_reviewer";
 
 export interface ProductView {
@@ -193,30 +194,6 @@ export interface ProductView {
   kind: ProductKind;
 }
 
-export interface ProposalListRow {
-  proposalId: number;
-  /** As in the URL: the number, or "draft-17" before it has one. */
-  key: string;
-  /** "TF2-CP-04", or "Draft 17". */
-  label: string;
-  number: number | null;
-  title: string;
-  state: ProposalState;
-  round: number;
-  proposer: PersonView;
-  proposedAt: string | null;
-  decidedAt: string | null;
-  neededBy: string | null;
-  baseIssue: number;
-  lines: LineReference[];
-  /** Change of the predicted total at the worst point on today's issue, for what is open. */
-  effect: { operatingPoint: string; predictedDelta: number; standingWas: Standing; standingNow: Standing } | null;
-  waitingFor: { capacity: Capacity; names: string[] }[];
-  /** Sentences; empty when it is not overtaken. */
-  overtaken: string[];
-  unsettledRequests: number;
-}
-
 export interface RoundView {
   roundId: number;
   round: number;
@@ -224,6 +201,52 @@ export interface RoundView {
   submittedAt: string;
   submittedBy: PersonView;
   hash: string;
+}
+
+/** A file as it is shown: to be downloaded, and what is known of it. */
+export interface FileView {
+  fileId: number;
+  name: string;
+  mediaType: string;
+  size: number;
+  sha256: string;
+  sourceDate: string;
+  addedBy: string;
+  addedAt: string;
+  voided: { by: string; at: string; reason: string } | null;
+  mayVoid: boolean;
+}
+
+/** One citation of an edited item, with its file where it has one. */
+export interface CitedEvidenceView {
+  line: LineReference;
+  document: string;
+  revision: string;
+  date: string;
+  /** Not cited by the revision that the edit starts from. */
+  isNew: boolean;
+  fileName: string | null;
+  /** null where it has none, or where it is not (or not yet) the reader's to open. */
+  file: FileView | null;
+}
+
+export interface EvidenceView {
+  cited: CitedEvidenceView[];
+  /** Added beside the proposal since it was submitted; no hash of a round covers them. */
+  beside: FileView[];
+  /** Days after which evidence counts as old, by today's terms. */
+  ageDays: number;
+  /** What who may sign, or did, opened of this round; the files counted once each. */
+  signers: SignerLookings[];
+  /** Edited lines that have a history to look at. */
+  histories: LineReference[];
+}
+
+export interface SignerLookings {
+  person: PersonView;
+  files: { fileId: number; name: string; at: string | null }[];
+  /** Only for those who watch over the review; null for others. */
+  histories: { line: LineReference; at: string | null }[] | null;
 }
 
 /** What is signed, exactly as it is kept. */
@@ -253,6 +276,7 @@ export interface ProposalView {
   approvedAsIssue: number | null;
   lines: LineChangeView[];
   transfers: TransferView[];
+  evidence: EvidenceView;
   /** null where the content cannot be computed; `faults` says why. */
   effectOnBase: EffectView | null;
   effectToday: EffectView | null;

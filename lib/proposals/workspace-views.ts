@@ -56,6 +56,30 @@ export interface SettlementView {
   predictedDelta: { operatingPoint: string; delta: number; standingNow: Standing }[];
 }
 
+export interface ProposalListRow {
+  proposalId: number;
+  /** As in the URL: the number, or "draft-17" before it has one. */
+  key: string;
+  /** "TF2-CP-04", or "Draft 17". */
+  label: string;
+  number: number | null;
+  title: string;
+  state: ProposalState;
+  round: number;
+  proposer: PersonView;
+  proposedAt: string | null;
+  decidedAt: string | null;
+  neededBy: string | null;
+  baseIssue: number;
+  lines: LineReference[];
+  /** Change of the predicted total at the worst point on today's issue, for what is open. */
+  effect: { operatingPoint: string; predictedDelta: number; standingWas: Standing; standingNow: Standing } | null;
+  waitingFor: { capacity: Capacity; names: string[] }[];
+  /** Sentences; empty when it is not overtaken. */
+  overtaken: string[];
+  unsettledRequests: number;
+}
+
 export interface DaySheetEntry {
   productCode: string;
   proposalId: number;

@@ -1,7 +1,10 @@
+import { Readable } from "node:stream";
+import { addFile } from "@/lib/proposals/add-file";
 import { propose } from "@/lib/proposals/propose";
 import { saveDraft } from "@/lib/proposals/save-draft";
-import { SaveDraftInput, type DraftContent } from "@/lib/proposals/schema";
+import { AddFileInput, SaveDraftInput, type DraftContent } from "@/lib/proposals/schema";
 import { startDraft } from "@/lib/proposals/start-draft";
+import type { DemoFile } from "./demo-files";
 import type { Desk } from "./desk";
 import type { DemoPerson } from "./people";
 import { lockVersionOf } from "./shown-sheet";
@@ -11,6 +14,8 @@ export type DemoChange = Pick<DraftContent, "title" | "reason"> & {
   edits?: readonly unknown[];
   transfers?: readonly unknown[];
   neededBy?: string;
+  /** Files that its citations name, each with the date of its source. */
+  files?: readonly { file: DemoFile; sourceDate: string }[];
 };
 
 export function draftingActs({ house, productCode, key, deliverMail }: Desk) {
@@ -18,11 +23,17 @@ export function draftingActs({ house, productCode, key, deliverMail }: Desk) {
   async function draft(person: DemoPerson, change: DemoChange): Promise<number> {
     const input = { productCode, title: change.title, key: key() };
     const { proposalId } = await startDraft(await house.actor(person), input, house.clock);
+    for (const each of change.files ?? []) await addTo(person, proposalId, each.file, each.sourceDate);
     await save(person, proposalId, change);
     return proposalId;
   }
 
-  async function save(person: DemoPerson, proposalId: number, change: DemoChange): Promise<void> {
+  async function addTo(person: DemoPerson, proposalId: number, { name, content }: DemoFile, sourceDate: string) {
+    const input = AddFileInput.parse({ productCode, proposalId, place: "working_copy", name, sourceDate });
+    await addFile(await house.actor(person), input, Readable.from([content]), house.clock);
+  }
+
+  async function save(person: DemoPerson, proposalId: number, { files: _, ...change }: DemoChange): Promise<void> {
     const content = { neededBy: null, edits: [], transfers: [], ...change };
     const input = SaveDraftInput.parse({ proposalId, lockVersion: await lockVersionOf(proposalId), content });
     await saveDraft(await house.actor(person), input, house.clock);

@@ -1,6 +1,7 @@
 import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
 import { makeBaseline } from "@/lib/products/make-baseline";
 import { nameDeputy } from "@/lib/products/name-deputy";
+import { BRACKET_DRAWING, TRIM_DRAWING, TRIM_READINGS } from "./demo-files";
 import type { DemoHouse } from "./demo-house";
 import { FAIRING_GROUPS, FAIRING_ITEMS } from "./fairing-items";
 import { degreesCelsius, metresPerSecond, squareMetres } from "./item-draft";
@@ -67,15 +68,17 @@ async function raiseSpeed(house: DemoHouse, acts: ProposalActs): Promise<void> {
 
 async function thinOutBrackets(house: DemoHouse, acts: ProposalActs): Promise<void> {
   house.at(75, "10:45");
-  const evidence = [citation("Drawing 7731", "C", house.day(80))];
+  const evidence = [citation("Drawing 7731", "C", house.day(80), BRACKET_DRAWING)];
   const brackets = { name: "Under-floor brackets (18)", referenceArea: squareMetres(0.027), evidence };
   const proposal = await acts.submit("odo", {
     title: "Under-floor brackets 22 to 18",
     reason: "Four brackets were stiffened and the other four fall away. Gives 0.7 N back to the unallocated rest.",
     edits: [await revised(CODE, "item", "100", brackets)],
     transfers: [fromItem("100", 0.7)],
+    files: [{ file: BRACKET_DRAWING, sourceDate: house.day(80) }],
   });
   house.at(74, "14:30");
+  await acts.opens("ines", BRACKET_DRAWING);
   await acts.remark("ines", proposal, {
     text: "Evidence drawing 7731-C seen.",
     line: { kind: "item", number: "100" },
@@ -152,14 +155,22 @@ async function raiseNoseCap(house: DemoHouse, acts: ProposalActs): Promise<void>
 
 async function roundTrim(house: DemoHouse, acts: ProposalActs): Promise<void> {
   house.at(14, "11:20");
-  const evidence = [citation("Drawing 7741", "A", house.day(16))];
+  const evidence = [
+    citation("Drawing 7741", "A", house.day(16), TRIM_DRAWING),
+    citation("Readings of mould M-7741", "–", house.day(15), TRIM_READINGS),
+  ];
   const proposal = await acts.submit("tansy", {
     title: "Wheel-aperture trim with a radius of 18 mm",
     reason: "The rounded trim was drawn and goes into the mould from serial 041 on.",
     neededBy: house.day(-3),
     edits: [await revised(CODE, "item", "070", { dragCoefficient: 0.2333, grade: "preliminary", evidence })],
+    files: [
+      { file: TRIM_DRAWING, sourceDate: house.day(16) },
+      { file: TRIM_READINGS, sourceDate: house.day(15) },
+    ],
   });
   house.at(13, "09:40");
+  await acts.opens("elske", TRIM_DRAWING);
   const condition = await acts.remark("elske", proposal, {
     text: "The mould drawing has to show the radius before I sign.",
     line: { kind: "item", number: "070" },

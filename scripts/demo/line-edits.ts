@@ -1,4 +1,5 @@
 import type { LineKind } from "@/lib/vocabulary/lines";
+import { cited, type DemoFile } from "./demo-files";
 import type { DemoHouse } from "./demo-house";
 import { itemBody, type ItemDraft } from "./item-draft";
 import { standingLine } from "./shown-sheet";
@@ -52,7 +53,12 @@ export function fromItem(number: string, newtons: number) {
 }
 
 /** A citation as the form holds it. */
-export const citation = (document: string, revision: string, date: string) => ({ document, revision, date });
+export const citation = (document: string, revision: string, date: string, file?: DemoFile) => ({
+  document,
+  revision,
+  date,
+  ...(file ? { file: cited(file) } : {}),
+});
 
 function hundredths(newtons: number): number {
   return Math.round(newtons * 100);

@@ -1,4 +1,5 @@
 import { addRemark } from "@/lib/proposals/add-remark";
+import { fileToOpen, noteOpening } from "@/lib/proposals/open-file";
 import { raiseObjection } from "@/lib/proposals/raise-objection";
 import { returnProposal } from "@/lib/proposals/return-proposal";
 import { AddRemarkInput, ReturnProposalInput, SignProposalInput } from "@/lib/proposals/schema";
@@ -6,6 +7,8 @@ import { settleRemark } from "@/lib/proposals/settle-remark";
 import { signProposal } from "@/lib/proposals/sign-proposal";
 import { SIGNATURE_MEANINGS } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
+import { Attachment } from "@/models/attachment";
+import { cited, type DemoFile } from "./demo-files";
 import type { Desk } from "./desk";
 import { DEMO_PASSWORD, type DemoPerson } from "./people";
 import { shownSheet } from "./shown-sheet";
@@ -17,7 +20,7 @@ interface DemoRemark {
   asksForAction?: boolean;
 }
 
-export function reviewingActs({ house, key, deliverMail }: Desk) {
+export function reviewingActs({ house, productCode, key, deliverMail }: Desk) {
   const approve = (person: DemoPerson, capacity: Capacity, proposalId: number) =>
     sign(person, proposalId, { decision: "approve", capacity, meaning: SIGNATURE_MEANINGS[capacity][0] });
 
@@ -46,6 +49,14 @@ export function reviewingActs({ house, key, deliverMail }: Desk) {
     return added;
   }
 
+  /** Downloads a file of the product, by its content. */
+  async function opens(person: DemoPerson, file: DemoFile): Promise<void> {
+    const actor = await house.actor(person);
+    const row = await Attachment.findOne({ where: { sha256: cited(file).sha256 }, rejectOnEmpty: true });
+    const opened = await fileToOpen(actor, productCode, row.id);
+    await noteOpening(actor, opened.file, house.clock);
+  }
+
   async function settle(person: DemoPerson, remarkId: number, reason: string): Promise<void> {
     await settleRemark(await house.actor(person), { remarkId, reason }, house.clock);
   }
@@ -55,5 +66,5 @@ export function reviewingActs({ house, key, deliverMail }: Desk) {
     await deliverMail();
   }
 
-  return { approve, disapprove, giveBack, remark, settle, object };
+  return { approve, disapprove, giveBack, remark, settle, object, opens };
 }

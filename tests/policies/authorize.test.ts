@@ -104,6 +104,7 @@ const TABLE: [string, Question, string][] = [
   ["see a product in the register", product("see"), `${MEMBERS} administrator`],
   ["read a budget", product("read_budget"), MEMBERS],
   ["read the history", product("read_history"), MEMBERS],
+  ["see who looked at a history", product("read_lookings"), "manager auditor"],
   ["take an export", product("export"), MEMBERS],
   ["establish", product("establish"), "manager"],
   ["make a baseline", product("make_baseline"), "manager"],

@@ -1,7 +1,7 @@
 import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { lineName } from "@/lib/evaluation/lines/name-book";
 import type { DraftEdit } from "@/lib/proposals/schema";
-import type { PersonView } from "@/lib/proposals/views";
+import type { FileView, PersonView } from "@/lib/proposals/views";
 import type { LineKind } from "@/lib/vocabulary/lines";
 
 export interface NamedLine {
@@ -10,11 +10,23 @@ export interface NamedLine {
   name: string;
 }
 
-/** What the fields of a form can refer to: lines of the budget and those this proposal adds, and people. */
+/** What the product holds for citations, and where a new file goes. */
+export interface FileShelf {
+  productCode: string;
+  proposalId: number;
+  held: readonly ShelvedFile[];
+  onAdded: (file: ShelvedFile) => void;
+}
+
+export type ShelvedFile = Pick<FileView, "fileId" | "name" | "sha256" | "sourceDate" | "voided">;
+
+/** What the fields of a form can refer to: lines of the budget and those this proposal adds, people, files. */
 export interface EditorNames {
   lines: readonly NamedLine[];
   people: readonly PersonView[];
   owners: readonly PersonView[];
+  /** Missing where nothing is kept, as on the Trial sheet. */
+  files?: FileShelf;
 }
 
 export function linesToName(state: BudgetState, edits: readonly DraftEdit[]): NamedLine[] {

@@ -2,7 +2,7 @@ import type { ReactNode } from "react";
 
 import type { FieldSpec } from "@/lib/evaluation/lines/field-spec";
 
-import type { Json } from "./body";
+import type { Body, Json } from "./body";
 import type { EditorNames } from "./editor-names";
 
 export interface FieldInputProps {
@@ -14,6 +14,8 @@ export interface FieldInputProps {
   faultAt: (path: string) => string | undefined;
   /** Path of the field within its body. */
   path: string;
+  /** The list entry that the field belongs to: choosing a file may fill in what the entry lacks. */
+  entry?: { row: Body; onChange: (row: Body) => void };
   /** Id of the control, so that a fault listed elsewhere can lead to it. */
   id: string;
 }

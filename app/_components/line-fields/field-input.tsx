@@ -13,6 +13,7 @@ import { formatQuantity } from "@/lib/units/format-quantity";
 
 import { asList, asRecord, type Body, type Json } from "./body";
 import type { FieldInputProps } from "./field-input-props";
+import { FileInput } from "./file-input";
 import { ListInput } from "./list-input";
 import { NumberInput } from "./number-input";
 import { RecordInput } from "./record-input";
@@ -81,6 +82,10 @@ export function FieldInput(props: FieldInputProps) {
           onChange={(event) => onChange(event.target.value)}
         />
       );
+    case "file":
+      return props.entry && names.files ? (
+        <FileInput {...texts} fieldKey={spec.key} entry={props.entry} shelf={names.files} />
+      ) : null;
     case "date":
       return (
         <TextField

@@ -32,13 +32,14 @@ export function ListInput({ texts, list, rows, onChange, names, faultAt, path, i
       {rows.map((row, at) => (
         <div key={at} className="clear-both mt-2 flex flex-wrap items-end gap-3">
           {fields.map((spec) => (
-            <div key={spec.key} className="min-w-32 grow">
+            <div key={spec.key} className={spec.type.type === "file" ? "min-w-48 basis-full" : "min-w-32 grow"}>
               {renderField({
                 spec,
                 value: row[spec.key],
                 onChange: (value) => replace(at, { ...row, [spec.key]: value }),
                 names,
                 faultAt,
+                entry: { row, onChange: (changed) => replace(at, changed) },
                 path: `${path}.${at}.${spec.key}`,
                 id: `${id}-${at}-${spec.key}`,
               })}
@@ -55,5 +56,7 @@ export function ListInput({ texts, list, rows, onChange, names, faultAt, path, i
 }
 
 function emptyRow(fields: readonly FieldSpec[]): Body {
-  return Object.fromEntries(fields.map(({ key, type }) => [key, type.type === "text" ? "" : null]));
+  // A file that is not there is no field at all.
+  const typed = fields.filter(({ type }) => type.type !== "file");
+  return Object.fromEntries(typed.map(({ key, type }) => [key, type.type === "text" ? "" : null]));
 }

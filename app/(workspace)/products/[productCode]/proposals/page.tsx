@@ -8,7 +8,7 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { proposalList } from "@/lib/proposals/queries";
-import type { ProposalListRow } from "@/lib/proposals/views";
+import type { ProposalListRow } from "@/lib/proposals/workspace-views";
 import { END_STATES } from "@/lib/vocabulary/proposals";
 
 import { readForPage } from "../_server/read-page";

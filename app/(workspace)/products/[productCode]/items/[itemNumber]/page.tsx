@@ -9,6 +9,7 @@ import { lineHistory } from "@/lib/budget/line-history";
 import type { BudgetAt } from "@/lib/budget/views";
 import { findLine } from "@/lib/evaluation/budget/indexed-state";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+import { itemFiles } from "@/lib/proposals/item-files";
 
 import { AsStoodBanner } from "@/app/(workspace)/products/[productCode]/_components/as-stood-banner";
 import { budgetFields } from "@/app/(workspace)/products/[productCode]/_components/sheet-fields";
@@ -35,6 +36,7 @@ export default async function ItemPage({ params, searchParams }: Props) {
   if (!budget || line?.kind !== "item") notFound();
 
   const revisions = await readForPage(() => lineHistory(actor, productCode, "item", itemNumber));
+  const files = await readForPage(() => itemFiles(actor, productCode, itemNumber, budget.issue.number));
   const until = revisions.filter(({ issue }) => issue.number <= budget.issue.number);
   const path = `/products/${budget.product.code}/items/${itemNumber}`;
   const chosen = pointOf(budget, query.point);
@@ -58,6 +60,7 @@ export default async function ItemPage({ params, searchParams }: Props) {
             chosen={chosen.operatingPoint}
             hrefOf={(point) => sheetAddress(path, query, { point })}
             revisions={until}
+            files={files}
             now={new Date()}
           />
         )}

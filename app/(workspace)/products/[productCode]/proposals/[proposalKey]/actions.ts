@@ -3,11 +3,13 @@
 import { defineAction } from "@/app/_server/define-action";
 import { addRemark } from "@/lib/proposals/add-remark";
 import { nameReviewer } from "@/lib/proposals/name-reviewer";
+import { openLineHistory } from "@/lib/proposals/open-line-history";
 import { raiseObjection } from "@/lib/proposals/raise-objection";
 import { returnProposal } from "@/lib/proposals/return-proposal";
 import {
   AddRemarkInput,
   NameReviewerInput,
+  OpenLineHistoryInput,
   RaiseObjectionInput,
   ReturnProposalInput,
   SettleRemarkInput,
@@ -28,3 +30,5 @@ export const takeBackApprovalAction = defineAction(TakeBackApprovalInput, takeBa
 export const withdrawProposalAction = defineAction(WithdrawProposalInput, withdrawProposal);
 export const raiseObjectionAction = defineAction(RaiseObjectionInput, raiseObjection);
 export const nameReviewerAction = defineAction(NameReviewerInput, nameReviewer);
+/** A read, but one that is noted: a request of its own that no link or prefetch can make. */
+export const openLineHistoryAction = defineAction(OpenLineHistoryInput, openLineHistory);

@@ -16,6 +16,7 @@ import { ChangeSheet } from "./_components/change-sheet";
 import { ExportLinks } from "./_components/export-links";
 import { ProposalMoves } from "./_components/proposal-moves";
 import { SignOffTable } from "./_components/sign-off-table";
+import { WhatSignersOpened } from "./_components/what-signers-opened";
 
 type Props = PageProps<"/products/[productCode]/proposals/[proposalKey]">;
 
@@ -51,11 +52,12 @@ export default async function ProposalPage({ params, searchParams }: Props) {
             namedBecause={proposal.namedBecause}
             signatures={proposal.signatures}
           >
+            <WhatSignersOpened proposal={proposal} />
             <ProposalMoves proposal={proposal} readerId={actor.userId} />
           </SignOffTable>
         }
       >
-        <ChangeSheet proposal={proposal} />
+        <ChangeSheet proposal={proposal} now={new Date()} />
       </Sheet>
     </>
   );

@@ -3,7 +3,7 @@ import Link from "next/link";
 
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { dayText } from "@/app/_components/utc-text";
-import type { ProposalListRow } from "@/lib/proposals/views";
+import type { ProposalListRow } from "@/lib/proposals/workspace-views";
 import { formatNewtonsChange } from "@/lib/units/format-newtons";
 import { ROLE_NAMES } from "@/lib/vocabulary/roles";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";

@@ -7,6 +7,7 @@ import type { LineRevisionView } from "@/lib/budget/views";
 import { fieldRows } from "@/lib/evaluation/lines/field-rows";
 import type { LineOf } from "@/lib/evaluation/lines/line-state";
 import { nameBookOf } from "@/lib/evaluation/lines/name-book";
+import type { ItemFile } from "@/lib/proposals/item-files";
 
 import { FieldTable } from "@/app/(workspace)/products/[productCode]/_components/field-table";
 import { RevisionsTable } from "@/app/(workspace)/products/[productCode]/_components/revisions-table";
@@ -14,6 +15,7 @@ import { WorkingNotes } from "@/app/(workspace)/products/[productCode]/_componen
 import { itemNotes } from "@/app/(workspace)/products/[productCode]/_workings/item-working";
 import { AlternateLinesTable } from "./alternate-lines-table";
 import { AnswerTable } from "./answer-table";
+import { EarlierFiles } from "./earlier-files";
 import { EvidenceTable } from "./evidence-table";
 import { ItemPictures } from "./item-pictures";
 import { ItemWorking } from "./item-working-section";
@@ -26,11 +28,12 @@ interface ItemMatterProps {
   chosen: string;
   hrefOf: (operatingPoint: string) => string;
   revisions: readonly LineRevisionView[];
+  files: readonly ItemFile[];
   now: Date;
 }
 
 /** Everything about one item at an issue: results, notes, working, fields, evidence, revisions. */
-export function ItemMatter({ line, points, chosen, hrefOf, revisions, now }: ItemMatterProps) {
+export function ItemMatter({ line, points, chosen, hrefOf, revisions, files, now }: ItemMatterProps) {
   const shown = points.find(({ sheet }) => sheet.point.operatingPoint === chosen) ?? points[0];
   if (!shown) return null;
   const { budget, indexed } = shown.sheet;
@@ -54,7 +57,14 @@ export function ItemMatter({ line, points, chosen, hrefOf, revisions, now }: Ite
       <SectionHeading>Fields</SectionHeading>
       <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} />
       <SectionHeading>Evidence</SectionHeading>
-      <EvidenceTable evidence={line.body.evidence} ageDays={indexed.terms.evidenceAgeDays} now={now} />
+      <EvidenceTable
+        productCode={budget.product.code}
+        evidence={line.body.evidence}
+        files={files}
+        ageDays={indexed.terms.evidenceAgeDays}
+        now={now}
+      />
+      <EarlierFiles productCode={budget.product.code} files={files} revisions={revisions} />
       <SectionHeading>Revisions</SectionHeading>
       <RevisionsTable revisions={revisions} productCode={budget.product.code} />
     </>

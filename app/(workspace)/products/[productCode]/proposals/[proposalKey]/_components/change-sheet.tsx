@@ -9,12 +9,13 @@ import type { ProposalView } from "@/lib/proposals/views";
 
 import { ChangeTable } from "./change-table";
 import { EffectSummary } from "./effect-summary";
+import { EvidenceSection } from "./evidence-section";
 import { ItemEffects } from "./followers-table";
 import { RemarksSchedule } from "./remarks-schedule";
 import { TransfersTable } from "./transfers-table";
 
-/** The body of a change sheet: effect, lines field by field, what follows, reason, remarks. */
-export function ChangeSheet({ proposal }: { proposal: ProposalView }) {
+/** The body of a change sheet: effect, lines field by field, what follows, evidence, reason, remarks. */
+export function ChangeSheet({ proposal, now }: { proposal: ProposalView; now: Date }) {
   const effect = proposal.effectToday ?? proposal.effectOnBase;
   const baseIssue = proposal.round?.baseIssue ?? proposal.newestIssue;
   const mayRemark = proposal.moves.remark.applies && proposal.moves.remark.allowed;
@@ -39,6 +40,7 @@ export function ChangeSheet({ proposal }: { proposal: ProposalView }) {
           <ItemEffects heading="What only follows" effects={effect.followers} />
         </>
       ) : null}
+      <EvidenceSection proposal={proposal} now={now} />
       <section className="mt-7">
         <SectionHeading>Reason</SectionHeading>
         <MarkdownText text={proposal.reason} />

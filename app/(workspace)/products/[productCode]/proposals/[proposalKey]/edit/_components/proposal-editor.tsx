@@ -6,7 +6,7 @@ import { MarkdownEditor } from "@/app/_components/markdown-editor";
 import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { TextField } from "@/app/_components/text-field";
-import { linesToName } from "@/app/_components/line-fields/editor-names";
+import { type FileShelf, linesToName, type ShelvedFile } from "@/app/_components/line-fields/editor-names";
 import { bodyBefore } from "@/app/_components/line-fields/new-edit";
 import type { EditorView } from "@/lib/proposals/editor-view";
 import type { DraftContent } from "@/lib/proposals/schema";
@@ -117,7 +117,8 @@ interface LinesProps extends PartProps {
 
 function Lines({ view, content, setContent, preview, strict }: LinesProps) {
   const { state } = view.budget;
-  const names = { lines: linesToName(state, content.edits), people: view.people, owners: view.owners };
+  const files = useFileShelf(view);
+  const names = { lines: linesToName(state, content.edits), people: view.people, owners: view.owners, files };
   const setEdits = (change: (edits: DraftContent["edits"]) => DraftContent["edits"]) =>
     setContent((old) => ({ ...old, edits: change(old.edits) }));
   const replace = (at: number, edit: DraftContent["edits"][number]) =>
@@ -155,4 +156,14 @@ function Lines({ view, content, setContent, preview, strict }: LinesProps) {
       />
     </>
   );
+}
+
+/** The product's files, and those that this page adds. */
+function useFileShelf({ draft, files }: EditorView): FileShelf {
+  const [held, setHeld] = useState<readonly ShelvedFile[]>(files);
+  const { productCode, proposalId } = draft;
+  const onAdded = (file: ShelvedFile) =>
+    setHeld((old) => [file, ...old.filter(({ sha256 }) => sha256 !== file.sha256)]);
+
+  return { productCode, proposalId, held, onAdded };
 }
