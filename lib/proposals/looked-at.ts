@@ -3,6 +3,7 @@ import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { inTransaction } from "@/models/database";
 import { Looking } from "@/models/looking";
+import { noteLooking } from "./note-looking";
 
 const ROUND = "round";
 const SHEET = "signing text";
@@ -18,8 +19,8 @@ interface Looked {
 export function noteLooked(actor: Actor, { roundId, textHash }: Looked, clock: Clock = systemClock): Promise<void> {
   return inTransaction(async (tx) => {
     const at = clock().toISOString();
-    if (roundId !== null) await note(actor.userId, ROUND, String(roundId), at, tx);
-    if (textHash !== null) await note(actor.userId, SHEET, textHash, at, tx);
+    if (roundId !== null) await noteLooking({ userId: actor.userId, kind: ROUND, subject: String(roundId) }, at, tx);
+    if (textHash !== null) await noteLooking({ userId: actor.userId, kind: SHEET, subject: textHash }, at, tx);
   });
 }
 
@@ -43,10 +44,4 @@ export async function roundsLookedAt(
   const where = { userId, kind: ROUND, subject: { [Op.in]: roundIds.map(String) } };
   const rows = await Looking.findAll({ where, transaction: tx });
   return new Map(rows.map(({ subject, lastAt }) => [Number(subject), lastAt]));
-}
-
-async function note(userId: number, kind: string, subject: string, at: string, tx: Transaction): Promise<void> {
-  const known = await Looking.findOne({ where: { userId, kind, subject }, transaction: tx });
-  if (known) await known.update({ lastAt: at }, { transaction: tx });
-  else await Looking.create({ userId, kind, subject, firstAt: at, lastAt: at }, { transaction: tx });
 }

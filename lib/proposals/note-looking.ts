@@ -1,7 +1,7 @@
 import { Op, type Transaction } from "sequelize";
 import { Looking } from "@/models/looking";
 
-export type LookingKind = "file" | "line history";
+export type LookingKind = "file" | "line history" | "round" | "signing text";
 
 interface Looked {
   userId: number;

@@ -50,15 +50,15 @@ describe("the sheet of a proposal", () => {
       const moves = (await proposalView(reader, CODE, "2", undefined, clock))?.moves;
       return Object.entries(moves ?? {}).flatMap(([move, { applies, allowed }]) => (applies && allowed ? [move] : []));
     };
-    expect(await movesOf(tansy)).toEqual(["edit", "share", "propose", "withdraw", "remark"]);
+    expect(await movesOf(tansy)).toEqual(["edit", "share", "propose", "withdraw", "remark", "add_file"]);
     expect((await proposalView(tansy, CODE, "2", undefined, clock))?.moves.sign_as_reviewer).toEqual({
       applies: true,
       allowed: false,
       because: "Nobody signs their own change: you are barred as its proposer and as owner of item 010.",
     });
-    expect(await movesOf(odo)).toEqual(["object", "remark"]);
-    expect(await movesOf(ines)).toEqual(["sign_as_reviewer", "return", "remark"]);
-    expect(await movesOf(lusia)).toEqual(["withdraw", "return", "disapprove", "remark", "name_reviewer"]);
+    expect(await movesOf(odo)).toEqual(["object", "remark", "add_file"]);
+    expect(await movesOf(ines)).toEqual(["sign_as_reviewer", "return", "remark", "add_file"]);
+    expect(await movesOf(lusia)).toEqual(["withdraw", "return", "disapprove", "remark", "add_file", "name_reviewer"]);
     expect(await movesOf(maud)).toEqual([]);
 
     await proposed(fenno, clock, { edits: [adding("030", odo.userId, 0.1)] });
