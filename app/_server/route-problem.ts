@@ -46,6 +46,34 @@ export async function answerRead<Value>(read: (actor: Actor) => Promise<Value>):
   }
 }
 
+export interface FileAnswer {
+  name: string;
+  /** Media type. */
+  type: string;
+  body: string | Uint8Array<ArrayBuffer>;
+}
+
+/** Answers a read for the signed-in person with a file to keep. */
+export async function answerFile(read: (actor: Actor) => Promise<FileAnswer>): Promise<Response> {
+  const actor = await currentActor();
+  if (!actor) return signedOut();
+
+  try {
+    const { name, type, body } = await read(actor);
+    return new Response(body, {
+      headers: {
+        "content-type": type,
+        "content-disposition": `attachment; filename="${name}"`,
+        "x-content-type-options": "nosniff",
+        "cache-control": "no-store",
+      },
+    });
+  } catch (error) {
+    if (error instanceof Refusal) return refusalResponse(error);
+    throw error;
+  }
+}
+
 /** Answers a write: same origin, signed in, parsed, then the command. */
 export async function answerWrite<Schema extends z.ZodType, Value>(
   request: Request,

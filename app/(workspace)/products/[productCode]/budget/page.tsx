@@ -58,7 +58,14 @@ export default async function BudgetPage({ params, searchParams }: Props) {
       <PageHeading
         title={product.name}
         subtitle={`${product.code} · issue ${budget.issue.number} · ${streamText(point)}`}
-        actions={<BudgetActions productCode={product.code} mayStart={mayStart} />}
+        actions={
+          <BudgetActions
+            productCode={product.code}
+            issue={budget.issue.number}
+            operatingPoint={point.operatingPoint}
+            mayStart={mayStart}
+          />
+        }
       />
       <BudgetMatter sheet={sheet} query={query} userId={actor.userId} />
     </>

@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 
+import { ExportMenu } from "@/app/_components/export-menu";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
@@ -13,7 +14,6 @@ import type { ProposalView } from "@/lib/proposals/views";
 import { readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
 import { stateWords } from "../_components/state-words";
 import { ChangeSheet } from "./_components/change-sheet";
-import { ExportLinks } from "./_components/export-links";
 import { ProposalMoves } from "./_components/proposal-moves";
 import { SignOffTable } from "./_components/sign-off-table";
 import { WhatSignersOpened } from "./_components/what-signers-opened";
@@ -42,7 +42,13 @@ export default async function ProposalPage({ params, searchParams }: Props) {
       <PageHeading
         title={proposal.title}
         subtitle={subtitleOf(proposal)}
-        actions={<ExportLinks productCode={productCode} proposalKey={proposal.key} />}
+        actions={
+          <ExportMenu
+            entries={[
+              { label: "Change as a unified patch", href: `/products/${productCode}/proposals/${proposal.key}/patch` },
+            ]}
+          />
+        }
       />
       <Sheet
         titleBlock={<TitleBlock fields={titleFields(proposal)} />}
