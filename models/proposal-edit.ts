@@ -11,6 +11,8 @@ export class ProposalEdit extends Model<InferAttributes<ProposalEdit>, InferCrea
   declare operation: EditOperation;
   declare baseLetter: CreationOptional<string | null>;
   declare body: CreationOptional<string | null>;
+  /** Who changed which field, as JSON. */
+  declare touched: CreationOptional<string>;
 }
 
 ProposalEdit.init(
@@ -22,6 +24,7 @@ ProposalEdit.init(
     operation: DataTypes.TEXT,
     baseLetter: DataTypes.TEXT,
     body: DataTypes.TEXT,
+    touched: { type: DataTypes.TEXT, defaultValue: "{}" },
   },
   { sequelize: database, modelName: "ProposalEdit", tableName: "proposal_edits" },
 );

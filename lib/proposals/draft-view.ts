@@ -7,7 +7,7 @@ import type { ProposalState } from "@/lib/vocabulary/proposals";
 import { database } from "@/models/database";
 import { keyOf, labelOf, type ProposalRecord } from "./proposal-record";
 import type { PersonView } from "./views";
-import { storedChange } from "./working-copy";
+import { storedChange, touchedLines } from "./working-copy";
 import type { DraftView } from "./workspace-views";
 
 /** The working copy for one of its editors. */
@@ -40,6 +40,9 @@ export async function draftViewOf(
       .filter(({ roles }) => roles.includes("component_owner") || roles.includes("program_manager"))
       .filter(({ userId }) => userId !== proposerId && !coEditorIds.includes(userId))
       .map(({ userId, printedName }) => ({ id: userId, name: printedName })),
+    touched: [...(await touchedLines(proposal.id, tx))].flatMap(([line, fields]) =>
+      Object.entries(fields).map(([field, { userId, at: when }]) => ({ line, field, by: person(userId), at: when })),
+    ),
     touchedElsewhere: (await touchedElsewhere(proposal, tx)).map(
       ({ kind, number, name, proposerId: by, ...other }) => ({
         line: { kind, number, name: name ?? "" },

@@ -1,5 +1,6 @@
 import { performAct } from "@/lib/audit/perform-act";
 import { loadNewestBudget } from "@/lib/budget/load-budget";
+import type { LineState } from "@/lib/evaluation/lines/line-state";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal, type FieldFault } from "@/lib/vocabulary/refusal";
@@ -13,8 +14,9 @@ import { isOpen, wrongStateSentence } from "./moves";
 import { noteEditor } from "./note-editor";
 import { proposalById, proposalQuestion, subjectOf, type ProposalRecord } from "./proposal-record";
 import { sameValue } from "./same-value";
-import type { DraftContent, SaveDraftInput } from "./schema";
-import { replaceWorkingCopy, storedChange, type StoredChange } from "./working-copy";
+import { DraftContent, type DraftEdit, type SaveDraftInput } from "./schema";
+import { touchedAfter, type TouchedFields } from "./touched-fields";
+import { replaceWorkingCopy, storedChange, touchedLines, type StoredChange } from "./working-copy";
 import type { DraftView } from "./workspace-views";
 
 export type SavedDraft =
@@ -44,7 +46,12 @@ export async function saveDraft(actor: Actor, input: SaveDraftInput, clock: Cloc
       authorizeChange(actor, [actor], { ...budget, productId: proposal.productId }, typed, input.content.edits);
       refuseFaults([...editedTwice(input.content), ...(await reserveLines(proposal, input.content.edits, at, tx))]);
 
-      await replaceWorkingCopy(proposal, input.content, tx);
+      const touched = touchedBy(actor.userId, at, input.content.edits, {
+        stored,
+        touched: await touchedLines(proposal.id, tx),
+        lines: budget.state.lines,
+      });
+      await replaceWorkingCopy(proposal, input.content, tx, touched);
       await updateFacts(proposal, input.content, tx);
       await noteEditor(proposal.id, actor.userId, at, tx);
       return { outcome: "saved", lockVersion: proposal.lockVersion + 1, savedAt: at };
@@ -54,6 +61,31 @@ export async function saveDraft(actor: Actor, input: SaveDraftInput, clock: Cloc
     const frame = { act: "save_draft", chain: named.productCode, subject: subjectOf(named) } as const;
     return performAct(actor, clock, frame, () => Promise.reject(problem));
   }
+}
+
+interface Before {
+  stored: StoredChange;
+  touched: ReadonlyMap<string, TouchedFields>;
+  lines: readonly LineState[];
+}
+
+/** Marks what this save changes with its saver, so that each editor sees who changed what. */
+function touchedBy(userId: number, at: string, edits: readonly DraftEdit[], before: Before) {
+  return new Map(
+    edits.map(({ kind, number, body }) => {
+      const key = `${kind} ${number}`;
+      const isHere = (each: { kind: string; number: string }) => each.kind === kind && each.number === number;
+      const stored = before.stored.edits.find(isHere);
+      const standing = before.lines.find(isHere);
+      const was = stored ? stored.body : standing ? asJson(standing.body) : null;
+      const marks = { body: was, touched: before.touched.get(key) ?? {}, isNew: stored === undefined };
+      return [key, touchedAfter(marks, body, { userId, at })];
+    }),
+  );
+}
+
+function asJson(body: object): DraftEdit["body"] {
+  return DraftContent.shape.edits.element.shape.body.parse(JSON.parse(JSON.stringify(body)));
 }
 
 /** Edits and transfers that differ from what is stored: what the saver answers for. */

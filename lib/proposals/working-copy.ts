@@ -7,6 +7,7 @@ import { ProposalEdit } from "@/models/proposal-edit";
 import { ProposalTransfer } from "@/models/proposal-transfer";
 import { lineIds } from "./line-ids";
 import { DraftTransfer, type DraftEdit } from "./schema";
+import { TouchedFields } from "./touched-fields";
 
 export interface StoredChange {
   edits: DraftEdit[];
@@ -38,17 +39,36 @@ export async function storedChange(
   };
 }
 
-/** Puts a new working copy in place of the old one; its new lines have to be reserved before. */
+/** Who touched which field of the working copy's lines, by "item 030". */
+export async function touchedLines(proposalId: number, tx: Transaction): Promise<Map<string, TouchedFields>> {
+  const rows = await database.query<{ key: string; touched: string }>(
+    `SELECT l.kind || ' ' || l.number AS key, e.touched
+     FROM proposal_edits e JOIN lines l ON l.id = e.line_id WHERE e.proposal_id = :proposalId`,
+    { type: QueryTypes.SELECT, replacements: { proposalId }, transaction: tx },
+  );
+  return new Map(rows.map(({ key, touched }) => [key, TouchedFields.parse(JSON.parse(touched))]));
+}
+
+/**
+ * Puts a new working copy in place of the old one; its new lines have to be reserved before. Who touched what stays as
+ * it was unless told anew.
+ */
 export async function replaceWorkingCopy(
   proposal: { id: number; productId: number },
   { edits, transfers }: StoredChange,
   tx: Transaction,
+  touchedNow?: ReadonlyMap<string, TouchedFields>,
 ): Promise<void> {
   const proposalId = proposal.id;
+  const touched = touchedNow ?? (await touchedLines(proposalId, tx));
   await ProposalEdit.destroy({ where: { proposalId }, transaction: tx });
   await ProposalTransfer.destroy({ where: { proposalId }, transaction: tx });
   await ProposalEdit.bulkCreate(
-    (await editRowsOf(proposal.productId, edits, tx)).map((row) => ({ proposalId, ...row })),
+    (await editRowsOf(proposal.productId, edits, tx)).map((row, at) => ({
+      proposalId,
+      ...row,
+      touched: canonicalJson(touched.get(`${edits[at]?.kind} ${edits[at]?.number}`) ?? {}),
+    })),
     { transaction: tx },
   );
   await ProposalTransfer.bulkCreate(

@@ -24,6 +24,8 @@ export interface DraftView {
   coEditors: PersonView[];
   /** Members of the product whom one could name as co-editors. */
   couldCoEdit: PersonView[];
+  /** Who changed a field last; of "item 030" as the line is keyed, field "" says who put the line in. */
+  touched: { line: string; field: string; by: PersonView; at: string }[];
   /** Lines of this draft that drafts or open proposals of others touch too. */
   touchedElsewhere: { line: LineReference; by: PersonView; state: ProposalState; number: number | null }[];
   /** Warned before the first keystroke: editing bars from signing. */

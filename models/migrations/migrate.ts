@@ -9,6 +9,7 @@ import { closings } from "./0006-closings";
 import { monteCarloRuns } from "./0007-monte-carlo-runs";
 import { datedFiles } from "./0008-dated-files";
 import { namedAndAddressed } from "./0009-named-and-addressed";
+import { touchedFields } from "./0009-touched-fields";
 import type { Migration } from "./migration";
 
 /** A static list: a folder that is read at run time would be missing from the built application. */
@@ -22,6 +23,7 @@ const MIGRATIONS: readonly Migration[] = [
   monteCarloRuns,
   datedFiles,
   namedAndAddressed,
+  touchedFields,
 ];
 
 /** Brings the open database to the newest schema, each step in a transaction of its own; answers what it ran. */

@@ -4,6 +4,8 @@ import { defineAction } from "@/app/_server/define-action";
 import { propose } from "@/lib/proposals/propose";
 import { ProposeInput, ShareDraftInput } from "@/lib/proposals/schema";
 import { shareDraft } from "@/lib/proposals/share-draft";
+import { unshareDraft } from "@/lib/proposals/unshare-draft";
 
 export const proposeAction = defineAction(ProposeInput, propose);
 export const shareDraftAction = defineAction(ShareDraftInput, shareDraft);
+export const unshareDraftAction = defineAction(ShareDraftInput, unshareDraft);

@@ -3,7 +3,7 @@ import { z } from "zod";
 import { DraftContent } from "@/lib/proposals/schema";
 
 /** What was typed, and the saved state of the draft that it was typed on. */
-export const Backup = z.object({ lockVersion: z.int(), content: DraftContent });
+export const Backup = z.object({ lockVersion: z.int(), base: DraftContent, content: DraftContent });
 export type Backup = z.output<typeof Backup>;
 
 /** What this device keeps of a draft until the server has it. */

@@ -1,7 +1,10 @@
 "use client";
 
+import { useState } from "react";
+
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { TextField } from "@/app/_components/text-field";
+import { UtcTime } from "@/app/_components/utc-time";
 import type { Body } from "@/app/_components/line-fields/body";
 import type { EditorNames } from "@/app/_components/line-fields/editor-names";
 import { FieldInput } from "@/app/_components/line-fields/field-input";
@@ -9,8 +12,9 @@ import { withMethod } from "@/app/_components/line-fields/new-edit";
 import { isShown, valuesOf } from "@/lib/evaluation/lines/field-rows";
 import { sameBody } from "@/lib/evaluation/lines/same-body";
 import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
-import { setByChoice } from "@/lib/evaluation/lines/field-spec";
+import { type FieldSpec, setByChoice } from "@/lib/evaluation/lines/field-spec";
 import type { DraftEdit } from "@/lib/proposals/schema";
+import type { DraftView } from "@/lib/proposals/workspace-views";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
@@ -25,12 +29,16 @@ interface LineFormProps {
   strict: boolean;
   /** The body before the edit: what differs from it carries a change bar. */
   before: Body | null;
+  /** What co-editors changed in this line. */
+  touched: DraftView["touched"];
 }
 
 const OPERATION_WORDS = { add: "new", revise: "revised", retire: "to be retired", reinstate: "to be reinstated" };
 
 /** One line of the proposal as a form, drawn from the field catalogue of its kind. */
-export function LineForm({ edit, index, onChange, onRemove, names, faults, strict, before }: LineFormProps) {
+export function LineForm(props: LineFormProps) {
+  const { edit, index, onChange, onRemove, names, faults, strict, before, touched } = props;
+  const [left, setLeft] = useState<Body>({});
   const own = faults
     .filter(({ path }) => path.startsWith(`edits.${index}.`))
     .map(({ path, sentence }) => ({ path: path.replace(/^edits\.\d+\.(body\.)?/, ""), sentence }));
@@ -72,6 +80,9 @@ export function LineForm({ edit, index, onChange, onRemove, names, faults, stric
           faults={own}
           strict={strict}
           before={before}
+          touched={touched}
+          left={left}
+          onLeave={setLeft}
           index={index}
         />
       ) : null}
@@ -85,12 +96,18 @@ function nameOf(edit: DraftEdit, before: Body | null): string {
   return typeof name === "string" && name !== "" ? name : edit.operation === "add" ? "(no name yet)" : "";
 }
 
-interface FieldsProps extends Pick<LineFormProps, "edit" | "index" | "names" | "faults" | "strict" | "before"> {
+interface FieldsProps extends Pick<
+  LineFormProps,
+  "edit" | "index" | "names" | "faults" | "strict" | "before" | "touched"
+> {
   body: Body;
   onChange: (body: Body) => void;
+  /** Values of fields that only methods chosen before have: they come back with their method. */
+  left: Body;
+  onLeave: (left: Body) => void;
 }
 
-function Fields({ edit, index, body, onChange, names, faults, strict, before }: FieldsProps) {
+function Fields({ edit, index, body, onChange, names, faults, strict, before, touched, left, onLeave }: FieldsProps) {
   const specs = fieldsOfBody(edit.kind, body).filter((spec) => !spec.fixed && spec.key !== "justifications");
   const shown = specs.filter((spec) => isShown(spec, valuesOf(body)));
   const faultAt = (path: string) => {
@@ -99,6 +116,14 @@ function Fields({ edit, index, body, onChange, names, faults, strict, before }: 
     if (isEmpty && !strict) return undefined;
 
     return faults.find((fault) => fault.path === path || isPartOf(fault.path, path))?.sentence;
+  };
+  const change = (spec: FieldSpec, value: Body[string]) => {
+    if (spec.key !== "method" || typeof value !== "string") {
+      return onChange({ ...body, [spec.key]: value, ...setByChoice(spec, value) });
+    }
+    const known = { ...left, ...body };
+    onLeave(known);
+    onChange(withMethod(known, value));
   };
 
   return (
@@ -115,22 +140,29 @@ function Fields({ edit, index, body, onChange, names, faults, strict, before }: 
             <FieldInput
               spec={spec}
               value={body[spec.key]}
-              onChange={(value) =>
-                onChange(
-                  spec.key === "method" && typeof value === "string"
-                    ? withMethod(body, value)
-                    : { ...body, [spec.key]: value, ...setByChoice(spec, value) },
-                )
-              }
+              onChange={(value) => change(spec, value)}
               names={names}
               faultAt={faultAt}
               path={spec.key}
               id={`edit-${index}-${spec.key}`}
             />
+            <TouchedBy marks={touched.filter(({ field }) => field.split(".")[0] === spec.key)} />
           </div>
         );
       })}
     </div>
+  );
+}
+
+/** Who else changed a field, and when: the newest mark where it has several parts. */
+function TouchedBy({ marks }: { marks: DraftView["touched"] }) {
+  const newest = marks.toSorted((one, other) => one.at.localeCompare(other.at)).at(-1);
+  if (!newest) return null;
+
+  return (
+    <p className="mt-0.5 text-xs text-ink-2">
+      changed by {newest.by.name}, <UtcTime at={newest.at} />
+    </p>
   );
 }
 

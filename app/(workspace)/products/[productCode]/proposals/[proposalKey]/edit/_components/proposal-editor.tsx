@@ -10,6 +10,7 @@ import { type FileShelf, linesToName, type ShelvedFile } from "@/app/_components
 import { bodyBefore } from "@/app/_components/line-fields/new-edit";
 import type { EditorView } from "@/lib/proposals/editor-view";
 import type { DraftContent } from "@/lib/proposals/schema";
+import type { DraftView } from "@/lib/proposals/workspace-views";
 
 import { CoEditors } from "./co-editors";
 import { EffectPanel } from "./effect-panel";
@@ -19,7 +20,8 @@ import { LineForm } from "./line-form";
 import { Obstacles } from "./obstacles";
 import { ProposeDialog } from "./propose-dialog";
 import { RoutingPanel } from "./routing-panel";
-import { MovedNotice, SaveWords } from "./save-words";
+import { MovedNotice } from "./moved-notice";
+import { SaveWords } from "./save-words";
 import { TransfersForm } from "./transfers-form";
 import { usePreview } from "./use-preview";
 import { useSavedDraft } from "./use-saved-draft";
@@ -27,7 +29,7 @@ import { useSavedDraft } from "./use-saved-draft";
 /** The working copy of a proposal: its lines as forms, and beside them what they do. */
 export function ProposalEditor({ view }: { view: EditorView }) {
   const { draft, budget } = view;
-  const { content, setContent, save, lockVersion, settle } = useSavedDraft(draft);
+  const { content, setContent, save, lockVersion, settle, touched } = useSavedDraft(draft);
   const preview = usePreview(view, content);
   const [strict, setStrict] = useState(false);
 
@@ -35,15 +37,24 @@ export function ProposalEditor({ view }: { view: EditorView }) {
     <div className="grid gap-x-8 gap-y-6 lg:grid-cols-[minmax(0,1fr)_22rem]">
       <div className="min-w-0">
         {draft.warning ? <Notice kind="caution">{draft.warning}</Notice> : null}
-        {save.state === "moved" ? <MovedNotice stored={save.stored} settle={settle} /> : null}
+        {save.state === "moved" ? (
+          <MovedNotice base={save.base} mine={content} stored={save.stored} people={view.people} settle={settle} />
+        ) : null}
         <Heading content={content} setContent={setContent} faults={save.state === "failed" ? save.faults : []} />
-        <Lines view={view} content={content} setContent={setContent} preview={preview} strict={strict} />
+        <Lines
+          view={view}
+          content={content}
+          setContent={setContent}
+          preview={preview}
+          strict={strict}
+          touched={touched}
+        />
       </div>
       <aside className="min-w-0 lg:sticky lg:top-4 lg:max-h-[calc(100dvh-2rem)] lg:self-start lg:overflow-y-auto lg:border-l lg:border-rule lg:pl-6">
         <SaveWords save={save} />
         <EffectPanel preview={preview} issue={budget.issue} />
         <RoutingPanel preview={preview} />
-        <CoEditors draft={draft} />
+        <CoEditors draft={draft} isProposer={draft.proposer.id === view.me.userId} />
         <Obstacles
           obstacles={preview.obstacles}
           hasReason={content.reason.trim() !== ""}
@@ -113,9 +124,10 @@ interface LinesProps extends PartProps {
   view: EditorView;
   preview: ReturnType<typeof usePreview>;
   strict: boolean;
+  touched: DraftView["touched"];
 }
 
-function Lines({ view, content, setContent, preview, strict }: LinesProps) {
+function Lines({ view, content, setContent, preview, strict, touched }: LinesProps) {
   const { state } = view.budget;
   const files = useFileShelf(view);
   const names = { lines: linesToName(state, content.edits), people: view.people, owners: view.owners, files };
@@ -138,6 +150,7 @@ function Lines({ view, content, setContent, preview, strict }: LinesProps) {
           faults={preview.obstacles}
           strict={strict}
           before={bodyBefore(edit, state)}
+          touched={touched.filter(({ line, by }) => line === `${edit.kind} ${edit.number}` && by.id !== view.me.userId)}
         />
       ))}
       <LineChooser

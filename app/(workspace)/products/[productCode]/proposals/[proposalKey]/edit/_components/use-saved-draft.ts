@@ -3,6 +3,7 @@
 import { useCallback, useEffect, useRef, useState } from "react";
 
 import { type DraftAnswer, putDraft } from "@/app/(workspace)/_drafts/put-draft";
+import { asStored, mergeDrafts } from "@/lib/proposals/merge-drafts";
 import { sameValue } from "@/lib/proposals/same-value";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
@@ -14,7 +15,9 @@ export type SaveState =
   | { state: "waiting" }
   | { state: "saving" }
   /** What was typed is kept on this device. */
-  | Extract<DraftAnswer, { state: "failed" | "moved" }>;
+  | Extract<DraftAnswer, { state: "failed" }>
+  /** A co-editor changed a field that is changed here too, since both had the base. */
+  | (Extract<DraftAnswer, { state: "moved" }> & { base: DraftContent });
 
 const PAUSE_MS = 700;
 const RETRY_MS = 5000;
@@ -23,96 +26,90 @@ const RETRY_MS = 5000;
 function useTypedContent({ proposalId, ...draft }: DraftView) {
   const [content, setContent] = useState<DraftContent>(draft.content);
   const [lockVersion, setLockVersion] = useState(draft.lockVersion);
-  const newest = useRef(content);
-  const lock = useRef(lockVersion);
+  const newest = useRef<Backup>({ lockVersion, base: asStored(content), content });
 
-  const type = useCallback(
-    (next: DraftContent) => {
-      newest.current = next;
-      keepBackup(proposalId, { lockVersion: lock.current, content: next });
-      setContent(next);
+  const keep = useCallback(
+    (change: Partial<Backup>) => {
+      newest.current = { ...newest.current, ...change };
+      keepBackup(proposalId, newest.current);
+      setContent(newest.current.content);
+      setLockVersion(newest.current.lockVersion);
     },
     [proposalId],
   );
-  const adopt = useCallback(
-    (version: number) => {
-      lock.current = version;
-      setLockVersion(version);
-      keepBackup(proposalId, { lockVersion: version, content: newest.current });
-    },
-    [proposalId],
-  );
+  const current = useCallback(() => newest.current, []);
 
-  const current = useCallback(() => ({ lockVersion: lock.current, content: newest.current }), []);
-
-  return { content, lockVersion, current, type, adopt };
+  return { content, lockVersion, current, keep };
 }
 
 /** Keeps a draft: on the server a moment after the last keystroke, and on this device until the server has it. */
 export function useSavedDraft(draft: DraftView) {
-  const { content, lockVersion, current, type, adopt } = useTypedContent(draft);
+  const { content, lockVersion, current, keep } = useTypedContent(draft);
   const [save, setSave] = useState<SaveState>({ state: "saved", at: draft.savedAt });
+  const [touched, setTouched] = useState(draft.touched);
+  const sent = useRef<DraftContent[]>([]);
 
   const setContent = useCallback(
     (change: (content: DraftContent) => DraftContent) => {
-      type(change(current().content));
+      keep({ content: change(current().content) });
       setSave((now) => (now.state === "moved" ? now : { state: "waiting" }));
     },
-    [current, type],
+    [current, keep],
+  );
+
+  /** Goes on from what a co-editor stored, with what came of both. */
+  const settle = useCallback(
+    (merged: DraftContent, stored: DraftView) => {
+      setTouched(stored.touched);
+      keep({ lockVersion: stored.lockVersion, base: stored.content, content: merged });
+      setSave({ state: "waiting" });
+    },
+    [keep],
   );
 
   const send = useCallback(async () => {
-    const sent = current();
-    const { productCode, proposalId } = draft;
+    const { lockVersion: onto, content: typed } = current();
     setSave({ state: "saving" });
-    const answer = await putDraft({ productCode, proposalId, ...sent });
-    if (answer.state === "stored") {
-      adopt(answer.lockVersion);
-      if (current().content !== sent.content) return setSave({ state: "waiting" });
-      dropBackup(draft.proposalId);
-      return setSave({ state: "saved", at: answer.at });
+    sent.current.push(asStored(typed));
+    const { productCode, proposalId } = draft;
+    const answer = await putDraft({ productCode, proposalId, lockVersion: onto, content: typed });
+    if (answer.state === "failed") return setSave(answer);
+    if (answer.state === "moved") {
+      const base = baseOf(answer.stored, sent.current, current().base);
+      const merge = mergeDrafts(base, answer.stored.content, asStored(current().content), new Map());
+      return merge.conflicts.length > 0 ? setSave({ ...answer, base }) : settle(merge.content, answer.stored);
     }
-    setSave(answer);
-  }, [adopt, current, draft]);
+    sent.current = [];
+    keep({ lockVersion: answer.lockVersion, base: asStored(typed) });
+    if (current().content !== typed) return setSave({ state: "waiting" });
+    dropBackup(proposalId);
+    return setSave({ state: "saved", at: answer.at });
+  }, [current, draft, keep, settle]);
 
   useSending(save, send);
+  useKeptBackup(draft, keep, setSave);
 
-  const takeUp = useCallback(
-    (kept: Backup) => {
-      adopt(kept.lockVersion);
-      setContent(() => kept.content);
-    },
-    [adopt, setContent],
-  );
-  useKeptBackup(draft, takeUp);
+  return { content, setContent, save, lockVersion, settle, touched };
+}
 
-  const settle = useCallback(
-    (whose: "mine" | "theirs", stored: DraftView) => {
-      adopt(stored.lockVersion);
-      if (whose === "theirs") {
-        type(stored.content);
-        dropBackup(draft.proposalId);
-        setSave({ state: "saved", at: stored.savedAt });
-      } else setSave({ state: "waiting" });
-    },
-    [adopt, draft.proposalId, type],
-  );
-
-  return { content, setContent, save, lockVersion, settle, saveNow: send };
+/** A save whose answer was lost is no change of somebody else's: what is stored then is what was sent. */
+function baseOf(stored: DraftView, sent: readonly DraftContent[], base: DraftContent): DraftContent {
+  return sent.find((each) => sameValue(each, stored.content)) ?? base;
 }
 
 /**
  * What a lost connection or a sign-out left on this device is taken up again, on the saved state that it was typed on:
  * what a co-editor saved meanwhile is shown, not overwritten.
  */
-function useKeptBackup(draft: DraftView, takeUp: (kept: Backup) => void): void {
+function useKeptBackup(draft: DraftView, keep: (kept: Backup) => void, setSave: (save: SaveState) => void): void {
   useEffect(() => {
     const kept = readBackup(draft.proposalId);
     if (!kept) return;
     // The server had it, only its answer was lost.
     if (sameValue(kept.content, draft.content)) return dropBackup(draft.proposalId);
-    takeUp(kept);
-  }, [draft, takeUp]);
+    keep(kept);
+    setSave({ state: "waiting" });
+  }, [draft, keep, setSave]);
 }
 
 /** Sends a moment after the last keystroke, and again after what may pass. */

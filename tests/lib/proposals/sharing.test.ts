@@ -1,0 +1,70 @@
+import { describe, expect, it } from "vitest";
+import { historyPage } from "@/lib/audit/queries";
+import { editorView } from "@/lib/proposals/editor-view";
+import { saveDraft } from "@/lib/proposals/save-draft";
+import { shareDraft } from "@/lib/proposals/share-draft";
+import { startDraft } from "@/lib/proposals/start-draft";
+import { unshareDraft } from "@/lib/proposals/unshare-draft";
+import { withdrawProposal } from "@/lib/proposals/withdraw-proposal";
+import { withDatabase } from "@/tests/support/database";
+import { adding, CODE, content, formKey, team } from "./review-cycle";
+
+withDatabase();
+
+async function sharedDraft() {
+  const people = await team();
+  const { tansy, lusia, clock } = people;
+  const { proposalId, key } = await startDraft(tansy, { productCode: CODE, title: "", key: formKey() }, clock);
+  const edits = [adding("010", tansy.userId, 0.5)];
+  await saveDraft(tansy, { proposalId, lockVersion: 0, content: content({ edits }) }, clock);
+  await shareDraft(tansy, { proposalId, userId: lusia.userId }, clock);
+  return { ...people, proposalId, key };
+}
+
+describe("a shared draft", () => {
+  it("says of each field who changed it last, and of each line who put it in", async () => {
+    const { tansy, lusia, clock, proposalId, key } = await sharedDraft();
+    const edits = [adding("010", tansy.userId, 0.4), adding("020", tansy.userId, 0.1)];
+    await saveDraft(lusia, { proposalId, lockVersion: 1, content: content({ edits }) }, clock);
+    const { draft } = await editorView(tansy, CODE, key, clock);
+    expect(draft.touched.map(({ line, field, by }) => [line, field, by.name])).toEqual([
+      ["item 010", "", "Tansy Owner"],
+      ["item 010", "dragCoefficient", "Lusia Manager"],
+      ["item 020", "", "Lusia Manager"],
+    ]);
+  });
+
+  it("answers a save on an older state with what is stored and who changed it, and overwrites nothing", async () => {
+    const { tansy, lusia, clock, proposalId } = await sharedDraft();
+    const save = (actor: typeof tansy, coefficient: number) => {
+      const edits = [adding("010", tansy.userId, coefficient)];
+      return saveDraft(actor, { proposalId, lockVersion: 1, content: content({ edits }) }, clock);
+    };
+    expect(await save(lusia, 0.4)).toMatchObject({ outcome: "saved", lockVersion: 2 });
+    expect(await save(tansy, 0.3)).toMatchObject({
+      outcome: "moved",
+      stored: {
+        savedBy: { name: "Lusia Manager" },
+        content: { edits: [{ body: { dragCoefficient: 0.4 } }] },
+        touched: [{ field: "" }, { field: "dragCoefficient", by: { name: "Lusia Manager" } }],
+      },
+    });
+  });
+
+  it("is closed to a co-editor whose part its proposer ended; the history tells both", async () => {
+    const { tansy, lusia, odo, clock, proposalId, key } = await sharedDraft();
+    const ending = { proposalId, userId: lusia.userId };
+    await expect(unshareDraft(lusia, ending, clock)).rejects.toMatchObject({ code: "forbidden" });
+    await expect(unshareDraft(tansy, { proposalId, userId: odo.userId }, clock)).rejects.toMatchObject({
+      code: "not_found",
+    });
+    await unshareDraft(tansy, ending, clock);
+    await expect(editorView(lusia, CODE, key, clock)).rejects.toMatchObject({ code: "forbidden" });
+    const acts = (await historyPage({ chain: CODE })).rows.map(({ act, outcome }) => `${act} ${outcome}`);
+    expect(acts.slice(0, 3)).toEqual(["unshare_draft done", "unshare_draft refused", "share_draft done"]);
+
+    await shareDraft(tansy, ending, clock);
+    await withdrawProposal(tansy, { proposalId, reason: "Not needed any more" }, clock);
+    await expect(unshareDraft(tansy, ending, clock)).rejects.toMatchObject({ code: "wrong_state" });
+  });
+});
