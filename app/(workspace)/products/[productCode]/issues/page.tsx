@@ -13,6 +13,7 @@ import { abilityFor, covers } from "@/policies/ability";
 import { NotEstablished } from "../_components/not-established";
 import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
+import { TrendFigure } from "../_components/trend-figure";
 import { pageBudget, pageProduct, readForPage } from "../_server/read-page";
 import { pointOf } from "../_sheet/budget-sheet";
 import { Baselines } from "./_components/baselines";
@@ -20,7 +21,6 @@ import { Comparison } from "./_components/comparison";
 import { IssueForms } from "./_components/issue-forms";
 import { IssuesTable } from "./_components/issues-table";
 import { issuesQuery } from "./_components/issues-query";
-import { TrendFigure } from "./_components/trend-figure";
 import { TrendPoints } from "./_components/trend-points";
 
 type Props = PageProps<"/products/[productCode]/issues">;

@@ -21,6 +21,7 @@ export function BudgetActions({ productCode, issue, operatingPoint, mayStart }: 
           { label: "Sheet as XLSX", href: file("xlsx") },
         ]}
       />
+      <ButtonLink href={`/products/${productCode}/report`}>Report</ButtonLink>
       {mayStart ? <ButtonLink href={`/products/${productCode}/proposals`}>Propose a change…</ButtonLink> : null}
     </div>
   );
