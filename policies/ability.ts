@@ -11,6 +11,7 @@ type Can = AbilityBuilder<AppAbility>["can"];
 /** Everything a person may do. Who is not named here may not: there are no rules that forbid. */
 export function abilityFor(actor: Actor): AppAbility {
   const { can, build } = new AbilityBuilder<AppAbility>(createMongoAbility);
+  can("keep_preferences", "Account", { userId: actor.userId });
   if (actor.isAdministrator) allowAdministrator(can);
   for (const { productId, role } of actor.memberships) {
     allowMember(can, actor, productId);
@@ -24,6 +25,8 @@ export function covers(ability: AppAbility, question: Question): boolean {
   switch (question.on) {
     case "Installation":
       return ability.can(question.action, subject("Installation", {}));
+    case "Account":
+      return ability.can(question.action, subject("Account", { userId: question.userId }));
     case "Product":
       return ability.can(question.action, subject("Product", { productId: question.productId }));
     case "Line": {

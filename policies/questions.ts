@@ -3,6 +3,7 @@ import type { EditOperation, LineKind } from "@/lib/vocabulary/lines";
 /** What a person may be asked to be allowed to do, with the plain facts that decide it. */
 export type Question =
   | { on: "Installation"; action: InstallationAction }
+  | { on: "Account"; action: "keep_preferences"; userId: number }
   | { on: "Product"; action: ProductAction; productId: number }
   | {
       on: "Line";
@@ -82,6 +83,7 @@ const SENTENCES: Record<Exclude<Question["on"], "Line">, Record<string, string>>
     read_accounts: `${ADMINISTRATOR} may see the accounts.`,
     read_house_history: "Only an administrator or an auditor may read the history of the installation.",
   },
+  Account: { keep_preferences: "Only each person themselves may choose how they read." },
   Product: {
     see: "You hold no role in this product.",
     read_budget: "Only those who hold a role in this product may read its budget.",

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { MEASURES, UNIT_SYSTEMS } from "@/lib/vocabulary/measures";
 
 const Typed = z.string().max(200, "A password has at most 200 characters.");
 
@@ -27,3 +28,10 @@ export const ChangePasswordInput = z
   })
   .refine(({ current, next }) => current !== next, { path: ["next"], message: "This is your present password." });
 export type ChangePasswordInput = z.infer<typeof ChangePasswordInput>;
+
+/** What is left out stays as it is. */
+export const KeepPreferencesInput = z.strictObject({
+  measure: z.enum(MEASURES, "Choose one of the measures.").optional(),
+  units: z.enum(UNIT_SYSTEMS, "Choose SI or US customary units.").optional(),
+});
+export type KeepPreferencesInput = z.infer<typeof KeepPreferencesInput>;

@@ -32,6 +32,11 @@ const EXACT_UNITS: ReadonlyMap<string, { factor: number; si: string }> = new Map
   ["mmHg", { factor: MERCURY * 0.001, si: "Pa" }],
   ["kg/(m s)", { factor: 1, si: "Pa*s" }],
   ["thou", { factor: 2.54e-5, si: "m" }],
+  ["mil", { factor: 2.54e-5, si: "m" }],
+  ["lb/ft/s", { factor: 0.45359237 / 0.3048, si: "Pa*s" }],
+  ["lb/(ft*s)", { factor: 0.45359237 / 0.3048, si: "Pa*s" }],
+  // Of 550 foot pounds-force a second.
+  ["hp", { factor: 550 * 0.3048 * POUND_FORCE, si: "W" }],
 ]);
 
 const TEMPERATURES: ReadonlyMap<string, string> = new Map([

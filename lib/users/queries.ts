@@ -1,7 +1,9 @@
 import { Op, type Transaction } from "sequelize";
 import type { Actor } from "@/lib/vocabulary/actor";
+import type { Preferences } from "@/lib/vocabulary/measures";
 import { Membership } from "@/models/membership";
 import { User } from "@/models/user";
+import { parsePreferences } from "./preferences";
 
 /** An open account as a request needs it: who acts, and which sessions are still good. */
 export interface ActiveAccount {
@@ -9,6 +11,7 @@ export interface ActiveAccount {
   email: string;
   /** A session that was made under another epoch has ended. */
   sessionEpoch: number;
+  preferences: Preferences;
 }
 
 export interface AccountRow {
@@ -37,6 +40,7 @@ export async function actorById(userId: number, at: string): Promise<ActiveAccou
     },
     email: user.email,
     sessionEpoch: user.sessionEpoch,
+    preferences: parsePreferences(user.preferences),
   };
 }
 

@@ -71,6 +71,7 @@ const round = (action: (typeof ROUND_ACTIONS)[number], asDeputy = false): Questi
   productId: HERE,
   asDeputy,
 });
+const account = (userId: number): Question => ({ on: "Account", action: "keep_preferences", userId });
 const takeBack = (signerId: number): Question => ({ on: "Signature", action: "take_back", productId: HERE, signerId });
 const endDeputyship = (holderId: number): Question => ({
   on: "Deputyship",
@@ -101,6 +102,8 @@ const TABLE: [string, Question, string][] = [
   ["close an account", house("deactivate_account"), "administrator"],
   ["see the accounts", house("read_accounts"), "administrator"],
   ["read the house's history", house("read_house_history"), "auditor administrator elsewhere"],
+  ["keep one's own preferences", account(ME), `${MEMBERS} administrator elsewhere`],
+  ["keep another's preferences", account(OTHER), ""],
   ["see a product in the register", product("see"), `${MEMBERS} administrator`],
   ["read a budget", product("read_budget"), MEMBERS],
   ["read the history", product("read_history"), MEMBERS],
@@ -190,6 +193,7 @@ describe("who may do what", () => {
       ...ROUND_ACTIONS.map((action) => `Round ${action}`),
       ...["add", "revise", "retire", "reinstate"].map((action) => `Line ${action}`),
       "Transfer ask",
+      "Account keep_preferences",
       "Signature take_back",
       "Deputyship end",
       "Remark settle",

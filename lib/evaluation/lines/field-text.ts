@@ -1,7 +1,7 @@
 import { DIMENSIONS, type DimensionName } from "@/lib/units/dimensions";
 import { formatExact } from "@/lib/units/format-number";
 import { formatHundredths } from "@/lib/units/format-newtons";
-import { formatQuantity, formatQuantityNumber } from "@/lib/units/format-quantity";
+import { formatQuantity, formatQuantityNumber, formatUsQuantity } from "@/lib/units/format-quantity";
 import type { FieldType } from "./field-spec";
 import type { NameBook } from "./name-book";
 
@@ -10,6 +10,8 @@ export interface FieldText {
   unit?: string;
   /** As it was typed, where that differs from what is printed. */
   entered?: string;
+  /** The same in US customary units, for a reader who wants them: "27 ft". */
+  us?: string;
 }
 
 /** What stands where nothing is chosen or typed. */
@@ -23,7 +25,9 @@ export function fieldText(type: FieldType, value: unknown, names: NameBook): Fie
     case "quantity":
       return quantityText(type.dimension, value);
     case "newtons":
-      return typeof value === "number" ? { text: formatHundredths(value), unit: "N" } : asTyped(value);
+      return typeof value === "number"
+        ? { text: formatHundredths(value), unit: "N", us: formatUsQuantity(value / 100, "force") }
+        : asTyped(value);
     case "fraction":
       return typeof value === "number" ? { text: formatExact(value * 100), unit: "%" } : asTyped(value);
     case "number":
@@ -56,7 +60,8 @@ function quantityText(dimension: DimensionName, value: unknown): FieldText {
   const entered = "entered" in value && typeof value.entered === "string" ? value.entered : "";
   const printed = formatQuantity(value.value, dimension);
   const differs = entered !== "" && comparable(entered) !== comparable(printed) && comparable(entered) !== plain;
-  return { text, unit: DIMENSIONS[dimension].display, ...(differs ? { entered } : {}) };
+  const us = formatUsQuantity(value.value, dimension);
+  return { text, unit: DIMENSIONS[dimension].display, us, ...(differs ? { entered } : {}) };
 }
 
 /** A spread of temperatures is a difference: it is not shifted to Celsius. */

@@ -1,6 +1,5 @@
 import { describe, expect, it } from "vitest";
 import { budgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { measuresOf } from "@/app/(workspace)/products/[productCode]/_sheet/measures";
 import { figureWorking } from "@/app/(workspace)/products/[productCode]/_workings/figure-working";
 import { FIGURES, type Working } from "@/app/(workspace)/products/[productCode]/_workings/working";
 import type { LineRevisionView } from "@/lib/budget/views";
@@ -86,38 +85,3 @@ function revision(letter: string, number: number, field: string, was: string | n
   const issue = { number, at: "2026-05-01T08:00:00.000Z", contentHash: "0", proposal, signatures: [], baselines: [] };
   return { letter, retired: false, issue, fields: [{ field, label: "Allocation", was, now, unit: "N" }] };
 }
-
-describe("a drag in other measures", () => {
-  const stream = { dynamicPressure: 382.8125, speed: 25 };
-  const terms = { referenceArea: { value: 10 }, flowArea: { value: 3 }, countSize: 0.001 as const };
-
-  // C_D·A = D/q, C_D = C_D·A/A, power = D·U, energy = power × hours: by the definitions, worked by hand.
-  it("reads a moving body as drag area, coefficient, counts, power and energy a year", () => {
-    const measures = measuresOf(38.28125, { kind: "vehicle_fairing", terms, stream, hoursPerYear: 1000 });
-
-    expect(measures.map(({ text, unit }) => `${text} ${unit}`.trim())).toEqual([
-      "0.100 m²",
-      "0.0100",
-      "10.0",
-      "957 W",
-      "957 kWh",
-    ]);
-  });
-
-  it("reads a duct as pressure loss on its flow area and nothing else", () => {
-    const measures = measuresOf(180, { kind: "duct", terms, stream, hoursPerYear: 1000 });
-
-    expect(measures.map(({ name, text, unit }) => `${name} ${text} ${unit}`)).toEqual(["Pressure loss 60.0 Pa"]);
-  });
-
-  it("reads no coefficient without a reference area, and no power of what stands still", () => {
-    const measures = measuresOf(10, {
-      kind: "sign_panel",
-      terms: { ...terms, referenceArea: null },
-      stream,
-      hoursPerYear: null,
-    });
-
-    expect(measures.map(({ name }) => name)).toEqual(["Drag area"]);
-  });
-});

@@ -22,7 +22,7 @@ export function ComparisonTable({ a, b }: ComparisonTableProps) {
   const rows = ANSWER_FIELDS.map(({ name, symbol, text }) => ({
     name,
     symbol,
-    texts: [answerOf(a), answerOf(b)].map((answer) => (answer ? text(answer) : null)),
+    texts: [answerOf(a), answerOf(b)].map((answer) => (answer ? text(answer, "si") : null)),
   })).filter(({ texts }) => texts.some((text) => text !== null));
 
   return (

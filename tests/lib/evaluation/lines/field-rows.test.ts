@@ -49,6 +49,7 @@ describe("the fields of a line as they are printed", () => {
       label: "Length along the flow",
       text: "8.2296 ± 0.005",
       unit: "m",
+      us: "27\u2009ft",
       entered: "27 ft",
     });
     expect(rowOf("item", body, "breadth")).toEqual({ field: "breadth", label: "Breadth", text: "0.95", unit: "m" });

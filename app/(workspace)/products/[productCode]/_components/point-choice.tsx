@@ -9,10 +9,12 @@ interface PointChoiceProps {
   worstPoint: string;
   chosen: string;
   hrefOf: (operatingPoint: string) => string;
+  /** How a force at a point is printed; in newtons where it isn't said. */
+  print?: (point: PointResult, newtons: number) => string;
 }
 
 /** The operating points of the budget, the worst named first, each with where it stands. */
-export function PointChoice({ points, worstPoint, chosen, hrefOf }: PointChoiceProps) {
+export function PointChoice({ points, worstPoint, chosen, hrefOf, print }: PointChoiceProps) {
   if (points.length < 2) return null;
   const ordered = points.toSorted(
     (one, other) => Number(other.operatingPoint === worstPoint) - Number(one.operatingPoint === worstPoint),
@@ -30,7 +32,7 @@ export function PointChoice({ points, worstPoint, chosen, hrefOf }: PointChoiceP
         >
           {point.operatingPoint} {point.name}
           <span className={`block text-xs font-normal ${point.standing === "over" ? "text-signal" : "text-ink-2"}`}>
-            {standingSentence(point)}
+            {standingSentence(point, print && ((newtons) => print(point, newtons)))}
             {point.operatingPoint === worstPoint ? ", the worst" : ""}
           </span>
         </Link>

@@ -13,12 +13,16 @@ export function percent(fraction: number): string {
   return `${Number((fraction * 100).toFixed(4))}%`;
 }
 
-/** Round values of a ruler, steps of 1, 2 or 5 times a power of ten, at most `most` of them. */
-export function rulerTicks({ min, max }: Scale, most = 8): number[] {
-  const step = niceStep((max - min) / most);
-  const first = Math.ceil(min / step - 1e-9);
-  const last = Math.floor(max / step + 1e-9);
-  return Array.from({ length: last - first + 1 }, (_, index) => Number(((first + index) * step).toPrecision(12)));
+/**
+ * Where a ruler has its ticks, in newtons: round values of what is shown (newtons × `perNewton`), in steps of 1, 2 or 5
+ * times a power of ten, at most `most` of them.
+ */
+export function rulerTicks({ min, max }: Scale, most = 8, perNewton = 1): number[] {
+  const step = niceStep(((max - min) * perNewton) / most);
+  const first = Math.ceil((min * perNewton) / step - 1e-9);
+  const last = Math.floor((max * perNewton) / step + 1e-9);
+  const round = Array.from({ length: last - first + 1 }, (_, index) => (first + index) * step);
+  return round.map((shown) => Number((shown / perNewton).toPrecision(12)));
 }
 
 function niceStep(atLeast: number): number {

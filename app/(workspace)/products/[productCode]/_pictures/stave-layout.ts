@@ -43,11 +43,12 @@ export interface StaveLayout {
 }
 
 /**
- * The stave: every value of a total on one straight scale, in newtons.
+ * The stave: every value of a total on one straight scale, in newtons; its ruler has round values of the measure in
+ * which a newton is `perNewton`.
  * Contributions follow one another; the bar starts left of zero by what the savings give back,
  * so that its solid end stands at ΣB and its hatched end at ΣP on the ruler.
  */
-export function staveLayout(input: StaveInput): StaveLayout {
+export function staveLayout(input: StaveInput, perNewton = 1): StaveLayout {
   const savings = sum(input.items.filter(({ basic }) => basic < 0));
   const segments = segmentsFrom(savings, input.items);
   const growth = { from: input.basic, to: input.predicted };
@@ -62,7 +63,7 @@ export function staveLayout(input: StaveInput): StaveLayout {
     over: limit !== null && input.predicted > limit ? { from: limit, to: input.predicted } : null,
     limit,
     reserveFrom: limit !== null && input.reserve > 0 ? limit - input.reserve : null,
-    ticks: rulerTicks(scale),
+    ticks: rulerTicks(scale, 8, perNewton),
   };
 }
 

@@ -1,10 +1,10 @@
 import { type ReactNode, useId } from "react";
 
-import { formatExact } from "@/lib/units/format-number";
-import { formatNewtons, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { NEWTONS, type Reading, readNumber, readText } from "@/lib/evaluation/measures/reading";
 
 import { DimensionLines } from "./dimension-lines";
 import { type Dimension, placeDimensions } from "./dimension-rows";
+import { Ruler } from "./ruler";
 import { type Scale, fractionOf, percent } from "./scale";
 import { type Span, type StaveInput, type StaveLayout, type StaveSegment, staveLayout } from "./stave-layout";
 
@@ -14,9 +14,9 @@ const FIRST_ROW = 134;
 const ROW_STEP = 38;
 
 /** One total to scale: items solid in order, growth hatched at their end, posts for limit and reserve, a ruler, dimensions. */
-export function Stave({ input }: { input: StaveInput }) {
-  const layout = staveLayout(input);
-  const rows = dimensionRows(input)
+export function Stave({ input, reading = NEWTONS }: { input: StaveInput; reading?: Reading }) {
+  const layout = staveLayout(input, reading.perNewton);
+  const rows = dimensionRows(input, reading)
     .map((row) =>
       placeDimensions(
         layout.scale,
@@ -36,9 +36,9 @@ export function Stave({ input }: { input: StaveInput }) {
       className="block overflow-visible"
       aria-hidden
     >
-      <StaveBar layout={layout} top={BAR.top} height={BAR.height} named />
-      <Posts layout={layout} top={4} foot={RULER} labelled />
-      <Ruler layout={layout} y={RULER} />
+      <StaveBar layout={layout} top={BAR.top} height={BAR.height} reading={reading} named />
+      <Posts layout={layout} top={4} foot={RULER} reading={reading} labelled />
+      <Ruler layout={layout} y={RULER} reading={reading} />
       {rows.map((row, at) => (
         <DimensionLines key={at} scale={scale} row={row} y={FIRST_ROW + ROW_STEP * at} />
       ))}
@@ -46,15 +46,15 @@ export function Stave({ input }: { input: StaveInput }) {
   );
 }
 
-function dimensionRows({ basic, growth, predicted, limit }: StaveInput): Dimension[][] {
+function dimensionRows({ basic, growth, predicted, limit }: StaveInput, reading: Reading): Dimension[][] {
   const built = [
-    { from: 0, to: basic, value: formatNewtons(basic), word: "basic" },
-    { from: basic, to: predicted, value: formatNewtonsNumber(growth), word: "growth" },
+    { from: 0, to: basic, value: readText(reading, basic), word: "basic" },
+    { from: basic, to: predicted, value: readNumber(reading, growth), word: "growth" },
   ];
-  const total = { from: 0, to: predicted, value: formatNewtons(predicted), word: "predicted" };
+  const total = { from: 0, to: predicted, value: readText(reading, predicted), word: "predicted" };
   if (limit === null) return [built, [total]];
 
-  const distance = formatNewtonsNumber(Math.abs(limit - predicted));
+  const distance = readNumber(reading, Math.abs(limit - predicted));
   if (predicted > limit) return [built, [total], [{ from: limit, to: predicted, value: distance, word: "over" }]];
   return [built, [total, { from: predicted, to: limit, value: distance, word: "to limit" }]];
 }
@@ -65,11 +65,19 @@ interface StaveBarProps {
   scale?: Scale;
   top: number;
   height: number;
+  reading?: Reading;
   named?: boolean;
 }
 
 /** The bar of a stave: solid, hatched, and what lies beyond the limit. */
-export function StaveBar({ layout, scale = layout.scale, top, height, named = false }: StaveBarProps) {
+export function StaveBar({
+  layout,
+  scale = layout.scale,
+  top,
+  height,
+  reading = NEWTONS,
+  named = false,
+}: StaveBarProps) {
   const id = useId();
   const { growth, over, savings } = layout;
 
@@ -91,7 +99,15 @@ export function StaveBar({ layout, scale = layout.scale, top, height, named = fa
           <rect x="100%" width="4" height={height} transform="translate(-1.5)" className="fill-sheet" />
         </Segment>
       ))}
-      {savings ? <Hollow span={savings} scale={scale} top={top} height={height} named={named} /> : null}
+      {savings ? (
+        <Hollow
+          span={savings}
+          scale={scale}
+          top={top}
+          height={height}
+          savings={named ? readNumber(reading, savings.from) : null}
+        />
+      ) : null}
       <Part span={growth} scale={scale} top={top} height={height} part="growth" fill={`url(#${id}-growth)`} />
       {over ? <Part span={over} scale={scale} top={top} height={height} part="over" fill={`url(#${id}-over)`} /> : null}
     </>
@@ -144,7 +160,7 @@ function Part({ span, scale, top, height, part, fill }: BandProps & { part: stri
 }
 
 /** What savings give back stands left of zero, hollowed: it counts in no total. */
-function Hollow({ span, scale, top, height, named }: BandProps & { named: boolean }) {
+function Hollow({ span, scale, top, height, savings }: BandProps & { savings: string | null }) {
   return (
     <Segment span={span} scale={scale} top={top} height={height}>
       <rect
@@ -158,9 +174,9 @@ function Hollow({ span, scale, top, height, named }: BandProps & { named: boolea
         data-from={span.from}
         data-to={span.to}
       />
-      {named && fractionOf(scale, span.to) - fractionOf(scale, span.from) > 0.12 ? (
+      {savings !== null && fractionOf(scale, span.to) - fractionOf(scale, span.from) > 0.12 ? (
         <text x="6" y={height - 8} className="fill-ink text-xs">
-          savings {formatNewtonsNumber(span.from)}
+          savings {savings}
         </text>
       ) : null}
     </Segment>
@@ -202,21 +218,24 @@ interface PostsProps {
   scale?: Scale;
   top: number;
   foot: number;
+  reading?: Reading;
   labelled?: boolean;
 }
 
 /** The limit solid, the reserve dashed, both in ink. Their labels stand on two lines, so that they never meet. */
-export function Posts({ layout: { limit, reserveFrom, scale: own }, scale = own, top, foot, labelled }: PostsProps) {
+export function Posts({ layout, scale = layout.scale, top, foot, reading = NEWTONS, labelled }: PostsProps) {
+  const { limit, reserveFrom } = layout;
+
   return (
     <>
       {reserveFrom === null ? null : (
         <Post at={reserveFrom} scale={scale} top={labelled ? top + 16 : top} foot={foot} part="reserve">
-          {labelled ? `reserve from ${formatNewtonsNumber(reserveFrom)}` : null}
+          {labelled ? `reserve from ${readNumber(reading, reserveFrom)}` : null}
         </Post>
       )}
       {limit === null ? null : (
         <Post at={limit} scale={scale} top={top} foot={foot} part="limit">
-          {labelled ? `limit ${formatNewtonsNumber(limit)}` : null}
+          {labelled ? `limit ${readNumber(reading, limit)}` : null}
         </Post>
       )}
     </>
@@ -261,26 +280,6 @@ function Post({ at, scale, top, foot, part, children }: PostProps) {
           {children}
         </text>
       ) : null}
-    </>
-  );
-}
-
-function Ruler({ layout: { scale, ticks }, y }: { layout: StaveLayout; y: number }) {
-  return (
-    <>
-      <line x1="0" x2="100%" y1={y} y2={y} className="stroke-ink" />
-      {ticks.map((tick, at) => {
-        const x = percent(fractionOf(scale, tick));
-        const anchor = at === 0 && fractionOf(scale, tick) < 0.01 ? "start" : "middle";
-        return (
-          <g key={tick}>
-            <line x1={x} x2={x} y1={y} y2={y + 6} className="stroke-ink" data-part="tick" data-at={tick} />
-            <text x={x} y={y + 20} textAnchor={anchor} className="fill-ink-2 text-xs">
-              {formatExact(tick)}
-            </text>
-          </g>
-        );
-      })}
     </>
   );
 }

@@ -2,12 +2,13 @@ import type { MethodAnswer } from "@/lib/evaluation/methods/method-answer";
 import { lineTitle } from "@/lib/evaluation/notes/line-title";
 import { formatNewtons } from "@/lib/units/format-newtons";
 import { formatPercent, formatSignificant } from "@/lib/units/format-number";
-import { formatResult, formatRoughness, formatThickness } from "@/lib/units/format-quantity";
+import { formatResult, formatResultIn, formatRoughness, formatThickness } from "@/lib/units/format-quantity";
+import type { UnitSystem, UsDimension } from "@/lib/units/us-customary";
 
 interface AnswerField {
   name: string;
   symbol: string;
-  text: (answer: MethodAnswer) => string | null;
+  text: (answer: MethodAnswer, units: UnitSystem) => string | null;
 }
 
 /** Everything a method gives besides the drag, in the order of a hand calculation. */
@@ -63,20 +64,19 @@ export const ANSWER_FIELDS: readonly AnswerField[] = [
   {
     name: "Drag area",
     symbol: "C_D·A",
-    text: shown(
-      (answer) => answer.dragArea,
-      (area) => formatResult(area, "m²"),
-    ),
+    text: shown((answer) => answer.dragArea, inUnits("area", "m²")),
   },
-  { name: "Standard uncertainty", symbol: "u", text: shown((answer) => answer.standardUncertainty, formatNewtons) },
+  { name: "Standard uncertainty", symbol: "u", text: shown((answer) => answer.standardUncertainty, force) },
 ];
 
 type Pick = (answer: MethodAnswer) => number | undefined;
 
-function shown(pick: Pick, print: (value: number) => string): (answer: MethodAnswer) => string | null {
-  return (answer) => {
+type Print = (value: number, units: UnitSystem) => string;
+
+function shown(pick: Pick, print: Print): AnswerField["text"] {
+  return (answer, units) => {
     const value = pick(answer);
-    return value === undefined ? null : print(value);
+    return value === undefined ? null : print(value, units);
   };
 }
 
@@ -84,14 +84,22 @@ function number(pick: Pick) {
   return shown(pick, (value) => formatSignificant(value));
 }
 
-function metres(value: number): string {
-  return formatResult(value, "m");
+function inUnits(dimension: UsDimension, si: string): Print {
+  return (value, units) => formatResultIn(units, value, dimension, formatResult(value, si));
 }
 
-function pascals(value: number): string {
-  return formatResult(value, "Pa");
+function metres(value: number, units: UnitSystem): string {
+  return inUnits("length", "m")(value, units);
 }
 
-function metresPerSecond(value: number): string {
-  return formatResult(value, "m/s");
+function pascals(value: number, units: UnitSystem): string {
+  return inUnits("pressure", "Pa")(value, units);
+}
+
+function metresPerSecond(value: number, units: UnitSystem): string {
+  return inUnits("ductSpeed", "m/s")(value, units);
+}
+
+function force(value: number, units: UnitSystem): string {
+  return formatResultIn(units, value, "force", formatNewtons(value));
 }

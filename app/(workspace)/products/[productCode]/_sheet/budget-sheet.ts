@@ -6,6 +6,7 @@ import { type SheetRow, sheetOrder } from "@/lib/evaluation/budget/sheet-order";
 import type { GroupBody } from "@/lib/evaluation/lines/group-body";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
 import type { LineState } from "@/lib/evaluation/lines/line-state";
+import { type MeasureBasis, measureBasis } from "@/lib/evaluation/measures/measure-basis";
 import { roundStored, toHundredths } from "@/lib/units/rounding";
 
 interface RowFigures {
@@ -73,6 +74,12 @@ export function budgetSheet(budget: BudgetAt, point: PointResult): BudgetSheet {
     rows: sheetOrder(indexed).flatMap((row) => rowOf(row, context) ?? []),
     retired: budget.state.lines.filter(({ retired }) => retired),
   };
+}
+
+/** What the forces of the sheet are referred to when they are read in another measure. */
+export function sheetBasis({ budget, indexed, point }: BudgetSheet): MeasureBasis {
+  const hoursPerYear = indexed.operatingPoints.get(point.operatingPoint)?.hoursPerYear ?? null;
+  return measureBasis(budget.product.kind, indexed.terms, point.stream, hoursPerYear);
 }
 
 interface RowContext {

@@ -16,6 +16,7 @@ export const SheetQuery = z.object({
     .regex(/^[A-Z0-9][A-Z0-9-]{0,11}$/)
     .optional()
     .catch(undefined),
+  measure: ShortText.optional().catch(undefined),
   find: ShortText.catch(""),
   only: z.enum(["all", "over", "cautions", "mine"]).catch("all"),
   sort: z.enum(SORT_KEYS).catch("sheet"),
@@ -30,6 +31,7 @@ export function sheetAddress(path: string, query: SheetQuery, change: Partial<Sh
   if (next.issue !== undefined) parts.set("issue", String(next.issue));
   if (next.on !== undefined) parts.set("on", next.on);
   if (next.point !== undefined) parts.set("point", next.point);
+  if (next.measure !== undefined) parts.set("measure", next.measure);
   if (next.find !== "") parts.set("find", next.find);
   if (next.only !== "all") parts.set("only", next.only);
   if (next.sort !== "sheet") parts.set("sort", next.sort);

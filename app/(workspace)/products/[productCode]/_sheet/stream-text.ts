@@ -1,9 +1,15 @@
 import type { PointResult } from "@/lib/evaluation/budget/results";
 import { formatSignificant } from "@/lib/units/format-number";
+import { formatResultIn } from "@/lib/units/format-quantity";
+import type { UnitSystem } from "@/lib/units/us-customary";
 
-/** "OP-1 motorway, 25.0 m/s, ρ 1.225 kg/m³, q 382.8 Pa". */
-export function streamText({ operatingPoint, name, stream }: PointResult): string {
-  const speed = `${formatSignificant(stream.speed)} m/s`;
-  const density = `ρ ${formatSignificant(stream.density, 4)} kg/m³`;
-  return `${operatingPoint} ${name}, ${speed}, ${density}, q ${formatSignificant(stream.dynamicPressure, 4)} Pa`;
+/** "OP-1 motorway, 25.0 m/s, ρ 1.225 kg/m³, q 382.8 Pa"; in US customary units with these beside. */
+export function streamText({ operatingPoint, name, stream }: PointResult, units: UnitSystem): string {
+  const { speed, density, dynamicPressure } = stream;
+  const parts = [
+    formatResultIn(units, speed, "speed", `${formatSignificant(speed)} m/s`),
+    `ρ ${formatResultIn(units, density, "density", `${formatSignificant(density, 4)} kg/m³`)}`,
+    `q ${formatResultIn(units, dynamicPressure, "pressure", `${formatSignificant(dynamicPressure, 4)} Pa`)}`,
+  ];
+  return `${operatingPoint} ${name}, ${parts.join(", ")}`;
 }

@@ -1,10 +1,14 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 
-import { requireActor } from "@/app/_server/session";
+import { type ChosenMeasure, chosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
+import type { PointResult } from "@/lib/evaluation/budget/results";
+import { readText } from "@/lib/evaluation/measures/reading";
 import { abilityFor, covers } from "@/policies/ability";
 
 import { AsStoodBanner } from "../_components/as-stood-banner";
@@ -14,7 +18,7 @@ import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
 import { WorkingsProvider } from "../_components/workings-provider";
 import { pageBudget, pageProduct } from "../_server/read-page";
-import { type BudgetSheet, budgetSheet, pointOf } from "../_sheet/budget-sheet";
+import { type BudgetSheet, budgetSheet, pointOf, sheetBasis } from "../_sheet/budget-sheet";
 import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
 import { streamText } from "../_sheet/stream-text";
 import { BudgetActions } from "./_components/budget-actions";
@@ -37,8 +41,9 @@ export async function generateMetadata({ params, searchParams }: Props): Promise
 export default async function BudgetPage({ params, searchParams }: Props) {
   const { productCode } = await params;
   const query = SheetQuery.parse(await searchParams);
-  const [actor, product, budget] = await Promise.all([
+  const [actor, preferences, product, budget] = await Promise.all([
     requireActor(),
+    currentPreferences(),
     pageProduct(productCode),
     pageBudget(productCode, query),
   ]);
@@ -51,13 +56,14 @@ export default async function BudgetPage({ params, searchParams }: Props) {
   const point = pointOf(budget, query.point);
   if (!point) notFound();
   const sheet = budgetSheet(budget, point);
+  const chosen = chosenMeasure(query.measure, preferences, [sheetBasis(sheet)]);
   const mayStart = covers(ability, { on: "Product", action: "start_draft", productId: product.id });
 
   return (
     <>
       <PageHeading
         title={product.name}
-        subtitle={`${product.code} · issue ${budget.issue.number} · ${streamText(point)}`}
+        subtitle={`${product.code} · issue ${budget.issue.number} · ${streamText(point, chosen.units)}`}
         actions={
           <BudgetActions
             productCode={product.code}
@@ -67,7 +73,7 @@ export default async function BudgetPage({ params, searchParams }: Props) {
           />
         }
       />
-      <BudgetMatter sheet={sheet} query={query} userId={actor.userId} />
+      <BudgetMatter sheet={sheet} query={query} userId={actor.userId} chosen={chosen} />
     </>
   );
 }
@@ -76,10 +82,15 @@ interface BudgetMatterProps {
   sheet: BudgetSheet;
   query: SheetQuery;
   userId: number;
+  chosen: ChosenMeasure;
 }
 
-function BudgetMatter({ sheet, query, userId }: BudgetMatterProps) {
+function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
   const { budget, point } = sheet;
+  const { units } = chosen;
+  const readingAt = (at: PointResult) => readingFor(chosen, sheetBasis({ ...sheet, point: at }));
+  const reading = readingAt(point);
+  const reference = budget.results.points.find((each) => each.operatingPoint === budget.allocations.operatingPoint);
   const path = `/products/${budget.product.code}/budget`;
 
   return (
@@ -95,12 +106,14 @@ function BudgetMatter({ sheet, query, userId }: BudgetMatterProps) {
           worstPoint={budget.results.worstPoint}
           chosen={point.operatingPoint}
           hrefOf={(operatingPoint) => sheetAddress(path, query, { point: operatingPoint })}
+          print={(at, newtons) => readText(readingAt(at), newtons)}
         />
-        <StandingHead point={point} />
-        <StaveFigure sheet={sheet} />
-        <BudgetItems sheet={sheet} query={query} path={path} userId={userId} />
-        <ConservationLine sums={budget.allocations} />
-        <MeasuresTable sheet={sheet} />
+        <MeasureBar chosen={chosen} reading={reading} hrefOf={(measure) => sheetAddress(path, query, { measure })} />
+        <StandingHead point={point} reading={reading} />
+        <StaveFigure sheet={sheet} reading={reading} />
+        <BudgetItems sheet={sheet} query={query} path={path} userId={userId} reading={reading} units={units} />
+        <ConservationLine sums={budget.allocations} reading={readingAt(reference ?? point)} />
+        <MeasuresTable sheet={sheet} units={units} />
       </WorkingsProvider>
       <RetiredLines lines={sheet.retired} />
     </Sheet>

@@ -1,7 +1,7 @@
 import type { Metadata, Route } from "next";
 import Link from "next/link";
 
-import { requireActor } from "@/app/_server/session";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
@@ -31,8 +31,9 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function OperatingPointsPage({ params, searchParams }: Props) {
   const { productCode } = await params;
   const query = SheetQuery.parse(await searchParams);
-  const [actor, product, budget] = await Promise.all([
+  const [actor, { units }, product, budget] = await Promise.all([
     requireActor(),
+    currentPreferences(),
     pageProduct(productCode),
     pageBudget(productCode, query),
   ]);
@@ -60,19 +61,23 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
       <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, null)} />}>
         <AsStoodBanner budget={budget} newestHref={`${base}/operating-points`} />
         <ServiceWindCaution kind={product.kind} />
-        <PointsTable budget={budget} budgetHref={(point) => sheetAddress(`${base}/budget`, query, { point })} />
+        <PointsTable
+          budget={budget}
+          units={units}
+          budgetHref={(point) => sheetAddress(`${base}/budget`, query, { point })}
+        />
         <StreamSourcesList points={pointsInForce} />
         <SectionHeading aside={terms ? `revision ${terms.letter}` : null}>Terms</SectionHeading>
-        <FieldTable rows={termsRows.filter((row) => !isReviewRule(row))} caption="Terms" />
+        <FieldTable rows={termsRows.filter((row) => !isReviewRule(row))} caption="Terms" units={units} />
         <p className="mt-2 text-sm print:hidden">
           <Link className="link" href={`${base}/growth` as Route}>
             Estimate-to-test growth, and what growth table it suggests
           </Link>
         </p>
         <SectionHeading aside="a program manager signs too on what is said yes to">Review rules</SectionHeading>
-        <FieldTable rows={termsRows.filter(isReviewRule).map(shortRule)} caption="Review rules" />
+        <FieldTable rows={termsRows.filter(isReviewRule).map(shortRule)} caption="Review rules" units={units} />
         <SectionHeading>Finishes</SectionHeading>
-        <FinishTable lines={budget.state.lines} />
+        <FinishTable lines={budget.state.lines} units={units} />
       </Sheet>
     </>
   );

@@ -1,4 +1,6 @@
 import { EmptyNote } from "@/app/_components/empty-note";
+import type { Reading } from "@/lib/evaluation/measures/reading";
+import type { UnitSystem } from "@/lib/units/us-customary";
 
 import type { BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { chosenRows, type SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
@@ -10,10 +12,12 @@ interface BudgetItemsProps {
   query: SheetQuery;
   path: string;
   userId: number;
+  reading: Reading;
+  units: UnitSystem;
 }
 
 /** The items of the sheet, or what to do first where there are none. */
-export function BudgetItems({ sheet, query, path, userId }: BudgetItemsProps) {
+export function BudgetItems({ sheet, query, path, userId, reading, units }: BudgetItemsProps) {
   const all = countItems(sheet.rows);
   if (all === 0 && sheet.rows.length === 0) {
     return (
@@ -30,7 +34,7 @@ export function BudgetItems({ sheet, query, path, userId }: BudgetItemsProps) {
       {rows.length === 0 ? (
         <EmptyNote title="No item is like that.">Ask for fewer words, or show all items again.</EmptyNote>
       ) : (
-        <BudgetTable sheet={sheet} rows={rows} path={path} query={query} />
+        <BudgetTable sheet={sheet} rows={rows} path={path} query={query} reading={reading} units={units} />
       )}
     </>
   );

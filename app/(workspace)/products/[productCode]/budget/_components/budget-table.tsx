@@ -1,4 +1,6 @@
 import { Head, Table, TableHead } from "@/app/_components/table";
+import type { Reading } from "@/lib/evaluation/measures/reading";
+import type { UnitSystem } from "@/lib/units/us-customary";
 
 import type { BudgetRow, BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import {
@@ -15,15 +17,19 @@ interface BudgetTableProps {
   rows: readonly BudgetRow[];
   path: string;
   query: SheetQuery;
+  reading: Reading;
+  units: UnitSystem;
 }
 
 /** Items and groups with their numbers; every number opens its working. */
-export function BudgetTable({ sheet, rows, path, query }: BudgetTableProps) {
+export function BudgetTable({ sheet, rows, path, query, reading, units }: BudgetTableProps) {
   const { product } = sheet.budget;
   const itemHref = (number: string) => itemAddress(product.code, number, query);
 
   return (
-    <Table caption={`Items at ${sheet.point.operatingPoint} ${sheet.point.name}`}>
+    <Table
+      caption={`Items at ${sheet.point.operatingPoint} ${sheet.point.name}${reading.basis ? `; ${reading.basis}` : ""}`}
+    >
       <TableHead>
         <Head className="min-w-36 lg:min-w-48" {...sorting("number", path, query)}>
           Item
@@ -31,7 +37,7 @@ export function BudgetTable({ sheet, rows, path, query }: BudgetTableProps) {
         <Head className="max-sm:hidden">Method</Head>
         <Head>Rev</Head>
         {COLUMNS.map(({ key, label }) => (
-          <Head key={key} numeric unit="N" {...sorting(key, path, query)}>
+          <Head key={key} numeric unit={reading.unit} {...sorting(key, path, query)}>
             {label}
           </Head>
         ))}
@@ -45,14 +51,16 @@ export function BudgetTable({ sheet, rows, path, query }: BudgetTableProps) {
               row={row}
               isReference={sheet.isReference}
               href={itemHref(row.number)}
+              reading={reading}
+              units={units}
             />
           ) : (
-            <GroupTableRow key={`group ${row.number}`} row={row} isReference={sheet.isReference} />
+            <GroupTableRow key={`group ${row.number}`} row={row} isReference={sheet.isReference} reading={reading} />
           ),
         )}
       </tbody>
       <tfoot>
-        <TotalRows point={sheet.point} />
+        <TotalRows point={sheet.point} reading={reading} />
       </tfoot>
     </Table>
   );
@@ -81,10 +89,11 @@ function sorting(key: SortKey, path: string, query: SheetQuery) {
   };
 }
 
-function itemAddress(productCode: string, number: string, { issue, point }: SheetQuery): string {
+function itemAddress(productCode: string, number: string, { issue, point, measure }: SheetQuery): string {
   const parts = new URLSearchParams();
   if (issue !== undefined) parts.set("issue", String(issue));
   if (point !== undefined) parts.set("point", point);
+  if (measure !== undefined) parts.set("measure", measure);
   const query = parts.toString();
   return `/products/${productCode}/items/${number}${query === "" ? "" : `?${query}`}`;
 }

@@ -1,12 +1,22 @@
 import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import type { AllocationsView } from "@/lib/evaluation/budget/allocations-view";
+import { isKept, type Reading, readText } from "@/lib/evaluation/measures/reading";
 import { formatHundredths } from "@/lib/units/format-newtons";
 
 import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 
-/** Allocations, unallocated and reserve against the limit: the sum that must hold after every act. */
-export function ConservationLine({ sums }: { sums: AllocationsView }) {
+interface ConservationLineProps {
+  sums: AllocationsView;
+  /** Of the reference operating point, where allocations are set. */
+  reading: Reading;
+}
+
+/**
+ * Allocations, unallocated and reserve against the limit: the sum that must hold after every act. It holds in newtons
+ * to 0.01 N, so newtons stand first in every measure.
+ */
+export function ConservationLine({ sums, reading }: ConservationLineProps) {
   const parts = [
     { sign: "", label: "allocated", value: sums.allocatedHundredths, figure: null },
     { sign: "+", label: "unallocated", value: sums.unallocatedHundredths, figure: "unallocated" },
@@ -33,6 +43,9 @@ export function ConservationLine({ sums }: { sums: AllocationsView }) {
                 </WorkingNumber>
               ) : (
                 `${formatHundredths(value)} N`
+              )}
+              {isKept(reading) ? null : (
+                <span className="block text-sm font-normal text-ink-2">{readText(reading, value / 100)}</span>
               )}
             </dd>
           </div>

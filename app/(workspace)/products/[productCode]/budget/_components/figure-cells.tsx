@@ -1,5 +1,5 @@
 import { Cell } from "@/app/_components/table";
-import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 
 import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 import { AllocationBar } from "@/app/(workspace)/products/[productCode]/_pictures/allocation-bar";
@@ -12,8 +12,14 @@ const SUMS = [
   { figure: "predicted", label: "Predicted" },
 ] as const;
 
+interface FigureCellsProps {
+  row: BudgetRow;
+  isReference: boolean;
+  reading: Reading;
+}
+
 /** The numbers of a row: basic, growth, predicted, allocation, margin and the small bar. */
-export function FigureCells({ row, isReference }: { row: BudgetRow; isReference: boolean }) {
+export function FigureCells({ row, isReference, reading }: FigureCellsProps) {
   const { kind, number, allocationHundredths, marginHundredths } = row;
   const over = isReference && isOver(row);
 
@@ -22,13 +28,13 @@ export function FigureCells({ row, isReference }: { row: BudgetRow; isReference:
       {SUMS.map(({ figure, label }) => (
         <Cell key={figure} numeric>
           <WorkingNumber figure={figure} of={kind} number={number} name={`${label} of ${number}`}>
-            {formatNewtonsNumber(row[figure])}
+            {readNumber(reading, row[figure])}
           </WorkingNumber>
         </Cell>
       ))}
       <Cell numeric>
         <WorkingNumber figure="allocation" of={kind} number={number} name={`Allocation of ${number}`}>
-          {allocationHundredths === null ? "none" : formatHundredths(allocationHundredths)}
+          {allocationHundredths === null ? "none" : readNumber(reading, allocationHundredths / 100)}
         </WorkingNumber>
       </Cell>
       <Cell numeric className={over ? "font-semibold text-signal" : undefined}>
@@ -36,7 +42,7 @@ export function FigureCells({ row, isReference }: { row: BudgetRow; isReference:
           <span className="text-ink-2">–</span>
         ) : (
           <WorkingNumber figure="margin" of={kind} number={number} name={`Margin of ${number}`}>
-            {formatHundredths(marginHundredths)}
+            {readNumber(reading, marginHundredths / 100)}
           </WorkingNumber>
         )}
         {over ? <span className="block text-xs">over</span> : null}

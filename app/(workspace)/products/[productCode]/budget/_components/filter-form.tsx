@@ -63,7 +63,7 @@ export function FilterForm({ path, query, found, all, isReference }: FilterFormP
   );
 }
 
-const KEPT = ["issue", "on", "point", "sort", "down"] as const;
+const KEPT = ["issue", "on", "point", "measure", "sort", "down"] as const;
 
 const ONLY = [
   { value: "all", label: "all items" },

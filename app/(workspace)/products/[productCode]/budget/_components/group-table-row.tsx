@@ -1,11 +1,18 @@
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { Cell, Row, RowHead } from "@/app/_components/table";
+import type { Reading } from "@/lib/evaluation/measures/reading";
 
 import type { GroupRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { FigureCells } from "./figure-cells";
 
+interface GroupTableRowProps {
+  row: GroupRow;
+  isReference: boolean;
+  reading: Reading;
+}
+
 /** A group ahead of what it holds: sums over it and its subgroups. */
-export function GroupTableRow({ row, isReference }: { row: GroupRow; isReference: boolean }) {
+export function GroupTableRow({ row, isReference, reading }: GroupTableRowProps) {
   const { number, name, letter, depth, members } = row;
 
   return (
@@ -22,7 +29,7 @@ export function GroupTableRow({ row, isReference }: { row: GroupRow; isReference
       <Cell className="font-normal">
         <RevisionLetter letter={letter} />
       </Cell>
-      <FigureCells row={row} isReference={isReference} />
+      <FigureCells row={row} isReference={isReference} reading={reading} />
     </Row>
   );
 }

@@ -6,6 +6,8 @@ import { RevisionLetter } from "@/app/_components/revision-letter";
 import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Row, RowHead } from "@/app/_components/table";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+import type { Reading } from "@/lib/evaluation/measures/reading";
+import type { UnitSystem } from "@/lib/units/us-customary";
 
 import type { ItemRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { keyFigures } from "@/app/(workspace)/products/[productCode]/_sheet/key-figures";
@@ -16,10 +18,12 @@ interface ItemTableRowProps {
   row: ItemRow;
   isReference: boolean;
   href: string;
+  reading: Reading;
+  units: UnitSystem;
 }
 
 /** An item on the budget sheet. */
-export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
+export function ItemTableRow({ row, isReference, href, reading, units }: ItemTableRowProps) {
   const { number, name, owner, letter, depth, body, result } = row;
 
   return (
@@ -42,7 +46,7 @@ export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
       <Cell className="min-w-44 max-sm:hidden lg:max-w-64">
         {ITEM_METHODS[body.method].label}
         <span className="block text-xs text-ink-2">
-          {keyFigures(body, result.answer).map(({ symbol, text }, at, all) => (
+          {keyFigures(body, result.answer, units).map(({ symbol, text }, at, all) => (
             <Fragment key={symbol}>
               <span className="whitespace-nowrap">
                 <SymbolText symbol={symbol} /> {text}
@@ -56,7 +60,7 @@ export function ItemTableRow({ row, isReference, href }: ItemTableRowProps) {
       <Cell>
         <RevisionLetter letter={letter} />
       </Cell>
-      <FigureCells row={row} isReference={isReference} />
+      <FigureCells row={row} isReference={isReference} reading={reading} />
     </Row>
   );
 }

@@ -1,55 +1,47 @@
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import { formatHundredths, formatNewtons } from "@/lib/units/format-newtons";
+import { measuresOffered } from "@/lib/evaluation/measures/measure-basis";
+import { readingOf, readText } from "@/lib/evaluation/measures/reading";
+import type { UnitSystem } from "@/lib/units/us-customary";
+import { MEASURE_NAMES } from "@/lib/vocabulary/measures";
 
-import type { BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { measuresOf } from "@/app/(workspace)/products/[productCode]/_sheet/measures";
+import { type BudgetSheet, sheetBasis } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 
-/** The total and its limit in the measures of the trade; newtons are what is kept. */
-export function MeasuresTable({ sheet: { budget, indexed, point } }: { sheet: BudgetSheet }) {
-  const context = {
-    kind: budget.product.kind,
-    terms: indexed.terms,
-    stream: point.stream,
-    hoursPerYear: indexed.operatingPoints.get(point.operatingPoint)?.hoursPerYear ?? null,
-  };
-  const predicted = measuresOf(point.totals.predicted, context);
-  const limit = measuresOf(point.limitHundredths / 100, context);
-  if (predicted.length === 0) return null;
+/** The total and its limit in every measure that the product has; newtons are what is kept. */
+export function MeasuresTable({ sheet, units }: { sheet: BudgetSheet; units: UnitSystem }) {
+  const { point } = sheet;
+  const basis = sheetBasis(sheet);
+  const readings = measuresOffered(basis).flatMap((measure) => [
+    ...(measure === "newtons" && units === "us" ? [readingOf(measure, basis, "si")] : []),
+    readingOf(measure, basis, units),
+  ]);
 
   return (
     <section aria-labelledby="measures" className="mt-7">
-      <SectionHeading id="measures">In other measures</SectionHeading>
-      <Table caption="The predicted total and the limit in other measures" narrow="stack">
+      <SectionHeading id="measures">In every measure</SectionHeading>
+      <Table caption="The predicted total and the limit in every measure" narrow="stack">
         <TableHead>
           <Head>Measure</Head>
           <Head numeric>Predicted</Head>
           <Head numeric>Limit</Head>
         </TableHead>
         <tbody>
-          <Row>
-            <RowHead label="Measure">Drag</RowHead>
-            <Cell numeric label="Predicted">
-              {formatNewtons(point.totals.predicted)}
-            </Cell>
-            <Cell numeric label="Limit">
-              {formatHundredths(point.limitHundredths)} N
-            </Cell>
-          </Row>
-          {predicted.map(({ name, of, text, unit }, at) => (
-            <Row key={name}>
-              <RowHead label="Measure">
-                {name}
-                {of ? <span className="block text-xs text-ink-2">{of}</span> : null}
-              </RowHead>
-              <Cell numeric label="Predicted">
-                {text} {unit}
-              </Cell>
-              <Cell numeric label="Limit">
-                {limit[at]?.text ?? ""} {unit}
-              </Cell>
-            </Row>
-          ))}
+          {readings.map((reading) =>
+            reading === null ? null : (
+              <Row key={`${reading.measure} ${reading.unit}`}>
+                <RowHead label="Measure">
+                  {MEASURE_NAMES[reading.measure]}
+                  {reading.basis ? <span className="block text-xs text-ink-2">{reading.basis}</span> : null}
+                </RowHead>
+                <Cell numeric label="Predicted">
+                  {readText(reading, point.totals.predicted)}
+                </Cell>
+                <Cell numeric label="Limit">
+                  {readText(reading, point.limitHundredths / 100)}
+                </Cell>
+              </Row>
+            ),
+          )}
         </tbody>
       </Table>
     </section>

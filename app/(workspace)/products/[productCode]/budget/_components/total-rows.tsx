@@ -1,6 +1,6 @@
 import { Cell, Row, RowHead } from "@/app/_components/table";
 import type { PointResult } from "@/lib/evaluation/budget/results";
-import { formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 import { toHundredths } from "@/lib/units/rounding";
 
 import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
@@ -8,7 +8,7 @@ import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_compone
 const FIGURES = ["basic", "growth", "predicted"] as const;
 
 /** The totals, with savings and, where there are any, without them. */
-export function TotalRows({ point: { totals } }: { point: PointResult }) {
+export function TotalRows({ point: { totals }, reading }: { point: PointResult; reading: Reading }) {
   const hasSavings = toHundredths(totals.predicted) !== toHundredths(totals.predictedWithoutSavings);
 
   return (
@@ -20,7 +20,7 @@ export function TotalRows({ point: { totals } }: { point: PointResult }) {
         {FIGURES.map((figure) => (
           <Cell key={figure} numeric>
             <WorkingNumber figure={figure} of="total" number={null} name={`Total, ${figure}`}>
-              {formatNewtonsNumber(totals[figure])}
+              {readNumber(reading, totals[figure])}
             </WorkingNumber>
           </Cell>
         ))}
@@ -34,7 +34,7 @@ export function TotalRows({ point: { totals } }: { point: PointResult }) {
           <Cell colSpan={3} />
           <Cell numeric>
             <WorkingNumber figure="predictedWithoutSavings" of="total" number={null} name="Predicted without savings">
-              {formatNewtonsNumber(totals.predictedWithoutSavings)}
+              {readNumber(reading, totals.predictedWithoutSavings)}
             </WorkingNumber>
           </Cell>
           <Cell colSpan={2} />

@@ -1,21 +1,25 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 
-import { requireActor } from "@/app/_server/session";
+import { type ChosenMeasure, chosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { lineHistory } from "@/lib/budget/line-history";
-import type { BudgetAt } from "@/lib/budget/views";
+import type { BudgetAt, LineRevisionView } from "@/lib/budget/views";
 import { findLine } from "@/lib/evaluation/budget/indexed-state";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
-import { itemFiles } from "@/lib/proposals/item-files";
+import type { LineOf } from "@/lib/evaluation/lines/line-state";
+import type { PointResult } from "@/lib/evaluation/budget/results";
+import { type ItemFile, itemFiles } from "@/lib/proposals/item-files";
 
 import { AsStoodBanner } from "@/app/(workspace)/products/[productCode]/_components/as-stood-banner";
 import { budgetFields } from "@/app/(workspace)/products/[productCode]/_components/sheet-fields";
 import { ServiceWindCaution } from "@/app/(workspace)/products/[productCode]/_components/service-wind-caution";
 import { pageBudget, readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
-import { budgetSheet, pointOf } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { budgetSheet, pointOf, sheetBasis } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { sheetAddress, SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { ItemMatter } from "./_components/item-matter";
 import { RetiredItem } from "./_components/retired-item";
@@ -31,7 +35,11 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function ItemPage({ params, searchParams }: Props) {
   const { productCode, itemNumber } = await params;
   const query = SheetQuery.parse(await searchParams);
-  const [actor, budget] = await Promise.all([requireActor(), pageBudget(productCode, query)]);
+  const [actor, preferences, budget] = await Promise.all([
+    requireActor(),
+    currentPreferences(),
+    pageBudget(productCode, query),
+  ]);
   const line = budget ? findLine(budget.state, "item", itemNumber) : undefined;
   if (!budget || line?.kind !== "item") notFound();
 
@@ -39,8 +47,9 @@ export default async function ItemPage({ params, searchParams }: Props) {
   const files = await readForPage(() => itemFiles(actor, productCode, itemNumber, budget.issue.number));
   const until = revisions.filter(({ issue }) => issue.number <= budget.issue.number);
   const path = `/products/${budget.product.code}/items/${itemNumber}`;
-  const chosen = pointOf(budget, query.point);
-  if (!chosen) notFound();
+  const point = pointOf(budget, query.point);
+  if (!point) notFound();
+  const chosen = chosenMeasure(query.measure, preferences, [sheetBasis(budgetSheet(budget, point))]);
 
   return (
     <>
@@ -54,17 +63,43 @@ export default async function ItemPage({ params, searchParams }: Props) {
         {line.retired ? (
           <RetiredItem line={line} revisions={until} productCode={budget.product.code} />
         ) : (
-          <ItemMatter
-            line={line}
-            points={pointRows(budget, itemNumber)}
-            chosen={chosen.operatingPoint}
-            hrefOf={(point) => sheetAddress(path, query, { point })}
-            revisions={until}
-            files={files}
-            now={new Date()}
-          />
+          <ItemInForce line={line} budget={budget} point={point} chosen={chosen} query={query} revisions={until} files={files} />
         )}
       </Sheet>
+    </>
+  );
+}
+
+interface ItemInForceProps {
+  line: LineOf<"item">;
+  budget: BudgetAt;
+  point: PointResult;
+  chosen: ChosenMeasure;
+  query: SheetQuery;
+  revisions: readonly LineRevisionView[];
+  files: readonly ItemFile[];
+}
+
+function ItemInForce({ line, budget, point, chosen, query, revisions, files }: ItemInForceProps) {
+  const path = `/products/${budget.product.code}/items/${line.number}`;
+
+  return (
+    <>
+      <MeasureBar
+        chosen={chosen}
+        reading={readingFor(chosen, sheetBasis(budgetSheet(budget, point)))}
+        hrefOf={(measure) => sheetAddress(path, query, { measure })}
+      />
+      <ItemMatter
+        line={line}
+        points={pointRows(budget, line.number)}
+        shownAt={point.operatingPoint}
+        measure={chosen}
+        hrefOf={(operatingPoint) => sheetAddress(path, query, { point: operatingPoint })}
+        revisions={revisions}
+        files={files}
+        now={new Date()}
+      />
     </>
   );
 }

@@ -2,9 +2,17 @@ import { RevisionLetter } from "@/app/_components/revision-letter";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { LineOf, LineState } from "@/lib/evaluation/lines/line-state";
 import { formatQuantityNumber } from "@/lib/units/format-quantity";
+import type { UnitSystem } from "@/lib/units/us-customary";
+
+import { InUsUnits } from "./in-us-units";
+
+interface FinishTableProps {
+  lines: readonly LineState[];
+  units: UnitSystem;
+}
 
 /** The finishes that items may name, with their equivalent sand-grain roughness and where it comes from. */
-export function FinishTable({ lines }: { lines: readonly LineState[] }) {
+export function FinishTable({ lines, units }: FinishTableProps) {
   const finishes = lines.filter((line): line is LineOf<"finish"> => line.kind === "finish");
 
   if (finishes.length === 0) return <p className="text-ink-2">None: every item types its own roughness.</p>;
@@ -29,6 +37,7 @@ export function FinishTable({ lines }: { lines: readonly LineState[] }) {
             </RowHead>
             <Cell numeric label="k_s, µm">
               {formatQuantityNumber(body.roughness.value, "roughness")}
+              <InUsUnits value={body.roughness.value} dimension="roughness" units={units} />
             </Cell>
             <Cell label="Rev">
               <RevisionLetter letter={letter} />

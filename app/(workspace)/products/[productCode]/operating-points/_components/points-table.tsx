@@ -12,12 +12,21 @@ import type { OperatingPointBody } from "@/lib/evaluation/lines/operating-point-
 import { formatHundredths } from "@/lib/units/format-newtons";
 import { formatExact, formatPercent, formatSignificant } from "@/lib/units/format-number";
 import { formatQuantity } from "@/lib/units/format-quantity";
+import type { UnitSystem, UsDimension } from "@/lib/units/us-customary";
+
+import { InUsUnits } from "./in-us-units";
 
 /** Derived numbers of a stream are printed to four digits, so that a hand calculation can start from them. */
 const DIGITS = 4;
 
+interface PointsTableProps {
+  budget: BudgetAt;
+  units: UnitSystem;
+  budgetHref: (point: string) => string;
+}
+
 /** Every operating point: the state as stated, what follows from it, limit, reserve and standing. */
-export function PointsTable({ budget, budgetHref }: { budget: BudgetAt; budgetHref: (point: string) => string }) {
+export function PointsTable({ budget, units, budgetHref }: PointsTableProps) {
   const { terms, operatingPoints } = indexState(budget.state);
   const letters = new Map(budget.state.lines.map((line) => [`${line.kind} ${line.number}`, line.letter]));
 
@@ -47,6 +56,7 @@ export function PointsTable({ budget, budgetHref }: { budget: BudgetAt; budgetHr
             point={point}
             body={operatingPoints.get(point.operatingPoint)}
             isReference={terms.referenceOperatingPoint === point.operatingPoint}
+            units={units}
             letter={letters.get(`operating_point ${point.operatingPoint}`) ?? "–"}
             href={budgetHref(point.operatingPoint)}
           />
@@ -56,23 +66,29 @@ export function PointsTable({ budget, budgetHref }: { budget: BudgetAt; budgetHr
   );
 }
 
-const DERIVED: readonly { symbol: string; unit: string; of: (point: PointResult) => number }[] = [
-  { symbol: "U", unit: "m/s", of: ({ stream }) => stream.speed },
-  { symbol: "ρ", unit: "kg/m³", of: ({ stream }) => stream.density },
-  { symbol: "μ", unit: "Pa·s", of: ({ stream }) => stream.dynamicViscosity },
-  { symbol: "ν", unit: "m²/s", of: ({ stream }) => stream.kinematicViscosity },
-  { symbol: "q", unit: "Pa", of: ({ stream }) => stream.dynamicPressure },
+const DERIVED: readonly {
+  symbol: string;
+  unit: string;
+  dimension: UsDimension;
+  of: (point: PointResult) => number;
+}[] = [
+  { symbol: "U", unit: "m/s", dimension: "speed", of: ({ stream }) => stream.speed },
+  { symbol: "ρ", unit: "kg/m³", dimension: "density", of: ({ stream }) => stream.density },
+  { symbol: "μ", unit: "Pa·s", dimension: "viscosity", of: ({ stream }) => stream.dynamicViscosity },
+  { symbol: "ν", unit: "m²/s", dimension: "kinematicViscosity", of: ({ stream }) => stream.kinematicViscosity },
+  { symbol: "q", unit: "Pa", dimension: "pressure", of: ({ stream }) => stream.dynamicPressure },
 ];
 
 interface PointRowProps {
   point: PointResult;
   body: OperatingPointBody | undefined;
   isReference: boolean;
+  units: UnitSystem;
   letter: string;
   href: string;
 }
 
-function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
+function PointRow({ point, body, isReference, units, letter, href }: PointRowProps) {
   return (
     <Row data-point={point.operatingPoint}>
       <RowHead>
@@ -84,7 +100,7 @@ function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
       </RowHead>
       <Cell className="whitespace-nowrap">
         {body
-          ? stateText(body).map((part) => (
+          ? stateText(body, units).map((part) => (
               <span key={part} className="block">
                 {part}
               </span>
@@ -94,13 +110,18 @@ function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
       <Cell>
         <RevisionLetter letter={letter} />
       </Cell>
-      {DERIVED.map(({ symbol, of }) => (
+      {DERIVED.map(({ symbol, dimension, of }) => (
         <Cell key={symbol} numeric>
           {formatSignificant(of(point), DIGITS)}
+          <InUsUnits value={of(point)} dimension={dimension} units={units} />
         </Cell>
       ))}
-      <Cell numeric>{formatHundredths(point.limitHundredths)}</Cell>
-      <Cell numeric>{formatHundredths(point.reserveHundredths)}</Cell>
+      {[point.limitHundredths, point.reserveHundredths].map((hundredths, at) => (
+        <Cell key={at} numeric>
+          {formatHundredths(hundredths)}
+          <InUsUnits value={hundredths / 100} dimension="force" units={units} />
+        </Cell>
+      ))}
       <Cell className={`whitespace-nowrap ${point.standing === "over" ? "font-semibold text-signal" : ""}`}>
         {standingSentence(point)}
       </Cell>
@@ -109,16 +130,16 @@ function PointRow({ point, body, isReference, letter, href }: PointRowProps) {
 }
 
 /** "Air", "15 °C", "101 325 Pa". */
-function stateText(body: OperatingPointBody): string[] {
+function stateText(body: OperatingPointBody, units: UnitSystem): string[] {
   const { staticTemperature, staticPressure, pressureAltitude, relativeHumidity, density, dynamicViscosity } = body;
   return [
     FLUID_CHOICES.find(({ value }) => value === body.fluid)?.label ?? body.fluid,
-    ...(staticTemperature ? [formatQuantity(staticTemperature.value, "temperature")] : []),
-    ...(staticPressure ? [formatQuantity(staticPressure.value, "pressure")] : []),
-    ...(pressureAltitude ? [`at ${formatQuantity(pressureAltitude.value, "altitude")}`] : []),
+    ...(staticTemperature ? [formatQuantity(staticTemperature.value, "temperature", units)] : []),
+    ...(staticPressure ? [formatQuantity(staticPressure.value, "pressure", units)] : []),
+    ...(pressureAltitude ? [`at ${formatQuantity(pressureAltitude.value, "altitude", units)}`] : []),
     ...(relativeHumidity === null ? [] : [`${formatPercent(relativeHumidity)} relative humidity`]),
-    ...(density ? [`ρ ${formatQuantity(density.value, "density")}`] : []),
-    ...(dynamicViscosity ? [`μ ${formatQuantity(dynamicViscosity.value, "viscosity")}`] : []),
+    ...(density ? [`ρ ${formatQuantity(density.value, "density", units)}`] : []),
+    ...(dynamicViscosity ? [`μ ${formatQuantity(dynamicViscosity.value, "viscosity", units)}`] : []),
     ...(body.hoursPerYear === null ? [] : [`${formatExact(body.hoursPerYear)} hours a year`]),
   ];
 }

@@ -1,15 +1,16 @@
 import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { UnitSystem } from "@/lib/units/us-customary";
 
 import { ANSWER_FIELDS } from "@/app/(workspace)/products/[productCode]/_sheet/answer-rows";
 import type { PointRow } from "./results-table";
 
 /** Everything the method gives, side by side at every operating point. */
-export function AnswerTable({ points }: { points: readonly PointRow[] }) {
+export function AnswerTable({ points, units }: { points: readonly PointRow[]; units: UnitSystem }) {
   const rows = ANSWER_FIELDS.map(({ name, symbol, text }) => ({
     name,
     symbol,
-    texts: points.map(({ row }) => (row.result.answer ? text(row.result.answer) : null)),
+    texts: points.map(({ row }) => (row.result.answer ? text(row.result.answer, units) : null)),
   })).filter(({ texts }) => texts.some((text) => text !== null));
   if (rows.length === 0) return null;
 

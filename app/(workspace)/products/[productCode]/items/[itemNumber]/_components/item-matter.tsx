@@ -1,6 +1,7 @@
 import type { Route } from "next";
 import Link from "next/link";
 
+import type { ChosenMeasure } from "@/app/(workspace)/_measures/chosen-measure";
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { SectionHeading } from "@/app/_components/section-heading";
 import type { LineRevisionView } from "@/lib/budget/views";
@@ -25,7 +26,8 @@ interface ItemMatterProps {
   line: LineOf<"item">;
   points: readonly PointRow[];
   /** The operating point whose working is written out. */
-  chosen: string;
+  shownAt: string;
+  measure: ChosenMeasure;
   hrefOf: (operatingPoint: string) => string;
   revisions: readonly LineRevisionView[];
   files: readonly ItemFile[];
@@ -33,8 +35,8 @@ interface ItemMatterProps {
 }
 
 /** Everything about one item at an issue: results, notes, working, fields, evidence, revisions. */
-export function ItemMatter({ line, points, chosen, hrefOf, revisions, files, now }: ItemMatterProps) {
-  const shown = points.find(({ sheet }) => sheet.point.operatingPoint === chosen) ?? points[0];
+export function ItemMatter({ line, points, shownAt, measure, hrefOf, revisions, files, now }: ItemMatterProps) {
+  const shown = points.find(({ sheet }) => sheet.point.operatingPoint === shownAt) ?? points[0];
   if (!shown) return null;
   const { budget, indexed } = shown.sheet;
   const names = nameBookOf(budget.state, new Map(budget.people.map(({ id, name }) => [id, name])));
@@ -44,18 +46,20 @@ export function ItemMatter({ line, points, chosen, hrefOf, revisions, files, now
       <SectionHeading aside={<>owner {shown.row.owner}</>}>
         Results <RevisionLetter letter={line.letter} />
       </SectionHeading>
-      <ResultsTable points={points} />
+      <ResultsTable points={points} measure={measure} />
       <ItemNotes points={points} />
-      <SectionHeading aside={points.length > 1 ? <PointLinks points={points} chosen={chosen} hrefOf={hrefOf} /> : null}>
+      <SectionHeading
+        aside={points.length > 1 ? <PointLinks points={points} shownAt={shownAt} hrefOf={hrefOf} /> : null}
+      >
         How it comes about at {shown.sheet.point.operatingPoint}
       </SectionHeading>
       <ItemWorking shown={shown} />
       <SectionHeading>What the method gives</SectionHeading>
-      <AnswerTable points={points} />
+      <AnswerTable points={points} units={measure.units} />
       <AlternateLinesTable shown={shown} />
       <ItemPictures shown={shown} />
       <SectionHeading>Fields</SectionHeading>
-      <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} />
+      <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} units={measure.units} />
       <SectionHeading>Evidence</SectionHeading>
       <EvidenceTable
         productCode={budget.product.code}
@@ -71,11 +75,11 @@ export function ItemMatter({ line, points, chosen, hrefOf, revisions, files, now
   );
 }
 
-function PointLinks({ points, chosen, hrefOf }: Pick<ItemMatterProps, "points" | "chosen" | "hrefOf">) {
+function PointLinks({ points, shownAt, hrefOf }: Pick<ItemMatterProps, "points" | "shownAt" | "hrefOf">) {
   return points.map(({ sheet: { point } }, at) => (
     <span key={point.operatingPoint}>
       {at === 0 ? "" : " · "}
-      {point.operatingPoint === chosen ? (
+      {point.operatingPoint === shownAt ? (
         <strong>{point.operatingPoint}</strong>
       ) : (
         <Link className="link" href={hrefOf(point.operatingPoint) as Route} scroll={false}>

@@ -1,8 +1,13 @@
+import { type ChosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { readNumber, readText } from "@/lib/evaluation/measures/reading";
 import { formatPercent } from "@/lib/units/format-number";
 
-import type { BudgetSheet, ItemRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import {
+  type BudgetSheet,
+  type ItemRow,
+  sheetBasis,
+} from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 import { isOver } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 
 export interface PointRow {
@@ -10,41 +15,58 @@ export interface PointRow {
   row: ItemRow;
 }
 
-/** The item's result at every operating point of the budget. */
-export function ResultsTable({ points }: { points: readonly PointRow[] }) {
+interface ResultsTableProps {
+  points: readonly PointRow[];
+  measure: ChosenMeasure;
+}
+
+/** The item's result at every operating point of the budget; each point refers a force to its own stream. */
+export function ResultsTable({ points, measure }: ResultsTableProps) {
+  const units = new Set(points.map(({ sheet }) => readingFor(measure, sheetBasis(sheet)).unit));
+  // Where a point lacks the measure its row is in newtons, and every figure says its unit.
+  const [common = ""] = units.size === 1 ? units : [];
+
   return (
-    <Table caption="Result at every operating point, in newtons">
+    <Table caption={`Result at every operating point${common ? `, in ${common}` : ""}`}>
       <TableHead>
         <Head>Operating point</Head>
-        <Head numeric unit="N">
+        <Head numeric unit={common}>
           Basic
         </Head>
         <Head numeric unit="of basic">
           Growth
         </Head>
-        <Head numeric unit="N">
-          Growth
-        </Head>
-        <Head numeric unit="N">
-          Predicted
-        </Head>
-        <Head numeric unit="N">
-          Allocation
-        </Head>
-        <Head numeric unit="N">
-          Margin
-        </Head>
+        {["Growth", "Predicted", "Allocation", "Margin"].map((label) => (
+          <Head key={label} numeric unit={common}>
+            {label}
+          </Head>
+        ))}
       </TableHead>
       <tbody>
         {points.map(({ sheet, row }) => (
-          <ResultRow key={sheet.point.operatingPoint} sheet={sheet} row={row} />
+          <ResultRow
+            key={sheet.point.operatingPoint}
+            sheet={sheet}
+            row={row}
+            measure={measure}
+            alone={units.size === 1}
+          />
         ))}
       </tbody>
     </Table>
   );
 }
 
-function ResultRow({ sheet: { point, isReference }, row }: PointRow) {
+interface ResultRowProps extends PointRow {
+  measure: ChosenMeasure;
+  /** The unit stands in the heads of the columns. */
+  alone: boolean;
+}
+
+function ResultRow({ sheet, row, measure, alone }: ResultRowProps) {
+  const { point, isReference } = sheet;
+  const reading = readingFor(measure, sheetBasis(sheet));
+  const print = (newtons: number) => (alone ? readNumber(reading, newtons) : readText(reading, newtons));
   const { result, allocationHundredths, marginHundredths } = row;
   const over = isReference && isOver(row);
 
@@ -54,13 +76,13 @@ function ResultRow({ sheet: { point, isReference }, row }: PointRow) {
         {point.operatingPoint} {point.name}
         {isReference ? <span className="block text-xs text-ink-2">reference: allocations are set here</span> : null}
       </RowHead>
-      <Cell numeric>{result.refused ? "refused" : formatNewtonsNumber(row.basic)}</Cell>
+      <Cell numeric>{result.refused ? "refused" : print(row.basic)}</Cell>
       <Cell numeric>{formatPercent(result.growthFraction)}</Cell>
-      <Cell numeric>{formatNewtonsNumber(row.growth)}</Cell>
-      <Cell numeric>{formatNewtonsNumber(row.predicted)}</Cell>
-      <Cell numeric>{allocationHundredths === null ? "none" : formatHundredths(allocationHundredths)}</Cell>
+      <Cell numeric>{print(row.growth)}</Cell>
+      <Cell numeric>{print(row.predicted)}</Cell>
+      <Cell numeric>{allocationHundredths === null ? "none" : print(allocationHundredths / 100)}</Cell>
       <Cell numeric className={over ? "font-semibold text-signal" : undefined}>
-        {marginHundredths === null ? "–" : formatHundredths(marginHundredths)}
+        {marginHundredths === null ? "–" : print(marginHundredths / 100)}
         {over ? <span className="block text-xs">over</span> : null}
       </Cell>
     </Row>
