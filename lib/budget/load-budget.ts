@@ -70,7 +70,7 @@ export async function linesAt(productId: number, issue: number, tx: Transaction)
   return rows.map(toLineState);
 }
 
-interface LineRow {
+export interface LineRow {
   kind: LineKind;
   number: string;
   letter: string;

@@ -1,16 +1,16 @@
-import { QueryTypes, type Transaction } from "sequelize";
+import type { Transaction } from "sequelize";
 import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Refusal } from "@/lib/vocabulary/refusal";
-import { database, inSnapshot } from "@/models/database";
+import { inSnapshot } from "@/models/database";
 import { authorize } from "@/policies/authorize";
 import { endOfDay } from "./calendar";
 import { issueFactsOf } from "./issue-facts";
 import { loadBudget, newestIssue, productByCode, type ProductRow } from "./load-budget";
 import { loadUncertainty } from "./load-uncertainty";
 import { namesOf } from "./members";
-import { parseTotals, type StoredPoint } from "./stored-results";
-import type { BudgetAt, IssueFacts, ProductFacts, TrendIssue, TrendPoint } from "./views";
+import { trendPoints } from "./trend";
+import type { BudgetAt, IssueFacts, ProductFacts, TrendIssue } from "./views";
 
 /** An issue by its number, the newest, the one that stood at a moment, or the one that stood when a day ended. */
 export type AsOf = number | "newest" | { at: string } | { day: string };
@@ -49,11 +49,7 @@ export function issuesOf(actor: Actor, productCode: string): Promise<IssueFacts[
 export function trendOf(actor: Actor, productCode: string): Promise<TrendIssue[]> {
   return inSnapshot(async (tx) => {
     const product = await readableProduct(actor, productCode, tx);
-    const totals = await database.query<{ number: number; totals: string }>(
-      "SELECT number, totals FROM issues WHERE product_id = :productId",
-      { type: QueryTypes.SELECT, replacements: { productId: product.id }, transaction: tx },
-    );
-    const byNumber = new Map(totals.map((row) => [row.number, parseTotals(row.totals).points.map(trendPoint)]));
+    const byNumber = await trendPoints(product, tx);
     const facts = await issueFactsOf(product, tx);
     return facts.map(({ number, at, proposal }) => ({ number, at, proposal, points: byNumber.get(number) ?? [] }));
   });
@@ -81,17 +77,4 @@ function momentOf({ timeZone }: ProductRow, asOf: Exclude<AsOf, number>): string
 
 function productFacts(product: ProductRow, issues: readonly IssueFacts[]): ProductFacts {
   return { ...product, newestIssue: issues.at(-1)?.number ?? null };
-}
-
-function trendPoint({
-  operatingPoint,
-  name,
-  totals,
-  limitHundredths,
-  reserveHundredths,
-  standing,
-}: StoredPoint): TrendPoint {
-  const { basic, growth, predicted, margin } = totals;
-  const limits = { limit: limitHundredths / 100, reserve: reserveHundredths / 100 };
-  return { operatingPoint, name, basic, growth, predicted, ...limits, margin, standing };
 }

@@ -1,6 +1,7 @@
 import type { AllocationsView } from "@/lib/evaluation/budget/allocations-view";
 import type { BudgetResults } from "@/lib/evaluation/budget/results";
 import type { BudgetState } from "@/lib/evaluation/lines/line-state";
+import type { MeasureBasis } from "@/lib/evaluation/measures/measure-basis";
 import type { LineKind, ProductKind } from "@/lib/vocabulary/lines";
 import type { Capacity, Role } from "@/lib/vocabulary/roles";
 import type { Standing } from "@/lib/vocabulary/standing";
@@ -63,6 +64,8 @@ export interface TrendPoint {
   reserve: number;
   margin: number;
   standing: Standing;
+  /** What these forces are referred to, by the terms of their own issue. */
+  basis: MeasureBasis;
 }
 
 export interface TrendIssue {
@@ -128,6 +131,7 @@ export interface RegisterEntry {
     name: string;
     predicted: number;
     limit: number;
+    reserve: number;
     margin: number;
     standing: Standing;
   } | null;

@@ -144,7 +144,8 @@ function worstOf(text: string): RegisterEntry["worst"] {
   const { worstPoint, points } = parseTotals(text);
   const worst = points.find(({ operatingPoint }) => operatingPoint === worstPoint);
   if (!worst) return null;
-  const { operatingPoint, name, totals, limitHundredths, standing } = worst;
+  const { operatingPoint, name, totals, limitHundredths, reserveHundredths, standing } = worst;
   const { predicted, margin } = totals;
-  return { operatingPoint, name, predicted, limit: limitHundredths / 100, margin, standing };
+  const limits = { limit: limitHundredths / 100, reserve: reserveHundredths / 100 };
+  return { operatingPoint, name, predicted, ...limits, margin, standing };
 }

@@ -6,18 +6,26 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { dayText } from "@/app/_components/utc-text";
-import { requireActor } from "@/app/_server/session";
-import { registerFor } from "@/lib/products/queries";
+import { chosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
+import { currentPreferences, requireActor } from "@/app/_server/session";
+import { NEWTONS } from "@/lib/evaluation/measures/reading";
+import { registerSheet } from "@/lib/products/register-sheet";
+import { waitingByProduct } from "@/lib/proposals/waiting-by-product";
 import { systemClock } from "@/lib/vocabulary/clock";
 import { isAllowed } from "@/policies/authorize";
 
+import { RegisterFilter } from "./_components/register-filter";
 import { RegisterTable } from "./_components/register-table";
+import { chosenProducts, registerAddress, RegisterQuery, type RegisterRow } from "./_register/register-rows";
 
 export const metadata: Metadata = { title: "Products" };
 
-export default async function ProductsPage() {
+export default async function ProductsPage({ searchParams }: PageProps<"/products">) {
+  const query = RegisterQuery.parse(await searchParams);
   const actor = await requireActor();
-  const entries = await registerFor(actor);
+  const [sheet, waiting] = await Promise.all([registerSheet(actor), waitingByProduct(actor)]);
+  const entries = sheet.map((entry) => ({ ...entry, waiting: waiting.get(entry.product.code) ?? 0 }));
   const mayCreate = isAllowed(actor, { on: "Installation", action: "create_product" });
 
   return (
@@ -39,7 +47,7 @@ export default async function ProductsPage() {
         }
       >
         {entries.length > 0 ? (
-          <RegisterTable entries={entries} />
+          <Register entries={entries} query={query} />
         ) : (
           <EmptyNote title="No product yet.">
             {mayCreate
@@ -49,5 +57,27 @@ export default async function ProductsPage() {
         )}
       </Sheet>
     </div>
+  );
+}
+
+async function Register({ entries, query }: { entries: readonly RegisterRow[]; query: RegisterQuery }) {
+  const bases = entries.flatMap(({ trend }) => trend.at(-1)?.basis ?? []);
+  const measure = chosenMeasure(query.measure, await currentPreferences(), bases);
+  const rows = chosenProducts(entries, query);
+
+  return (
+    <>
+      <RegisterFilter query={query} found={rows.length} all={entries.length} />
+      <MeasureBar
+        chosen={measure}
+        reading={measure.measure === "newtons" && bases[0] ? readingFor(measure, bases[0]) : NEWTONS}
+        hrefOf={(next) => registerAddress(query, { measure: next })}
+      />
+      {rows.length === 0 ? (
+        <EmptyNote title="No product is like that.">Ask for fewer words, or show all products again.</EmptyNote>
+      ) : (
+        <RegisterTable rows={rows} query={query} measure={measure} />
+      )}
+    </>
   );
 }

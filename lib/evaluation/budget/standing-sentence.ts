@@ -1,10 +1,12 @@
 import { formatNewtons } from "@/lib/units/format-newtons";
 import { roundHundredths } from "@/lib/units/rounding";
-import type { PointResult } from "./results";
+import type { PointResult, Totals } from "./results";
+
+type StandingFigures = Pick<PointResult, "standing" | "reserveHundredths"> & { totals: Pick<Totals, "margin"> };
 
 /** Where a point stands, in words: "Inside by 1.41 N" is what is clear of the reserve. Decided in newtons to 0.01 N. */
 export function standingSentence(
-  { standing, totals, reserveHundredths }: Pick<PointResult, "standing" | "totals" | "reserveHundredths">,
+  { standing, totals, reserveHundredths }: StandingFigures,
   print: (newtons: number) => string = formatNewtons,
 ): string {
   const margin = roundHundredths(totals.margin);

@@ -44,11 +44,15 @@ export interface TrendLayout {
   planned: TrendPoint[];
 }
 
-/** Issues over time at one operating point; the last one holds until `until`. */
+/**
+ * Issues over time at one operating point; the last one holds until `until`. Ticks are round values of the measure in
+ * which a newton is `perNewton`.
+ */
 export function trendLayout(
   issues: readonly TrendIssue[],
   planned: readonly PlannedPoint[],
   until: string,
+  perNewton = 1,
 ): TrendLayout {
   const time = timeScale(issues, planned, until);
   const newtons = newtonScale(issues, planned);
@@ -61,7 +65,7 @@ export function trendLayout(
 
   return {
     newtons,
-    ticks: rulerTicks(newtons, 6).map((value) => ({ value, y: y(value) })),
+    ticks: rulerTicks(newtons, 6, perNewton).map((value) => ({ value, y: y(value) })),
     dates: dateTicks(time),
     marks: labelledMarks(issues.map(({ issue, at, predicted }) => ({ issue, predicted, x: x(at), y: y(predicted) }))),
     predicted: steps((issue) => issue.predicted),

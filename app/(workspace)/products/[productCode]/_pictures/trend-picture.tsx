@@ -1,4 +1,4 @@
-import { formatExact } from "@/lib/units/format-number";
+import { NEWTONS, type Reading, readTick } from "@/lib/evaluation/measures/reading";
 
 import { percent } from "./scale";
 import { type PlannedPoint, type TrendIssue, type TrendLayout, type TrendPoint, trendLayout } from "./trend-layout";
@@ -8,21 +8,22 @@ interface TrendPictureProps {
   planned: readonly PlannedPoint[];
   /** ISO time up to which the newest issue is drawn. */
   until: string;
+  reading?: Reading;
 }
 
 const HEIGHT = 240;
 const FOOT = 24;
 
 /** Predicted and basic totals over the issues, with limit, reserve and the planned profile. */
-export function TrendPicture({ issues, planned, until }: TrendPictureProps) {
-  const layout = trendLayout(issues, planned, until);
+export function TrendPicture({ issues, planned, until, reading = NEWTONS }: TrendPictureProps) {
+  const layout = trendLayout(issues, planned, until, reading.perNewton);
 
   return (
-    <div className="grid grid-cols-[2.5rem_minmax(0,1fr)]" aria-hidden>
+    <div className="grid grid-cols-[3rem_minmax(0,1fr)]" aria-hidden>
       <svg width="100%" height={HEIGHT + FOOT} className="block overflow-visible">
         {layout.ticks.map((tick) => (
           <text key={tick.value} x="100%" dx="-8" y={y(tick.y) + 4} textAnchor="end" className="fill-ink-2 text-2xs">
-            {formatExact(tick.value)}
+            {readTick(reading, tick.value)}
           </text>
         ))}
       </svg>

@@ -1,6 +1,8 @@
 import type { Metadata } from "next";
 
-import { requireActor } from "@/app/_server/session";
+import { chosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
@@ -20,7 +22,7 @@ import { Baselines } from "./_components/baselines";
 import { Comparison } from "./_components/comparison";
 import { IssueForms } from "./_components/issue-forms";
 import { IssuesTable } from "./_components/issues-table";
-import { issuesQuery } from "./_components/issues-query";
+import { issuesAddress, issuesQuery } from "./_components/issues-query";
 import { TrendPoints } from "./_components/trend-points";
 
 type Props = PageProps<"/products/[productCode]/issues">;
@@ -32,8 +34,9 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function IssuesPage({ params, searchParams }: Props) {
   const { productCode } = await params;
   const query = issuesQuery(await searchParams);
-  const [actor, product, budget] = await Promise.all([
+  const [actor, preferences, product, budget] = await Promise.all([
     requireActor(),
+    currentPreferences(),
     pageProduct(productCode),
     pageBudget(productCode, {}),
   ]);
@@ -53,6 +56,8 @@ export default async function IssuesPage({ params, searchParams }: Props) {
   const { terms } = indexState(budget.state);
   const point = pointOf(budget, query.point) ?? budget.results.points[0];
   const operatingPoint = point?.operatingPoint ?? terms.referenceOperatingPoint;
+  const bases = (trend.at(-1)?.points ?? []).flatMap((at) => (at.operatingPoint === operatingPoint ? at.basis : []));
+  const measure = chosenMeasure(query.measure, preferences, bases);
 
   return (
     <>
@@ -62,18 +67,32 @@ export default async function IssuesPage({ params, searchParams }: Props) {
       />
       <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point ?? null)} />}>
         <ServiceWindCaution kind={product.kind} />
-        <TrendPoints points={budget.results.points} chosen={operatingPoint} path={`/products/${product.code}/issues`} />
+        <TrendPoints
+          points={budget.results.points}
+          chosen={operatingPoint}
+          hrefOf={(at) => issuesAddress(product.code, query, { point: at })}
+        />
+        {bases.map((basis) => (
+          <MeasureBar
+            key={operatingPoint}
+            chosen={measure}
+            reading={readingFor(measure, basis)}
+            hrefOf={(next) => issuesAddress(product.code, query, { measure: next })}
+          />
+        ))}
         <TrendFigure
           trend={trend}
           operatingPoint={operatingPoint}
           planned={operatingPoint === terms.referenceOperatingPoint ? terms.plannedProfile : []}
           until={new Date().toISOString()}
+          measure={measure}
         />
         <IssueForms
           productCode={product.code}
           numbers={issues.map(({ number }) => number)}
           compare={compare}
           operatingPoint={operatingPoint}
+          measure={query.measure}
         />
         {comparison ? <Comparison comparison={comparison} operatingPoint={operatingPoint} /> : null}
         <Baselines
@@ -82,7 +101,13 @@ export default async function IssuesPage({ params, searchParams }: Props) {
           maySign={covers(abilityFor(actor), { on: "Product", action: "make_baseline", productId: product.id })}
         />
         <SectionHeading>All issues</SectionHeading>
-        <IssuesTable issues={issues} trend={trend} operatingPoint={operatingPoint} productCode={product.code} />
+        <IssuesTable
+          issues={issues}
+          trend={trend}
+          operatingPoint={operatingPoint}
+          productCode={product.code}
+          measure={measure}
+        />
       </Sheet>
     </>
   );

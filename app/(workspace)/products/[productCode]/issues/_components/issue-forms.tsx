@@ -7,10 +7,11 @@ interface IssueFormsProps {
   numbers: readonly number[];
   compare: { from: number; to: number } | null;
   operatingPoint: string;
+  measure: string | undefined;
 }
 
 /** Two questions to the issues: what two of them differ in, and how the budget stood on a day. */
-export function IssueForms({ productCode, numbers, compare, operatingPoint }: IssueFormsProps) {
+export function IssueForms({ productCode, numbers, compare, operatingPoint, measure }: IssueFormsProps) {
   const newest = numbers.at(-1) ?? 1;
 
   return (
@@ -18,6 +19,7 @@ export function IssueForms({ productCode, numbers, compare, operatingPoint }: Is
       {numbers.length > 1 ? (
         <form action={`/products/${productCode}/issues`} className="flex flex-wrap items-end gap-x-3 gap-y-2">
           <input type="hidden" name="point" value={operatingPoint} />
+          {measure === undefined ? null : <input type="hidden" name="measure" value={measure} />}
           <IssueChoice label="Compare issue" name="from" numbers={numbers} value={compare?.from ?? newest - 1} />
           <IssueChoice label="with issue" name="to" numbers={numbers} value={compare?.to ?? newest} />
           <Button type="submit">Compare</Button>

@@ -3,6 +3,7 @@ import { z } from "zod";
 const IssueNumber = z.coerce.number().int().positive().optional().catch(undefined);
 
 const Address = z.object({
+  measure: z.string().trim().max(120).optional().catch(undefined),
   point: z
     .string()
     .regex(/^[A-Z0-9][A-Z0-9-]{0,11}$/)
@@ -18,6 +19,7 @@ const Address = z.object({
 });
 
 export interface IssuesQuery {
+  measure: string | undefined;
   point: string | undefined;
   /** Two issues to compare, the earlier first; null where none or only one is asked for. */
   compare: { from: number; to: number } | null;
@@ -25,8 +27,19 @@ export interface IssuesQuery {
 
 /** What the address of the issues sheet may say: "?from=3&to=5", or shorter "?compare=3,5". */
 export function issuesQuery(searchParams: unknown): IssuesQuery {
-  const { point, from, to, compare } = Address.parse(searchParams);
+  const { point, measure, from, to, compare } = Address.parse(searchParams);
   const [one = from, other = to] = compare?.split(",").map(Number) ?? [];
-  if (one === undefined || other === undefined || one === other) return { point, compare: null };
-  return { point, compare: { from: Math.min(one, other), to: Math.max(one, other) } };
+  if (one === undefined || other === undefined || one === other) return { point, measure, compare: null };
+  return { point, measure, compare: { from: Math.min(one, other), to: Math.max(one, other) } };
+}
+
+/** The same address with some of it changed. */
+export function issuesAddress(productCode: string, query: IssuesQuery, change: Partial<IssuesQuery>): string {
+  const { point, measure, compare } = { ...query, ...change };
+  const parts = new URLSearchParams();
+  if (point !== undefined) parts.set("point", point);
+  if (measure !== undefined) parts.set("measure", measure);
+  if (compare !== null) parts.set("compare", `${compare.from},${compare.to}`);
+  const text = parts.toString();
+  return `/products/${productCode}/issues${text === "" ? "" : `?${text}`}`;
 }

@@ -1,10 +1,11 @@
 import type { Route } from "next";
 import Link from "next/link";
 
+import { type ChosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { UtcTime } from "@/app/_components/utc-time";
 import type { IssueFacts, TrendIssue } from "@/lib/budget/views";
-import { formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { readText } from "@/lib/evaluation/measures/reading";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
 import { approvedBy, proposedBy } from "@/app/(workspace)/products/[productCode]/_components/sheet-fields";
@@ -14,10 +15,11 @@ interface IssuesTableProps {
   trend: readonly TrendIssue[];
   operatingPoint: string;
   productCode: string;
+  measure: ChosenMeasure;
 }
 
 /** Every issue, newest first: what made it, who signed, and where the total stood. */
-export function IssuesTable({ issues, trend, operatingPoint, productCode }: IssuesTableProps) {
+export function IssuesTable({ issues, trend, operatingPoint, productCode, measure }: IssuesTableProps) {
   const totals = new Map(trend.map(({ number, points }) => [number, points]));
 
   return (
@@ -27,17 +29,15 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode }: Issu
         <Head>Issued</Head>
         <Head>By proposal</Head>
         <Head>Proposed, approved</Head>
-        <Head numeric unit="N">
-          Predicted
-        </Head>
-        <Head numeric unit="N">
-          To limit
-        </Head>
+        <Head numeric>Predicted</Head>
+        <Head numeric>To limit</Head>
         <Head>Standing</Head>
       </TableHead>
       <tbody>
         {issues.toReversed().map((issue) => {
           const point = totals.get(issue.number)?.find((each) => each.operatingPoint === operatingPoint);
+          // By the terms of its own issue: what stood then is not read by what holds now.
+          const print = (newtons: number) => (point ? readText(readingFor(measure, point.basis), newtons) : "–");
           return (
             <Row key={issue.number} data-issue={issue.number}>
               <RowHead>
@@ -75,8 +75,8 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode }: Issu
                 {proposedBy(issue)}
                 <span className="block text-xs text-ink-2">{approvedBy(issue)}</span>
               </Cell>
-              <Cell numeric>{point ? formatNewtonsNumber(point.predicted) : "–"}</Cell>
-              <Cell numeric>{point ? formatNewtonsNumber(point.margin) : "–"}</Cell>
+              <Cell numeric>{point ? print(point.predicted) : "–"}</Cell>
+              <Cell numeric>{point ? print(point.margin) : "–"}</Cell>
               <Cell className={point?.standing === "over" ? "font-semibold text-signal" : undefined}>
                 {point ? STANDING_NAMES[point.standing] : "no such operating point"}
               </Cell>

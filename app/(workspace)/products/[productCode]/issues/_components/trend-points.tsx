@@ -6,11 +6,11 @@ import type { PointResult } from "@/lib/evaluation/budget/results";
 interface TrendPointsProps {
   points: readonly PointResult[];
   chosen: string;
-  path: string;
+  hrefOf: (operatingPoint: string) => string;
 }
 
 /** At which operating point the trend is drawn. */
-export function TrendPoints({ points, chosen, path }: TrendPointsProps) {
+export function TrendPoints({ points, chosen, hrefOf }: TrendPointsProps) {
   if (points.length < 2) return null;
 
   return (
@@ -18,7 +18,7 @@ export function TrendPoints({ points, chosen, path }: TrendPointsProps) {
       {points.map(({ operatingPoint, name }) => (
         <Link
           key={operatingPoint}
-          href={`${path}?point=${operatingPoint}` as Route}
+          href={hrefOf(operatingPoint) as Route}
           aria-current={operatingPoint === chosen ? "true" : undefined}
           className="py-1 hover:underline aria-[current=true]:font-semibold"
         >
