@@ -44,7 +44,7 @@ export function MeasureBar({ chosen, reading, hrefOf }: MeasureBarProps) {
 const SI = {
   newtons: "N",
   "drag-area": "m²",
-  coefficient: "–",
+  coefficient: "",
   counts: "",
   power: "W",
   energy: "kWh",

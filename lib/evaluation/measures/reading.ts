@@ -51,7 +51,9 @@ export function readNumber(reading: Reading, newtons: number): string {
 /** A value with its unit: "0.16090 m²", "16.089 counts". */
 export function readText(reading: Reading, newtons: number): string {
   const number = readNumber(reading, newtons);
-  return reading.unit === "" ? number : `${number}${THIN_SPACE}${reading.unit}`;
+  // A word stands apart from its number, a unit's sign close to it; neither is torn off at the end of a line.
+  const space = reading.measure === "counts" ? "\u00a0" : THIN_SPACE;
+  return reading.unit === "" ? number : `${number}${space}${reading.unit}`;
 }
 
 /** A change with its sign always; nothing has none. */

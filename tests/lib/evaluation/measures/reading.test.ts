@@ -20,7 +20,7 @@ const DUCT: MeasureBasis = { ...MOVING, kind: "duct", referenceArea: null, flowA
 
 function read(measure: Measure, newtons: number, basis = MOVING, system: "si" | "us" = "si"): string | null {
   const reading = readingOf(measure, basis, system);
-  return reading && readText(reading, newtons).replace(/\u2009/g, " ");
+  return reading && readText(reading, newtons).replace(/[\u2009\u00a0]/g, " ");
 }
 
 describe("a force in another measure", () => {
@@ -49,7 +49,7 @@ describe("a force in another measure", () => {
   });
 
   it("states what it is referred to: the size of a count and its area always", () => {
-    const basis = (measure: Measure, of = MOVING) => readingOf(measure, of, "si")?.basis?.replace(/\u2009/g, " ");
+    const basis = (measure: Measure, of = MOVING) => readingOf(measure, of, "si")?.basis?.replace(/[\u2009\u00a0]/g, " ");
     expect(basis("counts")).toBe("1 count = 0.001 on 10.00 m²");
     expect(basis("counts", { ...MOVING, countSize: 0.0001, referenceArea: 2.125 })).toBe(
       "1 count = 0.0001 on 2.125 m²",
