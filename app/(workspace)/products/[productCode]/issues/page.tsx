@@ -19,6 +19,7 @@ import { TrendFigure } from "../_components/trend-figure";
 import { pageBudget, pageProduct, readForPage } from "../_server/read-page";
 import { pointOf } from "../_sheet/budget-sheet";
 import { Baselines } from "./_components/baselines";
+import { ComparedTotals } from "./_components/compared-totals";
 import { Comparison } from "./_components/comparison";
 import { IssueForms } from "./_components/issue-forms";
 import { IssuesTable } from "./_components/issues-table";
@@ -95,6 +96,9 @@ export default async function IssuesPage({ params, searchParams }: Props) {
           measure={query.measure}
         />
         {comparison ? <Comparison comparison={comparison} operatingPoint={operatingPoint} /> : null}
+        {compare ? (
+          <ComparedTotals trend={trend} compare={compare} operatingPoint={operatingPoint} measure={measure} />
+        ) : null}
         <Baselines
           productCode={product.code}
           issues={issues}
