@@ -49,7 +49,8 @@ describe("a force in another measure", () => {
   });
 
   it("states what it is referred to: the size of a count and its area always", () => {
-    const basis = (measure: Measure, of = MOVING) => readingOf(measure, of, "si")?.basis?.replace(/[\u2009\u00a0]/g, " ");
+    const basis = (measure: Measure, of = MOVING) =>
+      readingOf(measure, of, "si")?.basis?.replace(/[\u2009\u00a0]/g, " ");
     expect(basis("counts")).toBe("1 count = 0.001 on 10.00 m²");
     expect(basis("counts", { ...MOVING, countSize: 0.0001, referenceArea: 2.125 })).toBe(
       "1 count = 0.0001 on 2.125 m²",

@@ -5,11 +5,12 @@ import type { UnitSystem } from "@/lib/units/us-customary";
 interface FieldTableProps {
   rows: readonly FieldRow[];
   caption: string;
-  units: UnitSystem;
+  /** Those of the reader; SI where it isn't said. */
+  units?: UnitSystem;
 }
 
 /** The fields of a line as rows: what a proposal would change and a remark be tied to. */
-export function FieldTable({ rows, caption, units }: FieldTableProps) {
+export function FieldTable({ rows, caption, units = "si" }: FieldTableProps) {
   return (
     <table className="w-full border-collapse border-t border-ink text-table">
       <caption className="sr-only">{caption}</caption>

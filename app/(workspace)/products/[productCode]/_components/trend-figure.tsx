@@ -4,6 +4,7 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import type { TrendIssue, TrendPoint } from "@/lib/budget/views";
 import type { TermsBody } from "@/lib/evaluation/lines/terms-body";
 import { type Reading, readNumber, readText } from "@/lib/evaluation/measures/reading";
+import { FIRST_PREFERENCES } from "@/lib/vocabulary/measures";
 
 import { TrendPicture } from "@/app/(workspace)/products/[productCode]/_pictures/trend-picture";
 
@@ -13,11 +14,12 @@ interface TrendFigureProps {
   /** Of the newest terms; drawn at the reference operating point only. */
   planned: TermsBody["plannedProfile"];
   until: string;
-  measure: ChosenMeasure;
+  /** Newtons where it isn't said. */
+  measure?: Pick<ChosenMeasure, "measure" | "units">;
 }
 
 /** The totals at one operating point over the issues. */
-export function TrendFigure({ trend, operatingPoint, planned, until, measure }: TrendFigureProps) {
+export function TrendFigure({ trend, operatingPoint, planned, until, measure = FIRST_PREFERENCES }: TrendFigureProps) {
   const issues = trend.flatMap(({ number, at, points }) => {
     const point = points.find((each) => each.operatingPoint === operatingPoint);
     return point ? [{ issue: number, at, ...point }] : [];
@@ -60,7 +62,7 @@ export function TrendFigure({ trend, operatingPoint, planned, until, measure }: 
 function readAt<Point extends TrendRow & { basis: TrendPoint["basis"] }>(
   point: Point,
   reading: Reading,
-  measure: ChosenMeasure,
+  measure: Pick<ChosenMeasure, "measure" | "units">,
 ): Point[] {
   const own = readingFor(measure, point.basis);
   if (own.measure !== reading.measure) return [];

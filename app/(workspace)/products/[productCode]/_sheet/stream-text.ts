@@ -4,7 +4,7 @@ import { formatResultIn } from "@/lib/units/format-quantity";
 import type { UnitSystem } from "@/lib/units/us-customary";
 
 /** "OP-1 motorway, 25.0 m/s, ρ 1.225 kg/m³, q 382.8 Pa"; in US customary units with these beside. */
-export function streamText({ operatingPoint, name, stream }: PointResult, units: UnitSystem): string {
+export function streamText({ operatingPoint, name, stream }: PointResult, units: UnitSystem = "si"): string {
   const { speed, density, dynamicPressure } = stream;
   const parts = [
     formatResultIn(units, speed, "speed", `${formatSignificant(speed)} m/s`),

@@ -63,7 +63,15 @@ export default async function ItemPage({ params, searchParams }: Props) {
         {line.retired ? (
           <RetiredItem line={line} revisions={until} productCode={budget.product.code} />
         ) : (
-          <ItemInForce line={line} budget={budget} point={point} chosen={chosen} query={query} revisions={until} files={files} />
+          <ItemInForce
+            line={line}
+            budget={budget}
+            point={point}
+            chosen={chosen}
+            query={query}
+            revisions={until}
+            files={files}
+          />
         )}
       </Sheet>
     </>
