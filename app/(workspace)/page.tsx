@@ -58,6 +58,13 @@ export default async function DaySheetPage({ searchParams }: PageProps<"/">) {
             </Link>
           </p>
         ) : null}
+        {[...sheet.waitsForMe, ...sheet.iWaitFor].some(({ neededBy }) => neededBy !== null) ? (
+          <p className="mb-2 print:hidden">
+            <a className="link" href="/api/needed-by" download>
+              Needed-by dates as a calendar file
+            </a>
+          </p>
+        ) : null}
         {toEstablish.length === 0 || sheet.waitsForMe.length > 0 ? (
           <WaitingTable entries={sheet.waitsForMe} today={today} order={order} />
         ) : null}

@@ -18,11 +18,12 @@ const Lines = z.array(z.string());
 
 /** What each mail needs to know; kept in the outbox as JSON and read back through the same schema. */
 const SCHEMAS = {
-  proposed: Proposal.extend({
+  // Not strict: those that were put in before the reasons were left out still go.
+  proposed: z.object({
+    ...Proposal.shape,
     proposerName: z.string(),
     round: z.int(),
     capacity: z.enum(CAPACITIES),
-    reasons: Lines,
     neededBy: z.string().nullable(),
   }),
   signed: ByActor.extend({ capacity: z.enum(CAPACITIES), stillNeeded: Lines }),

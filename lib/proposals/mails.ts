@@ -53,7 +53,7 @@ export async function mailProposed(
   { routing, round }: { routing: readonly RoutedCapacity[]; round: RoundRecord },
 ): Promise<void> {
   const { people, ...facts } = await proposerFacts(context);
-  for (const { capacity, reasons, maySign, signedBySubmitting } of routing) {
+  for (const { capacity, maySign, signedBySubmitting } of routing) {
     if (signedBySubmitting) continue;
     await mailMany(context, {
       template: "proposed",
@@ -64,7 +64,6 @@ export async function mailProposed(
         ...facts,
         proposerName: people.get(round.submittedById) ?? "",
         ...{ round: round.number, capacity, neededBy: round.neededBy },
-        reasons: reasons.map(({ sentence }) => sentence),
       },
     });
   }

@@ -13,13 +13,14 @@ const MOVES = {
 } as const satisfies Record<string, { from: readonly ProposalState[]; to: ProposalState }>;
 export type Move = keyof typeof MOVES;
 
-const STATE_WORDS: Record<ProposalState, string> = {
-  draft: "still a draft",
-  proposed: "open for signatures",
-  returned: "returned for rework",
-  approved: "approved",
-  disapproved: "disapproved",
-  withdrawn: "withdrawn",
+/** What stands against an act in each state, and what its reader can do. */
+const STATE_SENTENCES: Record<ProposalState, string> = {
+  draft: "This proposal is still a draft: it has to be submitted first.",
+  proposed: "This proposal is open for signatures already.",
+  returned: "This proposal was returned for rework: it has to be submitted again first.",
+  approved: "This proposal has been approved and never changes again. A further change needs a new proposal.",
+  disapproved: "This proposal was disapproved and never changes again. The same change needs a new proposal.",
+  withdrawn: "This proposal was withdrawn and never changes again. The same change needs a new proposal.",
 };
 
 export function canMove(state: ProposalState, move: Move): boolean {
@@ -38,5 +39,5 @@ export function isOpen(state: ProposalState): boolean {
 }
 
 export function wrongStateSentence(state: ProposalState): string {
-  return `This proposal is ${STATE_WORDS[state]}, so this can no longer be done, or not yet.`;
+  return STATE_SENTENCES[state];
 }

@@ -2,6 +2,7 @@ import { performAct } from "@/lib/audit/perform-act";
 import { dayIn } from "@/lib/budget/calendar";
 import { newestIssue } from "@/lib/budget/load-budget";
 import { namesOf } from "@/lib/budget/members";
+import { isWorkingDay, workingDaysAfter } from "@/lib/budget/working-days";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { inSnapshot } from "@/models/database";
 import { Product } from "@/models/product";
@@ -11,9 +12,8 @@ import { proposalsOf, subjectOf, type ProposalRecord } from "./proposal-record";
 import { roundOf } from "./round-record";
 import { isFilled, reviewRound } from "./round-review";
 
-/** Days between the reminder to the signers and the one to the program managers. */
-const MANAGER_AFTER_DAYS = 3;
-const DAY = 86_400_000;
+/** On the first working day after the date the signers are reminded, on this one the program managers. */
+const MANAGER_ON_WORKING_DAY = 3;
 
 /** Nobody acts here but the calendar. */
 const CALENDAR = { userId: null, printedName: "Leeboard" };
@@ -28,8 +28,8 @@ interface Reminder {
 }
 
 /**
- * A needed-by date that has passed reminds the signers, then the program managers, once each in a round. Silence never
- * approves. Answers how many proposals were reminded of.
+ * A needed-by date that has passed reminds the signers, then the program managers, on working days and once each in a
+ * round. Silence never approves. Answers how many proposals were reminded of.
  */
 export async function remindSigners(clock: Clock = systemClock): Promise<number> {
   const due = await dueReminders(clock);
@@ -49,19 +49,20 @@ function dueReminders(clock: Clock): Promise<Reminder[]> {
     const moment = clock();
     const due: Reminder[] = [];
     for (const { id, timeZone } of await Product.findAll({ transaction: tx })) {
-      if ((await newestIssue(id, tx)) === null) continue;
+      const today = dayIn(timeZone, moment);
+      if (!isWorkingDay(today) || (await newestIssue(id, tx)) === null) continue;
       const budgets = budgetReader(id, tx);
       const names = new Map((await namesOf(id, tx)).map((person) => [person.id, person.name]));
       for (const proposal of (await proposalsOf(id, tx)).filter(({ state }) => state === "proposed")) {
         const round = await roundOf(proposal.id, proposal.round, tx);
-        if (!round || round.neededBy === null || dayIn(timeZone, moment) <= round.neededBy) continue;
+        if (!round || round.neededBy === null || today <= round.neededBy) continue;
         const review = await reviewRound(proposal, round, budgets, { at: moment.toISOString(), tx });
         const open = review.routing.filter((each) => !isFilled(each, review.approvals, round));
         const common = { productCode: proposal.productCode, proposal, neededBy: round.neededBy };
         const reminder = { ...common, proposerName: names.get(proposal.proposerId) ?? "" };
         const signers = open.flatMap(({ maySign }) => maySign.map(({ userId }) => userId));
         due.push({ ...reminder, occasion: `reminded in round ${round.number}`, to: signers });
-        if (dayIn(timeZone, new Date(moment.getTime() - MANAGER_AFTER_DAYS * DAY)) <= round.neededBy) continue;
+        if (workingDaysAfter(round.neededBy, today) < MANAGER_ON_WORKING_DAY) continue;
         const managers = review.signing.members.filter(({ roles }) => roles.includes("program_manager"));
         const to = managers.map(({ userId }) => userId);
         due.push({ ...reminder, occasion: `manager reminded in round ${round.number}`, to });

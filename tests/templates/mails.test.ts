@@ -14,7 +14,6 @@ const MAILS = {
   proposed: proposed(frame, {
     ...facts,
     ...{ proposerName: "Eva", round: 2, capacity: "program_manager", neededBy: "2026-12-20" },
-    reasons: ["It adds item 070."],
   }),
   signed: signed(frame, { ...actor, capacity: "reviewer", stillNeeded: ["a program manager"] }),
   approved: approved(frame, { ...facts, issue: 14, signerNames: ["Tom, reviewer"] }),
@@ -61,9 +60,9 @@ describe.each(Object.entries(MAILS))("the mail %s", (_, mail) => {
   });
 });
 
-it("tells why somebody is asked, and by when", () => {
+it("tells in which capacity somebody is asked, and by when; why is told on the sheet", () => {
   expect(MAILS.proposed.subject).toBe("TF2-CP-04 waits for a program manager's signature");
-  expect(MAILS.proposed.text).toContain("- It adds item 070.");
+  expect(MAILS.proposed.text).toContain("asked as program manager");
   expect(MAILS.proposed.text).toContain("needed by 2026-12-20");
   expect(MAILS.proposed.text).toContain("(round 2)");
 });

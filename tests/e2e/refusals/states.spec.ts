@@ -88,7 +88,7 @@ test("of two reviewers who sign at one moment exactly one counts, and one issue 
   const refused = answers.find(({ ok }) => !ok);
   expect(refused).toMatchObject({
     code: "wrong_state",
-    sentence: "This proposal is approved, so this can no longer be done, or not yet.",
+    sentence: "This proposal has been approved and never changes again. A further change needs a new proposal.",
   });
   const loser = refused === answers[0] ? ines : elske;
   expect(after.history.slice(before.history.length)).toEqual([

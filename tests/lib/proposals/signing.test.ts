@@ -255,6 +255,9 @@ describe("a needed-by date that passes", () => {
     expect(await reminded()).toEqual([]);
     for (const hour of ["08", "09"]) await remindSigners(() => new Date(`2026-03-06T${hour}:00:00.000Z`));
     expect(await reminded()).toEqual([elske.userId, ines.userId]);
+    // Saturday to Monday: no reminder on days off, and the second working day after the date.
+    for (const day of ["07", "08", "09"]) await remindSigners(() => new Date(`2026-03-${day}T08:00:00.000Z`));
+    expect(await reminded()).toEqual([elske.userId, ines.userId]);
     await remindSigners(() => new Date("2026-03-10T08:00:00.000Z"));
     expect(await reminded()).toEqual([elske.userId, ines.userId, fenno.userId, lusia.userId]);
     expect(await Proposal.findByPk(proposalId)).toMatchObject({ state: "proposed" });
