@@ -1,13 +1,12 @@
 import type { Transaction } from "sequelize";
-import { newestIssue, productByCode, type ProductRow } from "@/lib/budget/load-budget";
-import { namesOf } from "@/lib/budget/members";
+import { newestIssue, type ProductRow } from "@/lib/budget/load-budget";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal } from "@/lib/vocabulary/refusal";
-import { inSnapshot } from "@/models/database";
 import { authorize, isAllowed } from "@/policies/authorize";
 import { budgetReader } from "./budget-reader";
 import { isOpen, wrongStateSentence } from "./moves";
+import { peopleOf, reading } from "./product-reading";
 import { listedProposals } from "./proposal-list";
 import { patchOf } from "./proposal-patch";
 import { labelOf, proposalByKey, proposalQuestion, type ProposalRecord } from "./proposal-record";
@@ -103,23 +102,6 @@ export async function settlementView(actor: Actor, productCode: string, key: str
   return view;
 }
 
-/** Reads that agree with each other, for somebody who may see the product; null where there is no such product. */
-function reading<T>(
-  actor: Actor,
-  productCode: string,
-  read: (from: { product: ProductRow; tx: Transaction }) => Promise<T | null>,
-): Promise<T | null> {
-  return inSnapshot(async (tx) => {
-    const product = await productByCode(productCode, tx).catch((problem: unknown) => {
-      if (problem instanceof Refusal && problem.code === "not_found") return null;
-      throw problem;
-    });
-    if (!product) return null;
-    authorize(actor, { on: "Product", action: "read_budget", productId: product.id });
-    return read({ product, tx });
-  });
-}
-
 async function readableProposal(
   actor: Actor,
   product: ProductRow,
@@ -129,8 +111,4 @@ async function readableProposal(
   const proposal = await proposalByKey(product.id, key, tx);
   if (proposal) authorize(actor, proposalQuestion(proposal, actor, "read"));
   return proposal;
-}
-
-async function peopleOf(productId: number, tx: Transaction): Promise<Map<number, string>> {
-  return new Map((await namesOf(productId, tx)).map(({ id, name }) => [id, name]));
 }
