@@ -2,6 +2,7 @@ import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 
 import { requireActor } from "@/app/_server/session";
+import { ButtonLink } from "@/app/_components/button";
 import { EmptyNote } from "@/app/_components/empty-note";
 import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
@@ -33,7 +34,14 @@ export default async function ProposalsPage({ params }: Props) {
       <PageHeading
         title="Proposals"
         subtitle={`${product.code} · ${product.name} · issue ${newestIssue}`}
-        actions={mayStart ? <StartDraft productCode={product.code} /> : null}
+        actions={
+          <>
+            {rows.some(({ state }) => state === "draft" || state === "proposed") ? (
+              <ButtonLink href={`/products/${product.code}/what-if`}>What if…</ButtonLink>
+            ) : null}
+            {mayStart ? <StartDraft productCode={product.code} /> : null}
+          </>
+        }
       />
       <Sheet
         titleBlock={

@@ -7,10 +7,11 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import { UtcTime } from "@/app/_components/utc-time";
 import type { ProposalView } from "@/lib/proposals/views";
 
+import { EffectSummary } from "@/app/(workspace)/products/[productCode]/_components/effect-summary";
+import { ItemEffects } from "@/app/(workspace)/products/[productCode]/_components/item-effects";
+
 import { ChangeTable } from "./change-table";
-import { EffectSummary } from "./effect-summary";
 import { EvidenceSection } from "./evidence-section";
-import { ItemEffects } from "./followers-table";
 import { RemarksSchedule } from "./remarks-schedule";
 import { TransfersTable } from "./transfers-table";
 

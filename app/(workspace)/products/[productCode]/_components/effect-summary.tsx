@@ -3,30 +3,30 @@ import type { EffectView, PointEffectView } from "@/lib/proposals/views";
 import { formatNewtons, formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
-import { StavePair } from "@/app/(workspace)/products/[productCode]/_pictures/stave-pair";
+import { StavePair } from "../_pictures/stave-pair";
 
 interface EffectSummaryProps {
   effect: EffectView;
   /** "with TF2-CP-04": names the lower stave. */
   withLabel: string;
+  /** Draws a pair of staves for each operating point in place of the worst alone. */
+  everyPoint?: boolean;
 }
 
-/** What the proposal does to the total: in a sentence, drawn, and in figures at every operating point. */
-export function EffectSummary({ effect, withLabel }: EffectSummaryProps) {
-  const worst = effect.points[0];
-
+/** What a change does to the total: in a sentence, drawn, and in figures at every operating point. */
+export function EffectSummary({ effect, withLabel, everyPoint = false }: EffectSummaryProps) {
   return (
     <>
       <p className="mb-3 text-xl font-semibold">{effect.sentence}</p>
-      {worst ? (
-        <figure className="mb-4">
-          <StavePair staves={stavesOf(effect.onIssue, worst, withLabel)} />
+      {effect.points.slice(0, everyPoint ? undefined : 1).map((point) => (
+        <figure key={point.operatingPoint} className="mb-4">
+          <StavePair staves={stavesOf(effect.onIssue, point, withLabel)} />
           <figcaption className="mt-1 text-xs text-ink-2">
-            {worst.operatingPoint} {worst.name}: solid is basic, hatched is growth; the post is the limit, the dashed
+            {point.operatingPoint} {point.name}: solid is basic, hatched is growth; the post is the limit, the dashed
             post where the reserve begins.
           </figcaption>
         </figure>
-      ) : null}
+      ))}
       <PointsTable effect={effect} />
     </>
   );
