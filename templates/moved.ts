@@ -15,6 +15,13 @@ export interface OvertakenFacts extends ProposalFacts {
   because: string[];
 }
 
+export interface LeftPlannedBandFacts extends ProposalFacts {
+  issue: number;
+  /** The reference operating point, for which the profile is planned. */
+  operatingPoint: string;
+  side: "above" | "below";
+}
+
 export interface ReminderFacts extends ProposalFacts {
   proposerName: string;
   /** "2026-12-20" */
@@ -46,6 +53,18 @@ export function overtaken(frame: MailFrame, facts: OvertakenFacts): MailText {
     subject: `${label} is overtaken`,
     sentences: [`${label} was drafted on an earlier issue and can't be approved until it is carried forward, because:`],
     listing: because,
+  });
+}
+
+/** To the program managers, once until it has come back: the total no longer keeps to its plan. */
+export function leftPlannedBand(frame: MailFrame, facts: LeftPlannedBandFacts): MailText {
+  const { label, productName, issue, operatingPoint, side } = facts;
+  return proposalNotice(frame, facts, {
+    subject: `${label}: predicted leaves its planned profile`,
+    sentences: [
+      `With issue ${issue}, made by ${label}, the predicted total of ${productName} at ${operatingPoint} is ${side} the tolerance band of its planned profile.`,
+      "This is told once. Further issues outside the band send nothing, until it has come back and leaves it again.",
+    ],
   });
 }
 

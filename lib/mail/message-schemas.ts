@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { CAPACITIES } from "@/lib/vocabulary/roles";
 import { approvalTakenBack, approved, disapproved, returned, signed, withdrawn } from "@/templates/decided";
-import { aheadChanged, overtaken, reminder, superseded } from "@/templates/moved";
+import { aheadChanged, leftPlannedBand, overtaken, reminder, superseded } from "@/templates/moved";
 import type { MailFrame, MailText } from "@/templates/proposal-notice";
 import { proposed } from "@/templates/proposed";
 import { remarkAnswered, remarkAsksAction, remarkSettled } from "@/templates/remarks";
@@ -35,6 +35,11 @@ const SCHEMAS = {
   superseded: Proposal.extend({ proposerName: z.string(), signedRound: z.int(), round: z.int(), moved: Lines }),
   overtaken: Proposal.extend({ because: Lines }),
   ahead_changed: Proposal.extend({ issue: z.int(), behind: Lines }),
+  left_planned_band: Proposal.extend({
+    issue: z.int(),
+    operatingPoint: z.string(),
+    side: z.enum(["above", "below"]),
+  }),
   reminder: Proposal.extend({ proposerName: z.string(), neededBy: z.string() }),
   remark_asks_action: Remark,
   remark_answered: Remark,
@@ -61,6 +66,7 @@ const RENDERERS: Record<MailTemplate, Render> = {
   superseded: renderer(SCHEMAS.superseded, superseded),
   overtaken: renderer(SCHEMAS.overtaken, overtaken),
   ahead_changed: renderer(SCHEMAS.ahead_changed, aheadChanged),
+  left_planned_band: renderer(SCHEMAS.left_planned_band, leftPlannedBand),
   reminder: renderer(SCHEMAS.reminder, reminder),
   remark_asks_action: renderer(SCHEMAS.remark_asks_action, remarkAsksAction),
   remark_answered: renderer(SCHEMAS.remark_answered, remarkAnswered),

@@ -6,6 +6,7 @@ import { Refusal } from "@/lib/vocabulary/refusal";
 import { actOnProposal, type ProposalAct } from "./act-on-proposal";
 import { approveRound } from "./approve-round";
 import { demandApprovable } from "./demand-approvable";
+import { noteLeftPlannedBand } from "./left-planned-band";
 import { openRound } from "./open-round";
 import { mailDownstream } from "./mail-downstream";
 import { mailApproved, mailDecided, mailSigned } from "./mails";
@@ -87,6 +88,7 @@ async function approve(
   const { after, changedLines } = review.onToday.change;
   const changedItems = changedLines.filter(({ kind }) => kind === "item").map(({ number }) => number);
   await mailDownstream(context, { issue: issue.number, state: after.state, changedItems });
+  await noteLeftPlannedBand(context, review, issue);
   await mailOthers(context);
   return { state: "approved", issue: issue.number };
 }

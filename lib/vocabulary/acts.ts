@@ -37,6 +37,7 @@ export const ACT_NAMES = {
   export_records: "Export records",
   check_history: "Check history",
   remind_signers: "Remind signers",
+  leave_planned_band: "Leave planned profile",
 } as const;
 
 export type Act = keyof typeof ACT_NAMES;

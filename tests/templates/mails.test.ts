@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { approvalTakenBack, approved, disapproved, returned, signed, withdrawn } from "@/templates/decided";
 import { html } from "@/templates/html";
-import { aheadChanged, overtaken, reminder, superseded } from "@/templates/moved";
+import { aheadChanged, leftPlannedBand, overtaken, reminder, superseded } from "@/templates/moved";
 import { proposed } from "@/templates/proposed";
 import { remarkAnswered, remarkAsksAction, remarkSettled } from "@/templates/remarks";
 
@@ -30,6 +30,7 @@ const MAILS = {
   }),
   overtaken: overtaken(frame, { ...facts, because: ["Item 050 has revision C since."] }),
   aheadChanged: aheadChanged(frame, { ...facts, issue: 14, behind: ["020 Mid panels, behind 010"] }),
+  leftPlannedBand: leftPlannedBand(frame, { ...facts, issue: 14, operatingPoint: "OP-1", side: "above" }),
   reminder: reminder(frame, { ...facts, proposerName: "Eva", neededBy: "2026-12-20" }),
   remarkAsksAction: remarkAsksAction(frame, remark),
   remarkAnswered: remarkAnswered(frame, remark),
