@@ -24,13 +24,18 @@ export function evaluateBudget(state: BudgetState, options: EvaluationOptions = 
     throw new RangeError(`no roll-up of version ${indexed.terms.rollUpVersion}`);
   }
 
-  const points = pointOrder(indexed).map((number) => pointResult(number, indexed, options));
+  const points = pointOrder(indexed).map((number) => evaluateOperatingPoint(number, indexed, options));
   const [worst] = [...points].sort(worseFirst);
   if (!worst) throw new RangeError("the budget has no operating point in force");
   return { points, worstPoint: worst.operatingPoint };
 }
 
-function pointResult(number: string, state: IndexedState, { frozen }: EvaluationOptions): PointResult {
+/** Every item at one operating point, with its totals and standing. */
+export function evaluateOperatingPoint(
+  number: string,
+  state: IndexedState,
+  { frozen }: EvaluationOptions = {},
+): PointResult {
   const body = state.operatingPoints.get(number);
   if (!body) throw new RangeError(`no operating point ${number} in force`);
 

@@ -30,6 +30,7 @@ export default async function ProductLayout({ children, params }: ProductLayoutP
             { href: `${base}/proposals`, label: "Proposals", count: open },
             { href: `${base}/operating-points`, label: "Operating points" },
             { href: `${base}/issues`, label: "Issues" },
+            { href: `${base}/pictures`, label: "Pictures" },
             { href: `${base}/history`, label: "History" },
             { href: `${base}/people`, label: "People" },
           ]}

@@ -1,0 +1,63 @@
+import { EmptyNote } from "@/app/_components/empty-note";
+import { FigureWithTable } from "@/app/_components/figure-with-table";
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { BudgetAt } from "@/lib/budget/views";
+import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
+
+import {
+  type AllocatedItem,
+  allocationsLayout,
+} from "@/app/(workspace)/products/[productCode]/_pictures/allocations-layout";
+import { AllocationsPicture } from "@/app/(workspace)/products/[productCode]/_pictures/allocations-picture";
+
+/** Every item against what it may use, at the reference operating point, where allocations are set. */
+export function AllocationsFigure({ budget: { allocations, results } }: { budget: BudgetAt }) {
+  const point = results.points.find(({ operatingPoint }) => operatingPoint === allocations.operatingPoint);
+  const items = allocations.lines.flatMap((line): AllocatedItem[] => {
+    const result = point?.items.find(({ item, refused }) => line.kind === "item" && item === line.number && !refused);
+    return result ? [{ ...line, basic: result.basic, predicted: result.predicted }] : [];
+  });
+  if (items.length === 0) {
+    return <EmptyNote title="No items yet.">Items come by proposals: start a draft and add one.</EmptyNote>;
+  }
+  const over = items.filter(({ marginHundredths }) => marginHundredths !== null && marginHundredths < 0);
+
+  return (
+    <FigureWithTable
+      summary={
+        `${items.length} items against their allocations at ${allocations.operatingPoint}; over: ` +
+        `${over.length === 0 ? "none" : over.map(({ number, name }) => `${number} ${name}`).join(", ")}.`
+      }
+      picture={<AllocationsPicture layout={allocationsLayout(items)} />}
+      caption="Newtons. Solid: basic; hatched: growth; post: allocation; hatched the other way, beyond the post: over. At the right the margin; a dash where there is no allocation."
+      table={<AllocationsTable items={items} />}
+    />
+  );
+}
+
+function AllocationsTable({ items }: { items: readonly AllocatedItem[] }) {
+  return (
+    <Table caption="The numbers of the picture, in newtons">
+      <TableHead>
+        <Head>Item</Head>
+        <Head numeric>Basic</Head>
+        <Head numeric>Predicted</Head>
+        <Head numeric>Allocation</Head>
+        <Head numeric>Margin</Head>
+      </TableHead>
+      <tbody>
+        {items.map(({ number, name, basic, predicted, allocationHundredths, marginHundredths }) => (
+          <Row key={number}>
+            <RowHead>
+              {number} {name}
+            </RowHead>
+            <Cell numeric>{formatNewtonsNumber(basic)}</Cell>
+            <Cell numeric>{formatNewtonsNumber(predicted)}</Cell>
+            <Cell numeric>{allocationHundredths === null ? "none" : formatHundredths(allocationHundredths)}</Cell>
+            <Cell numeric>{marginHundredths === null ? "–" : formatHundredths(marginHundredths)}</Cell>
+          </Row>
+        ))}
+      </tbody>
+    </Table>
+  );
+}

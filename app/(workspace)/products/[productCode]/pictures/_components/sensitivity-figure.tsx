@@ -1,0 +1,58 @@
+import { FigureWithTable } from "@/app/_components/figure-with-table";
+import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { PointResult } from "@/lib/evaluation/budget/results";
+import { sensitivities, type Variable } from "@/lib/evaluation/budget/sensitivity";
+import type { BudgetState } from "@/lib/evaluation/lines/line-state";
+
+import {
+  changeText,
+  type SensitivityBar,
+  SensitivityPicture,
+} from "@/app/(workspace)/products/[productCode]/_pictures/sensitivity-picture";
+
+const NAMES: Record<Variable, string> = {
+  speed: "Speed, 1 %",
+  temperature: "Temperature, 5 K",
+  roughness: "Roughness k_s, 10 %",
+  drag_coefficient: "C_D, 10 %",
+};
+
+/** What the predicted total moves by when one thing moves everywhere, the greatest first. */
+export function SensitivityFigure({ state, point }: { state: BudgetState; point: PointResult }) {
+  const bars = sensitivities(state, point.operatingPoint).map(({ variable, lower, higher }) => ({
+    ...{ label: NAMES[variable], lower, higher },
+  }));
+  const [first] = bars;
+  if (!first)
+    return <p className="my-3 text-ink-2">An item has no result here, so that there is no whole total to vary.</p>;
+
+  return (
+    <FigureWithTable
+      summary={`Change of the predicted total at ${point.operatingPoint}. The most: ${first.label}, ${changeText(first.lower)} to ${changeText(first.higher)} N.`}
+      picture={<SensitivityPicture bars={bars} />}
+      caption="Change of the predicted total in newtons, the whole budget computed anew: hollow with one step less, solid with one step more. At the right the two in figures. C_D is that of bluff bodies and inside drag areas; every other input stays."
+      table={<SensitivityTable bars={bars} />}
+    />
+  );
+}
+
+function SensitivityTable({ bars }: { bars: readonly SensitivityBar[] }) {
+  return (
+    <Table caption="Change of the predicted total, in newtons">
+      <TableHead>
+        <Head>What moves</Head>
+        <Head numeric>One step less</Head>
+        <Head numeric>One step more</Head>
+      </TableHead>
+      <tbody>
+        {bars.map(({ label, lower, higher }) => (
+          <Row key={label}>
+            <RowHead>{label}</RowHead>
+            <Cell numeric>{changeText(lower)}</Cell>
+            <Cell numeric>{changeText(higher)}</Cell>
+          </Row>
+        ))}
+      </tbody>
+    </Table>
+  );
+}
