@@ -1,5 +1,7 @@
 import type { ReactNode } from "react";
 
+import { SaveFigure } from "./save-figure/save-figure";
+
 interface FigureWithTableProps {
   /** What the picture says, in a sentence. */
   summary: string;
@@ -19,10 +21,13 @@ export function FigureWithTable({ summary, picture, table, caption }: FigureWith
       </div>
       <figcaption className="mt-1 text-sm text-ink-2">
         {caption}
-        <details className="mt-1 text-ink print:hidden">
-          <summary className="link w-fit text-sm">As a table</summary>
-          <div className="mt-2">{table}</div>
-        </details>
+        <div className="mt-1 flex flex-wrap items-baseline gap-x-4 text-ink">
+          <details className="open:basis-full print:hidden">
+            <summary className="link w-fit text-sm">As a table</summary>
+            <div className="mt-2">{table}</div>
+          </details>
+          <SaveFigure />
+        </div>
       </figcaption>
     </figure>
   );

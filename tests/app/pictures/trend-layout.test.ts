@@ -28,7 +28,7 @@ describe("the trend over issues", () => {
     const layout = trendLayout(issues, [{ date: "2026-02-01", predicted: 100, tolerance: 5 }], until);
 
     expect(layout.plannedBand[0]?.y).toBeGreaterThan(layout.planned[0]?.y ?? Infinity);
-    expect(layout.plannedBand[1]?.y).toBeLessThan(layout.planned[0]?.y ?? -Infinity);
+    expect(layout.plannedBand.at(-1)?.y).toBeLessThan(layout.planned[0]?.y ?? -Infinity);
   });
 
   it("names a few whole days along the foot, each once", () => {
@@ -58,5 +58,19 @@ describe("issues that crowd", () => {
 
     expect(marks.map(({ labelled }) => labelled)).toEqual([false, false, true]);
     expect(dates.map(({ label }) => label)).toEqual(["2026-01-01 00:00", "2026-01-02 00:00"]);
+  });
+});
+
+describe("the planned profile in the trend", () => {
+  it("is drawn in the order of its dates, and its last row holds up to the end", () => {
+    const issues = [{ issue: 1, at: "2026-03-01T00:00:00.000Z", basic: 40, predicted: 50, limit: 100, reserve: 10 }];
+    const [late, early] = [
+      { date: "2026-03-21", predicted: 40, tolerance: 5 },
+      { date: "2026-03-11", predicted: 60, tolerance: 5 },
+    ];
+    const { planned } = trendLayout(issues, [late, early], "2026-03-31T00:00:00.000Z");
+    // Thirty days from the issue to the end.
+    expect(planned.map(({ x }) => Math.round(x * 30))).toEqual([10, 20, 30]);
+    expect(planned[1]?.y).toBe(planned[2]?.y);
   });
 });

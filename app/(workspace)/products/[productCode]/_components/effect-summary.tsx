@@ -1,3 +1,4 @@
+import { SaveFigure } from "@/app/_components/save-figure/save-figure";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { EffectView, PointEffectView } from "@/lib/proposals/views";
 import { formatNewtons, formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
@@ -20,15 +21,25 @@ export function EffectSummary({ effect, withLabel, everyPoint = false }: EffectS
       <p className="mb-3 text-xl font-semibold">{effect.sentence}</p>
       {effect.points.slice(0, everyPoint ? undefined : 1).map((point) => (
         <figure key={point.operatingPoint} className="mb-4">
-          <StavePair staves={stavesOf(effect.onIssue, point, withLabel)} />
+          <div role="img" aria-label={staveSentence(point)}>
+            <StavePair staves={stavesOf(effect.onIssue, point, withLabel)} />
+          </div>
           <figcaption className="mt-1 text-xs text-ink-2">
             {point.operatingPoint} {point.name}: solid is basic, hatched is growth; the post is the limit, the dashed
             post where the reserve begins.
+            <SaveFigure />
           </figcaption>
         </figure>
       ))}
       <PointsTable effect={effect} />
     </>
+  );
+}
+
+function staveSentence({ operatingPoint, predictedWas, predictedNow, limitNow }: PointEffectView): string {
+  return (
+    `Predicted at ${operatingPoint} from ${formatNewtons(predictedWas)} to ${formatNewtons(predictedNow)}, ` +
+    `limit ${formatNewtons(limitNow)}. The figures stand in the table below.`
   );
 }
 

@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 
+import { SymbolText } from "@/app/_components/symbol-text";
 import { formatExact } from "@/lib/units/format-number";
 
 import { type Scale, fractionOf, percent } from "./scale";
@@ -34,7 +35,7 @@ export function RowsPicture({ rows, scale, ticks }: RowsPictureProps) {
       <div>
         {rows.map(({ label }, at) => (
           <p key={at} className="h-[26px] truncate leading-[26px]">
-            {label}
+            <SymbolText symbol={label} />
           </p>
         ))}
       </div>

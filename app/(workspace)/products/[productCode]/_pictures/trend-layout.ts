@@ -56,12 +56,13 @@ export function trendLayout(
 ): TrendLayout {
   const time = timeScale(issues, planned, until);
   const newtons = newtonScale(issues, planned);
+  const profile = heldUntil(planned, until);
   const x = (at: string) => fractionOf(time, Date.parse(at));
   const y = (value: number) => fractionOf(newtons, value);
   const steps = (value: (issue: TrendIssue) => number | null) =>
     stepLine(issues, value, x, y, fractionOf(time, Date.parse(until)));
   const edge = (sign: 1 | -1) =>
-    planned.map(({ date, predicted, tolerance }) => ({ x: x(date), y: y(predicted + sign * tolerance) }));
+    profile.map(({ date, predicted, tolerance }) => ({ x: x(date), y: y(predicted + sign * tolerance) }));
 
   return {
     newtons,
@@ -73,8 +74,15 @@ export function trendLayout(
     limit: steps((issue) => issue.limit),
     reserve: steps((issue) => (issue.limit === null || issue.reserve === 0 ? null : issue.limit - issue.reserve)),
     plannedBand: [...edge(1), ...edge(-1).reverse()],
-    planned: planned.map(({ date, predicted }) => ({ x: x(date), y: y(predicted) })),
+    planned: profile.map(({ date, predicted }) => ({ x: x(date), y: y(predicted) })),
   };
+}
+
+/** In the order of its dates; what the last row says holds on. */
+function heldUntil(planned: readonly PlannedPoint[], until: string): PlannedPoint[] {
+  const rows = planned.toSorted((one, other) => Date.parse(one.date) - Date.parse(other.date));
+  const last = rows.at(-1);
+  return last && Date.parse(last.date) < Date.parse(until) ? [...rows, { ...last, date: until }] : rows;
 }
 
 function timeScale(issues: readonly TrendIssue[], planned: readonly PlannedPoint[], until: string): Scale {

@@ -95,7 +95,14 @@ export default async function IssuesPage({ params, searchParams }: Props) {
           operatingPoint={operatingPoint}
           measure={query.measure}
         />
-        {comparison ? <Comparison comparison={comparison} operatingPoint={operatingPoint} /> : null}
+        {comparison ? (
+          <Comparison
+            comparison={comparison}
+            trend={trend}
+            operatingPoint={operatingPoint}
+            productCode={product.code}
+          />
+        ) : null}
         {compare ? (
           <ComparedTotals trend={trend} compare={compare} operatingPoint={operatingPoint} measure={measure} />
         ) : null}

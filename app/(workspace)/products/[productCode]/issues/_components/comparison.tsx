@@ -2,28 +2,43 @@ import { FigureWithTable } from "@/app/_components/figure-with-table";
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import type { ComparedLine, IssueComparison } from "@/lib/budget/views";
+import type { ComparedLine, IssueComparison, TrendIssue } from "@/lib/budget/views";
 import { formatNewtons, formatNewtonsChange } from "@/lib/units/format-newtons";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
 import { ChangedFields } from "@/app/(workspace)/products/[productCode]/_components/revisions-table";
 import { bridgeLayout } from "@/app/(workspace)/products/[productCode]/_pictures/bridge-layout";
 import { BridgePicture } from "@/app/(workspace)/products/[productCode]/_pictures/bridge-picture";
+import { proposalBridge } from "@/app/(workspace)/products/[productCode]/_pictures/proposal-bridge";
+
+import { ProposalBridgeFigure } from "./proposal-bridge-figure";
 
 interface ComparisonProps {
   comparison: IssueComparison;
+  trend: readonly TrendIssue[];
   operatingPoint: string;
+  productCode: string;
 }
 
 /** What two issues differ in: totals, the items that moved, the lines that have other letters. */
-export function Comparison({ comparison, operatingPoint }: ComparisonProps) {
+export function Comparison({ comparison, trend, operatingPoint, productCode }: ComparisonProps) {
   const { from, to, lines } = comparison;
+  const bridge = proposalBridge(trend, from.number, to.number, operatingPoint);
 
   return (
     <section aria-labelledby="comparison" className="mt-7">
       <SectionHeading id="comparison" aside={`${lines.length} ${lines.length === 1 ? "line" : "lines"} changed`}>
         Issue {from.number} compared with issue {to.number}
       </SectionHeading>
+      {bridge ? (
+        <ProposalBridgeFigure
+          bridge={bridge}
+          from={from.number}
+          to={to.number}
+          operatingPoint={operatingPoint}
+          productCode={productCode}
+        />
+      ) : null}
       <ItemBridge comparison={comparison} operatingPoint={operatingPoint} />
       <Table caption={`Lines that differ between issue ${from.number} and issue ${to.number}`} narrow="stack">
         <TableHead>
@@ -71,7 +86,10 @@ function LineRow({ line }: { line: ComparedLine }) {
 }
 
 /** From one total to the other, item by item, at an operating point that both issues have. */
-function ItemBridge({ comparison: { from, to, items, points }, operatingPoint }: ComparisonProps) {
+function ItemBridge({
+  comparison: { from, to, items, points },
+  operatingPoint,
+}: Pick<ComparisonProps, "comparison" | "operatingPoint">) {
   const point = points.find((each) => each.operatingPoint === operatingPoint);
   if (!point || point.predictedWas === null || point.predictedNow === null) {
     return <p className="my-3 text-ink-2">One of the two issues has no operating point {operatingPoint}.</p>;
@@ -92,7 +110,7 @@ function ItemBridge({ comparison: { from, to, items, points }, operatingPoint }:
     <FigureWithTable
       summary={`Predicted at ${operatingPoint} from ${formatNewtons(was.total)} to ${formatNewtons(now.total)}, ${moved.length} items moved.`}
       picture={<BridgePicture layout={bridgeLayout(was, moved, now)} />}
-      caption={`Predicted at ${operatingPoint}, newtons; the ruler does not begin at zero.`}
+      caption={`The same item by item. Predicted at ${operatingPoint}, newtons; the ruler does not begin at zero.`}
       table={<BridgeTable moved={moved} />}
     />
   );

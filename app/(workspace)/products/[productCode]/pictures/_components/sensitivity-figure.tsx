@@ -1,4 +1,5 @@
 import { FigureWithTable } from "@/app/_components/figure-with-table";
+import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { PointResult } from "@/lib/evaluation/budget/results";
 import { sensitivities, type Variable } from "@/lib/evaluation/budget/sensitivity";
@@ -30,7 +31,7 @@ export function SensitivityFigure({ state, point }: { state: BudgetState; point:
     <FigureWithTable
       summary={`Change of the predicted total at ${point.operatingPoint}. The most: ${first.label}, ${changeText(first.lower)} to ${changeText(first.higher)} N.`}
       picture={<SensitivityPicture bars={bars} />}
-      caption="Change of the predicted total in newtons, the whole budget computed anew: hollow with one step less, solid with one step more. At the right the two in figures. C_D is that of bluff bodies and inside drag areas; every other input stays."
+      caption="Change of the predicted total in newtons, the whole budget computed anew: hollow with one step less, solid with one step more. At the right the two in figures. The drag coefficient is that of bluff bodies and inside drag areas; every other input stays."
       table={<SensitivityTable bars={bars} />}
     />
   );
@@ -47,7 +48,9 @@ function SensitivityTable({ bars }: { bars: readonly SensitivityBar[] }) {
       <tbody>
         {bars.map(({ label, lower, higher }) => (
           <Row key={label}>
-            <RowHead>{label}</RowHead>
+            <RowHead>
+              <SymbolText symbol={label} />
+            </RowHead>
             <Cell numeric>{changeText(lower)}</Cell>
             <Cell numeric>{changeText(higher)}</Cell>
           </Row>
