@@ -163,7 +163,7 @@ describe("what a set of proposals would do together", () => {
       { name: "010 Wing", was: null, toBe: allocated },
       { name: "Unallocated", was: before.allocations.get("Unallocated"), toBe: free },
     ]);
-  });
+  }, 120_000);
 
   it("leaves out a proposal that changes the same field, and names field, line, values and the other proposal", async () => {
     const people = await withItems();
