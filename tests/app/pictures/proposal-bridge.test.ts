@@ -2,6 +2,11 @@ import { describe, expect, it } from "vitest";
 import { proposalBridge } from "@/app/(workspace)/products/[productCode]/_pictures/proposal-bridge";
 import type { TrendIssue } from "@/lib/budget/views";
 
+const basis = {
+  ...{ kind: "vehicle_fairing" as const, countSize: 0.001, referenceArea: null, flowArea: null },
+  ...{ dynamicPressure: 382.8, speed: 25, hoursPerYear: null },
+};
+
 function issue(number: number, predicted: number | null): TrendIssue {
   const point = { operatingPoint: "OP-1", name: "Cruise", basic: 0, growth: 0, limit: 100, reserve: 10, margin: 0 };
   return {
@@ -11,7 +16,7 @@ function issue(number: number, predicted: number | null): TrendIssue {
       number === 1
         ? null
         : { number: number - 1, label: `T-CP-0${number - 1}`, title: "Change", proposer: { id: 1, name: "Eva" } },
-    points: predicted === null ? [] : [{ ...point, predicted, standing: "inside" }],
+    points: predicted === null ? [] : [{ ...point, predicted, basis, standing: "inside" }],
   };
 }
 
