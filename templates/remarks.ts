@@ -6,6 +6,15 @@ export interface RemarkFacts extends ProposalFacts {
   remarkNumber: number;
 }
 
+/** To those to whom a remark is addressed. */
+export function remarkAddressed(frame: MailFrame, facts: RemarkFacts): MailText {
+  const { label, authorName, remarkNumber } = facts;
+  return proposalNotice(frame, facts, {
+    subject: `${label}: remark R${remarkNumber} is addressed to you`,
+    sentences: [`${authorName} addresses you in remark R${remarkNumber} on ${label}.`],
+  });
+}
+
 /** To the proposer and the co-editors: no approval is taken until this remark is settled. */
 export function remarkAsksAction(frame: MailFrame, facts: RemarkFacts): MailText {
   const { label, authorName, remarkNumber } = facts;

@@ -4,7 +4,7 @@ import { approvalTakenBack, approved, disapproved, returned, signed, withdrawn }
 import { aheadChanged, leftPlannedBand, overtaken, reminder, superseded } from "@/templates/moved";
 import type { MailFrame, MailText } from "@/templates/proposal-notice";
 import { proposed } from "@/templates/proposed";
-import { remarkAnswered, remarkAsksAction, remarkSettled } from "@/templates/remarks";
+import { remarkAddressed, remarkAnswered, remarkAsksAction, remarkSettled } from "@/templates/remarks";
 
 const Proposal = z.strictObject({
   productCode: z.string(),
@@ -41,6 +41,7 @@ const SCHEMAS = {
     side: z.enum(["above", "below"]),
   }),
   reminder: Proposal.extend({ proposerName: z.string(), neededBy: z.string() }),
+  remark_addressed: Remark,
   remark_asks_action: Remark,
   remark_answered: Remark,
   remark_settled: Remark,
@@ -68,6 +69,7 @@ const RENDERERS: Record<MailTemplate, Render> = {
   ahead_changed: renderer(SCHEMAS.ahead_changed, aheadChanged),
   left_planned_band: renderer(SCHEMAS.left_planned_band, leftPlannedBand),
   reminder: renderer(SCHEMAS.reminder, reminder),
+  remark_addressed: renderer(SCHEMAS.remark_addressed, remarkAddressed),
   remark_asks_action: renderer(SCHEMAS.remark_asks_action, remarkAsksAction),
   remark_answered: renderer(SCHEMAS.remark_answered, remarkAnswered),
   remark_settled: renderer(SCHEMAS.remark_settled, remarkSettled),

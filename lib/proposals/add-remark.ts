@@ -1,8 +1,10 @@
 import { z } from "zod";
+import { membersAt } from "@/lib/budget/members";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { Comment } from "@/models/comment";
+import { CommentAddressee } from "@/models/comment-addressee";
 import { authorize } from "@/policies/authorize";
 import { actOnProposal, type ProposalAct } from "./act-on-proposal";
 import { answeredBefore, keepAnswer } from "./answered-before";
@@ -48,8 +50,16 @@ export function addRemark(actor: Actor, input: AddRemarkInput, clock: Clock = sy
       { transaction: tx },
     );
     const number = parent?.number ?? remark.number ?? 0;
-    record({ now: { remark: number, asksForAction: remark.asksAction, ...whereOf(input) }, reason: input.text });
-    await mailRemark(actor, context, { remark, number, parent });
+    const addressed = await addressRemark(remark.id, input.to, context);
+    record({
+      now: {
+        ...{ remark: number, asksForAction: remark.asksAction, ...whereOf(input) },
+        ...(addressed.length === 0 ? {} : { to: addressed.map(({ printedName }) => printedName) }),
+      },
+      reason: input.text,
+    });
+    const to = addressed.map(({ userId }) => userId);
+    await mailRemark(actor, context, { remark, number, parent, to });
     const answer = { remarkId: remark.id, number };
     await keepAnswer(form, answer, at, tx);
     return answer;
@@ -64,6 +74,22 @@ async function parentOf({ parentId }: AddRemarkInput, { proposal, tx }: Proposal
   });
   if (!parent) throw new Refusal("not_found", "There is no such remark to answer.");
   return parent;
+}
+
+/** Keeps to whom it is addressed: members of the product, each once. */
+async function addressRemark(commentId: number, to: readonly number[], { proposal, at, tx }: ProposalAct) {
+  if (to.length === 0) return [];
+  const members = await membersAt(proposal.productId, at, tx);
+  const addressed = members.filter(({ userId }) => to.includes(userId));
+  if (addressed.length < new Set(to).size) {
+    const sentence = "Address it to people who hold a role in this product.";
+    throw new Refusal("invalid", sentence, [{ path: "to", sentence }]);
+  }
+  await CommentAddressee.bulkCreate(
+    addressed.map(({ userId }) => ({ commentId, userId })),
+    { transaction: tx },
+  );
+  return addressed;
 }
 
 async function nextNumber({ proposal, tx }: ProposalAct): Promise<number> {

@@ -3,11 +3,14 @@ import type { Comment } from "@/models/comment";
 import type { ProposalAct } from "./act-on-proposal";
 import { editorsOf, mailFacts, mailMany } from "./mails";
 
-/** A request for action goes to the editors, an answer to who raised the remark; other remarks send no mail. */
+/**
+ * A request for action goes to the editors, an answer to who raised the remark, and any remark to whom it is addressed;
+ * nobody gets two mails of one remark.
+ */
 export async function mailRemark(
   actor: Actor,
   context: ProposalAct,
-  { remark, number, parent }: { remark: Comment; number: number; parent: Comment | null },
+  { remark, number, parent, to }: { remark: Comment; number: number; parent: Comment | null; to: readonly number[] },
 ): Promise<void> {
   const data = { ...mailFacts(context.proposal), authorName: actor.printedName, remarkNumber: number };
   const mail = { occasion: `remark ${remark.id}`, except: actor, data };
@@ -15,6 +18,7 @@ export async function mailRemark(
   else if (remark.asksAction) {
     await mailMany(context, { ...mail, template: "remark_asks_action", to: editorsOf(context.proposal) });
   }
+  await mailMany(context, { ...mail, template: "remark_addressed", to });
 }
 
 export function mailSettled(actor: Actor, context: ProposalAct, remark: Comment): Promise<number> {

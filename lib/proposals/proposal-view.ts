@@ -47,7 +47,10 @@ export async function proposalViewOf(
   const roundNumbers = new Map(rounds.map(({ id, number }) => [id, number]));
   const isOwner = await ownsEditedItem(actor.userId, proposal.productId, round, tx);
   const state = review.onToday.change.after.state;
-  const remarks = await remarkViews({ actor, proposal, isOwner, state, roundNumbers }, tx);
+  const remarks = await remarkViews(
+    { actor, proposal, isOwner, state, rounds, shown: round, people: review.people },
+    tx,
+  );
   const asOf = isCurrent ? review : { ...review, proposal: { ...proposal, state: "withdrawn" as const } };
   return {
     ...facts(proposal, round, review),
@@ -61,6 +64,9 @@ export async function proposalViewOf(
     namedBecause: await whyNamed(proposal.id, tx),
     objections: await objectionViews(proposal, roundNumbers, tx),
     remarks,
+    addressable: review.signing.members
+      .filter(({ userId }) => userId !== actor.userId)
+      .map(({ userId, printedName }) => ({ id: userId, name: printedName })),
     moves: moveViews(actor, asOf, await unsettledRequests(proposal.id, tx)),
     signingSheet:
       submitted && isCurrent ? { text: review.text, textHash: review.textHash, roundHash: round.hash } : null,

@@ -94,6 +94,8 @@ export const AddRemarkInput = z
     /** A wording that the remark suggests for the field or the reason. */
     suggestion: plainText(500).nullable(),
     asksForAction: z.boolean(),
+    /** Members to whom it is addressed: they get it by mail. */
+    to: z.array(Id).max(20, "Address it to at most 20 people.").default([]),
     key: IdempotencyKey,
   })
   .refine((remark) => remark.field === null || remark.line !== null, { path: ["field"], error: "Name the line." });

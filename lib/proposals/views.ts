@@ -106,7 +106,6 @@ export interface SignatureView {
   meaning: string | null;
   reason: string | null;
   signer: PersonView;
-  /** As it was printed at the moment of signing. */
   printedName: string;
   deputyFor: PersonView | null;
   at: string;
@@ -141,6 +140,7 @@ export interface ReplyView {
   at: string;
   text: string;
   suggestion: string | null;
+  to: PersonView[];
 }
 
 export interface RemarkView extends ReplyView {
@@ -150,6 +150,8 @@ export interface RemarkView extends ReplyView {
   line: LineReference | null;
   field: string | null;
   fieldLabel: string | null;
+  /** What the field said in the round of the remark, where the round shown says something else or no longer has it. */
+  referredTo: string | null;
   asksForAction: boolean;
   settled: { by: PersonView; at: string; reason: string } | null;
   replies: ReplyView[];
@@ -290,6 +292,7 @@ export interface ProposalView {
   signatures: SignatureView[];
   objections: ObjectionView[];
   remarks: RemarkView[];
+  addressable: PersonView[];
   moves: Record<ProposalMove, MoveView>;
   /** For whom the reader may sign as a deputy, by capacity. */
   deputyFor: { capacity: Capacity; person: PersonView }[];

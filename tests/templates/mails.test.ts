@@ -3,7 +3,7 @@ import { approvalTakenBack, approved, disapproved, returned, signed, withdrawn }
 import { html } from "@/templates/html";
 import { aheadChanged, leftPlannedBand, overtaken, reminder, superseded } from "@/templates/moved";
 import { proposed } from "@/templates/proposed";
-import { remarkAnswered, remarkAsksAction, remarkSettled } from "@/templates/remarks";
+import { remarkAddressed, remarkAnswered, remarkAsksAction, remarkSettled } from "@/templates/remarks";
 
 const frame = { recipientName: "Ines <script>", baseUrl: "http://127.0.0.1:3000/" };
 const facts = { productCode: "TF2", productName: "Fairing & roof", label: "TF2-CP-04", proposalNumber: 4 };
@@ -32,6 +32,7 @@ const MAILS = {
   aheadChanged: aheadChanged(frame, { ...facts, issue: 14, behind: ["020 Mid panels, behind 010"] }),
   leftPlannedBand: leftPlannedBand(frame, { ...facts, issue: 14, operatingPoint: "OP-1", side: "above" }),
   reminder: reminder(frame, { ...facts, proposerName: "Eva", neededBy: "2026-12-20" }),
+  remarkAddressed: remarkAddressed(frame, remark),
   remarkAsksAction: remarkAsksAction(frame, remark),
   remarkAnswered: remarkAnswered(frame, remark),
   remarkSettled: remarkSettled(frame, remark),

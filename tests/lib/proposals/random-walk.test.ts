@@ -113,7 +113,7 @@ async function returns(actor: Actor, people: Team, proposal: Proposal) {
 }
 
 async function remarks(random: Numbers, actor: Actor, people: Team, proposal: Proposal) {
-  const words = { suggestion: null, text: "Look here.", asksForAction: random.below(3) === 0 };
+  const words = { suggestion: null, text: "Look here.", asksForAction: random.below(3) === 0, to: [] };
   const place = { proposalId: proposal.id, parentId: null, line: null, field: null };
   await addRemark(actor, { ...place, ...words, key: formKey() }, people.clock);
 }

@@ -129,7 +129,7 @@ describe("refused acts change nothing and stand in the history", () => {
         line: { kind: "item" as const, number: "010" },
         field: "dragCoefficient",
       },
-      ...{ text: "Which gauge?", suggestion: null, asksForAction: true },
+      ...{ text: "Which gauge?", suggestion: null, asksForAction: true, to: [] },
     };
     const { remarkId, number } = await addRemark(ines, { ...remark, key: formKey() }, clock);
     expect(number).toBe(1);
@@ -189,7 +189,16 @@ describe("refused acts change nothing and stand in the history", () => {
     const nothingNew = { ...input, lockVersion: 2, key: formKey() };
     await expect(propose(tansy, nothingNew, clock)).rejects.toMatchObject({ code: "invalid" });
     const remark = {
-      ...{ proposalId, parentId: null, line: null, field: null, text: "Seen.", suggestion: null, asksForAction: false },
+      ...{
+        proposalId,
+        parentId: null,
+        line: null,
+        field: null,
+        text: "Seen.",
+        suggestion: null,
+        asksForAction: false,
+        to: [],
+      },
       key: formKey(),
     };
     const first = await addRemark(people.ines, remark, clock);

@@ -99,13 +99,13 @@ describe("the sheet of a proposal", () => {
   it("shows remarks at their field, in threads, and objections to all", async () => {
     const { tansy, odo, ines, small, clock } = await withSmallChange();
     const place = { line: { kind: "item" as const, number: "010" }, field: "dragCoefficient" };
-    const words = { suggestion: "0.495", asksForAction: true, text: "Which gauge?" };
+    const words = { suggestion: "0.495", asksForAction: true, to: [], text: "Which gauge?" };
     const { remarkId } = await addRemark(
       ines,
       { proposalId: small, parentId: null, ...place, ...words, key: formKey() },
       clock,
     );
-    const answer = { line: null, field: null, suggestion: null, asksForAction: false, text: "Gauge 7." };
+    const answer = { line: null, field: null, suggestion: null, asksForAction: false, to: [], text: "Gauge 7." };
     await addRemark(tansy, { proposalId: small, parentId: remarkId, ...answer, key: formKey() }, clock);
     await raiseObjection(odo, { proposalId: small, reason: "My item sits in its wake.", key: formKey() }, clock);
 
@@ -114,7 +114,7 @@ describe("the sheet of a proposal", () => {
     expect(row?.remarkNumbers).toEqual([1]);
     expect(sheet?.remarks).toMatchObject([
       {
-        ...{ number: 1, asksForAction: true, settled: null, maySettle: true, fieldLabel: row?.label },
+        ...{ number: 1, asksForAction: true, to: [], settled: null, maySettle: true, fieldLabel: row?.label },
         replies: [{ text: "Gauge 7.", author: { name: "Tansy Owner" } }],
       },
     ]);

@@ -32,6 +32,7 @@ export function ChangeSheet({ proposal, now }: { proposal: ProposalView; now: Da
           line={line}
           baseIssue={baseIssue}
           mayRemark={mayRemark}
+          people={proposal.addressable}
         />
       ))}
       <TransfersTable transfers={proposal.transfers} />
@@ -48,7 +49,12 @@ export function ChangeSheet({ proposal, now }: { proposal: ProposalView; now: Da
       </section>
       <Rounds proposal={proposal} />
       <Objections proposal={proposal} />
-      <RemarksSchedule proposalId={proposal.proposalId} remarks={proposal.remarks} mayRemark={mayRemark} />
+      <RemarksSchedule
+        proposalId={proposal.proposalId}
+        remarks={proposal.remarks}
+        mayRemark={mayRemark}
+        people={proposal.addressable}
+      />
     </>
   );
 }

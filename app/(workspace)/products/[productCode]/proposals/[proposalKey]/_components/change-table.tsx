@@ -1,7 +1,7 @@
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { RemarkFlag } from "@/app/_components/remark-flag";
 import { RevisionLetter } from "@/app/_components/revision-letter";
-import type { FieldChangeRow, LineChangeView } from "@/lib/proposals/views";
+import type { FieldChangeRow, LineChangeView, PersonView } from "@/lib/proposals/views";
 import { formatNewtonsChange, formatNewtonsChangeNumber } from "@/lib/units/format-newtons";
 import type { EditOperation } from "@/lib/vocabulary/lines";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
@@ -20,10 +20,11 @@ interface ChangeTableProps {
   line: LineChangeView;
   baseIssue: number;
   mayRemark: boolean;
+  people: readonly PersonView[];
 }
 
 /** One line of the change sheet: every field as it was and as it is to be, changed rows with a bar in the margin. */
-export function ChangeTable({ proposalId, line, baseIssue, mayRemark }: ChangeTableProps) {
+export function ChangeTable({ proposalId, line, baseIssue, mayRemark, people }: ChangeTableProps) {
   const added = line.operation === "add";
 
   return (
@@ -43,7 +44,14 @@ export function ChangeTable({ proposalId, line, baseIssue, mayRemark }: ChangeTa
         </TableHead>
         <tbody>
           {line.rows.map((row) => (
-            <FieldRow key={row.field} proposalId={proposalId} line={line} row={row} mayRemark={mayRemark} />
+            <FieldRow
+              key={row.field}
+              proposalId={proposalId}
+              line={line}
+              row={row}
+              mayRemark={mayRemark}
+              people={people}
+            />
           ))}
         </tbody>
       </Table>
@@ -77,9 +85,10 @@ interface FieldRowProps {
   line: LineChangeView;
   row: FieldChangeRow;
   mayRemark: boolean;
+  people: readonly PersonView[];
 }
 
-function FieldRow({ proposalId, line, row, mayRemark }: FieldRowProps) {
+function FieldRow({ proposalId, line, row, mayRemark, people }: FieldRowProps) {
   // What stays as it is takes one line on a narrow screen, so that what changes is found.
   const wideOnly = row.changed ? "" : "max-sm:!hidden";
 
@@ -113,6 +122,7 @@ function FieldRow({ proposalId, line, row, mayRemark }: FieldRowProps) {
               proposalId={proposalId}
               target={{ line: { kind: line.kind, number: line.number }, field: row.field }}
               title={`Remark on ${line.number} ${row.label}`}
+              people={people}
               discreet
             />
           ) : null}

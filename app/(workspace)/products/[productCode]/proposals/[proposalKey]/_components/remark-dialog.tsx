@@ -4,6 +4,7 @@ import { useRouter } from "next/navigation";
 import { type FormEvent, useId, useRef, useState, useTransition } from "react";
 
 import type { AddRemarkInput } from "@/lib/proposals/schema";
+import type { PersonView } from "@/lib/proposals/views";
 import { Button } from "@/app/_components/button";
 import { CheckField } from "@/app/_components/check-field";
 import { MarkdownEditor } from "@/app/_components/markdown-editor";
@@ -21,6 +22,8 @@ interface RemarkDialogProps {
   parentId?: number;
   title: string;
   trigger?: string;
+  /** To whom it can be addressed. */
+  people: readonly PersonView[];
   /** Drawn as a plain word in a table row. */
   discreet?: boolean;
 }
@@ -58,7 +61,7 @@ export function RemarkDialog({ trigger = "Remark…", title, discreet = false, .
   );
 }
 
-interface RemarkFormProps extends Pick<RemarkDialogProps, "proposalId" | "target" | "parentId"> {
+interface RemarkFormProps extends Pick<RemarkDialogProps, "proposalId" | "target" | "parentId" | "people"> {
   onDone: () => void;
 }
 
@@ -87,11 +90,36 @@ function RemarkForm(props: RemarkFormProps) {
           />
         </>
       )}
+      <Addressees people={props.people} error={refusal?.faults.find(({ path }) => path.startsWith("to"))?.sentence} />
       {refusal ? <Notice kind="refusal">{refusal.sentence}</Notice> : null}
       <Button type="submit" kind="primary" busy={busy}>
         {isAnswer ? "Answer" : "Add the remark"}
       </Button>
     </form>
+  );
+}
+
+interface AddresseesProps {
+  people: readonly PersonView[];
+  error?: string;
+}
+
+/** Whom it is addressed to: they get a mail with the number and the link. */
+function Addressees({ people, error }: AddresseesProps) {
+  if (people.length === 0) return null;
+
+  return (
+    <fieldset>
+      <legend className="mb-1 text-sm font-medium">
+        Addressed to <span className="font-normal text-ink-2">(may stay empty)</span>
+      </legend>
+      <div className="grid gap-x-4 sm:grid-cols-2">
+        {people.map(({ id, name }) => (
+          <CheckField key={id} name="to" value={String(id)} label={name} />
+        ))}
+      </div>
+      {error ? <p className="text-sm font-medium text-signal">{error}</p> : null}
+    </fieldset>
   );
 }
 
@@ -117,6 +145,7 @@ function useRemark({ proposalId, target, parentId, onDone }: RemarkFormProps) {
         text,
         suggestion: suggestion === "" ? null : suggestion,
         asksForAction: form.get("asksForAction") === "on",
+        to: form.getAll("to").map(Number),
         key,
       });
       if (!answer.ok) return setRefusal(answer);

@@ -5,7 +5,7 @@ import { RemarkFlag } from "@/app/_components/remark-flag";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { UtcTime } from "@/app/_components/utc-time";
-import type { RemarkView, ReplyView } from "@/lib/proposals/views";
+import type { PersonView, RemarkView, ReplyView } from "@/lib/proposals/views";
 
 import { RemarkDialog } from "./remark-dialog";
 import { SettleDialog } from "./settle-dialog";
@@ -14,10 +14,11 @@ interface RemarksScheduleProps {
   proposalId: number;
   remarks: readonly RemarkView[];
   mayRemark: boolean;
+  people: readonly PersonView[];
 }
 
 /** The numbered remarks of a proposal with their answers, and how what they asked for was settled. */
-export function RemarksSchedule({ proposalId, remarks, mayRemark }: RemarksScheduleProps) {
+export function RemarksSchedule({ proposalId, remarks, mayRemark, people }: RemarksScheduleProps) {
   return (
     <section aria-labelledby="remarks" className="mt-7">
       <SectionHeading id="remarks" aside={asideText(remarks)}>
@@ -36,14 +37,25 @@ export function RemarksSchedule({ proposalId, remarks, mayRemark }: RemarksSched
           </TableHead>
           <tbody>
             {remarks.map((remark) => (
-              <RemarkRow key={remark.id} proposalId={proposalId} remark={remark} mayRemark={mayRemark} />
+              <RemarkRow
+                key={remark.id}
+                proposalId={proposalId}
+                remark={remark}
+                mayRemark={mayRemark}
+                people={people}
+              />
             ))}
           </tbody>
         </Table>
       )}
       {mayRemark ? (
         <div className="mt-3">
-          <RemarkDialog proposalId={proposalId} title="Remark on the proposal" trigger="Remark on the proposal…" />
+          <RemarkDialog
+            proposalId={proposalId}
+            title="Remark on the proposal"
+            trigger="Remark on the proposal…"
+            people={people}
+          />
         </div>
       ) : null}
     </section>
@@ -61,9 +73,10 @@ interface RemarkRowProps {
   proposalId: number;
   remark: RemarkView;
   mayRemark: boolean;
+  people: readonly PersonView[];
 }
 
-function RemarkRow({ proposalId, remark, mayRemark }: RemarkRowProps) {
+function RemarkRow({ proposalId, remark, mayRemark, people }: RemarkRowProps) {
   return (
     <Row id={`remark-${remark.number}`} className="target:bg-water-pale">
       <RowHead label="Remark">
@@ -72,6 +85,7 @@ function RemarkRow({ proposalId, remark, mayRemark }: RemarkRowProps) {
       <Cell label="On">
         {remark.line ? `${remark.line.number} ${remark.fieldLabel ?? remark.line.name}` : "the proposal"}
         <span className="block text-xs text-ink-2">round {remark.round}</span>
+        {remark.referredTo ? <span className="block text-xs text-ink-2">which said: {remark.referredTo}</span> : null}
       </Cell>
       <Cell label="By">
         {remark.author.name}
@@ -96,6 +110,7 @@ function RemarkRow({ proposalId, remark, mayRemark }: RemarkRowProps) {
               parentId={remark.id}
               title={`Answer remark ${remark.number}`}
               trigger="Answer…"
+              people={people}
               discreet
             />
           </div>
@@ -111,6 +126,9 @@ function RemarkRow({ proposalId, remark, mayRemark }: RemarkRowProps) {
 function Words({ reply }: { reply: ReplyView }): ReactNode {
   return (
     <>
+      {reply.to.length > 0 ? (
+        <p className="text-xs text-ink-2">to {reply.to.map(({ name }) => name).join(", ")}</p>
+      ) : null}
       <MarkdownText text={reply.text} />
       {reply.suggestion ? (
         <p className="mt-1 text-sm">
