@@ -1,4 +1,5 @@
 import { frictionItemTimes } from "./friction-items";
+import { uncertaintyTimes } from "./budget-uncertainty";
 import { momentumIntegralTimes } from "./momentum-integral";
 import { monteCarloTimes } from "./monte-carlo";
 import { spreadsheetTimes } from "./spreadsheet-budget";
@@ -24,6 +25,10 @@ report(
   25,
 );
 print(`  the budget: ${budget.toFixed(1)} ms, the spreadsheet: ${spreadsheet.toFixed(0)} ms`);
+
+const { evaluated, uncertainty } = uncertaintyTimes();
+report("first-order uncertainty of 500 uncertain plates over evaluating them once", uncertainty / evaluated, "≤", 25);
+print(`  ${uncertainty.toFixed(0)} ms inside the transaction of a last signature`);
 
 function report(what: string, ratio: number, sign: "≤" | "≥", goal: number): void {
   const isMet = sign === "≤" ? ratio <= goal : ratio >= goal;

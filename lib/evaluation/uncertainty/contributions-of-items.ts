@@ -1,6 +1,7 @@
-import { slope } from "../methods/sensitivity";
+import { slope, type Reading } from "../methods/sensitivity";
 import { streamStateOf, type StreamState } from "../methods/stream-state";
 import type { BudgetModel, FormulaItem, ShareItem } from "./budget-model";
+import type { Cause } from "./cause";
 import { fillSlots, type Slot } from "./slot";
 
 /** What each cause does to an item's basic estimate: slope times standard uncertainty, signed, N, by place of the cause. */
@@ -8,50 +9,79 @@ export type ItemContributions = ReadonlyMap<number, number>;
 
 /** The contributions to every item of the model, in its order. One cause adds up over items: that is their covariance. */
 export function contributionsOfItems(model: BudgetModel): ItemContributions[] {
+  const probe = probeOf(model);
   const contributions: ItemContributions[] = [];
   for (const item of model.items) {
-    contributions.push(item.kind === "share" ? ofShare(item, model, contributions) : ofFormula(item, model));
+    contributions.push(item.kind === "share" ? ofShare(item, model, contributions) : ofFormula(item, model, probe));
   }
   return contributions;
 }
 
-function ofFormula(item: FormulaItem, model: BudgetModel): ItemContributions {
-  const { causes, stream } = model;
+/** What the items are tried with, made once for all of them: the streams that the causes of the point give. */
+interface Probe {
+  pointPlaces: ReadonlySet<number>;
+  nominal: StreamState;
+  streamAt(place: number, value: number): StreamState;
+  /** All 0 between two trials. */
+  deviations: Float64Array;
+}
+
+function probeOf({ causes, stream }: BudgetModel): Probe {
+  const deviations = new Float64Array(causes.length);
+  const streams = new Map<string, StreamState>();
+  const streamAt = (place: number, value: number): StreamState => {
+    const key = `${place} ${value}`;
+    const known = streams.get(key);
+    if (known) return known;
+    deviations[place] = value - (causes[place]?.value ?? 0);
+    fillSlots(stream.slots, deviations);
+    const state = streamStateOf(stream.input);
+    deviations[place] = 0;
+    fillSlots(stream.slots, deviations);
+    streams.set(key, state);
+    return state;
+  };
+  return { pointPlaces: placesOf(stream.slots), nominal: streamStateOf(stream.input), streamAt, deviations };
+}
+
+function ofFormula(item: FormulaItem, model: BudgetModel, probe: Probe): ItemContributions {
   const found = new Map<number, number>();
-  const nominal = streamStateOf(stream.input);
-  const pointPlaces = placesOf(stream.slots);
-  for (const place of new Set([...pointPlaces, ...placesOf(item.slots)])) {
-    const cause = causes[place];
-    if (cause)
-      found.set(
-        place,
-        slopeOf(place, item, model, pointPlaces.has(place) ? null : nominal) * cause.standardUncertainty,
-      );
+  const own = placesOf(item.slots);
+  const centre = { newtons: item.force.newtons(probe.nominal), regime: item.force.regime(probe.nominal) };
+  for (const place of new Set([...probe.pointPlaces, ...own])) {
+    const cause = model.causes[place];
+    if (!cause) continue;
+    const readAt = own.has(place) ? ownReading(place, cause, item, probe) : streamReading(place, item, probe);
+    const slopeHere = slope(cause, (value) => {
+      if (value === cause.value) return Number.isFinite(centre.newtons) ? centre : null;
+      return value < cause.lowest || value > cause.highest ? null : readAt(value);
+    });
+    found.set(place, slopeHere * cause.standardUncertainty);
   }
   addBiases(item.biases, item.basic, model, found);
   return found;
 }
 
-/** @param nominal the stream where the cause leaves it alone; null where it has to be made anew */
-function slopeOf(place: number, item: FormulaItem, model: BudgetModel, nominal: StreamState | null): number {
-  const { causes, stream } = model;
-  const cause = causes[place];
-  if (!cause) return 0;
-  const deviations = new Float64Array(causes.length);
-  const setTo = (value: number): void => {
-    deviations[place] = value - cause.value;
-    fillSlots(item.slots, deviations);
-    if (!nominal) fillSlots(stream.slots, deviations);
+/** The item in the stream that one cause of the operating point gives. */
+function streamReading(place: number, item: FormulaItem, probe: Probe): (value: number) => Reading | null {
+  return (value) => readingIn(item, probe.streamAt(place, value));
+}
+
+/** The item with one of its own numbers at another value. */
+function ownReading(place: number, cause: Cause, item: FormulaItem, probe: Probe): (value: number) => Reading | null {
+  return (value) => {
+    probe.deviations[place] = value - cause.value;
+    fillSlots(item.slots, probe.deviations);
+    const reading = readingIn(item, probe.nominal);
+    probe.deviations[place] = 0;
+    fillSlots(item.slots, probe.deviations);
+    return reading;
   };
-  const found = slope(cause, (value) => {
-    if (value < cause.lowest || value > cause.highest) return null;
-    setTo(value);
-    const here = nominal ?? streamStateOf(stream.input);
-    const newtons = item.force.newtons(here);
-    return Number.isFinite(newtons) ? { newtons, regime: item.force.regime(here) } : null;
-  });
-  setTo(cause.value);
-  return found;
+}
+
+function readingIn({ force }: FormulaItem, stream: StreamState): Reading | null {
+  const newtons = force.newtons(stream);
+  return Number.isFinite(newtons) ? { newtons, regime: force.regime(stream) } : null;
 }
 
 function ofShare(item: ShareItem, model: BudgetModel, contributions: readonly ItemContributions[]): ItemContributions {
