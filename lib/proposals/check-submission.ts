@@ -3,6 +3,7 @@ import { approvedMoves } from "@/lib/budget/approved-moves";
 import type { LoadedBudget } from "@/lib/budget/load-budget";
 import { membersAt } from "@/lib/budget/members";
 import { termsOf } from "@/lib/evaluation/budget/indexed-state";
+import { namedFault } from "@/lib/evaluation/lines/named-fault";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Refusal, type FieldFault } from "@/lib/vocabulary/refusal";
 import type { Member } from "@/policies/signing-rights";
@@ -41,7 +42,7 @@ export async function checkedSubmission(actor: Actor, { tx, at, proposal }: Prop
   const preview = await previewOf(stored, base, members, { at, isManager, tx });
   const change = { ...stored, edits: stored.edits.map((edit) => stamped(edit, base, preview)) };
   const stampedPreview = await previewOf(change, base, members, { at, isManager, tx });
-  refuseObstacles(stampedPreview);
+  refuseObstacles(stampedPreview, change.edits);
   await refuseRepeated(proposal, base.issue, change, tx);
   return { base, change, preview: stampedPreview, members };
 }
@@ -89,13 +90,13 @@ function refuseFaults(faults: readonly FieldFault[]): void {
   if (first) throw new Refusal("invalid", first.sentence, faults);
 }
 
-function refuseObstacles({ obstacles }: ProposalPreview): void {
+function refuseObstacles({ obstacles }: ProposalPreview, edits: StoredChange["edits"]): void {
   const [first] = obstacles;
   if (!first) return;
   const more = obstacles.length > 1 ? ` (and ${obstacles.length - 1} more)` : "";
   throw new Refusal(
     first.code,
-    `${first.sentence}${more}`,
+    `${namedFault(edits, first)}${more}`,
     obstacles.map(({ path, sentence }) => ({ path, sentence })),
   );
 }

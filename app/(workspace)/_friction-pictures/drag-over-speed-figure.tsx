@@ -25,7 +25,7 @@ export function DragOverSpeedFigure({ input, stream, name }: DragOverSpeedFigure
   return (
     <FigureWithTable
       summary={`Drag over speed: ${name} has ${formatNewtons(drag)} at ${formatResult(stream.speed, "m/s")}.`}
-      picture={<Plot layout={dragOverSpeedLayout(points, { speed: stream.speed, drag })} />}
+      picture={<Plot layout={dragOverSpeedLayout([{ word: null, points, own: { speed: stream.speed, drag } }])} />}
       caption={
         <span>
           Drag by the method over the speed of the operating point, in the same fluid.

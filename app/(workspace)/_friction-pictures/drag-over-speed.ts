@@ -29,10 +29,21 @@ export function dragAt(input: MethodInput, stream: StreamState): number | null {
   return outcome.outcome === "answer" ? outcome.answer.drag : null;
 }
 
-export function dragOverSpeedLayout(points: readonly SpeedPoint[], own: { speed: number; drag: number }): PlotLayout {
-  const answered = points.flatMap(({ speed, drag }) => (drag === null ? [] : [{ speed, drag }]));
-  const xAxis = straightAxis(points.map(({ speed }) => speed));
-  const yAxis = straightAxis([...answered, own].map(({ drag }) => drag * 1.06));
+export interface SpeedCurve {
+  /** Nothing where the picture has one curve alone. */
+  word: "A" | "B" | null;
+  points: readonly SpeedPoint[];
+  own: { speed: number; drag: number };
+}
+
+/** One curve, or two beside each other: solid with a ring and dashed with a square. */
+export function dragOverSpeedLayout(curves: readonly SpeedCurve[]): PlotLayout {
+  const answered = curves.map(({ points }) =>
+    points.flatMap(({ speed, drag }) => (drag === null ? [] : [{ speed, drag }])),
+  );
+  const all = [...answered.flat(), ...curves.map(({ own }) => own)];
+  const xAxis = straightAxis(curves.flatMap(({ points }) => points.map(({ speed }) => speed)));
+  const yAxis = straightAxis(all.map(({ drag }) => drag * 1.06));
   const place = ({ speed, drag }: { speed: number; drag: number }) => ({
     x: xAxis.fraction(speed),
     y: yAxis.fraction(drag),
@@ -44,7 +55,17 @@ export function dragOverSpeedLayout(points: readonly SpeedPoint[], own: { speed:
     xTitle: "U, m/s",
     yTitle: "N",
     bands: [],
-    curves: [{ name: "drag", look: "own", points: answered.map(place), label: null }],
-    marks: [{ ...place(own), text: formatNewtons(own.drag) }],
+    curves: curves.map(({ word }, at) => ({
+      name: word ? `drag of ${word}` : "drag",
+      look: word === "B" ? "dashed" : "own",
+      points: (answered[at] ?? []).map(place),
+      label: null,
+    })),
+    marks: curves.map(({ word, own }) => ({
+      ...place(own),
+      text: word ? `${word} ${formatNewtons(own.drag)}` : formatNewtons(own.drag),
+      sign: word === "B" ? "square" : "ring",
+      side: word === "B" ? "below" : "above",
+    })),
   };
 }

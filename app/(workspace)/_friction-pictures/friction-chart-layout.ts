@@ -2,18 +2,21 @@ import { formatSignificant } from "@/lib/units/format-number";
 
 import { decadeAxis, powerOfTen, stepAxis } from "./axis";
 import type { ChartPoint, FrictionChart } from "./friction-chart";
-import type { PlotCurve, PlotLabel, PlotLayout, PlotPoint } from "./plot-layout";
+import type { PlotCurve, PlotLabel, PlotLayout, PlotMark, PlotPoint } from "./plot-layout";
 
 /** Coefficients that the lines themselves need; an item beyond them widens the chart. */
 const LEAST = 1e-3;
 const GREATEST = 1e-2;
 
-/** The friction chart on two logarithmic axes. */
-export function frictionChartLayout(chart: FrictionChart): PlotLayout {
-  const { own } = chart;
-  const xAxis = decadeAxis(Math.round(Math.log10(chart.leastReynolds)), 10);
-  const highest = Math.max(GREATEST, own.coefficient, chart.laminar[0]?.coefficient ?? 0);
-  const yAxis = stepAxis(Math.min(LEAST, own.coefficient), highest);
+/** The friction chart on two logarithmic axes, with one item, or with a second one beside it: A and B then. */
+export function frictionChartLayout(chart: FrictionChart, beside: FrictionChart | null = null): PlotLayout {
+  const charts = beside ? [chart, beside] : [chart];
+  const owns = charts.map(({ own }) => own.coefficient);
+  const isFirstLower = beside !== null && chart.own.coefficient < beside.own.coefficient;
+  const least = Math.min(...charts.map(({ leastReynolds }) => leastReynolds));
+  const xAxis = decadeAxis(Math.round(Math.log10(least)), 10);
+  const highest = Math.max(GREATEST, ...owns, ...charts.map(({ laminar }) => laminar[0]?.coefficient ?? 0));
+  const yAxis = stepAxis(Math.min(LEAST, ...owns), highest);
   const place = ({ reynolds, coefficient }: ChartPoint): PlotPoint => ({
     x: xAxis.fraction(reynolds),
     y: yAxis.fraction(coefficient),
@@ -30,9 +33,6 @@ export function frictionChartLayout(chart: FrictionChart): PlotLayout {
     points: points.map(place),
     label: label && labelAt ? { ...label, ...place(labelAt) } : null,
   });
-  // Lines fall from left to right: what ends below its point stands clear of them.
-  const above = (text: string) => ({ text, anchor: "end" as const, side: "above" as const });
-  const below = (text: string) => ({ text, anchor: "end" as const, side: "below" as const });
 
   return {
     xTicks: xAxis.ticks,
@@ -55,8 +55,23 @@ export function frictionChartLayout(chart: FrictionChart): PlotLayout {
       drawn("mixed", "dashed", chart.mixed),
       drawn("turbulent", "ink", chart.turbulent, below("turbulent"), lastBefore(chart.turbulent, 3e8)),
       drawn("this item's layer", "own", chart.layer),
+      ...(beside ? [drawn("the layer of B", "second", beside.layer)] : []),
     ],
-    marks: [{ ...place(own), text: `C_F ${formatSignificant(own.coefficient)}` }],
+    marks: charts.map(({ own }, at) => ({ ...place(own), ...markOf(own, at, beside !== null, isFirstLower) })),
+  };
+}
+
+// Lines fall from left to right: what ends below its point stands clear of them.
+const above = (text: string) => ({ text, anchor: "end" as const, side: "above" as const });
+const below = (text: string) => ({ text, anchor: "end" as const, side: "below" as const });
+
+/** Of two the lower one has its word below. */
+function markOf(own: ChartPoint, at: number, isOfTwo: boolean, isFirstLower: boolean): Omit<PlotMark, "x" | "y"> {
+  const word = at === 0 ? "A, " : "B, ";
+  return {
+    text: `${isOfTwo ? word : ""}C_F ${formatSignificant(own.coefficient)}`,
+    sign: at === 0 ? "ring" : "square",
+    side: isOfTwo && isFirstLower === (at === 0) ? "below" : "above",
   };
 }
 

@@ -67,7 +67,8 @@ export function shearLayout(growth: LayerGrowth): PlotLayout {
     yTitle: "τ_w, Pa",
     bands: bandsOf(growth, xAxis),
     curves: [{ name: "τ_w", look: "own", points, label: null }],
-    marks: last && atEnd ? [{ ...last, text: formatResult(atEnd.wallShearStress, "Pa") }] : [],
+    marks:
+      last && atEnd ? [{ ...last, text: formatResult(atEnd.wallShearStress, "Pa"), sign: "ring", side: "above" }] : [],
   };
 }
 

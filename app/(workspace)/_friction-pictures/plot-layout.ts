@@ -30,6 +30,10 @@ export interface PlotBand {
 
 export interface PlotMark extends PlotPoint {
   text: string;
+  /** Two marks in one picture are told apart by their sign and their word. */
+  sign: "ring" | "square";
+  /** Whether the word stands above or below the sign. */
+  side: "above" | "below";
 }
 
 /** A picture with two axes, ready to be drawn at any width. */

@@ -147,17 +147,23 @@ function Label({ label }: { label: PlotLabel }) {
   );
 }
 
-/** The item's own point with its value, on the side that has room. */
+/** An item's point with its value, on the side that has room. */
 function Mark({ mark }: { mark: PlotMark }) {
   const onLeft = mark.x > 0.6;
 
   return (
     <g>
-      <circle cx={percent(mark.x)} cy={y(mark.y)} r="4.5" strokeWidth="2.5" className="fill-sheet stroke-water" />
+      {mark.sign === "ring" ? (
+        <circle cx={percent(mark.x)} cy={y(mark.y)} r="4.5" strokeWidth="2.5" className="fill-sheet stroke-water" />
+      ) : (
+        <svg x={percent(mark.x)} y={y(mark.y)} className="overflow-visible">
+          <rect x="-4.5" y="-4.5" width="9" height="9" strokeWidth="2" className="fill-sheet stroke-ink" />
+        </svg>
+      )}
       <text
         x={percent(mark.x)}
         dx={onLeft ? -9 : 9}
-        y={y(mark.y) - 9}
+        y={y(mark.y) + (mark.side === "above" ? -9 : 19)}
         textAnchor={onLeft ? "end" : "start"}
         strokeWidth="4"
         strokeLinejoin="round"

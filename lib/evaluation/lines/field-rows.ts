@@ -26,6 +26,13 @@ export function isShown({ shownWhen }: FieldSpec, values: ReadonlyMap<string, un
   return shownWhen.is.some((value) => value === decisive);
 }
 
+/** The body without what its form no longer asks: an optional field that another choice hid is empty, not left behind. */
+export function withoutHidden<Body extends Readonly<Record<string, unknown>>>(kind: LineKind, body: Body): Body {
+  const values = valuesOf(body);
+  const hidden = fieldsOfBody(kind, body).filter((field) => field.optional && !isShown(field, values));
+  return { ...body, ...Object.fromEntries(hidden.filter(({ key }) => key in body).map(({ key }) => [key, null])) };
+}
+
 function rowsOf(field: FieldSpec, prefix: string, value: unknown, names: NameBook): FieldRow[] {
   const path = `${prefix}${field.key}`;
   if (field.type.type === "record") {

@@ -164,7 +164,7 @@ describe("drag over speed", () => {
   it("leaves out the speeds at which the method refuses the item", () => {
     const input = plate({ length: 0.001 });
     const points = dragOverSpeed(input, STREAM, 16);
-    const layout = dragOverSpeedLayout(points, { speed: 30, drag: answerOf(input).drag });
+    const layout = dragOverSpeedLayout([{ word: null, points, own: { speed: 30, drag: answerOf(input).drag } }]);
 
     expect(points.filter(({ drag }) => drag === null).length).toBeGreaterThan(0);
     expect(layout.curves[0]?.points).toHaveLength(points.filter(({ drag }) => drag !== null).length);
@@ -172,9 +172,46 @@ describe("drag over speed", () => {
 
   it("draws a saving below zero", () => {
     const input = MethodInput.parse({ method: "drag-area", dragArea: -0.1, saving: true });
-    const layout = dragOverSpeedLayout(dragOverSpeed(input, STREAM, 16), { speed: 30, drag: -45 });
+    const layout = dragOverSpeedLayout([
+      { word: null, points: dragOverSpeed(input, STREAM, 16), own: { speed: 30, drag: -45 } },
+    ]);
 
     expect(layout.yTicks.some(({ label }) => label?.startsWith("−"))).toBe(true);
     expect(layout.marks[0]?.y).toBeGreaterThanOrEqual(0);
+  });
+});
+
+describe("two settings in one picture", () => {
+  it("stand on one friction chart where each stands on its own, told apart by sign and word", () => {
+    const [smooth, rough] = [plate(), plate({ roughness: 1e-3 })].map((input) => frictionChart(subjectOf(input)));
+    if (!smooth || !rough) throw new Error("no charts");
+    const { marks } = frictionChartLayout(smooth, rough);
+
+    expect(marks.map(({ sign, text }) => `${sign} ${text.slice(0, 2)}`)).toEqual(["ring A,", "square B,"]);
+    // The same axes as of one alone: neither widens the chart here.
+    expect(marks[0]).toMatchObject({
+      x: frictionChartLayout(smooth).marks[0]?.x,
+      y: frictionChartLayout(smooth).marks[0]?.y,
+    });
+    expect(marks[1]).toMatchObject({
+      x: frictionChartLayout(rough).marks[0]?.x,
+      y: frictionChartLayout(rough).marks[0]?.y,
+    });
+    expect(marks.map(({ side }) => side)).toEqual(["below", "above"]);
+  });
+
+  it("have their drags over speed on the axes of both", () => {
+    const input = MethodInput.parse({ method: "drag-area", dragArea: 0.1 });
+    const curve = (word: "A" | "B", speed: number) => {
+      const stream = { ...STREAM, speed, dynamicPressure: 0.5 * speed ** 2 };
+      return { word, points: dragOverSpeed(input, stream), own: { speed, drag: 0.05 * speed ** 2 } };
+    };
+    const { curves, marks } = dragOverSpeedLayout([curve("A", 10), curve("B", 30)]);
+
+    expect(curves.map(({ look }) => look)).toEqual(["own", "dashed"]);
+    expect(marks.map(({ sign }) => sign)).toEqual(["ring", "square"]);
+    // One method in one fluid: at three times the speed nine times the drag, on one and the same axis.
+    expect((marks[1]?.x ?? 0) / (marks[0]?.x ?? 1)).toBeCloseTo(3, 9);
+    expect((marks[1]?.y ?? 0) / (marks[0]?.y ?? 1)).toBeCloseTo(9, 9);
   });
 });

@@ -1,10 +1,12 @@
 "use client";
 
-import { asRecord, type Body, type Json } from "@/app/_components/line-fields/body";
+import type { Body, Json } from "@/app/_components/line-fields/body";
 import type { EditorNames } from "@/app/_components/line-fields/editor-names";
 import { FieldInput } from "@/app/_components/line-fields/field-input";
 import { withMethod } from "@/app/_components/line-fields/new-edit";
 import { type FieldSpec, setByChoice } from "@/lib/evaluation/lines/field-spec";
+import { fieldWords } from "@/lib/evaluation/lines/named-fault";
+import { withoutHidden } from "@/lib/evaluation/lines/field-rows";
 import { FINISH_CATALOGUE } from "@/lib/products/finish-catalogue";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
 
@@ -47,7 +49,7 @@ export function SettingForm({ side, setting, onChange, faults }: SettingFormProp
         specs={pointFields(point)}
         body={point}
         faults={faults}
-        onField={(spec, value) => onChange({ ...setting, point: withChoice(point, spec, value) })}
+        onField={(spec, value) => onChange({ ...setting, point: withChoice("operating_point", point, spec, value) })}
       />
       <FieldGroup
         legend="Item"
@@ -56,7 +58,7 @@ export function SettingForm({ side, setting, onChange, faults }: SettingFormProp
         specs={itemFields(item)}
         body={item}
         faults={faults}
-        onField={(spec, value) => onChange({ ...setting, item: withChoice(item, spec, value) })}
+        onField={(spec, value) => onChange({ ...setting, item: withChoice("item", item, spec, value) })}
       />
       {item.method === "share" ? (
         <FieldGroup
@@ -73,13 +75,11 @@ export function SettingForm({ side, setting, onChange, faults }: SettingFormProp
   );
 }
 
-function withChoice(body: Body, spec: FieldSpec, value: Json): Body {
+function withChoice(kind: "operating_point" | "item", body: Body, spec: FieldSpec, value: Json): Body {
   if (spec.key === "method" && typeof value === "string") return withMethod(body, value);
-  const next = { ...body, [spec.key]: value, ...setByChoice(spec, value) };
-  // A catalogued finish brings its roughness: a typed one beside it would be a second answer.
-  return spec.key === "finish"
-    ? { ...next, roughness: value === null ? asRecord({ value: 0, entered: "0" }) : null }
-    : next;
+  // A catalogued finish brings its roughness; without one a typed roughness is asked, smooth to begin with.
+  const typed: Body = spec.key === "finish" && value === null ? { roughness: { value: 0, entered: "0" } } : {};
+  return withoutHidden(kind, { ...body, [spec.key]: value, ...setByChoice(spec, value), ...typed });
 }
 
 interface FieldGroupProps {
@@ -129,20 +129,28 @@ interface StillMissingProps extends Pick<FieldGroupProps, "specs" | "body" | "fa
   pathOf: (key: string) => string;
 }
 
-/** What has to be filled in before there is a result, by the names of the fields. */
+/** What keeps it from a result and stands at no field above: what is empty yet, and what another choice hid. */
 function StillMissing({ specs, body, faults, pathOf }: StillMissingProps) {
+  const kind = pathOf("") === "point." ? "operating_point" : "item";
   const missing = specs.flatMap(({ key, label }) => {
     const fault = faults.find(({ path }) => path === pathOf(key));
-    return fault && isBlank(body[key]) ? [{ key, text: `${label}: ${fault.sentence}` }] : [];
+    return fault && isBlank(body[key]) ? [`${label}: ${fault.sentence}`] : [];
   });
-  if (missing.length === 0) return null;
+  const hidden = faults.flatMap(({ path, sentence }) => {
+    const [, key = ""] = path.split(".");
+    const isHere = path.startsWith(pathOf("")) && pathOf("") !== "";
+    if (!isHere || specs.some((spec) => spec.key === key)) return [];
+    return [[...fieldWords({ kind, body }, key), sentence].join(": ")];
+  });
+  const texts = [...missing, ...hidden];
+  if (texts.length === 0) return null;
 
   return (
     <div role="status" className="mt-2 border-l-4 border-ink px-3 py-1 text-sm">
       Still needed:
       <ul>
-        {missing.map(({ key, text }) => (
-          <li key={key}>{text}</li>
+        {texts.map((text) => (
+          <li key={text}>{text}</li>
         ))}
       </ul>
     </div>

@@ -9,6 +9,7 @@ import { useHydrated } from "@/app/_components/use-hydrated";
 
 import { readSetting } from "../_trial/read-setting";
 import { exampleTrial, SIDES, type Trial } from "../_trial/setting";
+import { BothSettingsPictures } from "./both-settings-pictures";
 import { ComparisonTable } from "./comparison-table";
 import { keepTrial, readTrial } from "./kept-trial";
 import { SettingForm } from "./setting-form";
@@ -60,6 +61,7 @@ function TwoSettings({ userId, products }: TrialSheetProps) {
       </div>
       <SectionHeading>What comes out</SectionHeading>
       <ComparisonTable a={readings.a} b={readings.b} />
+      <BothSettingsPictures a={readings.a.result} b={readings.b.result} />
       <div className="mt-2 grid gap-x-10 lg:grid-cols-2">
         {SIDES.map((side) => (
           <SettingResult key={side} side={side} result={readings[side].result} />

@@ -9,10 +9,11 @@ import type { Body } from "@/app/_components/line-fields/body";
 import type { EditorNames } from "@/app/_components/line-fields/editor-names";
 import { FieldInput } from "@/app/_components/line-fields/field-input";
 import { withMethod } from "@/app/_components/line-fields/new-edit";
-import { isShown, valuesOf } from "@/lib/evaluation/lines/field-rows";
+import { isShown, valuesOf, withoutHidden } from "@/lib/evaluation/lines/field-rows";
 import { sameBody } from "@/lib/evaluation/lines/same-body";
 import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
 import { type FieldSpec, setByChoice } from "@/lib/evaluation/lines/field-spec";
+import { fieldWords } from "@/lib/evaluation/lines/named-fault";
 import type { DraftEdit } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
@@ -58,7 +59,7 @@ export function LineForm(props: LineFormProps) {
           </button>
         </span>
       </div>
-      <LineFaults faults={own} strict={strict} body={edit.body} />
+      <LineFaults faults={own} strict={strict} kind={edit.kind} body={edit.body} />
       {edit.operation === "add" ? (
         <div className="mb-3 max-w-44">
           <TextField
@@ -119,7 +120,7 @@ function Fields({ edit, index, body, onChange, names, faults, strict, before, to
   };
   const change = (spec: FieldSpec, value: Body[string]) => {
     if (spec.key !== "method" || typeof value !== "string") {
-      return onChange({ ...body, [spec.key]: value, ...setByChoice(spec, value) });
+      return onChange(withoutHidden(edit.kind, { ...body, [spec.key]: value, ...setByChoice(spec, value) }));
     }
     const known = { ...left, ...body };
     onLeave(known);
@@ -176,12 +177,20 @@ function isPartOf(faultPath: string, path: string): boolean {
 interface LineFaultsProps {
   faults: readonly FieldFault[];
   strict: boolean;
+  kind: DraftEdit["kind"];
   body: Body | null;
 }
 
 /** What is wrong with the line as a whole, or with a field that its form does not show. */
-function LineFaults({ faults, strict, body }: LineFaultsProps) {
-  const whole = faults.filter(({ path }) => path === "" || path === "body" || path === "operation" || !body);
+function LineFaults({ faults, strict, kind, body }: LineFaultsProps) {
+  const ofLine = faults.filter(({ path }) => path === "" || path === "body" || path === "operation" || !body);
+  const ofHidden = faults.filter(({ path }) => body && isHiddenField(kind, body, path));
+  const whole = [
+    ...ofLine,
+    ...ofHidden.map(({ path, sentence }) => {
+      return { path, sentence: `${fieldWords({ kind, body }, path).join(", ")}: ${sentence}` };
+    }),
+  ];
   if (whole.length === 0 || (!strict && body)) return null;
 
   return (
@@ -194,4 +203,10 @@ function LineFaults({ faults, strict, body }: LineFaultsProps) {
       ))}
     </ul>
   );
+}
+
+function isHiddenField(kind: DraftEdit["kind"], body: Body, path: string): boolean {
+  const spec = fieldsOfBody(kind, body).find(({ key }) => key === path.split(".")[0]);
+
+  return spec !== undefined && !isShown(spec, valuesOf(body));
 }

@@ -1,8 +1,11 @@
 "use client";
 
+import { namedFault } from "@/lib/evaluation/lines/named-fault";
 import type { Obstacle } from "@/lib/proposals/preview-proposal";
+import type { DraftEdit } from "@/lib/proposals/schema";
 
 interface ObstaclesProps {
+  edits: readonly DraftEdit[];
   obstacles: readonly Obstacle[];
   hasReason: boolean;
   strict: boolean;
@@ -10,9 +13,9 @@ interface ObstaclesProps {
 }
 
 /** What still keeps the draft from being proposed; each sentence leads to its field. */
-export function Obstacles({ obstacles, hasReason, strict, onShow }: ObstaclesProps) {
+export function Obstacles({ edits, obstacles, hasReason, strict, onShow }: ObstaclesProps) {
   const all = [
-    ...obstacles.map(({ path, sentence }) => ({ target: targetOf(path), sentence })),
+    ...obstacles.map((obstacle) => ({ target: targetOf(obstacle.path), sentence: namedFault(edits, obstacle) })),
     ...(hasReason ? [] : [{ target: "reason", sentence: "Say why: the reason is still empty." }]),
   ];
   if (all.length === 0) return <p className="mt-6 text-sm">Nothing keeps it from being proposed.</p>;

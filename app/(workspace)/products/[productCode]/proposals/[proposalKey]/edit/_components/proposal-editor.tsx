@@ -56,6 +56,7 @@ export function ProposalEditor({ view }: { view: EditorView }) {
         <RoutingPanel preview={preview} />
         <CoEditors draft={draft} isProposer={draft.proposer.id === view.me.userId} />
         <Obstacles
+          edits={content.edits}
           obstacles={preview.obstacles}
           hasReason={content.reason.trim() !== ""}
           strict={strict}
