@@ -25,12 +25,14 @@ export function chosenMeasure(
 
   const known = MEASURES.find((measure) => measure === asked);
   if (known !== undefined && offered.includes(known)) return { ...choice, measure: known, refusal: null };
-  return { ...choice, measure: "newtons", refusal: `${refusalOf(asked, known, bases[0])} Forces are shown instead.` };
+  return { ...choice, measure: "newtons", refusal: `${refusalOf(asked, known, bases)} Forces are shown instead.` };
 }
 
-function refusalOf(asked: string, known: Measure | undefined, basis: MeasureBasis | undefined): string {
-  if (known === undefined || basis === undefined) return `“${asked}” is no measure that is known here.`;
-  return missingMeasureSentence(known, basis);
+function refusalOf(asked: string, known: Measure | undefined, bases: readonly MeasureBasis[]): string {
+  if (known === undefined) return `“${asked}” is no measure that is known here.`;
+  const [only, ...others] = bases;
+  if (only === undefined || others.length > 0) return "None of these products has the measure that was asked for.";
+  return missingMeasureSentence(known, only);
 }
 
 /** How the newtons of one operating point are printed; in newtons where it doesn't have the measure. */

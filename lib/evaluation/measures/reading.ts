@@ -56,11 +56,6 @@ export function readText(reading: Reading, newtons: number): string {
   return reading.unit === "" ? number : `${number}${space}${reading.unit}`;
 }
 
-/** A change with its sign always; nothing has none. */
-export function readChange(reading: Reading, newtons: number): string {
-  return `${toHundredths(newtons) > 0 ? "+" : ""}${readText(reading, newtons)}`;
-}
-
 /** A round value of a ruler, given in newtons. */
 export function readTick(reading: Reading, newtons: number): string {
   return formatExact(newtons * reading.perNewton);

@@ -40,6 +40,7 @@ describe("the measure of a page", () => {
   it("offers on a page of several products what any of them has; a product without it stays in newtons", () => {
     const chosen = chosenMeasure("counts", SI, [DUCT, CAR]);
     expect(chosen.measure).toBe("counts");
+    expect(chosenMeasure("counts", SI, [DUCT, DUCT]).refusal).toMatch(/None of these products/);
     expect(readingFor(chosen, CAR).unit).toBe("counts");
     expect(readingFor(chosen, DUCT).unit).toBe("N");
     expect(readingFor({ ...chosen, units: "us" }, DUCT).unit).toBe("lbf");

@@ -21,6 +21,8 @@ interface IssuesTableProps {
 /** Every issue, newest first: what made it, who signed, and where the total stood. */
 export function IssuesTable({ issues, trend, operatingPoint, productCode, measure }: IssuesTableProps) {
   const totals = new Map(trend.map(({ number, points }) => [number, points]));
+  const newest = trend.at(-1)?.points.find((each) => each.operatingPoint === operatingPoint);
+  const newestBasis = newest ? readingFor(measure, newest.basis).basis : null;
 
   return (
     <Table caption={`Issues, with totals at ${operatingPoint}`}>
@@ -37,7 +39,8 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode, measur
         {issues.toReversed().map((issue) => {
           const point = totals.get(issue.number)?.find((each) => each.operatingPoint === operatingPoint);
           // By the terms of its own issue: what stood then is not read by what holds now.
-          const print = (newtons: number) => (point ? readText(readingFor(measure, point.basis), newtons) : "–");
+          const reading = point ? readingFor(measure, point.basis) : null;
+          const print = (newtons: number) => (reading ? readText(reading, newtons) : "–");
           return (
             <Row key={issue.number} data-issue={issue.number}>
               <RowHead>
@@ -75,7 +78,12 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode, measur
                 {proposedBy(issue)}
                 <span className="block text-xs text-ink-2">{approvedBy(issue)}</span>
               </Cell>
-              <Cell numeric>{point ? print(point.predicted) : "–"}</Cell>
+              <Cell numeric>
+                {point ? print(point.predicted) : "–"}
+                {reading && reading.basis !== newestBasis ? (
+                  <span className="block text-xs whitespace-normal text-ink-2">{reading.basis}</span>
+                ) : null}
+              </Cell>
               <Cell numeric>{point ? print(point.margin) : "–"}</Cell>
               <Cell className={point?.standing === "over" ? "font-semibold text-signal" : undefined}>
                 {point ? STANDING_NAMES[point.standing] : "no such operating point"}
