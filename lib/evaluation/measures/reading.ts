@@ -56,10 +56,12 @@ export function readText(reading: Reading, newtons: number): string {
   return reading.unit === "" ? number : `${number}${space}${reading.unit}`;
 }
 
-/** A round value of a ruler, given in newtons. */
+/** A round value of a ruler, given in newtons: 4 lbf there and back is 4 again, not 3.99999999999. */
 export function readTick(reading: Reading, newtons: number): string {
-  return formatExact(newtons * reading.perNewton);
+  return formatExact(Number((newtons * reading.perNewton).toPrecision(TICK_DIGITS)));
 }
+
+const TICK_DIGITS = 6;
 
 /** Is it read in what is kept, so that nothing needs to stand beside it? */
 export function isKept({ measure, perNewton: factor }: Reading): boolean {

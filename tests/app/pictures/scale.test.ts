@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { percent, rulerTicks } from "@/app/(workspace)/products/[productCode]/_pictures/scale";
+import { NEWTONS, readTick } from "@/lib/evaluation/measures/reading";
 
 describe("the ruler", () => {
   it("steps by 1, 2 or 5 times a power of ten", () => {
@@ -10,6 +11,14 @@ describe("the ruler", () => {
 
   it("never draws more ticks than one above what was asked", () => {
     for (let max = 0.013; max < 1e6; max *= 1.37) expect(rulerTicks({ min: 0, max }, 8).length).toBeLessThanOrEqual(9);
+  });
+
+  it("has round values of the measure that is read, and prints them round", () => {
+    // NIST SP 811 (2008), B.8: 1 lbf = 4.4482216152605 N exactly.
+    const pounds = { ...NEWTONS, perNewton: 1 / 4.4482216152605, unit: "lbf" };
+    const ticks = rulerTicks({ min: 0, max: 70 }, 8, pounds.perNewton);
+    expect(ticks.map((tick) => readTick(pounds, tick))).toEqual(["0", "2", "4", "6", "8", "10", "12", "14"]);
+    expect(ticks[1]).toBeCloseTo(8.896443230521, 9);
   });
 
   it("writes fractions as percentages a style attribute accepts", () => {
