@@ -80,6 +80,14 @@ export async function answerWrite<Schema extends z.ZodType, Value>(
   schema: Schema,
   command: Command<z.output<Schema>, Value>,
 ): Promise<Response> {
+  const write = await readWrite(request);
+  if (write instanceof Response) return write;
+
+  return resultResponse(await runCommand(schema, command, write.actor, write.body));
+}
+
+/** Who writes what; or the answer to a write that is none. */
+export async function readWrite(request: Request): Promise<{ actor: Actor; body: unknown } | Response> {
   if (isForeignWrite(request))
     return refusalResponse(new Refusal("forbidden", "This did not come from a page of ours."));
 
@@ -89,7 +97,7 @@ export async function answerWrite<Schema extends z.ZodType, Value>(
   const body = await readJson(request);
   if (body === undefined) return refusalResponse(new Refusal("invalid", "This is no JSON text, or it is too long."));
 
-  return resultResponse(await runCommand(schema, command, actor, body));
+  return { actor, body };
 }
 
 /** Longest body of a write: 512 KiB of JSON. */
@@ -106,7 +114,8 @@ async function readJson(request: Request): Promise<unknown> {
   }
 }
 
-function resultResponse(result: ActionResult<unknown>): Response {
+/** What a command answered, as an answer with its status. */
+export function resultResponse(result: ActionResult<unknown>): Response {
   if (result.ok) return Response.json(result.value ?? null, { headers: { "cache-control": "no-store" } });
   const { code, sentence, faults } = result;
 

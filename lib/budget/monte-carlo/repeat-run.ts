@@ -1,14 +1,9 @@
-import { z } from "zod";
 import type { Actor } from "@/lib/vocabulary/actor";
-import type { Clock } from "@/lib/vocabulary/clock";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { keptResultText, MONTE_CARLO_RECIPE } from "./kept-result";
 import { drawInPlace } from "./draw-in-place";
 import type { RunOptions } from "./run-monte-carlo";
 import { keptRun } from "./runs-of";
-
-export const RepeatRunInput = z.strictObject({ productCode: z.string(), runId: z.int().positive() });
-export type RepeatRunInput = z.infer<typeof RepeatRunInput>;
 
 export interface RepeatedRun {
   runId: number;
@@ -21,8 +16,8 @@ export interface RepeatedRun {
 /** Draws a kept run again and compares: changes nothing, so that an auditor may ask for it too. */
 export async function repeatRun(
   actor: Actor,
-  { productCode, runId }: RepeatRunInput,
-  _clock: Clock,
+  productCode: string,
+  runId: number,
   options: RunOptions = {},
 ): Promise<RepeatedRun> {
   const { text, ...kept } = await keptRun(actor, productCode, runId);

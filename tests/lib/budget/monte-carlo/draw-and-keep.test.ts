@@ -66,7 +66,7 @@ describe("a run that is kept", () => {
   it("gives the same bytes when it is drawn again, by whoever reads the budget", async () => {
     const { ines, maud } = await lamp();
     const { runId } = await drawAndKeep(ines, INPUT, clock, options);
-    const repeated = await repeatRun(maud, { productCode: "TF-2", runId }, clock, options);
+    const repeated = await repeatRun(maud, "TF-2", runId, options);
     expect(repeated).toEqual({ runId, sameInput: true, sameResult: true });
     expect(await entries()).toHaveLength(1);
   });
@@ -75,7 +75,7 @@ describe("a run that is kept", () => {
     const { ines } = await lamp();
     const { runId } = await drawAndKeep(ines, INPUT, clock, options);
     await forge("UPDATE monte_carlo_runs SET result = replace(result, '\"low95\":2', '\"low95\":1')");
-    const repeated = await repeatRun(ines, { productCode: "TF-2", runId }, clock, options);
+    const repeated = await repeatRun(ines, "TF-2", runId, options);
     expect(repeated).toEqual({ runId, sameInput: true, sameResult: false });
   });
 

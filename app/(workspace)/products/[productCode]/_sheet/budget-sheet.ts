@@ -7,6 +7,7 @@ import type { GroupBody } from "@/lib/evaluation/lines/group-body";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
 import type { LineState } from "@/lib/evaluation/lines/line-state";
 import { type MeasureBasis, measureBasis } from "@/lib/evaluation/measures/measure-basis";
+import type { PointUncertaintyOutcome } from "@/lib/evaluation/uncertainty/budget-uncertainty";
 import { roundStored, toHundredths } from "@/lib/units/rounding";
 
 interface RowFigures {
@@ -44,6 +45,8 @@ export interface BudgetSheet {
   budget: BudgetAt;
   indexed: IndexedState;
   point: PointResult;
+  /** To first order, as the issue froze it; null where it keeps nothing of it. */
+  uncertainty: PointUncertaintyOutcome | null;
   /** Allocations are set at the reference operating point; at another one a margin is no flag. */
   isReference: boolean;
   /** Groups ahead of what they hold. */
@@ -59,17 +62,20 @@ export function pointOf(budget: BudgetAt, asked: string | undefined): PointResul
 
 export function budgetSheet(budget: BudgetAt, point: PointResult): BudgetSheet {
   const indexed = indexState(budget.state);
+  const uncertainty = budget.uncertainty?.points.find((each) => each.operatingPoint === point.operatingPoint) ?? null;
   const context: RowContext = {
     indexed,
     results: new Map(point.items.map((result) => [result.item, result])),
     letters: new Map(budget.state.lines.map((line) => [`${line.kind} ${line.number}`, line.letter])),
     people: new Map(budget.people.map(({ id, name }) => [id, name])),
+    uncertainties: uncertaintiesOf(uncertainty),
   };
 
   return {
     budget,
     indexed,
     point,
+    uncertainty,
     isReference: indexed.terms.referenceOperatingPoint === point.operatingPoint,
     rows: sheetOrder(indexed).flatMap((row) => rowOf(row, context) ?? []),
     retired: budget.state.lines.filter(({ retired }) => retired),
@@ -87,6 +93,19 @@ interface RowContext {
   results: ReadonlyMap<string, ItemResult>;
   letters: ReadonlyMap<string, string>;
   people: ReadonlyMap<number, string>;
+  /** N, by the item's number. */
+  uncertainties: ReadonlyMap<string, number>;
+}
+
+function uncertaintiesOf(outcome: PointUncertaintyOutcome | null): ReadonlyMap<string, number> {
+  if (outcome === null || "refused" in outcome) return new Map();
+  return new Map(outcome.items.map(({ item, standardUncertainty }) => [item, standardUncertainty]));
+}
+
+/** A result is kept without its uncertainty: that stands with the issue, where what items share is counted once. */
+function withUncertainty(result: ItemResult, standardUncertainty: number | undefined): ItemResult {
+  if (!result.answer || standardUncertainty === undefined) return result;
+  return { ...result, answer: { ...result.answer, standardUncertainty } };
 }
 
 function rowOf({ kind, number, depth }: SheetRow, context: RowContext): BudgetRow | null {
@@ -112,7 +131,7 @@ function itemRow(number: string, depth: number, letter: string, context: RowCont
     ...allocationOf("item", number, result.refused ? null : predicted, context.indexed),
     body,
     owner: context.people.get(body.ownerId) ?? `person ${body.ownerId}`,
-    result,
+    result: withUncertainty(result, context.uncertainties.get(number)),
   };
 }
 

@@ -2,8 +2,11 @@ import type { LineRevisionView } from "@/lib/budget/views";
 
 import type { BudgetSheet } from "../_sheet/budget-sheet";
 import { allocationMarginWorking, allocationWorking } from "./allocation-working";
+import { causeWorking } from "./cause-working";
+import { itemUncertaintyWorking } from "./item-uncertainty-working";
 import { basicWorking, growthWorking, predictedWorking } from "./item-working";
 import { groupWorking, limitWorking, totalWorking, withoutSavingsWorking } from "./total-working";
+import { totalUncertaintyWorking } from "./total-uncertainty-working";
 import type { FigureQuestion, Working } from "./working";
 
 /** The working of any number on the sheet; null where the sheet has no such number. */
@@ -13,6 +16,7 @@ export function figureWorking(
   allocationRevisions: readonly LineRevisionView[],
 ): Working | null {
   if (of === "total") return sheetWorking(sheet, figure);
+  if (of === "cause") return causeWorking(sheet, number);
   const row = sheet.rows.find((candidate) => candidate.kind === of && candidate.number === number);
   if (!row) return null;
 
@@ -27,6 +31,8 @@ export function figureWorking(
       return allocationWorking(row, allocationRevisions);
     case "margin":
       return allocationMarginWorking(sheet, row);
+    case "standardUncertainty":
+      return row.kind === "item" ? itemUncertaintyWorking(sheet, row) : null;
     default:
       return null;
   }
@@ -46,6 +52,11 @@ function sheetWorking(sheet: BudgetSheet, figure: FigureQuestion["figure"]): Wor
     case "reserve":
     case "unallocated":
       return limitWorking(sheet, figure);
+    case "interval":
+    case "standardUncertainty":
+    case "basicExceedsLimit":
+    case "predictedExceedsLimit":
+      return totalUncertaintyWorking(sheet, figure);
     case "allocation":
       return null;
   }

@@ -52,12 +52,19 @@ export const FIGURES = [
   "limit",
   "reserve",
   "unallocated",
+  "interval",
+  "standardUncertainty",
+  "basicExceedsLimit",
+  "predictedExceedsLimit",
 ] as const;
 export type Figure = (typeof FIGURES)[number];
 
-/** Which number is asked about: of an item, of a group, or of the whole sheet. */
+export const FIGURE_OWNERS = ["item", "group", "total", "cause", "run"] as const;
+
+/** Which number is asked about: of an item, of a group, of the whole sheet, of a cause of its uncertainty, of a run. */
 export interface FigureQuestion {
   figure: Figure;
-  of: "item" | "group" | "total";
+  of: (typeof FIGURE_OWNERS)[number];
+  /** An item's or group's number, a cause's key, a run's id. */
   number: string | null;
 }

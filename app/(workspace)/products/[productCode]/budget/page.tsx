@@ -29,6 +29,7 @@ import { NewerIssue } from "./_components/newer-issue";
 import { RetiredLines } from "./_components/retired-lines";
 import { StandingHead } from "./_components/standing-head";
 import { StaveFigure } from "./_components/stave-figure";
+import { UncertaintyLine } from "./_components/uncertainty-line";
 
 type Props = PageProps<"/products/[productCode]/budget">;
 
@@ -92,6 +93,14 @@ function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
   const reading = readingAt(point);
   const reference = budget.results.points.find((each) => each.operatingPoint === budget.allocations.operatingPoint);
   const path = `/products/${budget.product.code}/budget`;
+  const { issue, on } = query;
+  const uncertaintyHref = sheetAddress(
+    `/products/${budget.product.code}/uncertainty`,
+    SheetQuery.parse({ issue, on }),
+    {
+      point: point.operatingPoint,
+    },
+  );
 
   return (
     <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point)} />}>
@@ -110,6 +119,7 @@ function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
         />
         <MeasureBar chosen={chosen} reading={reading} hrefOf={(measure) => sheetAddress(path, query, { measure })} />
         <StandingHead point={point} reading={reading} />
+        <UncertaintyLine sheet={sheet} href={uncertaintyHref} />
         <StaveFigure sheet={sheet} reading={reading} />
         <BudgetItems sheet={sheet} query={query} path={path} userId={userId} reading={reading} units={units} />
         <ConservationLine sums={budget.allocations} reading={readingAt(reference ?? point)} />

@@ -4,13 +4,19 @@ import {
   growthWorking,
   predictedWorking,
 } from "@/app/(workspace)/products/[productCode]/_workings/item-working";
+import { itemUncertaintyWorking } from "@/app/(workspace)/products/[productCode]/_workings/item-uncertainty-working";
 import type { PointRow } from "./results-table";
 
 /** The whole calculation of an item at one operating point, from its fields to the predicted value. */
 export function ItemWorking({ shown: { sheet, row } }: { shown: PointRow }) {
   const basic = basicWorking(sheet, row);
   if (row.result.refused) return <p className="text-ink-2">Refused: there is nothing to write out. See the notes.</p>;
-  const steps = [...basic.steps, ...growthWorking(sheet, row).steps, ...predictedWorking(sheet, row).steps];
+  const steps = [
+    ...basic.steps,
+    ...growthWorking(sheet, row).steps,
+    ...predictedWorking(sheet, row).steps,
+    ...(itemUncertaintyWorking(sheet, row)?.steps ?? []),
+  ];
 
   return (
     <div className="space-y-3">
