@@ -19,6 +19,7 @@ const READING = [
 const OTHERS = [
   "/products/PD7/budget?point=OP-2",
   "/products/PD7/growth",
+  "/products/TF2/uncertainty",
   "/products/GS4/budget",
   "/products/GS4/items/010",
 ];
@@ -36,6 +37,7 @@ const ROUNDS: readonly { person: DemoPerson; paths: readonly string[] }[] = [
       "/products/TF2/history",
       "/products/TF2/budget?issue=3",
       "/products/TF2/issues/3/recomputed",
+      "/products/TF2/uncertainty?issue=3",
     ],
   },
   {

@@ -109,6 +109,29 @@ export function askForAction(person: HttpPerson, { proposalId, key }: SubmittedP
   return callAction(person, { name: "addRemarkAction", page }, remark);
 }
 
+export interface AskedRun {
+  issue: number;
+  operatingPoint: string;
+  draws: number;
+  seed: number;
+}
+
+/** Asks for a Monte Carlo run; the value of one that is kept is its lines. */
+export async function run(
+  { address, cookie }: HttpPerson,
+  asked: AskedRun,
+  headers: Record<string, string> = {},
+): Promise<HttpAnswer> {
+  const response = await fetch(`${address}/api/products/${PRODUCT}/monte-carlo`, {
+    method: "POST",
+    headers: { "content-type": "application/json", cookie, ...headers },
+    body: JSON.stringify(asked),
+  });
+  if (!response.ok) return routeAnswer(response);
+  const lines = (await response.text()).trimEnd().split("\n");
+  return { ok: true, status: response.status, value: lines.map((line): unknown => JSON.parse(line)) };
+}
+
 /** What a person is answered who asks for a page or a file. */
 export async function read({ address, cookie }: HttpPerson, page: string): Promise<{ status: number; text: string }> {
   const response = await fetch(`${address}${page}`, { redirect: "manual", headers: { cookie } });
