@@ -50,7 +50,9 @@ export function dragOverSpeedLayout(points: readonly TotalAtSpeed[], own: OwnPoi
         },
       },
     ],
-    marks: [{ ...plot.place(own.speed, own.predicted), text: formatNewtons(own.predicted) }],
+    marks: [
+      { ...plot.place(own.speed, own.predicted), text: formatNewtons(own.predicted), sign: "ring", side: "above" },
+    ],
   };
 }
 
@@ -83,7 +85,9 @@ export function powerOverSpeedLayout(points: readonly TotalAtSpeed[], own: OwnPo
         },
       },
     ],
-    marks: [{ ...plot.place(own.speed, ownPower), text: `${formatSignificant(ownPower)} W` }],
+    marks: [
+      { ...plot.place(own.speed, ownPower), text: `${formatSignificant(ownPower)} W`, sign: "ring", side: "above" },
+    ],
   };
 }
 
