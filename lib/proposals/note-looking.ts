@@ -1,7 +1,7 @@
 import { Op, type Transaction } from "sequelize";
 import { Looking } from "@/models/looking";
 
-export type LookingKind = "file" | "line history" | "round" | "signing text";
+export type LookingKind = "file" | "line history" | "signing text";
 
 interface Looked {
   userId: number;

@@ -121,10 +121,10 @@ function transferViews({ round, onToday }: RoundReview): TransferView[] {
 }
 
 function roundView(
-  { id, number, baseIssue, submittedAt, submittedById, hash }: RoundRecord,
+  { number, baseIssue, submittedAt, submittedById, hash }: RoundRecord,
   { people }: RoundReview,
 ): RoundView {
-  return { roundId: id, round: number, baseIssue, submittedAt, submittedBy: personOf(people, submittedById), hash };
+  return { round: number, baseIssue, submittedAt, submittedBy: personOf(people, submittedById), hash };
 }
 
 /** What was decided is shown on the issue that it was applied to; anything else that ended on its base. */

@@ -9,7 +9,7 @@ import { signingRights } from "@/policies/signing-rights";
 import { budgetReader } from "./budget-reader";
 import { unsettledRequests } from "./demand-approvable";
 import { effectSentence } from "./effect-sentence";
-import { openedTexts } from "./looked-at";
+import { openedTexts } from "./opened-texts";
 import { moveViews } from "./move-views";
 import { listedProposals, type ListedProposal } from "./proposal-list";
 import type { RoundReview } from "./round-review";

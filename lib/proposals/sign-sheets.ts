@@ -3,7 +3,7 @@ import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal, type RefusalCode } from "@/lib/vocabulary/refusal";
 import { inSnapshot } from "@/models/database";
-import { openedTexts } from "./looked-at";
+import { openedTexts } from "./opened-texts";
 import type { SignSheetsInput } from "./schema";
 import { signSheet, type SignedProposal } from "./sign-proposal";
 

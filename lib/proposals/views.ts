@@ -197,7 +197,6 @@ export interface ProductView {
 }
 
 export interface RoundView {
-  roundId: number;
   round: number;
   baseIssue: number;
   submittedAt: string;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { noteLooked } from "@/lib/proposals/looked-at";
+import { noteOpened } from "@/lib/proposals/opened-texts";
 import { sheetsToSign } from "@/lib/proposals/sheets-to-sign";
 import { signSheets } from "@/lib/proposals/sign-sheets";
 import { withDatabase } from "@/tests/support/database";
@@ -22,7 +22,7 @@ describe("several sheets under one password", () => {
       expect(password).toBe(PASSWORD);
       sheets.push(sheet);
     }
-    for (const { textHash } of sheets) await noteLooked(ines, { roundId: null, textHash }, clock);
+    for (const { textHash } of sheets) await noteOpened(ines, textHash, clock);
     await expect(signSheets(ines, { sheets, password: "no" }, clock)).rejects.toMatchObject({ code: "wrong_password" });
     expect(await signSheets(ines, { sheets, password: PASSWORD }, clock)).toMatchObject({
       signed: [
@@ -44,9 +44,9 @@ describe("several sheets under one password", () => {
       [first, false],
       [second, false],
     ]);
-    for (const { textHash } of openedSheets) await noteLooked(elske, { roundId: null, textHash }, clock);
+    for (const { textHash } of openedSheets) await noteOpened(elske, textHash, clock);
     const [one] = openedSheets;
-    if (one) await noteLooked(ines, { roundId: null, textHash: one.textHash }, clock);
+    if (one) await noteOpened(ines, one.textHash, clock);
     expect((await sheetsToSign(ines, clock)).map(({ opened }) => opened)).toEqual([true, false]);
 
     const sheets = openedSheets.map(({ proposalId, roundHash, textHash, capacity }) => {

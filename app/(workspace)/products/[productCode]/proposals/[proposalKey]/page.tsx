@@ -7,7 +7,7 @@ import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { dayText } from "@/app/_components/utc-text";
 import { requireActor } from "@/app/_server/session";
-import { noteLooked } from "@/lib/proposals/looked-at";
+import { noteOpened } from "@/lib/proposals/opened-texts";
 import { proposalView } from "@/lib/proposals/queries";
 import type { ProposalView } from "@/lib/proposals/views";
 
@@ -32,10 +32,7 @@ export default async function ProposalPage({ params, searchParams }: Props) {
   const actor = await requireActor();
   const proposal = await readForPage(() => proposalView(actor, productCode, proposalKey, round));
   if (!proposal) notFound();
-  await noteLooked(actor, {
-    roundId: proposal.round?.roundId ?? null,
-    textHash: proposal.signingSheet?.textHash ?? null,
-  });
+  if (proposal.signingSheet) await noteOpened(actor, proposal.signingSheet.textHash);
 
   return (
     <>
