@@ -151,10 +151,11 @@ function itemOf(state: BudgetState, number: string) {
   return line?.kind === "item" ? line : undefined;
 }
 
+/** Whether the sheet gets a new revision: another tree gives it one even where no number on it moves. */
 function allocationsMoved(before: BudgetState, after: BudgetState): boolean {
   const [was, now] = [
     lineOf(before, "allocations", ALLOCATIONS_NUMBER),
     lineOf(after, "allocations", ALLOCATIONS_NUMBER),
   ];
-  return was !== undefined && now !== undefined && changedFields(was.body, now.body).length > 0;
+  return was?.letter !== now?.letter;
 }

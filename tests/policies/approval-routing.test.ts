@@ -82,6 +82,8 @@ const ALONE: Record<Exclude<RoutingRule, "reviewer">, RoutingFacts> = {
 };
 const RULES = Object.entries(ALONE).map(([rule, facts]) => [rule, facts] as const);
 
+const { windowDays: _, ...RULE_NAMES } = DEFAULT_REVIEW_RULES.programManagerOn;
+
 const rulesAsked = (facts: RoutingFacts) =>
   requiredCapacities(facts, false)
     .filter(({ capacity }) => capacity === "program_manager")
@@ -125,6 +127,10 @@ describe("what routes where", () => {
       newRangeCautions: [...a.newRangeCautions, ...b.newRangeCautions],
     };
     expect([...new Set(rulesAsked(facts))].sort()).toEqual([one, two].sort());
+  });
+
+  it("is tested for every rule of the list", () => {
+    expect(Object.keys(ALONE).sort()).toEqual(Object.keys(RULE_NAMES).sort());
   });
 
   it("says why in words with the number that decided it", () => {

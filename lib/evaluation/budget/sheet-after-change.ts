@@ -32,7 +32,7 @@ export function sheetAfterChange(
   const available = availableHundredths(after);
   sheet.unallocated = available - allocatedSum(sheet, tree);
 
-  const { faults, sound } = transferFaults(transfers, after);
+  const { faults, sound } = transferFaults(transfers, before, after);
   for (const transfer of sound) moveAllocation(sheet, tree, transfer);
   freeRetiredRows(sheet, tree, after.lines);
   if (allocatedSum(sheet, tree) + sheet.unallocated !== available) {

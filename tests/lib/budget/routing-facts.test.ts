@@ -9,6 +9,7 @@ import { firstIssueLines } from "@/lib/products/first-issue";
 import { DEFAULT_REVIEW_RULES } from "@/lib/vocabulary/review-rules";
 import { addItem, bluffItem, firstPoint, fixedItem, shareItem } from "@/tests/support/budget-on-file";
 
+const EVIDENCE = [{ document: "7731", revision: "C", date: "2026-03-15" }];
 const OWNER = 1;
 const OTHER = 2;
 
@@ -103,6 +104,19 @@ describe("the facts of a change", () => {
     };
     expect(factsOf([], [transfer])).toMatchObject({ transfers: 1, movesAllocations: true });
     expect(factsOf([revise("030", plate(5.7))])).toMatchObject({ transfers: 0, movesAllocations: false });
+  });
+
+  it("count another tree as a move of the sheet, also where no number on it moves", () => {
+    const group: LineEdit = {
+      operation: "add",
+      kind: "group",
+      number: "G10",
+      baseLetter: null,
+      body: { name: "Cab", parent: null, order: 10 },
+    };
+    const regrouped = revise("010", fixedItem(OWNER, 10, { grade: "layout", evidence: EVIDENCE, group: "G10" }));
+    expect(factsOf([group])).toMatchObject({ movesAllocations: false });
+    expect(factsOf([group, regrouped])).toMatchObject({ movesAllocations: true });
   });
 });
 

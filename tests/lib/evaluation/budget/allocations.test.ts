@@ -1,8 +1,20 @@
 import { describe, expect, it } from "vitest";
 import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import type { LineEdit } from "@/lib/evaluation/budget/edits";
+import { applyEdits } from "@/lib/evaluation/budget/apply-edits";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
-import { heldAfter, item, of, retire, revise, row, stateWith, transfer, UNALLOCATED } from "./allocation-fixture";
+import {
+  ALLOCATED,
+  heldAfter,
+  item,
+  of,
+  retire,
+  revise,
+  row,
+  stateWith,
+  transfer,
+  UNALLOCATED,
+} from "./allocation-fixture";
 
 describe("a transfer", () => {
   it("between members of a group leaves its ceiling", () => {
@@ -149,6 +161,15 @@ describe("acts that free or bind allocation", () => {
       unallocated: 5200,
       shortfall: null,
     });
+  });
+
+  it("what this change retires may still give, what was retired before holds nothing to give", () => {
+    const gives = [transfer(of("040"), UNALLOCATED, 100)];
+    expect(applyEdits(ALLOCATED, [retire("item", "040")], gives).faults).toEqual([]);
+    const { state } = applyEdits(ALLOCATED, [retire("item", "040")], []);
+    expect(applyEdits(state, [], gives).faults).toEqual([
+      { path: "transfers.0.giver", sentence: "The item 040 is retired." },
+    ]);
   });
 
   it("an edit that moves nothing of it leaves the sheet", () => {
