@@ -18,7 +18,7 @@ const SCROLL =
   "max-lg:min-w-[42rem] max-lg:[&_tr>*:first-child]:sticky max-lg:[&_tr>*:first-child]:left-0 max-lg:[&_tr>*:first-child]:z-10 max-lg:[&_tr>*:first-child]:max-w-[42vw] max-lg:[&_tr>*:first-child]:bg-inherit max-lg:[&_tr>*:first-child]:whitespace-normal";
 
 const STACK =
-  "max-sm:block max-sm:[&_thead]:sr-only max-sm:[&_tbody]:block max-sm:[&_tbody_tr]:block max-sm:[&_tbody_tr]:border-b max-sm:[&_tbody_tr]:border-rule-strong max-sm:[&_tbody_tr]:py-2 max-sm:[&_tbody_tr>*]:grid max-sm:[&_tbody_tr>*]:grid-cols-[8rem_minmax(0,1fr)] max-sm:[&_tbody_tr>*]:gap-x-3 max-sm:[&_tbody_tr>*]:border-0 max-sm:[&_tbody_tr>*]:px-0 max-sm:[&_tbody_tr>*]:py-1 max-sm:[&_tbody_tr>*]:text-left max-sm:[&_tbody_tr>*]:whitespace-normal max-sm:[&_tbody_tr>*]:before:text-xs max-sm:[&_tbody_tr>*]:before:font-normal max-sm:[&_tbody_tr>*]:before:text-ink-2 max-sm:[&_tbody_tr>*]:before:content-[attr(data-label)]";
+  "max-sm:block max-sm:[&_caption]:block max-sm:[&_thead]:sr-only max-sm:[&_tbody]:block max-sm:[&_tbody_tr]:block max-sm:[&_tbody_tr]:border-b max-sm:[&_tbody_tr]:border-rule-strong max-sm:[&_tbody_tr]:py-2 max-sm:[&_tbody_tr>*]:grid max-sm:[&_tbody_tr>*]:grid-cols-[8rem_minmax(0,1fr)] max-sm:[&_tbody_tr>*]:gap-x-3 max-sm:[&_tbody_tr>*]:border-0 max-sm:[&_tbody_tr>*]:px-0 max-sm:[&_tbody_tr>*]:py-1 max-sm:[&_tbody_tr>*]:text-left max-sm:[&_tbody_tr>*]:whitespace-normal max-sm:[&_tbody_tr>*]:before:text-xs max-sm:[&_tbody_tr>*]:before:font-normal max-sm:[&_tbody_tr>*]:before:text-ink-2 max-sm:[&_tbody_tr>*]:before:content-[attr(data-label)]";
 
 /** A table of a sheet. Its header stays in sight while a long one is read. */
 export function Table({ caption, showCaption = false, narrow = "scroll", children }: TableProps) {
