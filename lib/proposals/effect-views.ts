@@ -1,10 +1,10 @@
-import type { Effects, ItemEffect, PointEffect } from "@/lib/evaluation/budget/effects";
+import type { Effects, ItemEffect } from "@/lib/evaluation/budget/effects";
 import type { BudgetResults } from "@/lib/evaluation/budget/results";
 import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import type { Note } from "@/lib/evaluation/notes/note";
 import { effectSentence } from "./effect-sentence";
-import type { EffectView, ItemEffectView, NoteView, PointEffectView } from "./views";
+import type { EffectView, ItemEffectView, NoteView } from "./views";
 
 /** The effect of a change on one issue, as a page shows it: the worst operating point first. */
 export function effectView(
@@ -23,34 +23,10 @@ export function effectView(
   const [worst] = points;
   return {
     onIssue,
-    points: points.flatMap((point) => pointView(point) ?? []),
+    points,
     edited: items(effects.items.filter(({ edited }) => edited)),
     followers: items(effects.followers),
     sentence: worst ? effectSentence(worst) : "",
-  };
-}
-
-/** An operating point that stands on one side only shows the figures of that side on both. */
-function pointView({ operatingPoint, name, was, now, predictedDelta }: PointEffect): PointEffectView | null {
-  const before = was ?? now;
-  const after = now ?? was;
-  if (before === null || after === null) return null;
-  return {
-    operatingPoint,
-    name,
-    basicWas: before.basic,
-    basicNow: after.basic,
-    predictedWas: before.predicted,
-    predictedNow: after.predicted,
-    predictedDelta,
-    limitWas: before.limitHundredths / 100,
-    limitNow: after.limitHundredths / 100,
-    reserveWas: before.reserveHundredths / 100,
-    reserveNow: after.reserveHundredths / 100,
-    marginWas: before.margin,
-    marginNow: after.margin,
-    standingWas: before.standing,
-    standingNow: after.standing,
   };
 }
 

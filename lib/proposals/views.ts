@@ -1,7 +1,7 @@
+import type { PointEffect } from "@/lib/evaluation/budget/effects";
 import type { EditOperation, LineKind, ProductKind } from "@/lib/vocabulary/lines";
 import type { Decision, ProposalState } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
-import type { Standing } from "@/lib/vocabulary/standing";
 
 export interface PersonView {
   id: number;
@@ -20,25 +20,6 @@ export interface NoteView {
   sentence: string;
 }
 
-/** Totals at one operating point before and after, in newtons. */
-export interface PointEffectView {
-  operatingPoint: string;
-  name: string;
-  basicWas: number;
-  basicNow: number;
-  predictedWas: number;
-  predictedNow: number;
-  predictedDelta: number;
-  limitWas: number;
-  limitNow: number;
-  reserveWas: number;
-  reserveNow: number;
-  marginWas: number;
-  marginNow: number;
-  standingWas: Standing;
-  standingNow: Standing;
-}
-
 /** One item at one operating point, in newtons; null where the item has no result on that side. */
 export interface ItemEffectView {
   item: string;
@@ -55,7 +36,7 @@ export interface EffectView {
   /** The issue on which the change was computed. */
   onIssue: number;
   /** Worst operating point first. */
-  points: PointEffectView[];
+  points: PointEffect[];
   edited: ItemEffectView[];
   /** Items nobody edited that move all the same. */
   followers: ItemEffectView[];

@@ -142,12 +142,13 @@ describe("what a set of proposals would do together", () => {
 
     expect(await stored()).toEqual(before);
     expect(
-      view.effect?.points.map(({ operatingPoint, basicNow, predictedNow, marginNow, standingNow }) => ({
-        ...{ operatingPoint, basicNow, predictedNow, marginNow, standingNow },
+      view.effect?.points.map(({ operatingPoint, now }) => ({
+        ...{ operatingPoint, basic: now?.basic, predicted: now?.predicted },
+        ...{ margin: now?.margin, standing: now?.standing },
       })),
     ).toEqual(
       after.points.map(({ operatingPoint, totals: { basic, predicted, margin }, standing }) => ({
-        ...{ operatingPoint, basicNow: basic, predictedNow: predicted, marginNow: margin, standingNow: standing },
+        ...{ operatingPoint, basic, predicted, margin, standing },
       })),
     );
     const shown = [...(view.effect?.edited ?? []), ...(view.effect?.followers ?? [])];

@@ -1,7 +1,13 @@
 import { SaveFigure } from "@/app/_components/save-figure/save-figure";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import type { EffectView, PointEffectView } from "@/lib/proposals/views";
-import { formatNewtons, formatNewtonsChangeNumber, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import type { PointEffect, PointFigures } from "@/lib/evaluation/budget/effects";
+import type { EffectView } from "@/lib/proposals/views";
+import {
+  formatHundredths,
+  formatNewtons,
+  formatNewtonsChangeNumber,
+  formatNewtonsNumber,
+} from "@/lib/units/format-newtons";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 
 import { StavePair } from "../_pictures/stave-pair";
@@ -36,15 +42,24 @@ export function EffectSummary({ effect, withLabel, everyPoint = false }: EffectS
   );
 }
 
-function staveSentence({ operatingPoint, predictedWas, predictedNow, limitNow }: PointEffectView): string {
-  return (
-    `Predicted at ${operatingPoint} from ${formatNewtons(predictedWas)} to ${formatNewtons(predictedNow)}, ` +
-    `limit ${formatNewtons(limitNow)}. The figures stand in the table below.`
-  );
+function staveSentence({ operatingPoint, was, now }: PointEffect): string {
+  const figures = now ?? was;
+  const limit = figures ? `, limit ${formatHundredths(figures.limitHundredths)} N` : "";
+  return `Predicted at ${operatingPoint} ${sidesText(was, now)}${limit}. The figures stand in the table below.`;
 }
 
-function stavesOf(issue: number, point: PointEffectView, withLabel: string) {
-  const one = (label: string, basic: number, predicted: number, limit: number, reserve: number) => ({
+function sidesText(was: PointFigures | null, now: PointFigures | null): string {
+  if (was && now) return `from ${formatNewtons(was.predicted)} to ${formatNewtons(now.predicted)}`;
+  return now ? `${formatNewtons(now.predicted)}, a new operating point` : "no longer, it is retired";
+}
+
+/** An operating point that stands on one side only has one stave. */
+function stavesOf(issue: number, { was, now }: PointEffect, withLabel: string) {
+  return [...(was ? [staveOf(`issue ${issue}`, was)] : []), ...(now ? [staveOf(withLabel, now)] : [])];
+}
+
+function staveOf(label: string, { basic, predicted, limitHundredths, reserveHundredths }: PointFigures) {
+  return {
     label,
     text: `${formatNewtons(predicted)} predicted`,
     input: {
@@ -52,15 +67,10 @@ function stavesOf(issue: number, point: PointEffectView, withLabel: string) {
       basic,
       growth: predicted - basic,
       predicted,
-      limit,
-      reserve,
+      limit: limitHundredths / 100,
+      reserve: reserveHundredths / 100,
     },
-  });
-
-  return [
-    one(`issue ${issue}`, point.basicWas, point.predictedWas, point.limitWas, point.reserveWas),
-    one(withLabel, point.basicNow, point.predictedNow, point.limitNow, point.reserveNow),
-  ];
+  };
 }
 
 function PointsTable({ effect }: { effect: EffectView }) {
@@ -89,16 +99,16 @@ function PointsTable({ effect }: { effect: EffectView }) {
               {point.operatingPoint} {point.name}
             </RowHead>
             <Cell numeric label={`Issue ${effect.onIssue}`}>
-              {formatNewtonsNumber(point.predictedWas)}
+              {point.was ? formatNewtonsNumber(point.was.predicted) : "–"}
             </Cell>
             <Cell numeric label="To be">
-              {formatNewtonsNumber(point.predictedNow)}
+              {point.now ? formatNewtonsNumber(point.now.predicted) : "–"}
             </Cell>
             <Cell numeric label="Effect">
               {formatNewtonsChangeNumber(point.predictedDelta)}
             </Cell>
             <Cell numeric label="Margin">
-              {formatNewtonsNumber(point.marginWas)} → {formatNewtonsNumber(point.marginNow)}
+              {[point.was, point.now].map(marginText).join(" → ")}
             </Cell>
             <Cell label="Standing">
               <Standings point={point} />
@@ -110,9 +120,15 @@ function PointsTable({ effect }: { effect: EffectView }) {
   );
 }
 
-function Standings({ point }: { point: PointEffectView }) {
-  const now = STANDING_NAMES[point.standingNow];
-  const text = point.standingWas === point.standingNow ? now : `${STANDING_NAMES[point.standingWas]} → ${now}`;
+function marginText(figures: PointFigures | null): string {
+  return figures ? formatNewtonsNumber(figures.margin) : "–";
+}
 
-  return <span className={point.standingNow === "over" ? "font-semibold text-signal" : ""}>{text}</span>;
+function Standings({ point: { was, now } }: { point: PointEffect }) {
+  if (!now) return "retired";
+  const name = STANDING_NAMES[now.standing];
+  const before = was ? STANDING_NAMES[was.standing] : "new";
+  const text = was?.standing === now.standing ? name : `${before} → ${name}`;
+
+  return <span className={now.standing === "over" ? "font-semibold text-signal" : ""}>{text}</span>;
 }
