@@ -97,6 +97,19 @@ export async function signs(person: HttpPerson, proposal: SubmittedProposal, cap
   return sign(person, proposal, await sheetBefore(person, proposal), { capacity });
 }
 
+/** Brings a proposal onto that issue with one field settled for what it proposes itself. */
+export function carryForward(
+  person: HttpPerson,
+  { proposalId, key }: SubmittedProposal,
+  onto: { lockVersion: number; ontoIssue: number; item: string; field: string },
+): Promise<HttpAnswer> {
+  const page = `/products/${PRODUCT}/proposals/${key}/carry-forward`;
+  const { lockVersion, ontoIssue, item, field } = onto;
+  const settled = [{ kind: "item", number: item, field, choice: "yours", why: "Measured again since." }];
+  const input = { proposalId, lockVersion, ontoIssue, settled, key: formKey() };
+  return callAction(person, { name: "carryForwardAction", page }, input);
+}
+
 /** "Sign out everywhere" of the account page. */
 export function endSessions(person: HttpPerson): Promise<HttpAnswer> {
   return callAction(person, { name: "endSessionsAction", page: "/account" }, {});

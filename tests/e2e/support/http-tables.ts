@@ -65,6 +65,20 @@ export async function storedState(dataFolder: string): Promise<StoredState> {
   }
 }
 
+/** Rows of the application's own file, each of the shape that is asked for. */
+export async function storedRows<Shape extends z.ZodType>(
+  dataFolder: string,
+  statement: string,
+  shape: Shape,
+): Promise<z.output<Shape>[]> {
+  const database = await opened(path.join(dataFolder, "leeboard.sqlite"));
+  try {
+    return z.array(shape).parse(await rows(database, statement));
+  } finally {
+    await closed(database);
+  }
+}
+
 function opened(file: string): Promise<sqlite3.Database> {
   return new Promise((resolve, reject) => {
     const database = new sqlite3.Database(file, sqlite3.OPEN_READONLY, (problem) =>

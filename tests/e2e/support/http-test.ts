@@ -20,6 +20,8 @@ interface Refused {
 }
 
 interface WorkerFixtures {
+  /** The script that fills the database of the application before it starts. */
+  scene: string;
   application: RunningApplication;
   /** A person who is signed in; once for all tests of a file. */
   as: (name: PersonName) => Promise<HttpPerson>;
@@ -32,13 +34,14 @@ interface Fixtures {
 
 /** Tests over HTTP run against the built application with a small product of their own. */
 export const test = base.extend<Fixtures, WorkerFixtures>({
+  scene: ["tests/e2e/support/http-scene.ts", { option: true, scope: "worker" }],
   application: [
-    async ({}, use) => {
-      const application = await applicationWithScene();
+    async ({ scene }, use) => {
+      const application = await applicationWithScene(scene);
       await use(application);
       await application.stop();
     },
-    { scope: "worker", timeout: 120_000 },
+    { scope: "worker", timeout: 300_000 },
   ],
   as: [
     async ({ application }, use) => {
@@ -77,11 +80,11 @@ function expectRefusal(answer: HttpAnswer, { code, sentence, status = 200, at }:
   if (at !== undefined) expect(answer).toHaveProperty("faults", [{ path: at, sentence: words }]);
 }
 
-async function applicationWithScene(): Promise<RunningApplication> {
+async function applicationWithScene(scene: string): Promise<RunningApplication> {
   const { runTypeScript } = await import("@/scripts/readiness/run-typescript.mjs");
   const template = mkdtempSync(path.join(os.tmpdir(), "leeboard-http-"));
   try {
-    const code = await runTypeScript("tests/e2e/support/http-scene.ts", [], { LEEBOARD_DATA: template });
+    const code = await runTypeScript(scene, [], { LEEBOARD_DATA: template });
     if (code !== 0) throw new Error("The scene of the tests could not be set; the reason stands above.");
     return await runningApplication(template);
   } finally {
