@@ -52,7 +52,9 @@ describe("the fields of a line as they are printed", () => {
       us: "27\u2009ft",
       entered: "27 ft",
     });
-    expect(rowOf("item", body, "breadth")).toEqual({ field: "breadth", label: "Breadth", text: "0.95", unit: "m" });
+    // 0.95 / 0.3048, the foot of NIST SP 811.
+    const breadth = { field: "breadth", label: "Breadth", text: "0.95", unit: "m", us: "3.117\u2009ft" };
+    expect(rowOf("item", body, "breadth")).toEqual(breadth);
   });
 
   it("name persons, finishes, choices and citations", () => {
