@@ -90,7 +90,7 @@ export function databaseDesk(people: Record<string, Actor>, first: string): Desk
       allowed(() => shareDraft(actor(who), { proposalId: idOf(proposal), userId: ids[to] ?? 0 }, clock)),
     ask: (who, proposal) =>
       allowed(async () => {
-        const place = { proposalId: idOf(proposal), parentId: null, line: null, field: null, suggestion: null };
+        const place = { proposalId: idOf(proposal), parentId: null, line: null, field: null, suggestion: null, to: [] };
         await addRemark(actor(who), { ...place, text: "Look here.", asksForAction: true, key: formKey() }, clock);
       }),
     settle: (who, proposal, request) =>
