@@ -24,7 +24,8 @@ export interface RunOptions {
  */
 export async function runMonteCarlo(job: MonteCarloJob, options: RunOptions = {}): Promise<MonteCarloOutcome> {
   options.signal?.throwIfAborted();
-  const worker = new Worker(options.workerFile ?? builtWorkerFile(), { workerData: job });
+  // Left alone by the bundler, which would take any file of the repository for the thread and build them all.
+  const worker = new Worker(/* turbopackIgnore: true */ options.workerFile ?? builtWorkerFile(), { workerData: job });
   try {
     return await outcomeOf(worker, options);
   } finally {
