@@ -1,8 +1,11 @@
 import path from "node:path";
-import { Worker } from "node:worker_threads";
+import type { Worker } from "node:worker_threads";
 import type { MonteCarloOutcome } from "@/lib/evaluation/uncertainty/monte-carlo";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { MonteCarloMessage, type MonteCarloJob } from "./job";
+
+// Asked for while running: a bundler that sees where a thread begins takes every file of the repository for it.
+const threads = process.getBuiltinModule("node:worker_threads");
 
 /** A run that takes longer has gone wrong: a hundred thousand draws of a large budget take some ten seconds. */
 const LONGEST_RUN_MS = 120_000;
@@ -24,8 +27,7 @@ export interface RunOptions {
  */
 export async function runMonteCarlo(job: MonteCarloJob, options: RunOptions = {}): Promise<MonteCarloOutcome> {
   options.signal?.throwIfAborted();
-  // Left alone by the bundler, which would take any file of the repository for the thread and build them all.
-  const worker = new Worker(/* turbopackIgnore: true */ options.workerFile ?? builtWorkerFile(), { workerData: job });
+  const worker = new threads.Worker(options.workerFile ?? builtWorkerFile(), { workerData: job });
   try {
     return await outcomeOf(worker, options);
   } finally {

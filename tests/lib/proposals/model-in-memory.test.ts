@@ -5,7 +5,7 @@ import { pureDesk } from "./walk/pure-desk";
 import { walkCommands } from "./walk/walk-commands";
 
 /** More of them are run by hand: LEEBOARD_PURE_WALKS=20000. */
-const WALKS = Number(process.env.LEEBOARD_PURE_WALKS ?? 2000);
+const WALKS = Number(process.env.LEEBOARD_PURE_WALKS ?? 500);
 const ACTS = 24;
 const ACTS_TOLD = [
   ...["start", "save", "propose", "propose again", "approve as reviewer", "approve as program_manager", "return"],

@@ -22,7 +22,7 @@ import { ROLES } from "./walk/model-state";
 import { walkCommands } from "./walk/walk-commands";
 
 /** More of them are run by hand: LEEBOARD_WALKS=2000. */
-const WALKS = Number(process.env.LEEBOARD_WALKS ?? 100);
+const WALKS = Number(process.env.LEEBOARD_WALKS ?? 20);
 const ACTS = 24;
 
 const PRODUCT_ROLES: Record<string, Role> = {
