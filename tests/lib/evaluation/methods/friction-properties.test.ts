@@ -88,6 +88,23 @@ describe("friction of a plate, for every line, transition and roughness", () => 
     );
   });
 
+  it("is lowered by a longer run-up behind a trip at 0, where the layer is turbulent", () => {
+    fc.assert(
+      fc.property(
+        line,
+        // From Re 50,000 on no line is Blasius's any more, and a fully rough one follows its formula.
+        logarithmic(0.05, 50),
+        logarithmic(1.001, 10),
+        logarithmic(0.02, 20),
+        (frictionLine, runUp, factor, length) => {
+          const fields = withRoughness({ frictionLine, roughness: 0, transition: { kind: "tripped", at: 0 }, length });
+          expect(dragOf({ ...fields, runUp: runUp * factor })).toBeLessThan(dragOf({ ...fields, runUp }));
+        },
+      ),
+      runs,
+    );
+  });
+
   it("rises along the surface: no stretch of a layer has friction of 0 or less", () => {
     const stretch = fc.record({
       surface,
