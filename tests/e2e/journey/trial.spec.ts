@@ -11,7 +11,7 @@ function setting(page: Page, letter: "A" | "B"): Locator {
 }
 
 function drags(page: Page): Locator {
-  return page.getByRole("table", { name: "What the two settings give" }).getByRole("row", { name: /^Drag/ });
+  return page.getByRole("table", { name: "What the two settings give" }).getByRole("row", { name: /^Drag D / });
 }
 
 test("two settings stand side by side, in numbers and in one picture", async ({ pageOf }) => {

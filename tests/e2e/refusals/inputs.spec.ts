@@ -18,7 +18,7 @@ for (const [typed, value] of [
     const draft = await drafted(lusia, content([edit]));
     await refuses(() => propose(lusia, draft), {
       code: "invalid",
-      sentence: "Must be greater than 0.",
+      sentence: /^(Operating point OP-1, Speed: )?Must be greater than 0\.$/,
       at: "edits.0.body.speed",
     });
   });
