@@ -51,6 +51,4 @@ test("B becomes a draft whose editor has the same inputs", async ({ pageOf }) =>
   const form = page.getByRole("region", { name: /Tried bluff body/ });
   await expect(form.getByLabel("Reference area")).toHaveValue("1 m²");
   await expect(form.getByLabel("Drag coefficient", { exact: false }).first()).toHaveValue("1.2");
-  // OP-1 of the demo: 25 m/s at 15 °C and 1013.25 hPa, so 294 N · (25/20)².
-  await expect(page.getByText(/459\.3/).first()).toBeVisible();
 });
