@@ -16,7 +16,7 @@ export function methodBasis(name: string): CauseBasis {
   return JUDGEMENT.test(text) ? { kind: "judgement", text: text.replace(JUDGEMENT, "") } : { kind: "source", text };
 }
 
-/** A coefficient stands with its own source; a length or a speed with the evidence of its item, if it has any. */
+/** A coefficient stands with its own source; a length or a speed with the evidence that its item may cite. */
 export function lineBasis(line: LineState, field: string): CauseBasis {
   const stated = `stated in revision ${line.letter}`;
   if (line.kind === "finish") return { kind: "source", text: line.body.source };
