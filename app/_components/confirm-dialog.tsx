@@ -24,6 +24,8 @@ interface ConfirmDialogProps {
   /** Text of the button that acts: "Sign". */
   confirm: string;
   confirmKind?: ButtonKind;
+  /** While what the dialog asks about is still being read. */
+  confirmDisabled?: boolean;
   /** What is agreed to, and the fields that are asked. */
   children: ReactNode | ((faultOf: FaultOf) => ReactNode);
   onConfirm: (form: FormData) => Promise<ActionResult<unknown>>;
@@ -33,7 +35,7 @@ interface ConfirmDialogProps {
 
 /** Asks once more before an act: native dialog, its own form, refusals shown inside it. */
 export function ConfirmDialog(props: ConfirmDialogProps) {
-  const { trigger, triggerKind, disabled, title, confirm, confirmKind = "primary", children } = props;
+  const { trigger, triggerKind, disabled, title, confirm, confirmKind = "primary", confirmDisabled, children } = props;
   const dialog = useRef<HTMLDialogElement>(null);
   const { opened, open, busy, answer, submit, clear } = useConfirmation(dialog, props);
   const refused = answer && !answer.ok ? answer : null;
@@ -50,7 +52,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
             {typeof children === "function" ? children(faultOf) : children}
             {refused ? <Notice kind="refusal">{refused.sentence}</Notice> : null}
             <div className="flex flex-wrap gap-2">
-              <Button type="submit" kind={confirmKind} busy={busy}>
+              <Button type="submit" kind={confirmKind} busy={busy} disabled={confirmDisabled}>
                 {busy ? "One moment…" : confirm}
               </Button>
               <Button onClick={() => dialog.current?.close()}>Cancel</Button>

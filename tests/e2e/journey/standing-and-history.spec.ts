@@ -84,7 +84,7 @@ test("the program manager sees the new standing in the register and the trend ov
   await expect(trend).toHaveAttribute("aria-label", new RegExp(`${predicted.toFixed(2)}\\sN at issue ${newest}`));
   await expect(trend.locator("circle")).toHaveCount(newest);
   await page.getByText("As a table").first().click();
-  const numbers = page.getByRole("table", { name: "The numbers of the picture, in newtons" });
+  const numbers = page.getByRole("table", { name: "The numbers of the picture, in N" });
   await expect(numbers.getByRole("row", { name: new RegExp(`^${newest} `) })).toContainText(predicted.toFixed(2));
 });
 

@@ -50,6 +50,7 @@ export function TurnIntoProposal({ setting, isComputed, products }: TurnIntoProp
       disabled={!isComputed}
       title="Turn B into a proposal"
       confirm="Start the draft"
+      confirmDisabled={!targets}
       onConfirm={async (form) => {
         if (!targets) return refused("The items of this product are still being read. Try again.");
         const edit = editOf(form, setting, targets, target);
@@ -77,7 +78,7 @@ export function TurnIntoProposal({ setting, isComputed, products }: TurnIntoProp
             onChange={(event) => setTarget(event.target.value)}
             error={error instanceof Error ? error.message : undefined}
           />
-          {target === NEW_ITEM ? <NewItemFields targets={targets} faultOf={faultOf} /> : null}
+          {targets && target === NEW_ITEM ? <NewItemFields targets={targets} faultOf={faultOf} /> : null}
           <TextField name="title" label="Title" maxLength={120} required autoComplete="off" error={faultOf("title")} />
           <p className="text-sm text-ink-2">
             The draft is yours; evidence, grade and reason are added there. Whoever edits a proposal can’t sign it.
@@ -89,12 +90,12 @@ export function TurnIntoProposal({ setting, isComputed, products }: TurnIntoProp
 }
 
 interface NewItemFieldsProps {
-  targets: TrialTargets | undefined;
+  targets: TrialTargets;
   faultOf: (path: string) => string | undefined;
 }
 
 function NewItemFields({ targets, faultOf }: NewItemFieldsProps) {
-  const number = targets ? nextNumber("item", targets.taken) : "";
+  const number = nextNumber("item", targets.taken);
 
   return (
     <>
