@@ -3,15 +3,16 @@ import type { FluidState } from "./fluid-state";
 const GAS_CONSTANT = 461.51805;
 const REFERENCE_TEMPERATURE = 10;
 const REFERENCE_PRESSURE = 1e5;
-const VOLUME_CONSTANT = 1.93763157e-2;
-const ALPHA_TERMS = [
+/** a₅ of the specific volume, and the factors and powers of its α and β. */
+export const FRESH_WATER_VOLUME_CONSTANT = 1.93763157e-2;
+export const FRESH_WATER_ALPHA_TERMS = [
   [6.74458446e3, 4],
   [-2.22521604e5, 5],
   [1.00231247e8, 7],
   [-1.63552118e9, 8],
   [8.32299658e9, 9],
 ] as const;
-const BETA_TERMS = [
+export const FRESH_WATER_BETA_TERMS = [
   [5.78545292e-3, 1],
   [-1.53195665e-2, 2],
   [3.11337859e-2, 3],
@@ -19,7 +20,8 @@ const BETA_TERMS = [
   [3.38713507e-2, 5],
   [-1.19946761e-2, 6],
 ] as const;
-const VISCOSITY_TERMS = [
+/** Factors and powers of T/300 K. */
+export const FRESH_WATER_VISCOSITY_TERMS = [
   [280.68, -1.9],
   [511.45, -7.7],
   [61.131, -19.6],
@@ -45,9 +47,9 @@ export function freshWater(temperature: number): FluidState {
 export function freshWaterDensity(temperature: number): number {
   const alpha = REFERENCE_TEMPERATURE / (593 - temperature);
   const beta = REFERENCE_TEMPERATURE / (temperature - 232);
-  let sum: number = VOLUME_CONSTANT;
-  for (const [a, n] of ALPHA_TERMS) sum += a * alpha ** n;
-  for (const [b, m] of BETA_TERMS) sum += b * beta ** m;
+  let sum: number = FRESH_WATER_VOLUME_CONSTANT;
+  for (const [a, n] of FRESH_WATER_ALPHA_TERMS) sum += a * alpha ** n;
+  for (const [b, m] of FRESH_WATER_BETA_TERMS) sum += b * beta ** m;
   return REFERENCE_PRESSURE / (GAS_CONSTANT * REFERENCE_TEMPERATURE * sum);
 }
 
@@ -64,6 +66,6 @@ export function freshWaterDensity(temperature: number): number {
  */
 export function freshWaterViscosity(temperature: number): number {
   let sum = 0;
-  for (const [a, b] of VISCOSITY_TERMS) sum += a * (temperature / 300) ** b;
+  for (const [a, b] of FRESH_WATER_VISCOSITY_TERMS) sum += a * (temperature / 300) ** b;
   return 1e-6 * sum;
 }

@@ -27,12 +27,18 @@ export function seaWater(temperature: number): FluidState {
  * Worked: S = 35, 5 °C give 1027.67547 kg/m³.
  */
 export function seaWaterDensity(temperature: number, salinity: number): number {
-  const t = temperature - ZERO_CELSIUS;
-  const pure =
-    999.842594 + t * (6.793952e-2 + t * (-9.09529e-3 + t * (1.001685e-4 + t * (-1.120083e-6 + t * 6.536332e-9))));
-  const linear = 8.24493e-1 + t * (-4.0899e-3 + t * (7.6438e-5 + t * (-8.2467e-7 + t * 5.3875e-9)));
-  const power = -5.72466e-3 + t * (1.0227e-4 - t * 1.6546e-6);
+  const { pure, linear, power } = seaWaterDensityTerms(temperature);
   return pure + linear * salinity + power * salinity ** 1.5 + 4.8314e-4 * salinity ** 2;
+}
+
+/** ρ_w [kg/m³], A and B of the equation above. @param temperature T [K] */
+export function seaWaterDensityTerms(temperature: number): { pure: number; linear: number; power: number } {
+  const t = temperature - ZERO_CELSIUS;
+  return {
+    pure: 999.842594 + t * (6.793952e-2 + t * (-9.09529e-3 + t * (1.001685e-4 + t * (-1.120083e-6 + t * 6.536332e-9)))),
+    linear: 8.24493e-1 + t * (-4.0899e-3 + t * (7.6438e-5 + t * (-8.2467e-7 + t * 5.3875e-9))),
+    power: -5.72466e-3 + t * (1.0227e-4 - t * 1.6546e-6),
+  };
 }
 
 /**
@@ -49,9 +55,13 @@ export function seaWaterDensity(temperature: number, salinity: number): number {
  * uncertainty 1.5 %. Worked: S = 35, 15 °C give 1.2197e-3 Pa s.
  */
 export function seaWaterViscosity(temperature: number, salinity: number): number {
-  const t = temperature - ZERO_CELSIUS;
+  const { linear, square } = seaWaterViscosityTerms(temperature);
   const s = salinity / 1000;
-  const a = 1.541 + 0.01998 * t - 9.52e-5 * t ** 2;
-  const b = 7.974 - 0.07561 * t + 4.724e-4 * t ** 2;
-  return freshWaterViscosity(temperature) * (1 + a * s + b * s ** 2);
+  return freshWaterViscosity(temperature) * (1 + linear * s + square * s ** 2);
+}
+
+/** A and B of the viscosity's equation [-]. @param temperature T [K] */
+export function seaWaterViscosityTerms(temperature: number): { linear: number; square: number } {
+  const t = temperature - ZERO_CELSIUS;
+  return { linear: 1.541 + 0.01998 * t - 9.52e-5 * t ** 2, square: 7.974 - 0.07561 * t + 4.724e-4 * t ** 2 };
 }

@@ -11,8 +11,9 @@ export const ROUGHNESS_COEFFICIENT = Math.exp(-KAPPA * (8.5 - WALL_CONSTANT));
 const A = (1 + WAKE) / KAPPA;
 const C = (2 + 2 * WAKE * (1 + SINE_INTEGRAL_RATIO) + 1.5 * WAKE ** 2) / KAPPA ** 2;
 const K = Math.exp(-KAPPA * WALL_CONSTANT - 2 * WAKE);
-/** λ at which θ = 0. */
-const START = C / A;
+/** λ = C/A at which θ = 0. */
+export const START_OF_WALL_AND_WAKE = C / A;
+const START = START_OF_WALL_AND_WAKE;
 const EI_AT_START = exponentialIntegral(KAPPA * START);
 /** The fits that start the search are good to 0.14 and about 1 in λ; the margins put the start above the root. */
 const SMOOTH_GUESS_MARGIN = 0.15;

@@ -1,3 +1,4 @@
+import { FLUID_SOURCES } from "../methods/fluid-sources";
 import type { OperatingPointBody } from "./operating-point-body";
 
 /** By what formula a derived value of a stream was made, and from where that is. */
@@ -8,9 +9,6 @@ export interface StreamSource {
 
 type PointState = Pick<OperatingPointBody, "fluid" | "pressureAltitude" | "staticTemperature" | "relativeHumidity">;
 
-const SUTHERLAND = "Sutherland, β = 1.458 × 10⁻⁶ and S = 110.4 K (ISO 2533:1975)";
-const FRESH_WATER = "IAPWS SR6-08(2011) at 0.1 MPa";
-
 /** The formulas behind the values of an operating point that nobody typed; ν = μ/ρ and q = ½ρU² follow from them. */
 export function streamSources(point: PointState): StreamSource[] {
   switch (point.fluid) {
@@ -18,13 +16,13 @@ export function streamSources(point: PointState): StreamSource[] {
       return [...standardAtmosphereSource(point), { symbol: "ρ", source: airDensity(point) }, ...airViscosity(point)];
     case "fresh-water":
       return [
-        { symbol: "ρ", source: FRESH_WATER },
-        { symbol: "μ", source: FRESH_WATER },
+        { symbol: "ρ", source: FLUID_SOURCES.freshWater },
+        { symbol: "μ", source: FLUID_SOURCES.freshWater },
       ];
     case "sea-water":
       return [
-        { symbol: "ρ", source: "EOS-80 at one atmosphere and salinity 35 (UNESCO 1981)" },
-        { symbol: "μ", source: "Sharqawy, Lienhard and Zubair 2010 at 35 g/kg, over that of fresh water" },
+        { symbol: "ρ", source: FLUID_SOURCES.seaWaterDensity },
+        { symbol: "μ", source: FLUID_SOURCES.seaWaterViscosity },
       ];
     case "custom":
       return [
@@ -41,11 +39,10 @@ function standardAtmosphereSource({ pressureAltitude, staticTemperature }: Point
 }
 
 function airDensity({ relativeHumidity }: PointState): string {
-  return relativeHumidity === null
-    ? "dry air, p/(R T) with R = 287.05287 J/(kg K) (ISO 2533:1975)"
-    : "humid air, CIPM-2007 with 0.0004 of CO₂ (Picard et al., Metrologia 45, 2008)";
+  return relativeHumidity === null ? FLUID_SOURCES.dryAir : FLUID_SOURCES.humidAir;
 }
 
 function airViscosity({ relativeHumidity }: PointState): StreamSource[] {
-  return [{ symbol: "μ", source: relativeHumidity === null ? SUTHERLAND : `${SUTHERLAND}, as of dry air` }];
+  const { sutherland } = FLUID_SOURCES;
+  return [{ symbol: "μ", source: relativeHumidity === null ? sutherland : `${sutherland}, as of dry air` }];
 }

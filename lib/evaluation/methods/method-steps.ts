@@ -1,8 +1,8 @@
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
-import { evaluateDuctEntry } from "./duct-entry";
+import { fluidSteps } from "./fluid-steps";
 import { frictionSteps } from "./friction-steps";
-import { ductCase, frictionSetup, plateCase } from "./friction-setup";
+import { frictionSetup, plateCase } from "./friction-setup";
 import { digits, step, streamSteps } from "./step-text";
 import { localStream, streamStateOf, type StreamState } from "./stream-state";
 import type { WorkedStep } from "./worked-step";
@@ -23,55 +23,6 @@ export function flatPlateSteps(input: InputOf<"flat-plate-friction">, stream: St
       "D = q · faces · breadth · form factor · ΔF",
       [...factors, stretch].map(digits).join(" · "),
       product(factors) * stretch,
-    ),
-  ];
-}
-
-export function ductSteps(input: InputOf<"duct-entry">, stream: StreamState): WorkedStep[] {
-  const friction = ductCase(input);
-  const steps = [...streamSteps(stream, 1), ...frictionSteps(friction, frictionSetup(friction, stream), stream)];
-  const [width, height] = [numberOf(input.width), numberOf(input.height)];
-  const stretch = steps.at(-1)?.value ?? 0;
-  const drag = stream.dynamicPressure * 2 * (width + height) * stretch;
-  return [
-    ...steps,
-    ...blockageSteps(input, stream, stretch),
-    step(
-      DRAG,
-      "D = q · 2 (W + H) · ΔF",
-      `${digits(stream.dynamicPressure)} · 2 · (${digits(width)} + ${digits(height)}) · ${digits(stretch)}`,
-      drag,
-    ),
-  ];
-}
-
-function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState, stretch: number): WorkedStep[] {
-  const outcome = evaluateDuctEntry(input, stream);
-  if (outcome.outcome === "refused") return [];
-  const { displacementThickness, coreSpeedAtExit, pressureLoss } = outcome.answer;
-  if (displacementThickness === undefined || coreSpeedAtExit === undefined || pressureLoss === undefined) return [];
-  const [width, height] = [numberOf(input.width), numberOf(input.height)];
-  return [
-    step(
-      ["Displacement thickness at the exit", "δ*", "m"],
-      "δ* = H₁₂ θ, θ = ½ F, by the line's profile",
-      `δ* = ${digits(displacementThickness)}`,
-      displacementThickness,
-    ),
-    step(
-      ["Core speed at the exit", "U_c", "m/s"],
-      "U_c = U · W · H/((W − 2δ*) · (H − 2δ*))",
-      `${digits(stream.speed)} · ${digits(width)} · ${digits(height)}/((${digits(width)} − 2 · ` +
-        `${digits(displacementThickness)}) · (${digits(height)} − 2 · ${digits(displacementThickness)}))`,
-      coreSpeedAtExit,
-      { source: "continuity, single pass" },
-    ),
-    step(
-      ["Pressure loss", "Δp", "Pa"],
-      "Δp = q · 2 (W + H) · ΔF/(W H)",
-      `${digits(stream.dynamicPressure)} · 2 · (${digits(width)} + ${digits(height)}) · ${digits(stretch)}/(${digits(width)} · ` +
-        `${digits(height)})`,
-      pressureLoss,
     ),
   ];
 }
@@ -116,6 +67,7 @@ export function measuredSteps(input: InputOf<"measured">, stream: StreamState): 
   const force = numberOf(input.force);
   return [
     ...streamSteps(stream, 1),
+    ...fluidSteps(input.testPoint).density.map((each) => ({ ...each, quantity: `${each.quantity}, in the test` })),
     step(
       ["Dynamic pressure of the test", "q_test", "Pa"],
       "q_test = ½ ρ_test U_test²",

@@ -10,6 +10,11 @@ export function digits(value: number): string {
   return String(Number(value.toPrecision(6)));
 }
 
+/** One term of a printed sum with its sign: "− 0.0153195665 · (0.15)²". */
+export function signedTerm(factor: number, of: string): string {
+  return `${factor < 0 ? "−" : "+"} ${String(Math.abs(factor))} · ${of}`;
+}
+
 type StepExtras = Pick<WorkedStep, "source" | "range">;
 
 /** `quantity|symbol|unit`, the equation in symbols, with its values, and what it gives. */

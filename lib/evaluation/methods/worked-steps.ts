@@ -1,16 +1,10 @@
-import type { MethodInput } from "../document/schema";
+import type { MethodInput, StreamInput } from "../document/schema";
+import { fluidSteps } from "./fluid-steps";
 import { evaluateMethod } from "./method-registry";
-import {
-  bluffBodySteps,
-  dragAreaSteps,
-  ductSteps,
-  fixedSteps,
-  flatPlateSteps,
-  lossSteps,
-  measuredSteps,
-} from "./method-steps";
+import { ductSteps } from "./duct-steps";
+import { bluffBodySteps, dragAreaSteps, fixedSteps, flatPlateSteps, lossSteps, measuredSteps } from "./method-steps";
 import { ofMethod } from "./of-method";
-import type { StreamState } from "./stream-state";
+import { streamStateOf, type StreamState } from "./stream-state";
 import type { WorkedStep } from "./worked-step";
 
 export type { WorkedStep } from "./worked-step";
@@ -27,14 +21,24 @@ const STEPPERS: ReadonlyMap<string, Stepper> = new Map([
   ["fixed/1", ofMethod("fixed", fixedSteps)],
 ]);
 
+/** These need the viscosity of the stream besides its density; a fixed force needs neither. */
+const VISCOUS_METHODS = ["flat-plate-friction", "duct-entry"];
+
 /**
  * The calculation of one item as a hand calculator can repeat it; the last value is the drag. A refused item has no steps,
  * and neither has a share, whose calculation is its members'.
  */
-export function workedSteps(method: string, version: number, input: MethodInput, stream: StreamState): WorkedStep[] {
+export function workedSteps(method: string, version: number, input: MethodInput, point: StreamInput): WorkedStep[] {
   if (method === "share") return [];
+  const stream = streamStateOf(point);
   if (evaluateMethod(method, version, input, stream).outcome === "refused") return [];
   const steps = STEPPERS.get(`${method}/${version}`);
   if (!steps) throw new RangeError(`no worked steps of ${method} of version ${version}`);
-  return steps(input, stream);
+  return [...fluidStepsFor(method, point), ...steps(input, stream)];
+}
+
+function fluidStepsFor(method: string, point: StreamInput): WorkedStep[] {
+  if (method === "fixed") return [];
+  const { density, viscosity } = fluidSteps(point);
+  return VISCOUS_METHODS.includes(method) ? [...density, ...viscosity] : density;
 }

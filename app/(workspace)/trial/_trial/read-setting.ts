@@ -2,7 +2,7 @@ import { asRecord } from "@/app/_components/line-fields/body";
 import { itemProblems } from "@/lib/evaluation/budget/item-problems";
 import type { IndexedState } from "@/lib/evaluation/budget/indexed-state";
 import { type EvaluatedBody, methodInputOf, streamInputOf } from "@/lib/evaluation/budget/method-input";
-import type { MethodInput } from "@/lib/evaluation/document/schema";
+import type { MethodInput, StreamInput } from "@/lib/evaluation/document/schema";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
 import { parseBody } from "@/lib/evaluation/lines/parse-body";
 import { type StreamSource, streamSources } from "@/lib/evaluation/lines/stream-sources";
@@ -50,7 +50,8 @@ export function readSetting(setting: TrialSetting): TrialReading {
   if (point.content.kind !== "operating_point" || item.content.kind !== "item") return { result: null, faults };
 
   const { body } = item.content;
-  const flow = { stream: streamStateOf(streamInputOf(point.content.body)), sources: streamSources(point.content.body) };
+  const stream = streamInputOf(point.content.body);
+  const flow = { stream: streamStateOf(stream), sources: streamSources(point.content.body) };
   if (body.method === "share") return { result: shareResult(body.fraction, membersSumOf(setting), flow), faults };
   const state = stateWith(body);
   const problems = itemProblems(state, {}).flatMap(({ causes }) => causes);
@@ -59,7 +60,7 @@ export function readSetting(setting: TrialSetting): TrialReading {
     const told = own.map(({ path, sentence }) => ({ path: path.replace(/^body\./, ""), sentence }));
     return { result: null, faults: below("item", told) };
   }
-  return { result: resultOf(body, state, flow), faults };
+  return { result: resultOf(body, state, stream, flow), faults };
 }
 
 /** What a budget asks besides, and a trial doesn't, filled in for computing alone. */
@@ -111,14 +112,14 @@ function shareResult(fraction: number, membersSum: number | null, flow: Flow): T
   };
 }
 
-function resultOf(body: EvaluatedBody, state: IndexedState, flow: Flow): TrialResult {
+function resultOf(body: EvaluatedBody, state: IndexedState, point: StreamInput, flow: Flow): TrialResult {
   const input = methodInputOf(body, state);
   const { stream } = flow;
   return {
     ...flow,
     input,
     outcome: evaluateMethod(body.method, body.methodVersion, input, stream),
-    steps: workedSteps(body.method, body.methodVersion, input, stream),
+    steps: workedSteps(body.method, body.methodVersion, input, point),
     alternates: alternateLines(input, stream),
   };
 }

@@ -1,19 +1,19 @@
 import { describe, expect, it } from "vitest";
 import { FRICTION_LINE_NAMES } from "@/lib/aero/friction/friction-line-name";
-import { MethodInput, StreamPointInput } from "@/lib/evaluation/document/schema";
+import { MethodInput, type StreamInput, StreamPointInput } from "@/lib/evaluation/document/schema";
 import { evaluateMethod } from "@/lib/evaluation/methods/method-registry";
 import { streamStateOf } from "@/lib/evaluation/methods/stream-state";
 import { workedSteps } from "@/lib/evaluation/methods/worked-steps";
 import { expectRelative } from "@/tests/support/relative";
 import { PLAIN } from "./evaluate-one";
 
-const STREAM = streamStateOf(StreamPointInput.parse(PLAIN));
+const POINT: StreamInput = StreamPointInput.parse(PLAIN);
 const plate = (fields: object) => ({ method: "flat-plate-friction", length: 2, breadth: 0.7, faces: 2, ...fields });
 
-function stepsOf(item: object) {
+function stepsOf(item: object, point = POINT) {
   const input = MethodInput.parse(item);
-  const outcome = evaluateMethod(input.method, 1, input, STREAM);
-  return { steps: workedSteps(input.method, 1, input, STREAM), outcome };
+  const outcome = evaluateMethod(input.method, 1, input, streamStateOf(point));
+  return { steps: workedSteps(input.method, 1, input, point), outcome };
 }
 
 /** A hand calculator: the text of a step with its values, read as arithmetic. */
@@ -25,6 +25,7 @@ function handCalculated(text: string): number {
     .replaceAll("−", "-")
     .replaceAll("²", "**2")
     .replaceAll("e^(", "Math.exp(")
+    .replaceAll("^", "**")
     .replaceAll("√(", "Math.sqrt(")
     .replace(/√([\d.e-]+)/g, "Math.sqrt($1)");
   if (!/^[\d.e*/+() \-Mathsqrtxp]+$/.test(expression)) return NaN;
@@ -44,6 +45,16 @@ const PLATES: [string, object][] = [
   ["automatic", plate({})],
   ["automatic, rough", plate({ roughness: 1e-3, runUp: 0.5 })],
   ["laminar", plate({ transition: { kind: "laminar" } })],
+];
+const FLUIDS: [StreamInput, string][] = [
+  [{ fluid: "air", speed: 10, staticTemperature: 288.15, staticPressure: 101325 }, "ISO 2533:1975"],
+  [{ fluid: "air", speed: 10, pressureAltitude: 2000 }, "ISO 2533:1975"],
+  [{ fluid: "air", speed: 10, pressureAltitude: 14000 }, "ISO 2533:1975"],
+  [{ fluid: "air", speed: 10, pressureAltitude: 2000, staticTemperature: 290 }, "ISO 2533:1975"],
+  [{ fluid: "air", speed: 10, staticTemperature: 293.15, staticPressure: 101325, relativeHumidity: 0.5 }, "CIPM-2007"],
+  [{ fluid: "fresh-water", speed: 2, staticTemperature: 298.15 }, "IAPWS SR6-08"],
+  [{ fluid: "sea-water", speed: 2, staticTemperature: 278.15 }, "EOS-80"],
+  [{ fluid: "sea-water", speed: 2, staticTemperature: 273.15 }, "Sharqawy"],
 ];
 const OTHERS: [string, object][] = [
   ["duct", { method: "duct-entry", width: 0.5, height: 0.3, length: 1 }],
@@ -84,6 +95,26 @@ describe("worked steps", () => {
       expectRelative(byHand, step.value, lost, `${step.symbol}: ${step.withValues}`);
     }
     expect(repeated).toBeGreaterThanOrEqual(Math.min(steps.length, 3));
+  });
+
+  it.each(FLUIDS)("of a plate in %o begin with its density and viscosity, by %s", (point, source) => {
+    const stream = streamStateOf(point);
+    const { steps } = stepsOf(plate({ length: 1 }), point);
+    const last = (symbol: string) => steps.findLast((each) => each.symbol === symbol);
+    expect(last("ρ")?.value).toBe(stream.density);
+    expect(last("μ")?.value).toBe(stream.dynamicViscosity);
+    expect(steps.some((each) => each.source?.includes(source))).toBe(true);
+    const upToViscosity = steps.slice(0, steps.findIndex(({ symbol }) => symbol === "μ") + 1);
+    for (const { symbol, withValues, value } of upToViscosity) {
+      expectRelative(handCalculated(withValues), value, 2e-5, `${symbol}: ${withValues}`);
+    }
+  });
+
+  it("of what takes no viscosity leave it out, and a fixed force needs no fluid", () => {
+    const point: StreamInput = { fluid: "fresh-water", speed: 2, staticTemperature: 298.15 };
+    const symbolsOf = (item: object) => stepsOf(item, point).steps.map(({ symbol }) => symbol);
+    expect(symbolsOf({ method: "drag-area", dragArea: 0.3 })).toEqual(["α", "β", "ρ", "U", "q", "D"]);
+    expect(symbolsOf({ method: "fixed", force: 6.4 })).toEqual(["D"]);
   });
 
   it("states sources and ranges of the lines", () => {

@@ -1,4 +1,4 @@
-import { methodInputOf } from "@/lib/evaluation/budget/method-input";
+import { methodInputOf, streamInputOf } from "@/lib/evaluation/budget/method-input";
 import { shareMembers } from "@/lib/evaluation/budget/share-members";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
@@ -97,8 +97,10 @@ function methodSteps({ indexed, point }: BudgetSheet, { body, result }: ItemRow)
   if (body.method === "share") {
     return result.refused ? [] : [shareStep(body, result.basic)];
   }
-  const steps = workedSteps(body.method, result.methodVersion, methodInputOf(body, indexed), point.stream);
-  return steps.map(printedStep);
+  const stream = indexed.operatingPoints.get(point.operatingPoint);
+  if (!stream) throw new RangeError(`no operating point ${point.operatingPoint} in force`);
+  const input = methodInputOf(body, indexed);
+  return workedSteps(body.method, result.methodVersion, input, streamInputOf(stream)).map(printedStep);
 }
 
 function shareStep(body: Extract<ItemBody, { method: "share" }>, basic: number): WorkingStep {
