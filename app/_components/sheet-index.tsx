@@ -3,6 +3,7 @@
 import type { Route } from "next";
 import Link from "next/link";
 import { usePathname } from "next/navigation";
+import { useEffect, useRef } from "react";
 
 import { PendingMark } from "./pending-mark";
 
@@ -21,10 +22,17 @@ interface SheetIndexProps {
 /** The numbered index of sheets at the left of a page, as in a drawing set; a row to scroll on a narrow screen. */
 export function SheetIndex({ entries, label = "Sheets" }: SheetIndexProps) {
   const current = currentEntry(entries, usePathname());
+  const row = useRef<HTMLOListElement>(null);
+
+  // On a narrow screen the row scrolls by itself to where one is.
+  useEffect(() => {
+    const place = row.current?.querySelector<HTMLElement>("[aria-current=page]")?.parentElement;
+    if (place && row.current) row.current.scrollLeft = place.offsetLeft - row.current.offsetLeft;
+  }, [current?.href]);
 
   return (
     <nav aria-label={label} className="print:hidden">
-      <ol className="flex overflow-x-auto border-t-[3px] border-ink lg:block lg:overflow-visible">
+      <ol ref={row} className="flex overflow-x-auto border-t-[3px] border-ink lg:block lg:overflow-visible">
         {entries.map((entry, at) => (
           <li key={entry.href} className="shrink-0">
             <Link

@@ -54,7 +54,14 @@ function TrendLines({ layout }: { layout: TrendLayout }) {
         <g key={mark.issue}>
           <circle cx={percent(mark.x)} cy={y(mark.y)} r="3.5" className="fill-sheet stroke-water" strokeWidth="2" />
           {mark.labelled ? (
-            <text x={percent(mark.x)} y={y(mark.y) - 8} textAnchor={anchorAt(mark.x)} className="fill-ink text-2xs">
+            <text
+              x={percent(mark.x)}
+              y={y(mark.y) - 8}
+              textAnchor={anchorAt(mark.x)}
+              strokeWidth="3"
+              strokeLinejoin="round"
+              className="fill-ink stroke-sheet text-2xs [paint-order:stroke]"
+            >
               {mark.issue}
             </text>
           ) : null}

@@ -25,7 +25,7 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode, measur
   const newestBasis = newest ? readingFor(measure, newest.basis).basis : null;
 
   return (
-    <Table caption={`Issues, with totals at ${operatingPoint}`}>
+    <Table caption={`Issues, with totals at ${operatingPoint}`} narrow="stack">
       <TableHead>
         <Head>Issue</Head>
         <Head>Issued</Head>
@@ -43,7 +43,7 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode, measur
           const print = (newtons: number) => (reading ? readText(reading, newtons) : "–");
           return (
             <Row key={issue.number} data-issue={issue.number}>
-              <RowHead>
+              <RowHead label="Issue">
                 <Link className="link" href={`/products/${productCode}/budget?issue=${issue.number}` as Route}>
                   Issue {issue.number}
                 </Link>
@@ -62,10 +62,10 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode, measur
                   Recompute<span className="sr-only"> issue {issue.number}</span>
                 </Link>
               </RowHead>
-              <Cell>
+              <Cell label="Issued">
                 <UtcTime at={issue.at} />
               </Cell>
-              <Cell className="min-w-44">
+              <Cell label="By proposal" className="sm:min-w-44">
                 {issue.proposal ? (
                   <Link className="link" href={`/products/${productCode}/proposals/${issue.proposal.number}` as Route}>
                     {issue.proposal.label} {issue.proposal.title}
@@ -74,18 +74,20 @@ export function IssuesTable({ issues, trend, operatingPoint, productCode, measur
                   "established"
                 )}
               </Cell>
-              <Cell>
+              <Cell label="Proposed, approved">
                 {proposedBy(issue)}
                 <span className="block text-xs text-ink-2">{approvedBy(issue)}</span>
               </Cell>
-              <Cell numeric>
+              <Cell numeric label="Predicted">
                 {point ? print(point.predicted) : "–"}
                 {reading && reading.basis !== newestBasis ? (
                   <span className="block text-xs whitespace-normal text-ink-2">{reading.basis}</span>
                 ) : null}
               </Cell>
-              <Cell numeric>{point ? print(point.margin) : "–"}</Cell>
-              <Cell className={point?.standing === "over" ? "font-semibold text-signal" : undefined}>
+              <Cell numeric label="To limit">
+                {point ? print(point.margin) : "–"}
+              </Cell>
+              <Cell label="Standing" className={point?.standing === "over" ? "font-semibold text-signal" : undefined}>
                 {point ? STANDING_NAMES[point.standing] : "no such operating point"}
               </Cell>
             </Row>

@@ -27,7 +27,7 @@ export function ResultsTable({ points, measure }: ResultsTableProps) {
   const [common = ""] = units.size === 1 ? units : [];
 
   return (
-    <Table caption={`Result at every operating point${common ? `, in ${common}` : ""}`}>
+    <Table caption={`Result at every operating point${common ? `, in ${common}` : ""}`} narrow="stack">
       <TableHead>
         <Head>Operating point</Head>
         <Head numeric unit={common}>
@@ -69,19 +69,30 @@ function ResultRow({ sheet, row, measure, alone }: ResultRowProps) {
   const print = (newtons: number) => (alone ? readNumber(reading, newtons) : readText(reading, newtons));
   const { result, allocationHundredths, marginHundredths } = row;
   const over = isReference && isOver(row);
+  const inUnit = (label: string) => (alone && reading.unit ? `${label}, ${reading.unit}` : label);
 
   return (
     <Row>
-      <RowHead>
+      <RowHead label="Operating point">
         {point.operatingPoint} {point.name}
         {isReference ? <span className="block text-xs text-ink-2">reference: allocations are set here</span> : null}
       </RowHead>
-      <Cell numeric>{result.refused ? "refused" : print(row.basic)}</Cell>
-      <Cell numeric>{formatPercent(result.growthFraction)}</Cell>
-      <Cell numeric>{print(row.growth)}</Cell>
-      <Cell numeric>{print(row.predicted)}</Cell>
-      <Cell numeric>{allocationHundredths === null ? "none" : print(allocationHundredths / 100)}</Cell>
-      <Cell numeric className={over ? "font-semibold text-signal" : undefined}>
+      <Cell numeric label={inUnit("Basic")}>
+        {result.refused ? "refused" : print(row.basic)}
+      </Cell>
+      <Cell numeric label="Growth, of basic">
+        {formatPercent(result.growthFraction)}
+      </Cell>
+      <Cell numeric label={inUnit("Growth")}>
+        {print(row.growth)}
+      </Cell>
+      <Cell numeric label={inUnit("Predicted")}>
+        {print(row.predicted)}
+      </Cell>
+      <Cell numeric label={inUnit("Allocation")}>
+        {allocationHundredths === null ? "none" : print(allocationHundredths / 100)}
+      </Cell>
+      <Cell numeric label={inUnit("Margin")} className={over ? "font-semibold text-signal" : undefined}>
         {marginHundredths === null ? "–" : print(marginHundredths / 100)}
         {over ? <span className="block text-xs">over</span> : null}
       </Cell>

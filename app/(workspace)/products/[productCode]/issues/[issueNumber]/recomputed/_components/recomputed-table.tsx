@@ -8,7 +8,7 @@ export function RecomputedTable({ point }: { point: RecomputedPoint }) {
   const { items, total } = point;
 
   return (
-    <Table caption={`Predicted values at ${point.operatingPoint}, kept and recomputed`}>
+    <Table caption={`Predicted values at ${point.operatingPoint}, kept and recomputed`} narrow="stack">
       <TableHead>
         <Head>Item</Head>
         <Head>Method, version</Head>
@@ -31,13 +31,21 @@ export function RecomputedTable({ point }: { point: RecomputedPoint }) {
           <ItemRow key={item.item} {...item} />
         ))}
         <Row band>
-          <RowHead>Sum</RowHead>
-          <Cell />
-          <Cell numeric>{formatNewtonsNumber(total.frozen)}</Cell>
-          <Cell numeric>{formatNewtonsNumber(total.today)}</Cell>
-          <Cell numeric>{formatNewtonsChangeNumber(total.today - total.frozen)}</Cell>
-          <Cell />
-          <Cell numeric>{formatNewtonsNumber(total.newest)}</Cell>
+          <RowHead label="Item">Sum</RowHead>
+          <Cell className="max-sm:hidden!" />
+          <Cell numeric label="As signed, N">
+            {formatNewtonsNumber(total.frozen)}
+          </Cell>
+          <Cell numeric label="Today, N">
+            {formatNewtonsNumber(total.today)}
+          </Cell>
+          <Cell numeric label="Difference, N">
+            {formatNewtonsChangeNumber(total.today - total.frozen)}
+          </Cell>
+          <Cell className="max-sm:hidden!" />
+          <Cell numeric label="By the newest, N">
+            {formatNewtonsNumber(total.newest)}
+          </Cell>
         </Row>
       </tbody>
     </Table>
@@ -47,17 +55,25 @@ export function RecomputedTable({ point }: { point: RecomputedPoint }) {
 function ItemRow({ item, name, method, version, newestVersion, frozen, today, newest }: RecomputedItem) {
   return (
     <Row>
-      <RowHead>
+      <RowHead label="Item">
         {item} {name}
       </RowHead>
-      <Cell>
+      <Cell label="Method, version">
         {ITEM_METHODS[method].label}, {version}
       </Cell>
-      <Cell numeric>{formatNewtonsNumber(frozen)}</Cell>
-      <Cell numeric>{newtonsOrRefused(today)}</Cell>
-      <Cell numeric>{today === null ? "–" : formatNewtonsChangeNumber(today - frozen)}</Cell>
-      <Cell>{newestVersion === version ? "the same" : newestVersion}</Cell>
-      <Cell numeric>{newtonsOrRefused(newest)}</Cell>
+      <Cell numeric label="As signed, N">
+        {formatNewtonsNumber(frozen)}
+      </Cell>
+      <Cell numeric label="Today, N">
+        {newtonsOrRefused(today)}
+      </Cell>
+      <Cell numeric label="Difference, N">
+        {today === null ? "–" : formatNewtonsChangeNumber(today - frozen)}
+      </Cell>
+      <Cell label="Newest version">{newestVersion === version ? "the same" : newestVersion}</Cell>
+      <Cell numeric label="By the newest, N">
+        {newtonsOrRefused(newest)}
+      </Cell>
     </Row>
   );
 }
