@@ -1,8 +1,8 @@
+import type { FrictionLineChoice } from "@/lib/aero/friction/friction-line-name";
 import type { NumberInput } from "../document/number-input";
 import type { FluidInput, InputOf, MethodInput, StreamInput, TransitionInput } from "../document/schema";
 import type { Fluid } from "../lines/fluids";
 import type { ItemBody } from "../lines/item-body";
-import type { FrictionLineChoice } from "../lines/items/friction-fields";
 import type { OperatingPointBody } from "../lines/operating-point-body";
 import type { Quantity } from "../lines/quantity";
 import type { IndexedState } from "./indexed-state";

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { FRICTION_LINE_NAMES } from "@/lib/aero/friction/friction-line-name";
+import { FRICTION_LINE_CHOICES } from "@/lib/aero/friction/friction-line-name";
 import {
   anyNumber,
   fraction,
@@ -29,8 +29,8 @@ export const TransitionInput = z.discriminatedUnion(
 );
 
 const frictionLine = z
-  .enum(["automatic", ...FRICTION_LINE_NAMES], {
-    error: `must be one of automatic, ${FRICTION_LINE_NAMES.join(", ")}`,
+  .enum(FRICTION_LINE_CHOICES, {
+    error: `must be one of ${FRICTION_LINE_CHOICES.join(", ")}`,
   })
   .default("automatic");
 

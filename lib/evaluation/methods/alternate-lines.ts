@@ -1,5 +1,5 @@
 import { AUTOMATIC_RANGE } from "@/lib/aero/friction/automatic-layer";
-import { FRICTION_LINE_NAMES, type FrictionLineName } from "@/lib/aero/friction/friction-line-name";
+import { FRICTION_LINE_CHOICES, type FrictionLineName } from "@/lib/aero/friction/friction-line-name";
 import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
 import { within } from "@/lib/aero/range";
 import { numberOf } from "../document/number-input";
@@ -34,8 +34,7 @@ export function alternateLines(input: MethodInput, stream: StreamState): Alterna
   if (input.method !== "flat-plate-friction" && input.method !== "duct-entry") return null;
   const own = answerBy(input, input.frictionLine, stream);
   if (!own) return null;
-  const names = ["automatic", ...FRICTION_LINE_NAMES] as const;
-  const lines = names.flatMap((line) => {
+  const lines = FRICTION_LINE_CHOICES.flatMap((line) => {
     const isItemsOwn = line === input.frictionLine;
     if (!isItemsOwn && !isValid(line, own, numberOf(input.roughness))) return [];
     const answer = answerBy(input, line, stream);

@@ -5,7 +5,7 @@ import { frictionChartLayout } from "@/app/(workspace)/_friction-pictures/fricti
 import { frictionSubject } from "@/app/(workspace)/_friction-pictures/friction-subject";
 import { layerGrowth } from "@/app/(workspace)/_friction-pictures/layer-growth";
 import { growthLayout, shearLayout } from "@/app/(workspace)/_friction-pictures/layer-layouts";
-import { FRICTION_LINE_NAMES } from "@/lib/aero/friction/friction-line-name";
+import { FRICTION_LINE_CHOICES } from "@/lib/aero/friction/friction-line-name";
 import { type InputOf, MethodInput } from "@/lib/evaluation/document/schema";
 import { evaluateMethod } from "@/lib/evaluation/methods/method-registry";
 import { layerStretches } from "@/lib/evaluation/methods/layer-stretches";
@@ -127,22 +127,19 @@ describe("the layer along the plate", () => {
     expect(growthLayout(growth).bands.map(({ word }) => word)).toEqual(["laminar", "run-up"]);
   });
 
-  it.each(["automatic" as const, ...FRICTION_LINE_NAMES])(
-    "grows without a gap by %s, smooth and rough",
-    (frictionLine) => {
-      for (const roughness of [1e-5, 1e-3]) {
-        const growth = layerGrowth(subjectOf(plate({ frictionLine, roughness, length: 4 })), 21);
-        const thetas = growth.stations.map(({ momentumThickness }) => momentumThickness);
+  it.each(FRICTION_LINE_CHOICES)("grows without a gap by %s, smooth and rough", (frictionLine) => {
+    for (const roughness of [1e-5, 1e-3]) {
+      const growth = layerGrowth(subjectOf(plate({ frictionLine, roughness, length: 4 })), 21);
+      const thetas = growth.stations.map(({ momentumThickness }) => momentumThickness);
 
-        expect(thetas.every((theta, at) => theta > (thetas[at - 1] ?? 0))).toBe(true);
-        for (const { x, y } of [growthLayout(growth), shearLayout(growth)].flatMap(({ curves }) =>
-          curves.flatMap(({ points }) => points),
-        )) {
-          expect(Number.isFinite(x) && Number.isFinite(y)).toBe(true);
-        }
+      expect(thetas.every((theta, at) => theta > (thetas[at - 1] ?? 0))).toBe(true);
+      for (const { x, y } of [growthLayout(growth), shearLayout(growth)].flatMap(({ curves }) =>
+        curves.flatMap(({ points }) => points),
+      )) {
+        expect(Number.isFinite(x) && Number.isFinite(y)).toBe(true);
       }
-    },
-  );
+    }
+  });
 
   it("has nothing to draw of a method without a layer, or of an item that is refused", () => {
     const fixed = MethodInput.parse({ method: "fixed", force: 3 });

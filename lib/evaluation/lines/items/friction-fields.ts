@@ -1,36 +1,9 @@
 import { z } from "zod";
+import { FRICTION_LINE_CHOICES, type FrictionLineChoice } from "@/lib/aero/friction/friction-line-name";
+import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
 import type { Choice, FieldSpec } from "../field-spec";
 import { nonNegativeQuantity, positiveNumber, roughnessQuantity, SMALLEST_POSITIVE } from "../quantity";
 import { lineNumber } from "../text-schemas";
-
-export const FRICTION_LINES = [
-  "automatic",
-  "one-fifth-law",
-  "one-seventh-law",
-  "prandtl-schlichting",
-  "schultz-grunow",
-  "white",
-  "karman-schoenherr",
-  "ittc-1957",
-  "momentum-integral",
-  "fully-rough",
-  "fully-rough-mills-hang",
-] as const;
-export type FrictionLineChoice = (typeof FRICTION_LINES)[number];
-
-export const FRICTION_LINE_NAMES: Record<FrictionLineChoice, string> = {
-  automatic: "Automatic",
-  "one-fifth-law": "One-fifth power law",
-  "one-seventh-law": "One-seventh power law",
-  "prandtl-schlichting": "Prandtl–Schlichting",
-  "schultz-grunow": "Schultz-Grunow",
-  white: "White",
-  "karman-schoenherr": "Kármán–Schoenherr",
-  "ittc-1957": "ITTC 1957",
-  "momentum-integral": "Momentum integral (Coles)",
-  "fully-rough": "Fully rough (Schlichting)",
-  "fully-rough-mills-hang": "Fully rough (Mills–Hang)",
-};
 
 export function isFullyRough(line: FrictionLineChoice): boolean {
   return line === "fully-rough" || line === "fully-rough-mills-hang";
@@ -43,7 +16,7 @@ export const frictionShape = {
   transition: z.enum(["natural", "tripped", "laminar"], "Choose how the layer turns turbulent.").default("natural"),
   criticalReynolds: positiveNumber.default(500_000),
   trippedAt: nonNegativeQuantity.default({ value: 0 }),
-  frictionLine: z.enum(FRICTION_LINES, "Choose a friction line.").default("automatic"),
+  frictionLine: z.enum(FRICTION_LINE_CHOICES, "Choose a friction line.").default("automatic"),
 };
 
 export const newFriction = {
@@ -125,7 +98,10 @@ export const FRICTION_FIELDS: readonly FieldSpec[] = [
     help: "Automatic judges smooth or rough at each operating point; a line by name is used as asked.",
     type: {
       type: "choice",
-      choices: FRICTION_LINES.map((value) => ({ value, label: FRICTION_LINE_NAMES[value] })),
+      choices: FRICTION_LINE_CHOICES.map((value) => ({
+        value,
+        label: value === "automatic" ? "Automatic" : FRICTION_LINES[value].title,
+      })),
     },
   },
 ];

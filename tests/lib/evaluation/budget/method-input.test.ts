@@ -5,7 +5,7 @@ import { indexState } from "@/lib/evaluation/budget/indexed-state";
 import { methodInputOf, streamInputOf } from "@/lib/evaluation/budget/method-input";
 import { MethodInput, StreamPointInput } from "@/lib/evaluation/document/schema";
 import type { ItemBody } from "@/lib/evaluation/lines/item-body";
-import { FRICTION_LINES } from "@/lib/evaluation/lines/items/friction-fields";
+import { FRICTION_LINE_CHOICES } from "@/lib/aero/friction/friction-line-name";
 import type { LineState } from "@/lib/evaluation/lines/line-state";
 import { parseBody } from "@/lib/evaluation/lines/parse-body";
 import { budgetState } from "@/tests/support/budget-state";
@@ -51,7 +51,7 @@ const friction = {
   transition: fc.constantFrom("natural", "tripped", "laminar"),
   criticalReynolds: fc.constantFrom(1e3, 1e4, 5e5, 3e6),
   trippedAt: quantity,
-  frictionLine: fc.constantFrom(...FRICTION_LINES),
+  frictionLine: fc.constantFrom(...FRICTION_LINE_CHOICES),
 };
 const source = fc.constant("judgement");
 const bodies = fc.oneof(

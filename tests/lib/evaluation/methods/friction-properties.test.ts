@@ -1,17 +1,16 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { FRICTION_LINE_NAMES } from "@/lib/aero/friction/friction-line-name";
+import { FRICTION_LINE_CHOICES } from "@/lib/aero/friction/friction-line-name";
 import { expectRelative } from "@/tests/support/relative";
 import { answerOf, evaluateItems, PLAIN } from "./evaluate-one";
 
-const LINE_NAMES = ["automatic", ...FRICTION_LINE_NAMES] as const;
 const isRoughLine = (line: string): boolean => line.startsWith("fully-rough");
 
 /** A number spread evenly over its powers of ten. */
 const logarithmic = (min: number, max: number) =>
   fc.double({ min: Math.log10(min), max: Math.log10(max), noNaN: true }).map((log) => 10 ** log);
 
-const line = fc.constantFrom(...LINE_NAMES);
+const line = fc.constantFrom(...FRICTION_LINE_CHOICES);
 const transition = fc.oneof(
   logarithmic(1e4, 5e6).map((criticalReynolds) => ({ kind: "natural", criticalReynolds })),
   fc.constant({ kind: "tripped", at: 0 }),
@@ -186,7 +185,7 @@ describe("continuity", () => {
     return after / before - 1;
   };
 
-  it.each(LINE_NAMES)(
+  it.each(FRICTION_LINE_CHOICES)(
     "%s: F has no jump at transition, at a crossing or where a coefficient is held",
     (frictionLine) => {
       for (const finish of isRoughLine(frictionLine) ? [1e-6, 1e-4, 5e-3] : [0, 1e-6, 9e-5, 5e-3]) {
