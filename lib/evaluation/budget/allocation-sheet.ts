@@ -1,6 +1,7 @@
 import type { AllocationRow, AllocationsBody } from "../lines/allocations-body";
 import type { LineState } from "../lines/line-state";
 import type { Holder } from "./edits";
+import { oncePer } from "./once-per";
 import { compareNumbers } from "./sheet-order";
 
 /** Hundredths of a newton by holder, while acts are worked into the sheet. */
@@ -16,14 +17,14 @@ export function keyOf(kind: "item" | "group", number: string): string {
   return `${kind} ${number}`;
 }
 
-export function holderTree(lines: readonly LineState[]): HolderTree {
+export const holderTree = oncePer((lines: readonly LineState[]): HolderTree => {
   const tree = new Map<string, string | null>();
   for (const line of lines) {
     if (line.kind === "item") tree.set(keyOf("item", line.number), line.body.group);
     if (line.kind === "group") tree.set(keyOf("group", line.number), line.body.parent);
   }
   return tree;
-}
+});
 
 export function openSheet({ rows, unallocatedHundredths }: AllocationsBody): AllocationSheet {
   const byKey = new Map(rows.map((row) => [keyOf(row.kind, row.number), { ...row }]));

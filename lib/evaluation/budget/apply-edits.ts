@@ -93,8 +93,12 @@ function isChanged(line: LineState, state: BudgetState): boolean {
 
 /** Lines keep their places; new ones come last. */
 function replaceLines(state: BudgetState, lines: readonly LineState[]): BudgetState {
-  const fresh = new Map(lines.map((line) => [`${line.kind} ${line.number}`, line]));
-  const known = new Set(state.lines.map((line) => `${line.kind} ${line.number}`));
-  const kept = state.lines.map((line) => fresh.get(`${line.kind} ${line.number}`) ?? line);
-  return { ...state, lines: [...kept, ...lines.filter((line) => !known.has(`${line.kind} ${line.number}`))] };
+  if (lines.length === 0) return state;
+  const fresh = new Set(lines);
+  const replaced = state.lines.map((line) => {
+    const next = lines.find(({ number, kind }) => number === line.number && kind === line.kind);
+    if (next) fresh.delete(next);
+    return next ?? line;
+  });
+  return { ...state, lines: [...replaced, ...fresh] };
 }

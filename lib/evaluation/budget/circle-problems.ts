@@ -1,3 +1,4 @@
+import type { ItemBody } from "../lines/item-body";
 import { groupsAboveItem } from "./group-tree";
 import type { IndexedState } from "./indexed-state";
 import { shareMembers } from "./share-members";
@@ -19,7 +20,7 @@ function groupCircle({ groups }: IndexedState): Problem[] {
 }
 
 function runUpCircle({ items }: IndexedState): Problem[] {
-  const circle = findCircle([...items.keys()], (item) => {
+  const circle = findCircle(numbersOf(items, "flat-plate-friction"), (item) => {
     const body = items.get(item);
     return body?.method === "flat-plate-friction" && body.liesBehind !== null ? [body.liesBehind] : [];
   });
@@ -29,7 +30,7 @@ function runUpCircle({ items }: IndexedState): Problem[] {
 }
 
 function shareCircle(state: IndexedState): Problem[] {
-  const circle = findCircle([...state.items.keys()], (item) => {
+  const circle = findCircle(numbersOf(state.items, "share"), (item) => {
     const body = state.items.get(item);
     return body?.method === "share" ? shareMembers(body, state) : [];
   });
@@ -51,10 +52,18 @@ function shareField(number: string, { items }: IndexedState): string {
   return body?.method === "share" && body.ofGroup !== null ? "body.ofGroup" : "body.of";
 }
 
+/** Only such items lead on to others. */
+function numbersOf(items: IndexedState["items"], method: ItemBody["method"]): string[] {
+  const numbers: string[] = [];
+  for (const [number, body] of items) if (body.method === method) numbers.push(number);
+  return numbers;
+}
+
 /** A way that comes back to its start, as "a, b, a"; null where there is none. */
 function findCircle(nodes: readonly string[], next: (node: string) => readonly string[]): string[] | null {
   const done = new Set<string>();
   for (const start of nodes) {
+    if (done.has(start)) continue;
     const circle = walk(start, [], done, next);
     if (circle) return circle;
   }

@@ -2,6 +2,7 @@ import { roundStored } from "@/lib/units/rounding";
 import type { Note } from "../notes/note";
 import type { Effects, ItemEffect, PointEffect, PointFigures } from "./effects";
 import type { BudgetResults, ItemResult, PointResult } from "./results";
+import { resultsByItem } from "./results-by-item";
 
 /** What lies between two evaluations: totals and standings, items that moved, notes that came and went. */
 export function effectsOf(before: BudgetResults, after: BudgetResults, edited: readonly string[] = []): Effects {
@@ -41,13 +42,31 @@ function itemEffects(
   now: PointResult | undefined,
   edited: readonly string[],
 ): ItemEffect[] {
-  const [before, after] = [resultsByItem(was), resultsByItem(now)];
+  const before = was ? resultsByItem(was) : NONE;
   const isSamePoint = was !== undefined && now !== undefined;
-  return [...new Set([...after.keys(), ...before.keys()])]
-    .filter((item) => !isSamePoint || before.get(item) !== after.get(item) || edited.includes(item))
-    .map((item) => itemEffect(before.get(item), after.get(item), isSamePoint, edited.includes(item)))
+  // Most results are the very ones of before, and stand at the same place of the sheet.
+  const isTouched = (result: ItemResult, place: number) =>
+    !isSamePoint || (was.items[place] !== result && before.get(result.item) !== result) || edited.includes(result.item);
+  return [
+    ...(now?.items.filter(isTouched) ?? []).map((result) => [before.get(result.item), result] as const),
+    ...goneItems(was, now, before).map((result) => [result, undefined] as const),
+  ]
+    .map(([earlier, later]) => itemEffect(earlier, later, isSamePoint, edited.includes((later ?? earlier)?.item ?? "")))
     .filter((effect) => effect !== null)
     .filter((effect) => effect.edited || !isSamePoint || isMoved(effect));
+}
+
+/** Results that have none after them. Where as many come as were, none can have gone. */
+function goneItems(
+  was: PointResult | undefined,
+  now: PointResult | undefined,
+  before: ReadonlyMap<string, ItemResult>,
+): ItemResult[] {
+  const items = now?.items ?? [];
+  const isKept = ({ item }: ItemResult, place: number) => was?.items[place]?.item === item || before.has(item);
+  if (items.filter(isKept).length === before.size) return [];
+  const after = new Set(items.map(({ item }) => item));
+  return was?.items.filter(({ item }) => !after.has(item)) ?? [];
 }
 
 function itemEffect(
@@ -84,6 +103,8 @@ function isMoved({ basicDelta, predictedDelta, basicWas, basicNow, newNotes, van
   return cameOrWent || basicDelta !== 0 || predictedDelta !== 0 || newNotes.length > 0 || vanishedNotes.length > 0;
 }
 
+const NONE: ReadonlyMap<string, ItemResult> = new Map();
+
 /** Notes of one side that the other doesn't carry. */
 function notesMissing(side: ItemResult | undefined, other: ItemResult | undefined): Note[] {
   const known = (other?.notes ?? []).map(noteKey);
@@ -98,8 +119,4 @@ function noteKey({ code, values }: Note): string {
 
 function pointOf(results: BudgetResults, number: string): PointResult | undefined {
   return results.points.find((point) => point.operatingPoint === number);
-}
-
-function resultsByItem(point: PointResult | undefined): ReadonlyMap<string, ItemResult> {
-  return new Map(point?.items.map((result) => [result.item, result]));
 }

@@ -1,11 +1,13 @@
 import { STANDING_ORDER } from "@/lib/vocabulary/standing";
 import type { BudgetState } from "../lines/line-state";
+import type { OperatingPointBody } from "../lines/operating-point-body";
 import { streamStateOf } from "../methods/stream-state";
 import { evaluatePoint } from "./evaluate-point";
 import { indexState, type IndexedState } from "./indexed-state";
 import { streamInputOf } from "./method-input";
 import type { BudgetResults, ItemResult, PointResult } from "./results";
 import { limitAndReserve, ROLL_UP_VERSIONS, standingOf, totalsOf } from "./roll-up";
+import { oncePer } from "./once-per";
 import { compareNumbers } from "./sheet-order";
 
 export interface EvaluationOptions {
@@ -39,13 +41,20 @@ export function evaluateOperatingPoint(
   const body = state.operatingPoints.get(number);
   if (!body) throw new RangeError(`no operating point ${number} in force`);
 
-  const stream = streamStateOf(streamInputOf(body));
+  const stream = streamOf(body);
   const limits = limitAndReserve(number, state);
   const items = evaluatePoint({ operatingPoint: number, stream, frozen: (item) => frozen?.(number, item) }, state);
-  const totals = totalsOf(items, (item) => state.items.get(item)?.saving === true, limits);
+  const totals = totalsOf(items, savingsOf(state.items), limits);
   const standing = standingOf(totals, limits.reserveHundredths);
   return { operatingPoint: number, name: body.name, stream, ...limits, items, totals, standing };
 }
+
+const streamOf = oncePer((body: OperatingPointBody) => streamStateOf(streamInputOf(body)));
+
+const savingsOf = oncePer(
+  (items: IndexedState["items"]): ReadonlySet<string> =>
+    new Set([...items].flatMap(([item, { saving }]) => (saving ? [item] : []))),
+);
 
 /** The reference operating point first, the others by number. */
 function pointOrder({ terms, operatingPoints }: IndexedState): string[] {

@@ -6,8 +6,9 @@ import type { StreamState } from "../methods/stream-state";
 import type { Note } from "../notes/note";
 import { makeNote } from "../notes/note-catalogue";
 import type { IndexedState } from "./indexed-state";
-import { lineNotes, placesOf, type Places } from "./line-notes";
+import { lineNotes } from "./line-notes";
 import { methodInputOf } from "./method-input";
+import { oncePer } from "./once-per";
 import type { ItemResult } from "./results";
 import { roundAnswer, roundNote } from "./round-answer";
 import { shareMembers } from "./share-members";
@@ -22,25 +23,26 @@ export interface PointToEvaluate {
 
 /** Every item at one operating point, in the order of the sheet. */
 export function evaluatePoint(point: PointToEvaluate, state: IndexedState): ItemResult[] {
-  const order = itemsInSheetOrder(state);
-  const places = placesOf(state.items);
-  const evaluation: Evaluation = { point, state, places, results: new Map(), open: [] };
-  for (const item of order) evaluate(item, evaluation);
-  return order.flatMap((item) => evaluation.results.get(item) ?? []);
+  const evaluation: Evaluation = { point, state, results: new Map(), open: [] };
+  return orderOf(state).map((item) => evaluate(item, evaluation));
 }
+
+/** The same at every operating point. */
+const orderOf = oncePer(itemsInSheetOrder);
 
 interface Evaluation {
   point: PointToEvaluate;
   state: IndexedState;
-  places: Places;
+  /** What was computed so far. */
   results: Map<string, ItemResult>;
   /** Shares whose members are being added up: meeting one of them again is a circle. */
   open: string[];
 }
 
 function evaluate(item: string, evaluation: Evaluation): ItemResult {
-  const known = evaluation.results.get(item) ?? evaluation.point.frozen(item);
-  const result = known ?? compute(item, evaluation);
+  const known = evaluation.point.frozen(item) ?? evaluation.results.get(item);
+  if (known) return known;
+  const result = compute(item, evaluation);
   evaluation.results.set(item, result);
   return result;
 }
@@ -83,12 +85,7 @@ function refusalThrough(member: ItemResult): Note {
   return isCircle && member.refused ? member.refused : makeNote("share-of-refused", { item: member.item });
 }
 
-function toResult(
-  item: string,
-  body: ItemBody,
-  outcome: MethodOutcome,
-  { point, state, places }: Evaluation,
-): ItemResult {
+function toResult(item: string, body: ItemBody, outcome: MethodOutcome, { point, state }: Evaluation): ItemResult {
   const { operatingPoint } = point;
   const { methodVersion } = body;
   const growthFraction = state.terms.growthTable[body.grade];
@@ -102,7 +99,7 @@ function toResult(
   const basic = roundStored(basicEstimate(outcome.answer, state));
   const growth = roundStored(Math.abs(basic) * growthFraction);
   const predicted = roundStored(basic + growth);
-  const fromOthers = lineNotes(item, body, places).map((note) =>
+  const fromOthers = lineNotes(item, body, state.items).map((note) =>
     withOnePlateValue(note, body, { basic, point, state }),
   );
   const notes = [...answer.notes, ...fromOthers.map(roundNote)];

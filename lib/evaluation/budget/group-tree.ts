@@ -1,4 +1,5 @@
 import type { IndexedState } from "./indexed-state";
+import { oncePer } from "./once-per";
 
 type Tree = Pick<IndexedState, "items" | "groups">;
 
@@ -20,6 +21,28 @@ export function groupsAboveItem(tree: Tree, item: string): string[] {
 }
 
 /** Every item of a group and of its subgroups. */
-export function itemsOfGroup(tree: Tree, group: string): string[] {
-  return [...tree.items.keys()].filter((item) => groupsAboveItem(tree, item).includes(group));
+export function itemsOfGroup(tree: Tree, group: string): readonly string[] {
+  const within = groupWithSubgroups(tree, group);
+  if (within.size === 1) return itemsByGroup(tree.items).get(group) ?? [];
+  return [...tree.items].flatMap(([item, body]) => (body.group !== null && within.has(body.group) ? [item] : []));
 }
+
+function groupWithSubgroups({ groups }: Tree, group: string): ReadonlySet<string> {
+  const within = new Set([group]);
+  for (let before = 0; before < within.size;) {
+    before = within.size;
+    for (const [number, { parent }] of groups) if (parent !== null && within.has(parent)) within.add(number);
+  }
+  return within;
+}
+
+const itemsByGroup = oncePer((items: Tree["items"]): ReadonlyMap<string, readonly string[]> => {
+  const byGroup = new Map<string, string[]>();
+  for (const [item, { group }] of items) {
+    if (group === null) continue;
+    const others = byGroup.get(group);
+    if (others) others.push(item);
+    else byGroup.set(group, [item]);
+  }
+  return byGroup;
+});

@@ -5,6 +5,7 @@ import type { ItemBody } from "../lines/item-body";
 import type { BudgetState, LineState } from "../lines/line-state";
 import type { OperatingPointBody } from "../lines/operating-point-body";
 import { TERMS_NUMBER, type TermsBody } from "../lines/terms-body";
+import { oncePer } from "./once-per";
 
 /** The lines in force, by kind and number; retired ones are left out. */
 export interface IndexedState {
@@ -17,8 +18,12 @@ export interface IndexedState {
   finishes: ReadonlyMap<string, FinishBody>;
 }
 
-/** @throws RangeError if the budget was never established: it then has no terms and no allocations */
-export function indexState(state: BudgetState): IndexedState {
+/**
+ * A state never changes: each edit makes another one. So it is gone through once, however many questions it is asked.
+ *
+ * @throws RangeError if the budget was never established: it then has no terms and no allocations
+ */
+export const indexState = oncePer((state: BudgetState): IndexedState => {
   const items = new Map<string, ItemBody>();
   const groups = new Map<string, GroupBody>();
   const operatingPoints = new Map<string, OperatingPointBody>();
@@ -32,7 +37,7 @@ export function indexState(state: BudgetState): IndexedState {
   }
   const terms = termsOf(state);
   return { product: state.product, terms, allocations: allocationsOf(state), items, groups, operatingPoints, finishes };
-}
+});
 
 export function termsOf(state: BudgetState): TermsBody {
   for (const line of state.lines) if (line.kind === "terms" && line.number === TERMS_NUMBER) return line.body;

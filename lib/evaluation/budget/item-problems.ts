@@ -7,10 +7,11 @@ import type { Cause, Problem, ProblemOptions } from "./problem";
 
 /** What items need of the lines that they name. */
 export function itemProblems(state: IndexedState, options: ProblemOptions): Problem[] {
-  return [...state.items].flatMap(([number, body]) => [
-    ...commonProblems(number, body, state, options),
-    ...methodProblems(number, body, state),
-  ]);
+  const problems: Problem[] = [];
+  for (const [number, body] of state.items) {
+    problems.push(...commonProblems(number, body, state, options), ...methodProblems(number, body, state));
+  }
+  return problems;
 }
 
 function commonProblems(number: string, body: ItemBody, state: IndexedState, { mayOwn }: ProblemOptions): Problem[] {

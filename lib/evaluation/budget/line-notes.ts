@@ -1,53 +1,53 @@
 import type { ItemBody } from "../lines/item-body";
 import { makeNote } from "../notes/note-catalogue";
 import type { Note, NoteValues } from "../notes/note";
+import { oncePer } from "./once-per";
 import { runUpBehind } from "./run-up";
 import { compareNumbers } from "./sheet-order";
 
 type Items = ReadonlyMap<string, ItemBody>;
 
-/** The places that items say they are in, and who else says so. */
-export interface Places {
-  items: Items;
-  placesOf: ReadonlyMap<string, readonly string[]>;
-  itemsAt: ReadonlyMap<string, readonly string[]>;
-}
-
-export function placesOf(items: Items): Places {
-  const placesOf = new Map<string, readonly string[]>();
+/** Who says to be in a place. */
+const itemsByPlace = oncePer((items: Items): ReadonlyMap<string, readonly string[]> => {
   const itemsAt = new Map<string, string[]>();
   for (const [item, body] of items) {
-    const places = placesOfItem(body);
-    placesOf.set(item, places);
-    for (const place of places) {
+    for (const place of placesOf(body)) {
       const others = itemsAt.get(place);
       if (others) others.push(item);
       else itemsAt.set(place, [item]);
     }
   }
-  return { items, placesOf, itemsAt };
-}
+  return itemsAt;
+});
 
 /**
  * Notes that come from how items stand to one another; the method of one item alone cannot know them. Where a plate
  * starts anew though another lies ahead of it, the note carries the run-up that it would have as the rest of one plate.
  */
-export function lineNotes(item: string, body: ItemBody, places: Places): Note[] {
-  return [
-    ...freshEdgeNotes(body, places),
-    ...twinsOf(item, body, places).map((other) => twinNote(body, other, places)),
-  ];
+export function lineNotes(item: string, body: ItemBody, items: Items): Note[] {
+  return [...freshEdgeNotes(body, items), ...twinsOf(item, body, items).map((other) => twinNote(body, other, items))];
 }
 
-function freshEdgeNotes(body: ItemBody, { items }: Places): Note[] {
-  if (body.method !== "flat-plate-friction") return [];
-  const { liesBehind, runUpFollows, runUp } = body;
-  if (liesBehind === null || runUpFollows || runUp.value !== 0) return [];
-  return [makeNote("fresh-leading-edge-behind", { behind: liesBehind, ...runUpValue(liesBehind, items) })];
+/** The items that share a place or start anew behind a plate: nobody else has a note of this kind. */
+export const itemsWithNeighbours = oncePer((items: Items): readonly string[] => {
+  const shared = [...itemsByPlace(items).values()].filter(({ length }) => length > 1).flat();
+  const behind = [...items].flatMap(([item, body]) => (plateAheadOf(body) === null ? [] : [item]));
+  return [...new Set([...shared, ...behind])];
+});
+
+function freshEdgeNotes(body: ItemBody, items: Items): Note[] {
+  const ahead = plateAheadOf(body);
+  return ahead === null ? [] : [makeNote("fresh-leading-edge-behind", { behind: ahead, ...runUpValue(ahead, items) })];
+}
+
+/** The plate ahead of one that nevertheless starts anew. */
+function plateAheadOf(body: ItemBody): string | null {
+  if (body.method !== "flat-plate-friction" || body.runUpFollows || body.runUp.value !== 0) return null;
+  return body.liesBehind;
 }
 
 /** Butted plates that each start anew: what the second would have behind the first is told with the note. */
-function twinNote(body: ItemBody, other: string, { items }: Places): Note {
+function twinNote(body: ItemBody, other: string, items: Items): Note {
   const startsAnew = body.method === "flat-plate-friction" && body.liesBehind === null && body.runUp.value === 0;
   const named: NoteValues = body.surface === "" ? {} : { surface: body.surface };
   return makeNote("same-surface-twice", { other, ...named, ...(startsAnew ? runUpValue(other, items) : {}) });
@@ -58,14 +58,17 @@ function runUpValue(ahead: string, items: Items): { runUp?: number } {
   return runUp === null ? {} : { runUp };
 }
 
-function twinsOf(item: string, body: ItemBody, { items, placesOf, itemsAt }: Places): string[] {
-  const shared = (placesOf.get(item) ?? []).flatMap((place) => itemsAt.get(place) ?? []);
-  const others = shared.filter((other) => other !== item);
-  if (others.length === 0) return [];
-  return [...new Set(others)]
+function twinsOf(item: string, body: ItemBody, items: Items): string[] {
+  return [...new Set(othersInItsPlaces(item, body, items))]
     .filter((other) => !isNamedApart(body, items.get(other)))
     .filter((other) => !liesInLine(item, other, items) && !liesInLine(other, item, items))
     .sort(compareNumbers);
+}
+
+function othersInItsPlaces(item: string, body: ItemBody, items: Items): string[] {
+  const itemsAt = itemsByPlace(items);
+  const shared = placesOf(body).flatMap((place) => itemsAt.get(place) ?? []);
+  return shared.filter((other) => other !== item);
 }
 
 /** Two that name different surfaces or streams are not the same one, however alike they are. */
@@ -87,7 +90,7 @@ function liesInLine(item: string, other: string, items: Items): boolean {
 }
 
 /** Items are in one place that name one surface in one stream, and plates that agree in everything that places them. */
-function placesOfItem(body: ItemBody): string[] {
+const placesOf = oncePer((body: ItemBody): readonly string[] => {
   const { surface, stream } = body;
   const named = surface === "" ? [] : [JSON.stringify(["named", alike(surface), alike(stream)])];
   if (body.method !== "flat-plate-friction") return named;
@@ -95,7 +98,7 @@ function placesOfItem(body: ItemBody): string[] {
   const { group, length, breadth, faces, liesBehind, runUp, localSpeedRatio, finish, roughness } = body;
   const sizes = [length.value, breadth.value, faces, runUp.value, localSpeedRatio, roughness?.value];
   return [...named, JSON.stringify(["sized", group, liesBehind, finish, ...sizes])];
-}
+});
 
 function alike(name: string): string {
   return name.toLocaleLowerCase("en").replaceAll(/\s+/g, " ");

@@ -29,19 +29,23 @@ export function limitAndReserve(operatingPoint: string, { terms, operatingPoints
 /** Sums over the items that have a result, and what they leave of the limit. */
 export function totalsOf(
   items: readonly ItemResult[],
-  isSaving: (item: string) => boolean,
+  savings: ReadonlySet<string>,
   { limitHundredths, reserveHundredths }: LimitAndReserve,
 ): Totals {
-  const basic = sum(items, (result) => result.basic);
-  const growth = sum(items, (result) => result.growth);
-  const predicted = sum(items, (result) => result.predicted);
-  const withoutSavings = items.filter(({ item }) => !isSaving(item));
+  const sums = { basic: 0, growth: 0, predicted: 0, withoutSavings: 0 };
+  for (const { item, basic, growth, predicted } of items) {
+    sums.basic += basic;
+    sums.growth += growth;
+    sums.predicted += predicted;
+    if (savings.size === 0 || !savings.has(item)) sums.withoutSavings += predicted;
+  }
+  const predicted = roundStored(sums.predicted);
   const margin = roundStored(limitHundredths / 100 - predicted);
   return {
-    basic,
-    growth,
+    basic: roundStored(sums.basic),
+    growth: roundStored(sums.growth),
     predicted,
-    predictedWithoutSavings: sum(withoutSavings, (result) => result.predicted),
+    predictedWithoutSavings: roundStored(sums.withoutSavings),
     margin,
     clearOfReserve: roundStored(margin - reserveHundredths / 100),
   };
@@ -56,8 +60,4 @@ export function standingOf({ margin }: Pick<Totals, "margin">, reserveHundredths
 
 function reserveGivenAt(operatingPoint: string, reserves: IndexedState["terms"]["reserves"]): number | undefined {
   return reserves.find((row) => row.operatingPoint === operatingPoint)?.hundredths;
-}
-
-function sum(items: readonly ItemResult[], pick: (result: ItemResult) => number): number {
-  return roundStored(items.reduce((total, result) => total + pick(result), 0));
 }

@@ -62,8 +62,9 @@ function freeRetiredRows(sheet: AllocationSheet, tree: HolderTree, lines: readon
   const unallocated = { kind: "unallocated", number: null } as const;
   for (const kind of ["item", "group"] as const) {
     for (const line of lines) {
+      if (line.kind !== kind || !line.retired) continue;
       const row = sheet.rows.get(keyOf(kind, line.number));
-      if (line.kind !== kind || !line.retired || !row) continue;
+      if (!row) continue;
       moveAllocation(sheet, tree, {
         giver: { kind, number: line.number },
         receiver: unallocated,
@@ -96,5 +97,6 @@ function allocationsFreed(before: BudgetState, after: BudgetState): boolean {
   if (limitWas.reserveHundredths !== limitNow.reserveHundredths) return true;
 
   const [treeWas, treeNow] = [holderTree(before.lines), holderTree(after.lines)];
-  return [...treeWas].some(([key, parent]) => treeNow.get(key) !== parent);
+  for (const [key, parent] of treeWas) if (treeNow.get(key) !== parent) return true;
+  return false;
 }

@@ -12,13 +12,12 @@ type Tree = Pick<IndexedState, "items" | "groups">;
 
 /** Items and groups as the sheet prints them: level by level in the order that the lines state, then by number. */
 export function sheetOrder(tree: Tree): SheetRow[] {
-  const children = new Map<string | null, (Entry & { parent: string | null })[]>();
-  for (const entry of entriesOf(tree)) {
-    const siblings = children.get(entry.parent);
-    if (siblings) siblings.push(entry);
-    else children.set(entry.parent, [entry]);
-  }
-  return rowsBelow(null, 0, children);
+  const children: Children = new Map();
+  for (const [number, { order, parent }] of tree.groups) addChild(parent, { kind: "group", number, order }, children);
+  for (const [number, { order, group }] of tree.items) addChild(group, { kind: "item", number, order }, children);
+  const rows: SheetRow[] = [];
+  addRowsBelow(null, 0, children, rows);
+  return rows;
 }
 
 /** The numbers of the items alone. */
@@ -32,21 +31,19 @@ interface Entry {
   order: number;
 }
 
-type Children = ReadonlyMap<string | null, readonly (Entry & { parent: string | null })[]>;
+type Children = Map<string | null, Entry[]>;
 
-function entriesOf({ items, groups }: Tree): (Entry & { parent: string | null })[] {
-  return [
-    ...[...groups].map(([number, { order, parent }]) => ({ kind: "group" as const, number, order, parent })),
-    ...[...items].map(([number, { order, group }]) => ({ kind: "item" as const, number, order, parent: group })),
-  ];
+function addChild(parent: string | null, entry: Entry, children: Children): void {
+  const siblings = children.get(parent);
+  if (siblings) siblings.push(entry);
+  else children.set(parent, [entry]);
 }
 
-function rowsBelow(parent: string | null, depth: number, children: Children): SheetRow[] {
-  const entries = [...(children.get(parent) ?? [])].sort(byOrder);
-  return entries.flatMap(({ kind, number }) => [
-    { kind, number, depth },
-    ...(kind === "group" ? rowsBelow(number, depth + 1, children) : []),
-  ]);
+function addRowsBelow(parent: string | null, depth: number, children: Children, rows: SheetRow[]): void {
+  for (const { kind, number } of children.get(parent)?.sort(byOrder) ?? []) {
+    rows.push({ kind, number, depth });
+    if (kind === "group") addRowsBelow(number, depth + 1, children, rows);
+  }
 }
 
 function byOrder(one: Entry, other: Entry): number {

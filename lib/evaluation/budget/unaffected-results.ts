@@ -4,8 +4,9 @@ import { sameBody } from "../lines/same-body";
 import type { BudgetState } from "../lines/line-state";
 import type { EvaluationOptions } from "./evaluate-budget";
 import { indexState, type IndexedState } from "./indexed-state";
-import { lineNotes, placesOf, type Places } from "./line-notes";
-import type { BudgetResults, ItemResult } from "./results";
+import { itemsWithNeighbours, lineNotes } from "./line-notes";
+import type { BudgetResults } from "./results";
+import { resultsByItem } from "./results-by-item";
 import { runUpOf } from "./run-up";
 import { shareMembers } from "./share-members";
 
@@ -21,14 +22,12 @@ export function unaffectedResults(
   const [was, now] = [indexState(before), indexState(after)];
   const movedItems = itemsMoved(was, now);
   const movedPoints = pointsMoved(was, now);
-  const results = new Map<string, ItemResult>();
-  for (const point of frozen.points) {
-    if (movedPoints.has(point.operatingPoint)) continue;
-    for (const result of point.items) {
-      if (!movedItems.has(result.item)) results.set(`${point.operatingPoint} ${result.item}`, result);
-    }
-  }
-  return (operatingPoint, item) => results.get(`${operatingPoint} ${item}`);
+  const kept = new Map(
+    frozen.points.flatMap((point) =>
+      movedPoints.has(point.operatingPoint) ? [] : [[point.operatingPoint, resultsByItem(point)]],
+    ),
+  );
+  return (operatingPoint, item) => (movedItems.has(item) ? undefined : kept.get(operatingPoint)?.get(item));
 }
 
 function pointsMoved(was: IndexedState, now: IndexedState): ReadonlySet<string> {
@@ -42,31 +41,65 @@ function pointsMoved(was: IndexedState, now: IndexedState): ReadonlySet<string> 
 }
 
 function itemsMoved(was: IndexedState, now: IndexedState): ReadonlySet<string> {
-  const places = [placesOf(was.items), placesOf(now.items)] as const;
-  const moved = new Set([...now.items.keys()].filter((item) => isMovedItself(item, was, now, places)));
+  const moved = new Set(itemsWithOtherNotes(was, now));
+  for (const item of now.items.keys()) if (isMovedItself(item, was, now)) moved.add(item);
+  const shares = sharesOf(was, now);
+  for (const { item, isRegrouped } of shares) if (isRegrouped) moved.add(item);
   // Shares of shares: as long as one more follows, another may follow it.
   for (let grown = true; grown;) {
-    const followers = [...now.items].filter(
-      ([item, body]) => !moved.has(item) && followsMembers(body, moved, was, now),
-    );
-    for (const [item] of followers) moved.add(item);
+    const followers = shares.filter(({ item, members }) => !moved.has(item) && members.some((each) => moved.has(each)));
+    for (const { item } of followers) moved.add(item);
     grown = followers.length > 0;
   }
   return moved;
 }
 
+interface ShareNow {
+  item: string;
+  members: readonly string[];
+  /** Whether others than before are its members. */
+  isRegrouped: boolean;
+}
+
+function sharesOf(was: IndexedState, now: IndexedState): ShareNow[] {
+  const isTreeKept = sameTree(was, now);
+  const shares: ShareNow[] = [];
+  for (const [item, body] of now.items) {
+    if (body.method !== "share") continue;
+    const members = shareMembers(body, now);
+    const isRegrouped = !isTreeKept && !sameBody(shareMembers(body, was).toSorted(), members.toSorted());
+    shares.push({ item, members, isRegrouped });
+  }
+  return shares;
+}
+
+/** Whether the same items stand in the same groups, and the same of them are savings. */
+function sameTree(was: IndexedState, now: IndexedState): boolean {
+  if (was.items.size !== now.items.size || was.groups.size !== now.groups.size) return false;
+  for (const [item, { group, saving }] of now.items) {
+    const earlier = was.items.get(item);
+    if (earlier?.group !== group || earlier.saving !== saving) return false;
+  }
+  for (const [group, { parent }] of now.groups) if (was.groups.get(group)?.parent !== parent) return false;
+  return true;
+}
+
 /** What an item reads besides the results of others. */
-function isMovedItself(
-  item: string,
-  was: IndexedState,
-  now: IndexedState,
-  [placesWas, placesNow]: readonly [Places, Places],
-): boolean {
-  const [earlier, body] = [was.items.get(item), now.items.get(item)];
+function isMovedItself(item: string, was: IndexedState, now: IndexedState): boolean {
+  const earlier = was.items.get(item);
+  const body = now.items.get(item);
   if (!earlier || !body || !sameBody(earlier, body)) return true;
-  if (was.terms.growthTable[body.grade] !== now.terms.growthTable[body.grade]) return true;
-  if (readsMovedLine(body, was, now)) return true;
-  return !sameBody(lineNotes(item, earlier, placesWas), lineNotes(item, body, placesNow));
+  return was.terms.growthTable[body.grade] !== now.terms.growthTable[body.grade] || readsMovedLine(body, was, now);
+}
+
+/** Items that others bring other notes to than before: only one with neighbours on a side can be such. */
+function itemsWithOtherNotes(was: IndexedState, now: IndexedState): string[] {
+  const candidates = new Set([...itemsWithNeighbours(was.items), ...itemsWithNeighbours(now.items)]);
+  return [...candidates].filter((item) => {
+    const earlier = was.items.get(item);
+    const body = now.items.get(item);
+    return earlier && body && !sameBody(lineNotes(item, earlier, was.items), lineNotes(item, body, now.items));
+  });
 }
 
 function readsMovedLine(body: ItemBody, was: IndexedState, now: IndexedState): boolean {
@@ -87,12 +120,4 @@ function readsMovedLine(body: ItemBody, was: IndexedState, now: IndexedState): b
 
 function finishMoved(finish: string | null, was: IndexedState, now: IndexedState): boolean {
   return finish !== null && !sameBody(was.finishes.get(finish)?.roughness, now.finishes.get(finish)?.roughness);
-}
-
-function followsMembers(body: ItemBody, moved: ReadonlySet<string>, was: IndexedState, now: IndexedState): boolean {
-  if (body.method !== "share") return false;
-  const members = shareMembers(body, now);
-  return (
-    members.some((member) => moved.has(member)) || !sameBody(shareMembers(body, was).toSorted(), members.toSorted())
-  );
 }
