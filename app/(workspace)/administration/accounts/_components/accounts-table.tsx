@@ -37,7 +37,7 @@ export function AccountsTable({ accounts, ownId }: AccountsTableProps) {
             <Cell label="Administrator">{account.isAdministrator ? "yes" : "no"}</Cell>
             <Cell label="Made">{dayText(account.createdAt)}</Cell>
             <Cell label="State">{account.active ? "open" : "closed"}</Cell>
-            <Cell numeric label="">
+            <Cell numeric className="max-sm:flex!">
               {account.id === ownId ? null : account.active ? (
                 <CloseAccount account={account} />
               ) : (

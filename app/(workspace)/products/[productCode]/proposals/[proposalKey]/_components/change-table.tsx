@@ -6,6 +6,7 @@ import { formatNewtonsChange, formatNewtonsChangeNumber } from "@/lib/units/form
 import type { EditOperation } from "@/lib/vocabulary/lines";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
+import { FieldsThatStay } from "./fields-that-stay";
 import { RemarkDialog } from "./remark-dialog";
 
 const OPERATION_WORDS: Record<EditOperation, string> = {
@@ -14,6 +15,8 @@ const OPERATION_WORDS: Record<EditOperation, string> = {
   retire: "retired",
   reinstate: "reinstated",
 };
+
+const COLUMNS = 5;
 
 interface ChangeTableProps {
   proposalId: number;
@@ -26,6 +29,12 @@ interface ChangeTableProps {
 /** One line of the change sheet: every field as it was and as it is to be, changed rows with a bar in the margin. */
 export function ChangeTable({ proposalId, line, baseIssue, mayRemark, people }: ChangeTableProps) {
   const added = line.operation === "add";
+  // A field that somebody remarked on is at issue, changed or not.
+  const isAtIssue = (row: FieldChangeRow) => row.changed || row.remarkNumbers.length > 0;
+  const staying = line.rows.filter((row) => !isAtIssue(row));
+  const fieldRow = (row: FieldChangeRow) => (
+    <FieldRow key={row.field} proposalId={proposalId} line={line} row={row} mayRemark={mayRemark} people={people} />
+  );
 
   return (
     <section className="mt-7" aria-label={`${line.number} ${line.name}, ${OPERATION_WORDS[line.operation]}`}>
@@ -42,18 +51,12 @@ export function ChangeTable({ proposalId, line, baseIssue, mayRemark, people }: 
             <span className="sr-only">Remarks</span>
           </Head>
         </TableHead>
-        <tbody>
-          {line.rows.map((row) => (
-            <FieldRow
-              key={row.field}
-              proposalId={proposalId}
-              line={line}
-              row={row}
-              mayRemark={mayRemark}
-              people={people}
-            />
-          ))}
-        </tbody>
+        <tbody>{line.rows.filter(isAtIssue).map(fieldRow)}</tbody>
+        {staying.length > 0 ? (
+          <FieldsThatStay count={staying.length} of={`${line.number} ${line.name}`} columns={COLUMNS}>
+            {staying.map(fieldRow)}
+          </FieldsThatStay>
+        ) : null}
       </Table>
     </section>
   );
