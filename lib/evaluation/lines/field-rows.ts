@@ -74,7 +74,13 @@ function isPresent({ key, type }: FieldSpec, values: ReadonlyMap<string, unknown
 function entryText(printed: readonly (FieldText & { column: FieldSpec })[]): FieldText {
   const [only, ...others] = printed;
   if (only && others.length === 0) return { text: only.text, ...(only.unit === undefined ? {} : { unit: only.unit }) };
-  return { text: printed.map(columnText).join(", ") };
+  return { text: printed.map(columnText).reduce(beside, "") };
+}
+
+/** A typed sentence that ends with its own full stop is followed by a sentence, everything else by a comma. */
+function beside(before: string, text: string): string {
+  if (before === "") return text;
+  return /[.!?]$/.test(before) ? `${before} ${text.charAt(0).toUpperCase()}${text.slice(1)}` : `${before}, ${text}`;
 }
 
 /** What the application adds to an entry says what it is; what was typed speaks for itself. */

@@ -36,6 +36,8 @@ const STATE = budgetState({
 });
 const NAMES = nameBookOf(STATE, new Map([[3, "Tansy Ardle"]]));
 
+const JUSTIFIED = "justifications.mach-above-limit";
+
 function rowOf(kind: "item" | "terms" | "operating_point" | "allocations", body: object, field: string) {
   return fieldRows({ kind, body }, NAMES).find((row) => row.field === field);
 }
@@ -65,6 +67,13 @@ describe("the fields of a line as they are printed", () => {
       label: "Citation 1",
       text: "Drawing 7731, C, 2026-03-02",
     });
+  });
+
+  it("go on after a typed sentence with a sentence", () => {
+    const justified = (text: string) =>
+      rowOf("item", { ...body, justifications: [{ code: "mach-above-limit", text, excess: 1.1 }] }, JUSTIFIED)?.text;
+    expect(justified("Measured so.")).toBe("Measured so. Justified up to 1.1");
+    expect(justified("measured so")).toBe("measured so, justified up to 1.1");
   });
 
   it("leave out what doesn't matter beside the rest", () => {
