@@ -61,7 +61,9 @@ function CauseTableRow({ row }: { row: CauseRow }) {
         {basis.text}
       </Cell>
       <Cell numeric label="Effect, N">
-        {formatSignificant(newtons)}
+        <WorkingNumber figure="standardUncertainty" of="cause" number={key} name={`Effect of ${what}, ${where}`}>
+          {formatSignificant(newtons)}
+        </WorkingNumber>
       </Cell>
       <Cell numeric label="Share">
         <WorkingNumber figure="standardUncertainty" of="cause" number={key} name={`Share of ${what}, ${where}`}>
@@ -84,13 +86,13 @@ function OtherCauses({ others: { count, share } }: Pick<CausesTableProps, "other
         {count} {count === 1 ? "further cause" : "further causes"}
         <span className="block text-xs text-ink-2">less than 0.1 % each</span>
       </RowHead>
-      <Cell className="max-sm:hidden" />
-      <Cell className="max-sm:hidden" />
-      <Cell className="max-sm:hidden" />
+      <Cell className="max-sm:hidden!" />
+      <Cell className="max-sm:hidden!" />
+      <Cell className="max-sm:hidden!" />
       <Cell numeric label="Share">
         {formatPercent(share, 1)}
       </Cell>
-      <Cell className="max-sm:hidden" />
+      <Cell className="max-sm:hidden!" />
     </Row>
   );
 }

@@ -47,7 +47,9 @@ function ItemRowOf({ row: { number, name, basic, result }, base }: { row: ItemRo
         </Link>
       </RowHead>
       <Cell numeric label="Basic, N">
-        {formatNewtonsNumber(basic)}
+        <WorkingNumber figure="basic" of="item" number={number} name={`Basic estimate of ${number} ${name}`}>
+          {formatNewtonsNumber(basic)}
+        </WorkingNumber>
       </Cell>
       <Cell numeric label="u, N">
         <WorkingNumber

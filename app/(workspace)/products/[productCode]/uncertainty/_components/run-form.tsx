@@ -65,7 +65,7 @@ export function RunForm({ productCode, issue, operatingPoint, nextSeed, mayRun }
           hint="The same seed gives the same bytes."
           error={faultAt("seed")}
         />
-        <Button type="submit" kind="primary" busy={done !== null} className="sm:mt-6">
+        <Button type="submit" kind="primary" busy={done !== null} className="justify-self-start sm:mt-6">
           Run Monte Carlo
         </Button>
       </div>

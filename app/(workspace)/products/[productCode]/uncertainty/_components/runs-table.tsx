@@ -91,7 +91,7 @@ function Small({ children }: { children: ReactNode }) {
 function NoRuns() {
   return (
     <Row>
-      <Cell colSpan={RUN_FIGURES.length + 2} className="text-ink-2">
+      <Cell colSpan={RUN_FIGURES.length + 2} className="text-ink-2 max-sm:block!">
         No run of this issue at this operating point yet. First order takes every slope as straight and the sum as
         normal; a run shows how far that holds.
       </Cell>
