@@ -15,7 +15,7 @@ import { namesOf } from "./members";
 import { readableProduct } from "./queries";
 import type { ComparedLine, IssueComparison, IssueFacts } from "./views";
 
-/** What two issues of a budget differ in, read from the issues alone. */
+/** What two issues of a budget differ in, in either direction, read from the issues alone. */
 export function compareIssues(actor: Actor, productCode: string, from: number, to: number): Promise<IssueComparison> {
   return inSnapshot(async (tx) => {
     const product = await readableProduct(actor, productCode, tx);
@@ -45,13 +45,11 @@ interface Side {
   names: NameBook;
 }
 
-interface Pair {
-  was: LineSide | null;
-  now: LineSide;
-}
+/** A line on both sides; one of them may be without it. */
+type Pair = { line: LineState } & Record<"was" | "now", LineSide | null>;
 
 async function bothSides(product: ProductRow, from: number, to: number, tx: Transaction): Promise<[Side, Side]> {
-  if (from >= to) throw new Refusal("invalid", "Compare an issue with a later one.");
+  if (from === to) throw new Refusal("invalid", "Compare an issue with another one.");
   const people = new Map((await namesOf(product.id, tx)).map(({ id, name }) => [id, name]));
   const before = await loadBudget(product.id, from, tx);
   const after = await loadBudget(product.id, to, tx);
@@ -61,39 +59,41 @@ async function bothSides(product: ProductRow, from: number, to: number, tx: Tran
   ];
 }
 
-/** A line is never deleted, so that every line of the earlier issue stands in the later one too. */
 function changedPairs(before: Side, after: Side): Pair[] {
-  const earlier = new Map(before.budget.state.lines.map((line) => [keyOf(line), line]));
-  return after.budget.state.lines
-    .flatMap((line): Pair[] => {
-      const was = earlier.get(keyOf(line));
-      if (was?.letter === line.letter) return [];
-      return [{ was: was ? { line: was, names: before.names } : null, now: { line, names: after.names } }];
+  const [were, are] = [sidesOf(before), sidesOf(after)];
+  return [...new Set([...are.keys(), ...were.keys()])]
+    .flatMap((key): Pair[] => {
+      const [was = null, now = null] = [were.get(key), are.get(key)];
+      const line = now?.line ?? was?.line;
+      return line && was?.line.letter !== now?.line.letter ? [{ line, was, now }] : [];
     })
-    .sort((one, other) => LINE_KINDS.indexOf(one.now.line.kind) - LINE_KINDS.indexOf(other.now.line.kind));
+    .sort((one, other) => LINE_KINDS.indexOf(one.line.kind) - LINE_KINDS.indexOf(other.line.kind));
 }
 
-function comparedLine({ was, now }: Pair): ComparedLine {
-  const { kind, number, letter, retired } = now.line;
+function sidesOf({ budget, names }: Side): Map<string, LineSide> {
+  return new Map(budget.state.lines.map((line) => [keyOf(line), { line, names }]));
+}
+
+function comparedLine({ line, was, now }: Pair): ComparedLine {
   return {
-    kind,
-    number,
-    name: lineName(now.line),
+    kind: line.kind,
+    number: line.number,
+    name: lineName(line),
     letterWas: was?.line.letter ?? null,
-    letterNow: letter,
+    letterNow: now?.line.letter ?? null,
     retiredWas: was?.line.retired ?? false,
-    retiredNow: retired,
+    retiredNow: now?.line.retired ?? false,
     fields: comparedFields(was, now),
   };
 }
 
-function textsOf({ was, now }: Pair): LineTexts {
+function textsOf({ line, was, now }: Pair): LineTexts {
   return {
-    name: `${now.line.kind} ${now.line.number}`,
+    name: `${line.kind} ${line.number}`,
     letterBefore: was?.line.letter ?? null,
-    letterAfter: now.line.letter,
+    letterAfter: now?.line.letter ?? null,
     before: was ? canonicalLineText(was.line, was.names) : "",
-    after: canonicalLineText(now.line, now.names),
+    after: now ? canonicalLineText(now.line, now.names) : "",
   };
 }
 

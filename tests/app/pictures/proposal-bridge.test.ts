@@ -45,6 +45,22 @@ describe("the bridge from any issue to any other", () => {
     });
   });
 
+  it("goes back from a later issue to an earlier one by the same steps, each taken back", () => {
+    for (let from = 2; from <= 6; from += 1) {
+      for (let to = 1; to < from; to += 1) {
+        const bridge = proposalBridge(trend, from, to, "OP-1");
+        const forward = proposalBridge(trend, to, from, "OP-1");
+        if (!bridge || !forward) throw new Error("no bridge");
+        expect(bridge.steps.map(({ issue: number }) => number)).toEqual(
+          forward.steps.map(({ issue: number }) => number).reverse(),
+        );
+        const sum = bridge.steps.reduce((total, { delta }) => total + hundredths(delta), 0);
+        expect(sum).toBe(hundredths(bridge.now) - hundredths(bridge.was));
+        expect([bridge.was, bridge.now]).toEqual([forward.now, forward.was]);
+      }
+    }
+  });
+
   it("lets an issue without the operating point move nothing, and is none where an end has it not", () => {
     const gone = [issue(1, 10), issue(2, null), issue(3, 12)];
     expect(proposalBridge(gone, 1, 3, "OP-1")?.steps.map(({ delta }) => delta)).toEqual([0, 2]);

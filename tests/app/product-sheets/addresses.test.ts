@@ -9,8 +9,8 @@ import { issuesQuery } from "@/app/(workspace)/products/[productCode]/issues/_co
 import { evidenceAge } from "@/app/(workspace)/products/[productCode]/_sheet/evidence-age";
 
 describe("the address of the issues sheet", () => {
-  it("compares two issues, the earlier one first, in either spelling", () => {
-    expect(issuesQuery({ from: "5", to: "3" }).compare).toEqual({ from: 3, to: 5 });
+  it("compares two issues in the direction that is asked for, in either spelling", () => {
+    expect(issuesQuery({ from: "5", to: "3" }).compare).toEqual({ from: 5, to: 3 });
     expect(issuesQuery({ compare: "3,5" }).compare).toEqual({ from: 3, to: 5 });
   });
 

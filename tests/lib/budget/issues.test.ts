@@ -161,7 +161,26 @@ describe("what issues tell together", () => {
     expect(patch).toMatch(/^--- item 010\trevision –\n\+\+\+ item 010\trevision A\n@@/);
     expect(patch).toContain("\n-dragCoefficient: 0.5\n+dragCoefficient: 0.4\n");
     expect(patch).not.toContain("item 020");
-    await expect(compareIssues(people.ines, "TF-2", 3, 2)).rejects.toMatchObject({ code: "invalid" });
+    await expect(compareIssues(people.ines, "TF-2", 3, 3)).rejects.toMatchObject({ code: "invalid" });
+  });
+
+  it("is the same in the other direction, from a later issue back to an earlier one", async () => {
+    const people = await cast();
+    await threeIssues(people);
+    const back = await compareIssues(people.ines, "TF-2", 3, 2);
+    expect(back.lines).toMatchObject([{ number: "010", letterWas: "A", letterNow: "–" }]);
+    expect(back.lines[0]?.fields.map(({ field, was, now }) => [field, was, now])).toContainEqual([
+      "dragCoefficient",
+      "0.4",
+      "0.5",
+    ]);
+    expect(back.points).toMatchObject([{ operatingPoint: "OP-1", predictedNow: close(Q * 0.11 * 1.2) }]);
+    const first = await compareIssues(people.ines, "TF-2", 2, 1);
+    expect(first.lines.filter(({ kind }) => kind === "item")).toMatchObject([
+      { number: "010", letterWas: "–", letterNow: null },
+      { number: "020", letterWas: "–", letterNow: null },
+    ]);
+    expect(await issuesPatch(people.ines, "TF-2", 3, 2)).toContain("\n-dragCoefficient: 0.4\n+dragCoefficient: 0.5\n");
   });
 
   it("is the history of a line, newest revision first", async () => {

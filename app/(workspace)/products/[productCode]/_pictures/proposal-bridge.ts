@@ -18,10 +18,26 @@ export interface ProposalBridge {
 }
 
 /**
- * From the predicted total of one issue to that of a later one, a step for each proposal between them; null where one
- * of the two has no such operating point. An issue that has it not moves nothing: what it brings, its return shows.
+ * From the predicted total of one issue to that of any other, a step for each proposal between them, taken back on the
+ * way to an earlier one; null where one of the two has no such operating point. An issue that has it not moves nothing:
+ * what it brings, its return shows.
  */
 export function proposalBridge(
+  trend: readonly TrendIssue[],
+  from: number,
+  to: number,
+  operatingPoint: string,
+): ProposalBridge | null {
+  if (from <= to) return bridgeForward(trend, from, to, operatingPoint);
+  const bridge = bridgeForward(trend, to, from, operatingPoint);
+  return bridge && { was: bridge.now, now: bridge.was, steps: bridge.steps.map(takenBack).reverse() };
+}
+
+function takenBack({ delta, ...step }: ProposalStep): ProposalStep {
+  return { ...step, delta: delta === 0 ? 0 : -delta };
+}
+
+function bridgeForward(
   trend: readonly TrendIssue[],
   from: number,
   to: number,

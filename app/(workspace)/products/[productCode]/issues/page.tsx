@@ -13,6 +13,7 @@ import { indexState } from "@/lib/evaluation/budget/indexed-state";
 import { abilityFor, covers } from "@/policies/ability";
 
 import { NotEstablished } from "../_components/not-established";
+import { PointLinks } from "../_components/point-links";
 import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
 import { TrendFigure } from "../_components/trend-figure";
@@ -24,7 +25,6 @@ import { Comparison } from "./_components/comparison";
 import { IssueForms } from "./_components/issue-forms";
 import { IssuesTable } from "./_components/issues-table";
 import { issuesAddress, issuesQuery } from "./_components/issues-query";
-import { TrendPoints } from "./_components/trend-points";
 
 type Props = PageProps<"/products/[productCode]/issues">;
 
@@ -68,7 +68,7 @@ export default async function IssuesPage({ params, searchParams }: Props) {
       />
       <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point ?? null)} />}>
         <ServiceWindCaution kind={product.kind} />
-        <TrendPoints
+        <PointLinks
           points={budget.results.points}
           chosen={operatingPoint}
           hrefOf={(at) => issuesAddress(product.code, query, { point: at })}

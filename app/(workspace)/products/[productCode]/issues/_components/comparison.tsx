@@ -48,7 +48,7 @@ export function Comparison({ comparison, trend, operatingPoint, productCode }: C
         </TableHead>
         <tbody>
           {lines.map((line) => (
-            <LineRow key={`${line.kind} ${line.number}`} line={line} />
+            <LineRow key={`${line.kind} ${line.number}`} line={line} to={to.number} />
           ))}
         </tbody>
       </Table>
@@ -56,7 +56,7 @@ export function Comparison({ comparison, trend, operatingPoint, productCode }: C
   );
 }
 
-function LineRow({ line }: { line: ComparedLine }) {
+function LineRow({ line, to }: { line: ComparedLine; to: number }) {
   const { kind, number, name, letterWas, letterNow, retiredWas, retiredNow, fields } = line;
   const moved = retiredNow && !retiredWas ? "retired" : retiredWas && !retiredNow ? "reinstated" : null;
 
@@ -69,17 +69,17 @@ function LineRow({ line }: { line: ComparedLine }) {
         {name}
       </RowHead>
       <Cell label="Rev" className="whitespace-nowrap">
-        {letterWas === null ? null : (
-          <>
-            <RevisionLetter letter={letterWas} /> <span aria-hidden>→</span>{" "}
-          </>
-        )}
-        <RevisionLetter letter={letterNow} />
+        {letterWas === null ? null : <RevisionLetter letter={letterWas} />}
+        {letterWas === null || letterNow === null ? null : <span aria-hidden> → </span>}
+        {letterNow === null ? null : <RevisionLetter letter={letterNow} />}
       </Cell>
       <Cell label="What changed">
         {letterWas === null ? <span className="text-ink-2">new line</span> : null}
+        {letterNow === null ? <span className="text-ink-2">does not exist yet in issue {to}</span> : null}
         {moved ? <span className="block">{moved}</span> : null}
-        {letterWas === null || (moved && fields.length === 0) ? null : <ChangedFields fields={fields} />}
+        {letterWas === null || letterNow === null || (moved && fields.length === 0) ? null : (
+          <ChangedFields fields={fields} />
+        )}
       </Cell>
     </Row>
   );

@@ -21,7 +21,7 @@ const Address = z.object({
 export interface IssuesQuery {
   measure: string | undefined;
   point: string | undefined;
-  /** Two issues to compare, the earlier first; null where none or only one is asked for. */
+  /** Two issues to compare, in either direction; null where none or only one is asked for. */
   compare: { from: number; to: number } | null;
 }
 
@@ -30,7 +30,7 @@ export function issuesQuery(searchParams: unknown): IssuesQuery {
   const { point, measure, from, to, compare } = Address.parse(searchParams);
   const [one = from, other = to] = compare?.split(",").map(Number) ?? [];
   if (one === undefined || other === undefined || one === other) return { point, measure, compare: null };
-  return { point, measure, compare: { from: Math.min(one, other), to: Math.max(one, other) } };
+  return { point, measure, compare: { from: one, to: other } };
 }
 
 /** The same address with some of it changed. */

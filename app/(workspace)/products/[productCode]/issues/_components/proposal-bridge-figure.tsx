@@ -30,7 +30,7 @@ export function ProposalBridgeFigure({ bridge, from, to, operatingPoint, product
     <FigureWithTable
       summary={`Predicted at ${operatingPoint} from ${formatNewtons(bridge.was)} at issue ${from} to ${formatNewtons(bridge.now)} at issue ${to}, by ${count}.`}
       picture={<BridgePicture layout={layout} />}
-      caption={`Predicted at ${operatingPoint}, newtons, a step for each approved proposal: solid where it rises, hollow where it falls. The ruler does not begin at zero.`}
+      caption={`Predicted at ${operatingPoint}, newtons, a step for each approved proposal${from > to ? ", taken back from the later issue to the earlier one" : ""}: solid where it rises, hollow where it falls. The ruler does not begin at zero.`}
       table={<StepsTable bridge={bridge} from={from} to={to} productCode={productCode} />}
     />
   );
