@@ -3,7 +3,7 @@ import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
 import { indexState } from "@/lib/evaluation/budget/indexed-state";
 import type { BudgetResults, ItemResult, PointResult } from "@/lib/evaluation/budget/results";
 import { withNewestVersions } from "@/lib/evaluation/budget/with-newest-versions";
-import { CURRENT_METHOD_VERSIONS } from "@/lib/evaluation/methods/method-registry";
+import { newestVersionOf } from "@/lib/evaluation/methods/method-versions";
 import type { MethodName } from "@/lib/evaluation/methods/method-name";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { inSnapshot } from "@/models/database";
@@ -59,7 +59,7 @@ export function recomputedToday(actor: Actor, productCode: string, issue: number
           name: body.name,
           method: body.method,
           version: result.methodVersion,
-          newestVersion: CURRENT_METHOD_VERSIONS[body.method],
+          newestVersion: newestVersionOf(body.method),
           frozen: result.predicted,
           today: predictedOf(today, operatingPoint, result.item),
           newest: predictedOf(newest, operatingPoint, result.item),

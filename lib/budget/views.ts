@@ -90,7 +90,8 @@ export interface ComparedLine {
   name: string;
   /** null where the line did not yet exist. */
   letterWas: string | null;
-  letterNow: string;
+  /** null where it does not exist yet, which is so only on the way back. */
+  letterNow: string | null;
   retiredWas: boolean;
   retiredNow: boolean;
   /** Only the fields that differ. */

@@ -3,7 +3,7 @@ import { EDIT_OPERATIONS, LINE_KINDS } from "@/lib/vocabulary/lines";
 import { CAPACITIES } from "@/lib/vocabulary/roles";
 import { fileName, markdownText, plainText, sentenceText } from "./texts";
 
-const MAX_EDITS = 200;
+export const MAX_EDITS = 200;
 const MAX_TRANSFERS = 100;
 
 const LineNumber = z

@@ -37,6 +37,14 @@ export function shareItem(ownerId: number, fraction: number, of: readonly string
   return { ...commonItem(ownerId), name: "Gaps", ...own, ...more };
 }
 
+/** A plate of 2.4 m by 0.95 m, both sides wetted, tripped at its edge, by the one-fifth law. */
+export function plateItem(ownerId: number, methodVersion: number, more: object = {}) {
+  const { source: _, ...common } = commonItem(ownerId);
+  const size = { length: { value: 2.4 }, breadth: { value: 0.95 }, faces: 2, finish: "F30" };
+  const own = { method: "flat-plate-friction", ...size, frictionLine: "one-fifth-law", transition: "tripped" };
+  return { ...common, name: "Panel", ...own, methodVersion, ...more };
+}
+
 export function fixedItem(ownerId: number, newtons: number, more: object = {}) {
   return { ...commonItem(ownerId), name: "Lamp", method: "fixed", force: { value: newtons }, ...more };
 }

@@ -10,16 +10,17 @@ import { dragAt, dragOverSpeed, dragOverSpeedLayout } from "./drag-over-speed";
 import { Plot } from "./plot";
 
 interface DragOverSpeedFigureProps {
+  version: number;
   input: MethodInput;
   stream: StreamState;
   name: string;
 }
 
 /** The drag of an item in the same fluid at other speeds. */
-export function DragOverSpeedFigure({ input, stream, name }: DragOverSpeedFigureProps) {
-  const drag = dragAt(input, stream);
+export function DragOverSpeedFigure({ version, input, stream, name }: DragOverSpeedFigureProps) {
+  const drag = dragAt(version, input, stream);
   if (drag === null) return null;
-  const points = dragOverSpeed(input, stream);
+  const points = dragOverSpeed(version, input, stream);
   const isBroken = points.some((point) => point.drag === null);
 
   return (
@@ -32,14 +33,14 @@ export function DragOverSpeedFigure({ input, stream, name }: DragOverSpeedFigure
           {isBroken ? " Where the method refuses the item there is no line." : ""}
         </span>
       }
-      table={<SpeedTable input={input} stream={stream} name={name} />}
+      table={<SpeedTable version={version} input={input} stream={stream} name={name} />}
     />
   );
 }
 
 const SPEEDS_OF_TABLE = 16;
 
-function SpeedTable({ input, stream, name }: DragOverSpeedFigureProps) {
+function SpeedTable({ version, input, stream, name }: DragOverSpeedFigureProps) {
   return (
     <Table caption={`Drag of ${name} over speed`}>
       <TableHead>
@@ -49,7 +50,7 @@ function SpeedTable({ input, stream, name }: DragOverSpeedFigureProps) {
         </Head>
       </TableHead>
       <tbody>
-        {dragOverSpeed(input, stream, SPEEDS_OF_TABLE).map(({ speed, drag }) => (
+        {dragOverSpeed(version, input, stream, SPEEDS_OF_TABLE).map(({ speed, drag }) => (
           <Row key={speed}>
             <RowHead>{formatSignificant(speed)}</RowHead>
             <Cell numeric>{drag === null ? "refused" : formatNewtonsNumber(drag)}</Cell>

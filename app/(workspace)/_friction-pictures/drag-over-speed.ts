@@ -1,5 +1,5 @@
 import type { MethodInput } from "@/lib/evaluation/document/schema";
-import { CURRENT_METHOD_VERSIONS, evaluateMethod } from "@/lib/evaluation/methods/method-registry";
+import { evaluateMethod } from "@/lib/evaluation/methods/method-registry";
 import type { StreamState } from "@/lib/evaluation/methods/stream-state";
 import { formatNewtons } from "@/lib/units/format-newtons";
 
@@ -16,16 +16,17 @@ export interface SpeedPoint {
 const LEAST_PART = 0.1;
 const GREATEST_PART = 1.6;
 
-/** The item's drag in the same fluid at slower and faster speeds, by its own method. */
-export function dragOverSpeed(input: MethodInput, stream: StreamState, count = 46): SpeedPoint[] {
+/** The item's drag in the same fluid at slower and faster speeds, by its own method and version. */
+export function dragOverSpeed(version: number, input: MethodInput, stream: StreamState, count = 46): SpeedPoint[] {
   return evenly(LEAST_PART, GREATEST_PART, count).map((part) => {
     const speed = stream.speed * part;
-    return { speed, drag: dragAt(input, { ...stream, speed, dynamicPressure: stream.dynamicPressure * part ** 2 }) };
+    const faster = { ...stream, speed, dynamicPressure: stream.dynamicPressure * part ** 2 };
+    return { speed, drag: dragAt(version, input, faster) };
   });
 }
 
-export function dragAt(input: MethodInput, stream: StreamState): number | null {
-  const outcome = evaluateMethod(input.method, CURRENT_METHOD_VERSIONS[input.method], input, stream);
+export function dragAt(version: number, input: MethodInput, stream: StreamState): number | null {
+  const outcome = evaluateMethod(input.method, version, input, stream);
   return outcome.outcome === "answer" ? outcome.answer.drag : null;
 }
 

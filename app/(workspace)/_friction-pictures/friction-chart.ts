@@ -1,7 +1,6 @@
 import { blasiusFrictionIntegral, BLASIUS_RANGE } from "@/lib/aero/friction/blasius";
 import type { FrictionLine } from "@/lib/aero/friction/friction-line";
 import { frictionLayer } from "@/lib/aero/friction/friction-layer";
-import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
 import { FULLY_ROUGH } from "@/lib/aero/friction/fully-rough";
 import { PRANDTL_SCHLICHTING } from "@/lib/aero/friction/prandtl-schlichting";
 import { DEFAULT_CRITICAL_REYNOLDS } from "@/lib/evaluation/document/method-schemas";
@@ -39,7 +38,7 @@ export interface FrictionChart {
 /** Mean coefficients of friction over Re: what a plate can have, and where this item's is. */
 export function frictionChart({ friction, setup, meanCoefficient }: FrictionSubject): FrictionChart {
   const leastReynolds = setup.endReynolds < 2e4 ? 1e3 : 1e4;
-  const { smoothLine, roughLine } = linesOf(friction.frictionLine);
+  const { smoothLine, roughLine } = linesOf(friction);
   const transitionReynolds =
     setup.askedTransition.kind === "at" ? setup.askedTransition.reynolds : DEFAULT_CRITICAL_REYNOLDS;
   const range = evenRatios(leastReynolds, GREATEST_REYNOLDS, POINTS);
@@ -68,11 +67,11 @@ export function frictionChart({ friction, setup, meanCoefficient }: FrictionSubj
 }
 
 /** A line for rough surfaces has no smooth one and the other way round: the automatic choice's then stands in. */
-function linesOf(asked: FrictionSubject["friction"]["frictionLine"]): {
+function linesOf({ frictionLine: asked, lines }: FrictionSubject["friction"]): {
   smoothLine: FrictionLine;
   roughLine: FrictionLine;
 } {
-  const line = asked === "automatic" ? PRANDTL_SCHLICHTING : FRICTION_LINES[asked];
+  const line = asked === "automatic" ? PRANDTL_SCHLICHTING : lines[asked];
   return {
     smoothLine: line.surface === "rough" ? PRANDTL_SCHLICHTING : line,
     roughLine: line.surface === "smooth" ? FULLY_ROUGH : line,

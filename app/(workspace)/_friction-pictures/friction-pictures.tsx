@@ -7,6 +7,8 @@ import { frictionSubject } from "./friction-subject";
 import { GrowthFigure, ShearFigure } from "./layer-figures";
 
 interface FrictionPicturesProps {
+  /** Of the method. */
+  version: number;
   input: MethodInput;
   stream: StreamState;
   /** As it is called in summaries and tables: "Item 010". */
@@ -16,8 +18,8 @@ interface FrictionPicturesProps {
 }
 
 /** The pictures of an item, drawn by the functions that compute it; other methods than friction have drag over speed only. */
-export function FrictionPictures({ input, stream, name, wide = false }: FrictionPicturesProps) {
-  const subject = frictionSubject(input, stream);
+export function FrictionPictures({ version, input, stream, name, wide = false }: FrictionPicturesProps) {
+  const subject = frictionSubject(version, input, stream);
 
   return (
     <div className={wide ? "grid gap-x-8 lg:grid-cols-2" : ""}>
@@ -28,7 +30,7 @@ export function FrictionPictures({ input, stream, name, wide = false }: Friction
           <ShearFigure subject={subject} name={name} />
         </>
       ) : null}
-      <DragOverSpeedFigure input={input} stream={stream} name={name} />
+      <DragOverSpeedFigure version={version} input={input} stream={stream} name={name} />
     </div>
   );
 }

@@ -1,3 +1,4 @@
+import { adoptedVersion } from "@/lib/evaluation/budget/adopted-versions";
 import { findLine } from "@/lib/evaluation/budget/indexed-state";
 import { newFinish } from "@/lib/evaluation/lines/finish-body";
 import { newGroup } from "@/lib/evaluation/lines/group-body";
@@ -7,6 +8,7 @@ import type { BudgetState, LineState } from "@/lib/evaluation/lines/line-state";
 import { lineName } from "@/lib/evaluation/lines/name-book";
 import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
 import { METHOD_NAMES } from "@/lib/evaluation/methods/method-name";
+import { FIRST_METHOD_VERSION } from "@/lib/evaluation/methods/method-versions";
 import type { DraftEdit } from "@/lib/proposals/schema";
 
 import { asRecord, type Body } from "./body";
@@ -34,20 +36,29 @@ export function copyEdit(line: LineState, kind: NewLineKind, number: string, own
 
 function template(kind: NewLineKind, state: BudgetState, ownerId: number): object {
   const order = (state.lines.filter((line) => line.kind === kind).length + 1) * 10;
-  if (kind === "item") return ITEM_METHODS["flat-plate-friction"].template({ ownerId, order, group: null });
+  if (kind === "item") {
+    const method = "flat-plate-friction";
+    const fresh = ITEM_METHODS[method].template({ ownerId, order, group: null });
+    return { ...fresh, methodVersion: adoptedVersion(state, method) };
+  }
   if (kind === "group") return newGroup(order);
 
   return kind === "finish" ? newFinish() : newOperatingPoint();
 }
 
-/** Another method: what both methods have stays as typed, the rest starts from the new one's defaults. */
-export function withMethod(body: Body, method: string): Body {
+/**
+ * Another method: what both methods have stays as typed, the rest starts from the new one's defaults.
+ *
+ * @param state the budget whose versions count; null outside of one
+ */
+export function withMethod(body: Body, method: string, state: BudgetState | null): Body {
   const name: MethodName | undefined = METHOD_NAMES.find((known) => known === method);
   if (!name) return body;
   const fresh = asRecord(ITEM_METHODS[name].template({ ownerId: 0, order: 0, group: null }));
   const kept = Object.fromEntries(Object.keys(fresh).map((key) => [key, body[key] ?? fresh[key] ?? null]));
 
-  return { ...kept, method: name, methodVersion: fresh.methodVersion ?? 1 };
+  const methodVersion = state ? adoptedVersion(state, name) : FIRST_METHOD_VERSION;
+  return { ...kept, method: name, methodVersion };
 }
 
 /** The body that a line has before the edit; null for a new one. */

@@ -5,14 +5,16 @@ import { FULLY_ROUGH_MILLS_HANG } from "./fully-rough-mills-hang";
 import { ITTC_1957 } from "./ittc-1957";
 import { KARMAN_SCHOENHERR } from "./karman-schoenherr";
 import { MOMENTUM_INTEGRAL } from "./momentum-integral";
-import { ONE_FIFTH_LAW } from "./one-fifth-law";
+import { ONE_FIFTH_LAW, ONE_FIFTH_LAW_BY_INTEGRAL } from "./one-fifth-law";
 import { ONE_SEVENTH_LAW } from "./one-seventh-law";
 import { PRANDTL_SCHLICHTING } from "./prandtl-schlichting";
 import { SCHULTZ_GRUNOW } from "./schultz-grunow";
 import { WHITE } from "./white";
 
+export type FrictionLines = Readonly<Record<FrictionLineName, FrictionLine>>;
+
 /** Every friction line by its name: a new line is its file, its name and its row here. */
-export const FRICTION_LINES: Record<FrictionLineName, FrictionLine> = {
+export const FRICTION_LINES: FrictionLines = {
   "one-fifth-law": ONE_FIFTH_LAW,
   "one-seventh-law": ONE_SEVENTH_LAW,
   "prandtl-schlichting": PRANDTL_SCHLICHTING,
@@ -23,4 +25,10 @@ export const FRICTION_LINES: Record<FrictionLineName, FrictionLine> = {
   "momentum-integral": MOMENTUM_INTEGRAL,
   "fully-rough": FULLY_ROUGH,
   "fully-rough-mills-hang": FULLY_ROUGH_MILLS_HANG,
+};
+
+/** The second set of constants: the one-fifth law by the momentum integral, all other lines as in the first. */
+export const FRICTION_LINES_BY_INTEGRAL: FrictionLines = {
+  ...FRICTION_LINES,
+  "one-fifth-law": ONE_FIFTH_LAW_BY_INTEGRAL,
 };

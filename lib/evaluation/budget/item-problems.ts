@@ -1,7 +1,7 @@
 import { TERMS_NUMBER } from "../lines/terms-body";
 import type { ItemBody } from "../lines/item-body";
 import { isFullyRough } from "../lines/items/friction-fields";
-import { CURRENT_METHOD_VERSIONS } from "../methods/method-registry";
+import { newestVersionOf } from "../methods/method-versions";
 import type { IndexedState } from "./indexed-state";
 import type { Cause, Problem, ProblemOptions } from "./problem";
 
@@ -15,7 +15,7 @@ export function itemProblems(state: IndexedState, options: ProblemOptions): Prob
 }
 
 function commonProblems(number: string, body: ItemBody, state: IndexedState, { mayOwn }: ProblemOptions): Problem[] {
-  const isKnownVersion = body.methodVersion <= CURRENT_METHOD_VERSIONS[body.method];
+  const isKnownVersion = body.methodVersion <= newestVersionOf(body.method);
   const isStranger = mayOwn !== undefined && !mayOwn(body.ownerId);
   return [
     ...(isStranger ? [own(number, "ownerId", "Choose a member of this product who may own items.")] : []),

@@ -1,5 +1,5 @@
 import type { BudgetState, LineState } from "../lines/line-state";
-import { CURRENT_METHOD_VERSIONS } from "../methods/method-registry";
+import { newestVersionOf } from "../methods/method-versions";
 
 /** The same lines, each item by the newest version of its method: what adopting it would give. */
 export function withNewestVersions(state: BudgetState): BudgetState {
@@ -8,6 +8,5 @@ export function withNewestVersions(state: BudgetState): BudgetState {
 
 function withNewestVersion(line: LineState): LineState {
   if (line.kind !== "item") return line;
-  const methodVersion = CURRENT_METHOD_VERSIONS[line.body.method];
-  return { ...line, body: { ...line.body, methodVersion } };
+  return { ...line, body: { ...line.body, methodVersion: newestVersionOf(line.body.method) } };
 }

@@ -1,6 +1,7 @@
 import { contributionsOf, standardUncertaintyOf, type Contributions } from "../methods/contributions";
 import type { MethodAnswer } from "../methods/method-answer";
-import { CURRENT_METHOD_VERSIONS, evaluateMethod } from "../methods/method-registry";
+import { evaluateMethod } from "../methods/method-registry";
+import { FIRST_METHOD_VERSION } from "../methods/method-versions";
 import { OWN_UNCERTAINTIES } from "../methods/own-uncertainties";
 import { streamStateOf, type StreamState } from "../methods/stream-state";
 import type { Note } from "../notes/note";
@@ -40,11 +41,10 @@ function evaluatePoint(
 }
 
 function itemOutcome(item: ItemInput, point: OperatingPointInput, stream: StreamState): ItemOutcome {
-  const version = CURRENT_METHOD_VERSIONS[item.method];
-  const outcome = evaluateMethod(item.method, version, item, stream);
+  const outcome = evaluateMethod(item.method, FIRST_METHOD_VERSION, item, stream);
   if (outcome.outcome === "refused") return { refusedBy: outcome.note };
   const { answer } = outcome;
-  return { answer, contributions: contributionsOf(item.id, version, item, point, answer) };
+  return { answer, contributions: contributionsOf(item.id, FIRST_METHOD_VERSION, item, point, answer) };
 }
 
 function shareOutcome(

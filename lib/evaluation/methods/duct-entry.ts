@@ -1,5 +1,6 @@
 import { COLEBROOK_RANGE, COLEBROOK_ROUGHEST, colebrookFriction, developedDuctDrag } from "@/lib/aero/colebrook";
 import { ductBlockage, hydraulicDiameter, type DuctBlockage } from "@/lib/aero/duct-blockage";
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { within } from "@/lib/aero/range";
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
@@ -15,10 +16,14 @@ import type { StreamState } from "./stream-state";
 const LONG_DUCT = 10;
 
 /** Four walls as plates from the entry, at the entry speed, single pass. */
-export function evaluateDuctEntry(input: InputOf<"duct-entry">, stream: StreamState): MethodOutcome {
+export function evaluateDuctEntry(
+  input: InputOf<"duct-entry">,
+  stream: StreamState,
+  lines: FrictionLines,
+): MethodOutcome {
   const width = numberOf(input.width);
   const height = numberOf(input.height);
-  const result = frictionResult(ductCase(input), stream, stream.dynamicPressure * 2 * (width + height));
+  const result = frictionResult(ductCase(input, lines), stream, stream.dynamicPressure * 2 * (width + height));
   if (result.outcome === "refused") return result;
 
   const { answer } = result;

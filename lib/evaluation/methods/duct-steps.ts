@@ -1,5 +1,5 @@
 import { BLASIUS_SHAPE_FACTOR } from "@/lib/aero/friction/blasius";
-import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { START_OF_WALL_AND_WAKE } from "@/lib/aero/friction/wall-and-wake";
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
@@ -11,15 +11,15 @@ import { digits, step, streamSteps } from "./step-text";
 import type { StreamState } from "./stream-state";
 import type { WorkedStep } from "./worked-step";
 
-export function ductSteps(input: InputOf<"duct-entry">, stream: StreamState): WorkedStep[] {
-  const friction = ductCase(input);
+export function ductSteps(input: InputOf<"duct-entry">, stream: StreamState, lines: FrictionLines): WorkedStep[] {
+  const friction = ductCase(input, lines);
   const steps = [...streamSteps(stream, 1), ...frictionSteps(friction, frictionSetup(friction, stream), stream)];
   const [width, height] = [numberOf(input.width), numberOf(input.height)];
   const stretch = steps.at(-1)?.value ?? 0;
   const drag = stream.dynamicPressure * 2 * (width + height) * stretch;
   return [
     ...steps,
-    ...blockageSteps(input, stream, stretch),
+    ...blockageSteps(input, stream, lines, stretch),
     step(
       ["Drag", "D", "N"],
       "D = q · 2 (W + H) · ΔF",
@@ -29,8 +29,13 @@ export function ductSteps(input: InputOf<"duct-entry">, stream: StreamState): Wo
   ];
 }
 
-function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState, stretch: number): WorkedStep[] {
-  const outcome = evaluateDuctEntry(input, stream);
+function blockageSteps(
+  input: InputOf<"duct-entry">,
+  stream: StreamState,
+  lines: FrictionLines,
+  stretch: number,
+): WorkedStep[] {
+  const outcome = evaluateDuctEntry(input, stream, lines);
   if (outcome.outcome === "refused") return [];
   const { momentumThickness, displacementThickness, coreSpeedAtExit, pressureLoss } = outcome.answer;
   if (momentumThickness === undefined || displacementThickness === undefined) return [];
@@ -38,7 +43,7 @@ function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState, stretc
   const [width, height] = [numberOf(input.width), numberOf(input.height)];
   return [
     step(["Momentum thickness at the exit", "θ", "m"], "θ = ½ F(x₀+L)", `½ · ${digits(stretch)}`, momentumThickness),
-    shapeFactorStep(outcome.answer.frictionLineUsed, displacementThickness / momentumThickness),
+    shapeFactorStep(lines, outcome.answer.frictionLineUsed, displacementThickness / momentumThickness),
     step(
       ["Displacement thickness at the exit", "δ*", "m"],
       "δ* = H₁₂ θ",
@@ -64,13 +69,17 @@ function blockageSteps(input: InputOf<"duct-entry">, stream: StreamState, stretc
 }
 
 /** H₁₂ of the profile that the line has, or borrows. */
-function shapeFactorStep(line: MethodAnswer["frictionLineUsed"], shapeFactor: number): WorkedStep {
+function shapeFactorStep(
+  lines: FrictionLines,
+  line: MethodAnswer["frictionLineUsed"],
+  shapeFactor: number,
+): WorkedStep {
   const quantity = ["Shape factor at the exit", "H₁₂", "–"] as const;
   if (line === "blasius") {
     const source = { source: "profile of Blasius 1908" };
     return step(quantity, "H₁₂ = 1.7208/0.664", "1.7208/0.664", BLASIUS_SHAPE_FACTOR, source);
   }
-  if (line !== undefined && FRICTION_LINES[line].profile === "one-seventh-power") {
+  if (line !== undefined && lines[line].profile === "one-seventh-power") {
     return step(quantity, "H₁₂ = 9/7", "9/7", 9 / 7, { source: "one-seventh profile: Schlichting, 7th ed. 1979" });
   }
   const lambda = (START_OF_WALL_AND_WAKE * shapeFactor) / (shapeFactor - 1);

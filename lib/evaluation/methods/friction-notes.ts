@@ -2,7 +2,6 @@ import { AUTOMATIC_RANGE } from "@/lib/aero/friction/automatic-layer";
 import { BLASIUS_RANGE } from "@/lib/aero/friction/blasius";
 import { frictionBetween } from "@/lib/aero/friction/friction-between";
 import { frictionLayer } from "@/lib/aero/friction/friction-layer";
-import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
 import { PRANDTL_SCHLICHTING } from "@/lib/aero/friction/prandtl-schlichting";
 import { isBelow, isBeyond } from "@/lib/aero/friction/transition";
 import { within } from "@/lib/aero/range";
@@ -53,12 +52,12 @@ function addRangeNotes(facts: FrictionFacts, notes: Note[]): void {
   if (isHeldLaminar(facts)) return;
   const reynolds = setup.endReynolds;
   const asked = friction.frictionLine;
-  const { min, max } = asked === "automatic" ? AUTOMATIC_RANGE : FRICTION_LINES[asked].reynoldsRange;
+  const { min, max } = asked === "automatic" ? AUTOMATIC_RANGE : friction.lines[asked].reynoldsRange;
   if (isBelow(reynolds, min) || isBelow(max, reynolds)) {
     notes.push(makeNote("reynolds-outside-line-range", { line: asked, reynolds, min, max }));
   }
   const used = answer.frictionLineUsed;
-  const ratioRange = used === "blasius" ? undefined : FRICTION_LINES[used].lengthOverRoughnessRange;
+  const ratioRange = used === "blasius" ? undefined : friction.lines[used].lengthOverRoughnessRange;
   const lengthOverRoughness = lengthOverRoughnessOf(friction);
   if (ratioRange && lengthOverRoughness !== undefined && !within(lengthOverRoughness, ratioRange)) {
     const values: NoteValues = { line: used, lengthOverRoughness, min: ratioRange.min };
@@ -96,7 +95,7 @@ function addRoughnessNotes(facts: FrictionFacts, notes: Note[]): void {
     }
     return;
   }
-  const { surface } = FRICTION_LINES[line];
+  const { surface } = friction.lines[line];
   if (surface === "smooth" && !setup.isSmoothEnough && !isHeldLaminar(facts)) {
     notes.push(makeNote("roughness-above-admissible", { line, ...heights }));
   }
@@ -110,7 +109,7 @@ function addRoughnessNotes(facts: FrictionFacts, notes: Note[]): void {
 function addNamedLineNotes({ friction, setup, answer }: FrictionFacts, notes: Note[]): void {
   const line = friction.frictionLine;
   if (line === "automatic" || answer.frictionLineUsed !== "blasius" || isLaminarAtEnd(setup)) return;
-  const crossing = FRICTION_LINES[line].turbulentLayer(setup.roughnessReynolds).blasiusBelow;
+  const crossing = friction.lines[line].turbulentLayer(setup.roughnessReynolds).blasiusBelow;
   notes.push(makeNote("blasius-below-crossing", { line, reynolds: setup.endReynolds, crossing }));
 }
 
@@ -140,8 +139,8 @@ function automaticReason({ setup, answer }: FrictionFacts): string {
 }
 
 /** Between the regimes neither line is meant: the momentum integral, which knows them all, stands beside. */
-function betweenNote({ setup, answer, newtonsPerMetre }: FrictionFacts): Note {
-  const layer = frictionLayer(FRICTION_LINES["momentum-integral"], setup.roughnessReynolds, setup.transition);
+function betweenNote({ friction, setup, answer, newtonsPerMetre }: FrictionFacts): Note {
+  const layer = frictionLayer(friction.lines["momentum-integral"], setup.roughnessReynolds, setup.transition);
   const momentumIntegralDrag =
     newtonsPerMetre * setup.viscousLength * frictionBetween(layer, setup.startReynolds, setup.spanReynolds);
   return makeNote("regime-between", {

@@ -2,7 +2,7 @@ import { admissibleRoughness } from "@/lib/aero/admissible-roughness";
 import { automaticLayer, automaticTransition } from "@/lib/aero/friction/automatic-layer";
 import { frictionLayer, type FrictionLayer } from "@/lib/aero/friction/friction-layer";
 import type { FrictionLineName } from "@/lib/aero/friction/friction-line-name";
-import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { isBelow, type Transition } from "@/lib/aero/friction/transition";
 import { numberOf } from "../document/number-input";
 import type { InputOf, TransitionInput } from "../document/schema";
@@ -15,6 +15,8 @@ export interface FrictionCase {
   roughness: number;
   transition: TransitionInput;
   frictionLine: FrictionLineName | "automatic";
+  /** As the version of the method has them. */
+  lines: FrictionLines;
 }
 
 /** A friction case in its stream, in the dimensionless numbers that lines take. */
@@ -35,21 +37,26 @@ export interface FrictionSetup {
   layer: FrictionLayer;
 }
 
-export function plateCase(input: InputOf<"flat-plate-friction">): FrictionCase {
-  return frictionCase(input, numberOf(input.runUp));
+export function plateCase(input: InputOf<"flat-plate-friction">, lines: FrictionLines): FrictionCase {
+  return frictionCase(input, numberOf(input.runUp), lines);
 }
 
-export function ductCase(input: InputOf<"duct-entry">): FrictionCase {
-  return frictionCase(input, 0);
+export function ductCase(input: InputOf<"duct-entry">, lines: FrictionLines): FrictionCase {
+  return frictionCase(input, 0, lines);
 }
 
-function frictionCase(input: InputOf<"flat-plate-friction" | "duct-entry">, runUp: number): FrictionCase {
+function frictionCase(
+  input: InputOf<"flat-plate-friction" | "duct-entry">,
+  runUp: number,
+  lines: FrictionLines,
+): FrictionCase {
   return {
     length: numberOf(input.length),
     runUp,
     roughness: numberOf(input.roughness),
     transition: input.transition,
     frictionLine: input.frictionLine,
+    lines,
   };
 }
 
@@ -73,18 +80,18 @@ export function frictionSetup(friction: FrictionCase, stream: StreamState): Fric
     isSmoothEnough,
     askedTransition,
     transition,
-    layer: layerOf(friction.frictionLine, roughnessReynolds, transition),
+    layer: layerOf(friction, roughnessReynolds, transition),
   };
 }
 
 export function layerOf(
-  line: FrictionLineName | "automatic",
+  { frictionLine, lines }: Pick<FrictionCase, "frictionLine" | "lines">,
   roughnessReynolds: number,
   transition: Transition,
 ): FrictionLayer {
-  return line === "automatic"
+  return frictionLine === "automatic"
     ? automaticLayer(roughnessReynolds, transition)
-    : frictionLayer(FRICTION_LINES[line], roughnessReynolds, transition);
+    : frictionLayer(lines[frictionLine], roughnessReynolds, transition);
 }
 
 /** A trip keeps its place wherever the plate ends, so that a plate and its parts see one layer. */

@@ -1,7 +1,7 @@
 import { formatSignificant } from "@/lib/units/format-number";
 import { blasiusFrictionIntegral } from "@/lib/aero/friction/blasius";
 import type { FrictionLine } from "@/lib/aero/friction/friction-line";
-import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { isBeyond } from "@/lib/aero/friction/transition";
 import { frictionBetween } from "@/lib/aero/friction/friction-between";
 import type { FrictionCase, FrictionSetup } from "./friction-setup";
@@ -15,11 +15,11 @@ export function frictionSteps(friction: FrictionCase, setup: FrictionSetup, stre
   const steps = [...viscositySteps(stream), ...surfaceSteps(friction, setup, stream)];
   const end = friction.runUp + friction.length;
   steps.push(reynoldsStep("Reynolds number at the end", "Re", end, setup.endReynolds, stream));
-  steps.push(...placeSteps(setup, setup.endReynolds, "Re", "G", "x₀+L"));
+  steps.push(...placeSteps(friction.lines, setup, setup.endReynolds, ["Re", "G", "x₀+L"]));
   steps.push(frictionLengthStep(setup, setup.endReynolds, "G", "F(x₀+L)", "x₀+L"));
   if (friction.runUp > 0) {
     steps.push(reynoldsStep("Reynolds number at the run-up", "Re₀", friction.runUp, setup.startReynolds, stream));
-    steps.push(...placeSteps(setup, setup.startReynolds, "Re₀", "G₀", "x₀"));
+    steps.push(...placeSteps(friction.lines, setup, setup.startReynolds, ["Re₀", "G₀", "x₀"]));
     steps.push(frictionLengthStep(setup, setup.startReynolds, "G₀", "F(x₀)", "x₀"));
   }
   const stretch = setup.viscousLength * frictionBetween(setup.layer, setup.startReynolds, setup.spanReynolds);
@@ -78,11 +78,16 @@ function reynoldsStep(quantity: string, symbol: string, length: number, value: n
 }
 
 /** G = Re·C_F at one place of the layer, by the formula in force there. */
-function placeSteps(setup: FrictionSetup, reynolds: number, re: string, g: string, place: string): WorkedStep[] {
+function placeSteps(
+  lines: FrictionLines,
+  setup: FrictionSetup,
+  reynolds: number,
+  [re, g, place]: readonly [re: string, g: string, place: string],
+): WorkedStep[] {
   const { layer, transition } = setup;
   const line = layer.lineAt(reynolds);
   if (line === "blasius") return [blasiusStep(reynolds, re, g, place)];
-  const turbulent = FRICTION_LINES[line];
+  const turbulent = lines[line];
   const asFromStart = turbulent.turbulentLayer(setup.roughnessReynolds);
   const hasLaminarStretch = transition.kind === "at" && isBeyond(reynolds, transition.reynolds);
   if (asFromStart.reynoldsOf) return integralSteps(setup, reynolds, re, g, place);

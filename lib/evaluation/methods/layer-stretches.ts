@@ -2,6 +2,7 @@ import { isBeyond } from "@/lib/aero/friction/transition";
 import { numberOf } from "../document/number-input";
 import type { MethodInput } from "../document/schema";
 import { ductCase, frictionSetup, plateCase, type FrictionCase, type FrictionSetup } from "./friction-setup";
+import { frictionLinesOf } from "./friction-versions";
 import { localStream, type StreamState } from "./stream-state";
 
 /** A part of a surface with one regime; `from` and `to` in m from the start of the layer. */
@@ -12,11 +13,14 @@ export interface LayerStretch {
 }
 
 /** Regime by stretch over a plate or a duct's walls, from its run-up to its end; nothing for other methods. */
-export function layerStretches(input: MethodInput, stream: StreamState): LayerStretch[] {
+export function layerStretches(version: number, input: MethodInput, stream: StreamState): LayerStretch[] {
   if (input.method === "flat-plate-friction") {
-    return stretchesOf(plateCase(input), localStream(stream, numberOf(input.localSpeedRatio)));
+    return stretchesOf(
+      plateCase(input, frictionLinesOf(version)),
+      localStream(stream, numberOf(input.localSpeedRatio)),
+    );
   }
-  return input.method === "duct-entry" ? stretchesOf(ductCase(input), stream) : [];
+  return input.method === "duct-entry" ? stretchesOf(ductCase(input, frictionLinesOf(version)), stream) : [];
 }
 
 function stretchesOf(friction: FrictionCase, stream: StreamState): LayerStretch[] {

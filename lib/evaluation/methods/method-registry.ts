@@ -7,30 +7,18 @@ import { evaluateFlatPlateFriction } from "./flat-plate-friction";
 import { evaluateLossCoefficient } from "./loss-coefficient";
 import { evaluateMeasured } from "./measured";
 import type { MethodOutcome } from "./method-answer";
-import type { MethodName } from "./method-name";
+import { frictionLinesOf } from "./friction-versions";
 import { ofMethod } from "./of-method";
 import type { StreamState } from "./stream-state";
 
 export type { MethodAnswer, MethodOutcome } from "./method-answer";
 
-/** A result depends on the version of its method: an older one stays here, so that old issues can be computed again. */
-export const CURRENT_METHOD_VERSIONS: Record<MethodName, number> = {
-  "flat-plate-friction": 1,
-  "duct-entry": 1,
-  "loss-coefficient": 1,
-  "bluff-body": 1,
-  "drag-area": 1,
-  measured: 1,
-  fixed: 1,
-  share: 1,
-};
-
 type Evaluator = (input: MethodInput, stream: StreamState) => MethodOutcome;
 
-/** By method, then by version. */
+/** By method, then by version: an older one stays here, so that old issues can be computed again. */
 const EVALUATORS: ReadonlyMap<string, ReadonlyMap<number, Evaluator>> = new Map([
-  ["flat-plate-friction", new Map([[1, ofMethod("flat-plate-friction", evaluateFlatPlateFriction)]])],
-  ["duct-entry", new Map([[1, ofMethod("duct-entry", evaluateDuctEntry)]])],
+  ["flat-plate-friction", new Map([1, 2].map((version) => [version, plateOf(version)] as const))],
+  ["duct-entry", new Map([1, 2].map((version) => [version, ductOf(version)] as const))],
   ["loss-coefficient", new Map([[1, ofMethod("loss-coefficient", evaluateLossCoefficient)]])],
   ["bluff-body", new Map([[1, ofMethod("bluff-body", evaluateBluffBody)]])],
   ["drag-area", new Map([[1, ofMethod("drag-area", evaluateDragArea)]])],
@@ -52,4 +40,14 @@ export function evaluateMethod(
   const evaluate = EVALUATORS.get(method)?.get(version);
   if (!evaluate) throw new RangeError(`no method ${method} of version ${version}`);
   return evaluate(input, stream);
+}
+
+function plateOf(version: number): Evaluator {
+  const lines = frictionLinesOf(version);
+  return ofMethod("flat-plate-friction", (input, stream) => evaluateFlatPlateFriction(input, stream, lines));
+}
+
+function ductOf(version: number): Evaluator {
+  const lines = frictionLinesOf(version);
+  return ofMethod("duct-entry", (input, stream) => evaluateDuctEntry(input, stream, lines));
 }

@@ -1,3 +1,4 @@
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { numberOf } from "../document/number-input";
 import type { InputOf } from "../document/schema";
 import { fluidSteps } from "./fluid-steps";
@@ -9,10 +10,14 @@ import type { WorkedStep } from "./worked-step";
 
 const DRAG = ["Drag", "D", "N"] as const;
 
-export function flatPlateSteps(input: InputOf<"flat-plate-friction">, stream: StreamState): WorkedStep[] {
+export function flatPlateSteps(
+  input: InputOf<"flat-plate-friction">,
+  stream: StreamState,
+  lines: FrictionLines,
+): WorkedStep[] {
   const ratio = numberOf(input.localSpeedRatio);
   const local = localStream(stream, ratio);
-  const friction = plateCase(input);
+  const friction = plateCase(input, lines);
   const steps = [...streamSteps(stream, ratio), ...frictionSteps(friction, frictionSetup(friction, local), local)];
   const factors = [local.dynamicPressure, numberOf(input.faces), numberOf(input.breadth), numberOf(input.formFactor)];
   const stretch = steps.at(-1)?.value ?? 0;

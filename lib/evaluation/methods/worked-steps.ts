@@ -1,5 +1,6 @@
 import type { MethodInput, StreamInput } from "../document/schema";
 import { fluidSteps } from "./fluid-steps";
+import { frictionLinesOf } from "./friction-versions";
 import { evaluateMethod } from "./method-registry";
 import { ductSteps } from "./duct-steps";
 import { bluffBodySteps, dragAreaSteps, fixedSteps, flatPlateSteps, lossSteps, measuredSteps } from "./method-steps";
@@ -12,8 +13,7 @@ export type { WorkedStep } from "./worked-step";
 type Stepper = (input: MethodInput, stream: StreamState) => WorkedStep[];
 
 const STEPPERS: ReadonlyMap<string, Stepper> = new Map([
-  ["flat-plate-friction/1", ofMethod("flat-plate-friction", flatPlateSteps)],
-  ["duct-entry/1", ofMethod("duct-entry", ductSteps)],
+  ...[1, 2].flatMap((version) => frictionSteppers(version)),
   ["loss-coefficient/1", ofMethod("loss-coefficient", lossSteps)],
   ["bluff-body/1", ofMethod("bluff-body", bluffBodySteps)],
   ["drag-area/1", ofMethod("drag-area", dragAreaSteps)],
@@ -41,4 +41,15 @@ function fluidStepsFor(method: string, point: StreamInput): WorkedStep[] {
   if (method === "fixed") return [];
   const { density, viscosity } = fluidSteps(point);
   return VISCOUS_METHODS.includes(method) ? [...density, ...viscosity] : density;
+}
+
+function frictionSteppers(version: number): [string, Stepper][] {
+  const lines = frictionLinesOf(version);
+  return [
+    [
+      `flat-plate-friction/${version}`,
+      ofMethod("flat-plate-friction", (input, stream) => flatPlateSteps(input, stream, lines)),
+    ],
+    [`duct-entry/${version}`, ofMethod("duct-entry", (input, stream) => ductSteps(input, stream, lines))],
+  ];
 }

@@ -2,7 +2,7 @@ import { admissibleRoughness } from "@/lib/aero/admissible-roughness";
 import { automaticTransition } from "@/lib/aero/friction/automatic-layer";
 import { frictionBetween } from "@/lib/aero/friction/friction-between";
 import type { FrictionLayer } from "@/lib/aero/friction/friction-layer";
-import { FRICTION_LINES } from "@/lib/aero/friction/friction-lines";
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { isBelow, type Transition } from "@/lib/aero/friction/transition";
 import { numberOf, type NumberInput } from "../document/number-input";
 import { ADMITTED_REYNOLDS } from "../methods/friction-result";
@@ -28,9 +28,9 @@ interface KnownLayer {
  * The stretch of a surface as that stands at the moment. A layer that is the same as at the last call is not made again:
  * of smooth lines with natural transition it is one for all draws.
  */
-export function frictionStretch(surface: Surface): FrictionStretch {
+export function frictionStretch(surface: Surface, lines: FrictionLines): FrictionStretch {
   const { frictionLine } = surface;
-  const isSmoothLine = frictionLine !== "automatic" && FRICTION_LINES[frictionLine].surface === "smooth";
+  const isSmoothLine = frictionLine !== "automatic" && lines[frictionLine].surface === "smooth";
   const settled = settledTransition(surface);
   let last: KnownLayer | null = null;
 
@@ -44,7 +44,7 @@ export function frictionStretch(surface: Surface): FrictionStretch {
         : asked;
     const roughnessReynolds = isSmoothLine ? 0 : (speed * roughness) / kinematicViscosity;
     if (last?.roughnessReynolds === roughnessReynolds && isSame(last.transition, transition)) return last;
-    last = { layer: layerOf(frictionLine, roughnessReynolds, transition), roughnessReynolds, transition };
+    last = { layer: layerOf({ frictionLine, lines }, roughnessReynolds, transition), roughnessReynolds, transition };
     return last;
   };
 

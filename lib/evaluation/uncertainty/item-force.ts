@@ -1,5 +1,8 @@
+import type { FrictionLines } from "@/lib/aero/friction/friction-lines";
 import { numberOf, type UncertainNumber } from "../document/number-input";
 import type { InputOf, MethodInput } from "../document/schema";
+import { frictionLinesOf } from "../methods/friction-versions";
+import { newestVersionOf } from "../methods/method-versions";
 import { streamStateOf, type StreamState } from "../methods/stream-state";
 import { frictionStretch } from "./friction-stretch";
 
@@ -16,12 +19,13 @@ export interface ItemForce {
  * @throws RangeError for a version of a method that has no such function
  */
 export function itemForce(version: number, input: MethodInput, flowArea: UncertainNumber | null): ItemForce {
-  if (version !== 1) throw new RangeError(`no force of ${input.method} of version ${version}`);
+  if (version > newestVersionOf(input.method))
+    throw new RangeError(`no force of ${input.method} of version ${version}`);
   switch (input.method) {
     case "flat-plate-friction":
-      return plateForce(input);
+      return plateForce(input, frictionLinesOf(version));
     case "duct-entry":
-      return ductForce(input, flowArea);
+      return ductForce(input, frictionLinesOf(version), flowArea);
     case "loss-coefficient":
       return smooth((stream) => {
         const area = flowArea ?? input.flowArea;
@@ -54,8 +58,8 @@ function pressureAt({ dynamicPressure }: StreamState, ratio: number): number {
   return dynamicPressure * ratio * ratio;
 }
 
-function plateForce(input: InputOf<"flat-plate-friction">): ItemForce {
-  const surface = frictionStretch(input);
+function plateForce(input: InputOf<"flat-plate-friction">, lines: FrictionLines): ItemForce {
+  const surface = frictionStretch(input, lines);
   return {
     newtons: ({ speed, kinematicViscosity, dynamicPressure }) => {
       const ratio = numberOf(input.localSpeedRatio);
@@ -74,8 +78,8 @@ function plateForce(input: InputOf<"flat-plate-friction">): ItemForce {
   };
 }
 
-function ductForce(input: InputOf<"duct-entry">, flowArea: UncertainNumber | null): ItemForce {
-  const surface = frictionStretch(input);
+function ductForce(input: InputOf<"duct-entry">, lines: FrictionLines, flowArea: UncertainNumber | null): ItemForce {
+  const surface = frictionStretch(input, lines);
   return {
     newtons: ({ speed, kinematicViscosity, dynamicPressure }) => {
       const width = numberOf(input.width);

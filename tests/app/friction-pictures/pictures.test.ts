@@ -25,7 +25,7 @@ function plate(fields: Partial<InputOf<"flat-plate-friction">> = {}): MethodInpu
 }
 
 function subjectOf(input: MethodInput) {
-  const subject = frictionSubject(input, STREAM);
+  const subject = frictionSubject(1, input, STREAM);
   if (!subject) throw new Error("nothing to draw");
   return subject;
 }
@@ -123,7 +123,7 @@ describe("the layer along the plate", () => {
     const input = plate({ runUp: 0.1, transition: { kind: "tripped", at: 0.6 } });
     const growth = layerGrowth(subjectOf(input));
 
-    expect(growth.transitionAt).toBeCloseTo(layerStretches(input, STREAM)[1]?.from ?? NaN, 9);
+    expect(growth.transitionAt).toBeCloseTo(layerStretches(1, input, STREAM)[1]?.from ?? NaN, 9);
     expect(growthLayout(growth).bands.map(({ word }) => word)).toEqual(["laminar", "run-up"]);
   });
 
@@ -144,15 +144,15 @@ describe("the layer along the plate", () => {
   it("has nothing to draw of a method without a layer, or of an item that is refused", () => {
     const fixed = MethodInput.parse({ method: "fixed", force: 3 });
 
-    expect(frictionSubject(fixed, STREAM)).toBeNull();
-    expect(frictionSubject(plate({ length: 1e-5 }), STREAM)).toBeNull();
+    expect(frictionSubject(1, fixed, STREAM)).toBeNull();
+    expect(frictionSubject(1, plate({ length: 1e-5 }), STREAM)).toBeNull();
   });
 });
 
 describe("drag over speed", () => {
   it("rises with the square of the speed for a drag area", () => {
     const input = MethodInput.parse({ method: "drag-area", dragArea: 0.1 });
-    const points = dragOverSpeed(input, STREAM, 16);
+    const points = dragOverSpeed(1, input, STREAM, 16);
 
     for (const { speed, drag } of points) expect(drag).toBeCloseTo(0.5 * speed ** 2 * 0.1, 9);
     expect(points[9]?.speed).toBeCloseTo(30, 9);
@@ -160,7 +160,7 @@ describe("drag over speed", () => {
 
   it("leaves out the speeds at which the method refuses the item", () => {
     const input = plate({ length: 0.001 });
-    const points = dragOverSpeed(input, STREAM, 16);
+    const points = dragOverSpeed(1, input, STREAM, 16);
     const layout = dragOverSpeedLayout([{ word: null, points, own: { speed: 30, drag: answerOf(input).drag } }]);
 
     expect(points.filter(({ drag }) => drag === null).length).toBeGreaterThan(0);
@@ -170,7 +170,7 @@ describe("drag over speed", () => {
   it("draws a saving below zero", () => {
     const input = MethodInput.parse({ method: "drag-area", dragArea: -0.1, saving: true });
     const layout = dragOverSpeedLayout([
-      { word: null, points: dragOverSpeed(input, STREAM, 16), own: { speed: 30, drag: -45 } },
+      { word: null, points: dragOverSpeed(1, input, STREAM, 16), own: { speed: 30, drag: -45 } },
     ]);
 
     expect(layout.yTicks.some(({ label }) => label?.startsWith("−"))).toBe(true);
@@ -201,7 +201,7 @@ describe("two settings in one picture", () => {
     const input = MethodInput.parse({ method: "drag-area", dragArea: 0.1 });
     const curve = (word: "A" | "B", speed: number) => {
       const stream = { ...STREAM, speed, dynamicPressure: 0.5 * speed ** 2 };
-      return { word, points: dragOverSpeed(input, stream), own: { speed, drag: 0.05 * speed ** 2 } };
+      return { word, points: dragOverSpeed(1, input, stream), own: { speed, drag: 0.05 * speed ** 2 } };
     };
     const { curves, marks } = dragOverSpeedLayout([curve("A", 10), curve("B", 30)]);
 

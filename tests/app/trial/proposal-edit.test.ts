@@ -63,7 +63,7 @@ describe("a trial as a proposal", () => {
   });
 
   it("takes another method with its own fields, and none of the old one's", () => {
-    const setting = { ...SETTING, item: { ...withMethod(SETTING.item, "drag-area"), dragArea: { value: 0.1 } } };
+    const setting = { ...SETTING, item: { ...withMethod(SETTING.item, "drag-area", null), dragArea: { value: 0.1 } } };
     const { body } = revisedItemEdit(setting, ITEM, TARGETS);
 
     expect(body).toMatchObject({
@@ -77,8 +77,13 @@ describe("a trial as a proposal", () => {
     expect(body).not.toHaveProperty("finish");
   });
 
+  it("keeps the version of the item's method, which only a proposal that says so moves", () => {
+    const adopted = { ...ITEM, body: { ...ITEM.body, methodVersion: 2 } };
+    expect(revisedItemEdit(SETTING, adopted, TARGETS).body?.methodVersion).toBe(2);
+  });
+
   it("keeps the source of an item, unless the trial chose a catalogued shape", () => {
-    const bluff = withMethod(SETTING.item, "bluff-body");
+    const bluff = withMethod(SETTING.item, "bluff-body", null);
     const item = { ...ITEM, body: { ...bluff, source: "Tunnel test 4" } };
 
     const own = revisedItemEdit({ ...SETTING, item: { ...bluff, dragCoefficient: 1 } }, item, TARGETS);

@@ -23,7 +23,7 @@ const STREAM = {
 };
 
 function settingOf(method: string, fields: TrialSetting["item"], membersSum: TrialSetting["membersSum"] = null) {
-  return { point: STREAM, item: { ...withMethod(exampleTrial().a.item, method), ...fields }, membersSum };
+  return { point: STREAM, item: { ...withMethod(exampleTrial().a.item, method, null), ...fields }, membersSum };
 }
 
 describe("a setting of a trial", () => {
@@ -71,7 +71,7 @@ describe("a setting of a trial", () => {
 
   it.each(METHOD_NAMES)("says at fields of its form what %s still needs", (method) => {
     const fresh = settingOf(method, {});
-    const bare = { ...fresh, item: { ...withMethod({}, method) } };
+    const bare = { ...fresh, item: { ...withMethod({}, method, null) } };
     const { result, faults } = readSetting(bare);
     const onForm = [
       ...itemFields(bare.item).map(({ key }) => `item.${key}`),

@@ -28,7 +28,10 @@ interface BothSettingsPicturesProps {
 /** A and B in one picture, where both are of one kind; drawn anew only when a result is another. */
 export const BothSettingsPictures = memo(function BothSettingsPictures({ a, b }: BothSettingsPicturesProps) {
   if (!a?.input || !b?.input || a.input.method !== b.input.method || a.input.method === "fixed") return null;
-  const subjects = [frictionSubject(a.input, a.stream), frictionSubject(b.input, b.stream)] as const;
+  const subjects = [
+    frictionSubject(a.version, a.input, a.stream),
+    frictionSubject(b.version, b.input, b.stream),
+  ] as const;
   const curves = [curveOf("A", a), curveOf("B", b)].filter((curve) => curve !== null);
 
   return (
@@ -39,11 +42,11 @@ export const BothSettingsPictures = memo(function BothSettingsPictures({ a, b }:
   );
 });
 
-function curveOf(word: "A" | "B", { input, stream }: TrialResult): SpeedCurve | null {
-  const drag = input ? dragAt(input, stream) : null;
+function curveOf(word: "A" | "B", { version, input, stream }: TrialResult): SpeedCurve | null {
+  const drag = input ? dragAt(version, input, stream) : null;
   if (!input || drag === null) return null;
 
-  return { word, points: dragOverSpeed(input, stream), own: { speed: stream.speed, drag } };
+  return { word, points: dragOverSpeed(version, input, stream), own: { speed: stream.speed, drag } };
 }
 
 function BothOnChart({ a, b }: { a: FrictionSubject; b: FrictionSubject }) {

@@ -76,7 +76,7 @@ export function SettingForm({ side, setting, onChange, faults }: SettingFormProp
 }
 
 function withChoice(kind: "operating_point" | "item", body: Body, spec: FieldSpec, value: Json): Body {
-  if (spec.key === "method" && typeof value === "string") return withMethod(body, value);
+  if (spec.key === "method" && typeof value === "string") return withMethod(body, value, null);
   // A catalogued finish brings its roughness; without one a typed roughness is asked, smooth to begin with.
   const typed: Body = spec.key === "finish" && value === null ? { roughness: { value: 0, entered: "0" } } : {};
   return withoutHidden(kind, { ...body, [spec.key]: value, ...setByChoice(spec, value), ...typed });

@@ -38,7 +38,7 @@ export const SettingResult = memo(function SettingResult({ side, result }: Setti
       <StreamFacts stream={stream} sources={sources} />
       <WorkingNotes notes={notes.map(printedNote)} />
       {input && input.method !== "fixed" ? (
-        <FrictionPictures input={input} stream={stream} name={`Setting ${letter}`} />
+        <FrictionPictures version={result.version} input={input} stream={stream} name={`Setting ${letter}`} />
       ) : null}
       {alternates ? (
         <>

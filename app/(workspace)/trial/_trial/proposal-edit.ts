@@ -36,11 +36,13 @@ export function newItemEdit(
 }
 
 /** Chosen by the trial though no form of it asks: a run-up that is typed doesn't follow another item. */
-const DECIDED = ["method", "methodVersion", "runUpFollows"];
+const DECIDED = ["method", "runUpFollows"];
 
 /** The setting as a revision: what the trial doesn't ask stays as the item has it. */
 export function revisedItemEdit(setting: TrialSetting, item: TargetItem, targets: TrialTargets): DraftEdit {
   const asked = [...askedItemFields(setting.item).map(({ key }) => key), ...DECIDED];
+  // Only a proposal that says so moves an item to another version of its method.
+  if (setting.item.method !== item.body.method) asked.push("methodVersion");
   const body = Object.fromEntries(
     Object.entries(setting.item).map(([key, typed]) => [
       key,

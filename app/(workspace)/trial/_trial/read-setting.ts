@@ -9,6 +9,7 @@ import { type StreamSource, streamSources } from "@/lib/evaluation/lines/stream-
 import { newTerms } from "@/lib/evaluation/lines/terms-body";
 import { type AlternateLines, alternateLines } from "@/lib/evaluation/methods/alternate-lines";
 import { evaluateMethod, type MethodOutcome } from "@/lib/evaluation/methods/method-registry";
+import { FIRST_METHOD_VERSION } from "@/lib/evaluation/methods/method-versions";
 import { type StreamState, streamStateOf } from "@/lib/evaluation/methods/stream-state";
 import { type WorkedStep, workedSteps } from "@/lib/evaluation/methods/worked-steps";
 import { FINISH_CATALOGUE } from "@/lib/products/finish-catalogue";
@@ -21,6 +22,8 @@ import type { TrialSetting } from "./setting";
 export interface TrialResult {
   stream: StreamState;
   sources: StreamSource[];
+  /** Of the method. */
+  version: number;
   /** null for a share, which has no stream of its own. */
   input: MethodInput | null;
   outcome: MethodOutcome;
@@ -105,6 +108,7 @@ function shareResult(fraction: number, membersSum: number | null, flow: Flow): T
   };
   return {
     ...flow,
+    version: FIRST_METHOD_VERSION,
     input: null,
     outcome: { outcome: "answer", answer: { drag, notes: [] } },
     steps: [step],
@@ -117,10 +121,11 @@ function resultOf(body: EvaluatedBody, state: IndexedState, point: StreamInput, 
   const { stream } = flow;
   return {
     ...flow,
+    version: body.methodVersion,
     input,
     outcome: evaluateMethod(body.method, body.methodVersion, input, stream),
     steps: workedSteps(body.method, body.methodVersion, input, point),
-    alternates: alternateLines(input, stream),
+    alternates: alternateLines(body.methodVersion, input, stream),
   };
 }
 

@@ -12,18 +12,18 @@ const plate = (fields: object) =>
 
 describe("friction lines side by side", () => {
   it("are those whose range holds this Re, the item's own among them", () => {
-    const result = alternateLines(plate({ frictionLine: "white" }), STREAM);
+    const result = alternateLines(1, plate({ frictionLine: "white" }), STREAM);
     const names = result?.lines.map(({ line }) => line);
     expect(names).toContain("schultz-grunow");
     expect(names).not.toContain("fully-rough"); // no roughness to be rough with
     expect(result?.lines.filter(({ isItemsOwn }) => isItemsOwn).map(({ line }) => line)).toEqual(["white"]);
-    const low = alternateLines(plate({ frictionLine: "white", length: 0.7 }), STREAM)?.lines.map(({ line }) => line);
+    const low = alternateLines(1, plate({ frictionLine: "white", length: 0.7 }), STREAM)?.lines.map(({ line }) => line);
     expect(low).not.toContain("schultz-grunow");
     expect(low).not.toContain("momentum-integral");
   });
 
   it("show the difference from the item's own drag and the spread of those that fit its surface", () => {
-    const result = alternateLines(plate({ frictionLine: "white", roughness: 1e-4 * 0.5 }), STREAM);
+    const result = alternateLines(1, plate({ frictionLine: "white", roughness: 1e-4 * 0.5 }), STREAM);
     const own = answerOf(PLAIN, { ...plate({ frictionLine: "white", roughness: 1e-4 * 0.5 }) }).drag;
     for (const { line, drag, difference } of result?.lines ?? []) {
       expectRelative(drag, answerOf(PLAIN, { ...plate({ frictionLine: line, roughness: 1e-4 * 0.5 }) }).drag, 1e-14);
@@ -36,10 +36,10 @@ describe("friction lines side by side", () => {
   });
 
   it("keep the item's own line even outside its range, and are none for other methods", () => {
-    const own = alternateLines(plate({ frictionLine: "one-fifth-law", length: 50 }), STREAM);
+    const own = alternateLines(1, plate({ frictionLine: "one-fifth-law", length: 50 }), STREAM);
     expect(own?.lines.find(({ isItemsOwn }) => isItemsOwn)?.line).toBe("one-fifth-law");
-    expect(alternateLines(MethodInput.parse({ method: "fixed", force: 1 }), STREAM)).toBeNull();
-    expect(alternateLines(plate({ length: 1e6 }), STREAM)).toBeNull();
+    expect(alternateLines(1, MethodInput.parse({ method: "fixed", force: 1 }), STREAM)).toBeNull();
+    expect(alternateLines(1, plate({ length: 1e6 }), STREAM)).toBeNull();
   });
 });
 
@@ -65,7 +65,7 @@ describe("regime by stretch", () => {
     [{ roughness: 1e-3 }, [{ from: 0, to: 2, regime: "turbulent" }]],
     [{ length: 0.4 }, [{ from: 0, to: 0.4, regime: "laminar" }]],
   ])("%o", (fields, stretches) => {
-    const found = layerStretches(plate(fields), STREAM);
+    const found = layerStretches(1, plate(fields), STREAM);
     expect(found.map(({ regime }) => regime)).toEqual(
       stretches.map((stretch) => "regime" in stretch && stretch.regime),
     );
@@ -73,7 +73,7 @@ describe("regime by stretch", () => {
   });
 
   it("is none for other methods", () => {
-    expect(layerStretches(MethodInput.parse({ method: "fixed", force: 1 }), STREAM)).toEqual([]);
+    expect(layerStretches(1, MethodInput.parse({ method: "fixed", force: 1 }), STREAM)).toEqual([]);
   });
 });
 

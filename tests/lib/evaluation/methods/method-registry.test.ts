@@ -1,7 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { MethodInput, StreamPointInput } from "@/lib/evaluation/document/schema";
 import { METHOD_NAMES } from "@/lib/evaluation/methods/method-name";
-import { CURRENT_METHOD_VERSIONS, evaluateMethod } from "@/lib/evaluation/methods/method-registry";
+import { evaluateMethod } from "@/lib/evaluation/methods/method-registry";
+import { METHOD_VERSIONS } from "@/lib/evaluation/methods/method-versions";
 import { streamStateOf } from "@/lib/evaluation/methods/stream-state";
 import { AIR, PLAIN } from "./evaluate-one";
 
@@ -9,9 +10,14 @@ const STREAM = streamStateOf(StreamPointInput.parse(PLAIN));
 const FIXED = MethodInput.parse({ method: "fixed", force: 2 });
 
 describe("the registry of methods", () => {
-  it("has a current version of every method, and of all but share an evaluator", () => {
-    expect(Object.keys(CURRENT_METHOD_VERSIONS).sort()).toEqual([...METHOD_NAMES].sort());
-    expect(evaluateMethod("fixed", CURRENT_METHOD_VERSIONS.fixed, FIXED, STREAM)).toEqual({
+  it("has published versions of every method, and of all but share an evaluator of each", () => {
+    expect(Object.keys(METHOD_VERSIONS).sort()).toEqual([...METHOD_NAMES].sort());
+    for (const method of METHOD_NAMES.filter((name) => name !== "share" && name !== "fixed")) {
+      for (const { version } of METHOD_VERSIONS[method]) {
+        expect(() => evaluateMethod(method, version, FIXED, STREAM)).toThrow(`input of fixed given to ${method}`);
+      }
+    }
+    expect(evaluateMethod("fixed", 1, FIXED, STREAM)).toEqual({
       outcome: "answer",
       answer: { drag: 2, notes: [] },
     });

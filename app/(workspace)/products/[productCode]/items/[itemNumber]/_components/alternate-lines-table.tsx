@@ -9,7 +9,7 @@ import type { PointRow } from "./results-table";
 /** Every friction line whose range holds this item's Re, side by side: how much the choice of line decides. */
 export function AlternateLinesTable({ shown: { sheet, row } }: { shown: PointRow }) {
   if (row.body.method === "share") return null;
-  const alternates = alternateLines(methodInputOf(row.body, sheet.indexed), sheet.point.stream);
+  const alternates = alternateLines(row.body.methodVersion, methodInputOf(row.body, sheet.indexed), sheet.point.stream);
   if (!alternates) return null;
 
   return (

@@ -10,12 +10,18 @@ export function ItemPictures({ shown: { sheet, row } }: { shown: PointRow }) {
   if (row.body.method === "share") return null;
   const input = methodInputOf(row.body, sheet.indexed);
   const { stream, operatingPoint } = sheet.point;
-  if (!frictionSubject(input, stream)) return null;
+  if (!frictionSubject(row.body.methodVersion, input, stream)) return null;
 
   return (
     <>
       <SectionHeading>The layer at {operatingPoint} in pictures</SectionHeading>
-      <FrictionPictures input={input} stream={stream} name={`Item ${row.number}`} wide />
+      <FrictionPictures
+        version={row.body.methodVersion}
+        input={input}
+        stream={stream}
+        name={`Item ${row.number}`}
+        wide
+      />
     </>
   );
 }

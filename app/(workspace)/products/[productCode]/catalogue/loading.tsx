@@ -1,0 +1,5 @@
+import { LoadingSheet } from "@/app/_components/loading-sheet";
+
+export default function Loading() {
+  return <LoadingSheet what="the sheet" />;
+}
