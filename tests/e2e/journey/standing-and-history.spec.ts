@@ -105,7 +105,7 @@ test("the auditor reads who did what, goes back to an issue, and proves the chai
   await open(maud, `/products/${CODE}/issues?point=OP-1`);
   const row = maud.locator("tr[data-issue='3']");
   const stood = firstNumber(await row.getByRole("cell").nth(3).innerText());
-  await row.getByRole("link", { name: "Issue 3" }).click();
+  await row.getByRole("link", { name: "Issue 3", exact: true }).click();
   await expect(maud.getByText(/As it stood at issue 3, issued/)).toBeVisible();
   expect(await figure(maud, "Total, predicted")).toBe(stood);
 

@@ -2,7 +2,7 @@ import { NoteMark } from "@/app/_components/note-mark";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import type { Note } from "@/lib/evaluation/notes/note";
 
-/** Cautions and refusals stand in the row by what they say first; the whole sentence opens with the number. */
+/** Cautions and refusals stand in the row by what they say first; the whole sentence opens with the number, and is printed. */
 export function RowNotes({ notes }: { notes: readonly Note[] }) {
   const grave = notes.filter(isGrave);
   const informing = notes.length - grave.length;
@@ -11,7 +11,10 @@ export function RowNotes({ notes }: { notes: readonly Note[] }) {
     <>
       {grave.map((note) => (
         <NoteMark key={note.code} severity={note.severity}>
-          <span title={noteSentence(note)}>{firstClause(noteSentence(note))}</span>
+          <span title={noteSentence(note)} className="print:hidden">
+            {firstClause(noteSentence(note))}
+          </span>
+          <span className="hidden print:inline">{noteSentence(note)}</span>
         </NoteMark>
       ))}
       {informing > 0 ? (
