@@ -98,7 +98,7 @@ function changeShown(review: RoundReview, remarks: ProposalView["remarks"]) {
   return {
     lines: lineViews({ edits: round.edits, on, preview, today, remarks, people }),
     transfers: transferViews(review),
-    effectOnBase: effectView(base.issue, onBase.change.effects, onBase.change.after),
+    effectOnBase: effectView({ before: base, ...onBase.change, edits: round.edits }),
     faults: preview.obstacles.map(({ path, sentence }) => ({ path, sentence })),
     blocked: isOpen(review.proposal.state) ? blocked : null,
     overtaken: isOpen(review.proposal.state) ? overtaken : [],
@@ -107,8 +107,8 @@ function changeShown(review: RoundReview, remarks: ProposalView["remarks"]) {
   };
 }
 
-function effectOn({ today, onToday }: RoundReview) {
-  return effectView(today.issue, onToday.change.effects, onToday.change.after);
+function effectOn({ today, onToday, round }: RoundReview) {
+  return effectView({ before: today, ...onToday.change, edits: round.edits });
 }
 
 function transferViews({ round, onToday }: RoundReview): TransferView[] {

@@ -1,4 +1,5 @@
 import type { PointEffect } from "@/lib/evaluation/budget/effects";
+import type { EffectBasis } from "@/lib/evaluation/measures/effect-bases";
 import type { EditOperation, LineKind, ProductKind } from "@/lib/vocabulary/lines";
 import type { Decision, ProposalState } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
@@ -40,8 +41,19 @@ export interface EffectView {
   edited: ItemEffectView[];
   /** Items nobody edited that move all the same. */
   followers: ItemEffectView[];
+  /** To what the forces of each operating point are referred, on both sides. */
+  bases: EffectBasis[];
+  /** What reaches several items at once: a finish, a version of a method. */
+  touches: TouchView[];
   /** "Predicted falls by 3.90 N; inside again." */
   sentence: string;
+}
+
+/** A finish or a version of a method that changes, with every item that it reaches: also those that stay. */
+export interface TouchView {
+  title: string;
+  sentence: string;
+  effects: ItemEffectView[];
 }
 
 export interface FieldChangeRow {

@@ -2,6 +2,7 @@ import type { Transaction } from "sequelize";
 import { newestIssue } from "@/lib/budget/load-budget";
 import { allocationsView } from "@/lib/evaluation/budget/allocations-view";
 import { effectsOf } from "@/lib/evaluation/budget/effects-of";
+import { type EffectBasis, effectBases } from "@/lib/evaluation/measures/effect-bases";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { isAllowed } from "@/policies/authorize";
@@ -41,6 +42,8 @@ export interface WhatIfView {
   candidates: WhatIfCandidate[];
   /** Of the ticked ones, in the order of their numbers. */
   steps: JointStep[];
+  /** To what forces are referred today and with the set. */
+  bases: EffectBasis[];
   /** null while nothing that is ticked counts. */
   effect: EffectView | null;
   allocations: MovedAllocation[];
@@ -75,6 +78,7 @@ export function whatIfView(
       worstPoint: today.results.worstPoint,
       candidates: found.map((each) => candidate(each, today, people, set.includes(each))),
       steps,
+      bases: effectBases(today, after),
       effect: after === today ? null : jointEffect(today, after, set),
       allocations: movedAllocations(today, after),
     };
@@ -144,10 +148,9 @@ function candidate(
 }
 
 function jointEffect(today: BudgetAtIssue, after: BudgetAtIssue, set: readonly Tickable[]): EffectView {
-  const edited = set.flatMap(({ joint }) =>
-    joint.edits.filter(({ kind }) => kind === "item").map(({ number }) => number),
-  );
-  return effectView(today.issue, effectsOf(today.results, after.results, edited), after);
+  const edits = set.flatMap(({ joint }) => joint.edits);
+  const edited = edits.filter(({ kind }) => kind === "item").map(({ number }) => number);
+  return effectView({ before: today, after, edits, effects: effectsOf(today.results, after.results, edited) });
 }
 
 function movedAllocations(today: BudgetAtIssue, after: BudgetAtIssue): MovedAllocation[] {

@@ -56,6 +56,16 @@ export function readText(reading: Reading, newtons: number): string {
   return reading.unit === "" ? number : `${number}${space}${reading.unit}`;
 }
 
+/** A change without its unit, its sign always before it: "+0.00104"; what is 0.00 N has none. */
+export function readChangeNumber(reading: Reading, newtons: number): string {
+  return `${toHundredths(newtons) > 0 ? "+" : ""}${readNumber(reading, newtons)}`;
+}
+
+/** A change with its sign and unit: "−10.19 counts". */
+export function readChange(reading: Reading, newtons: number): string {
+  return `${toHundredths(newtons) > 0 ? "+" : ""}${readText(reading, newtons)}`;
+}
+
 /** A round value of a ruler, given in newtons: 4 lbf there and back is 4 again, not 3.99999999999. */
 export function readTick(reading: Reading, newtons: number): string {
   return formatExact(Number((newtons * reading.perNewton).toPrecision(TICK_DIGITS)));

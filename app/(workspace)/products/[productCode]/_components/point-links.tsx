@@ -1,16 +1,14 @@
 import type { Route } from "next";
 import Link from "next/link";
 
-import type { PointResult } from "@/lib/evaluation/budget/results";
-
-interface TrendPointsProps {
-  points: readonly PointResult[];
+interface PointLinksProps {
+  points: readonly { operatingPoint: string; name: string }[];
   chosen: string;
   hrefOf: (operatingPoint: string) => string;
 }
 
-/** At which operating point the trend is drawn. */
-export function TrendPoints({ points, chosen, hrefOf }: TrendPointsProps) {
+/** At which operating point a history is shown. */
+export function PointLinks({ points, chosen, hrefOf }: PointLinksProps) {
   if (points.length < 2) return null;
 
   return (
@@ -19,6 +17,7 @@ export function TrendPoints({ points, chosen, hrefOf }: TrendPointsProps) {
         <Link
           key={operatingPoint}
           href={hrefOf(operatingPoint) as Route}
+          scroll={false}
           aria-current={operatingPoint === chosen ? "true" : undefined}
           className="py-1 hover:underline aria-[current=true]:font-semibold"
         >

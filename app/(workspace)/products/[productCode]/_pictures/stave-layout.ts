@@ -82,6 +82,19 @@ function segmentsFrom(start: number, items: readonly StaveItem[]): StaveSegment[
     });
 }
 
+/** The same total in another measure: every value times what a newton is there. */
+export function scaledStave(input: StaveInput, perNewton: number): StaveInput {
+  const { items, basic, growth, predicted, limit, reserve } = input;
+  return {
+    items: items.map((item) => ({ ...item, basic: item.basic * perNewton })),
+    basic: basic * perNewton,
+    growth: growth * perNewton,
+    predicted: predicted * perNewton,
+    limit: limit === null ? null : limit * perNewton,
+    reserve: reserve * perNewton,
+  };
+}
+
 /** From the least to a little beyond the greatest, so that the last post does not stand on the edge. */
 function scaleFor(values: readonly number[]): Scale {
   const min = Math.min(...values);

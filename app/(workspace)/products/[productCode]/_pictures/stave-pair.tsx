@@ -1,18 +1,23 @@
 import type { Scale } from "./scale";
 import { Posts, StaveBar } from "./stave";
-import { type StaveInput, staveLayout } from "./stave-layout";
+import { scaledStave, type StaveInput, staveLayout } from "./stave-layout";
 
 export interface NamedStave {
   /** "issue 14", "with 31". */
   label: string;
+  /** Newtons. */
   input: StaveInput;
+  /** What a newton is in the measure to whose scale it is drawn; one measure for all of them. */
+  perNewton?: number;
   /** Printed at the right: "294.00 N predicted". */
   text: string;
 }
 
 /** Staves above one another to one scale: what stands and what would. */
 export function StavePair({ staves }: { staves: readonly NamedStave[] }) {
-  const drawn = staves.map(({ label, input, text }) => ({ label, text, layout: staveLayout(input) }));
+  const drawn = staves.map(({ label, input, text, perNewton = 1 }) => ({
+    ...{ label, text, layout: staveLayout(scaledStave(input, perNewton)) },
+  }));
   const scale = commonScale(drawn.map(({ layout }) => layout.scale));
 
   return (

@@ -122,7 +122,11 @@ function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
         <UncertaintyLine sheet={sheet} href={uncertaintyHref} />
         <StaveFigure sheet={sheet} reading={reading} />
         <BudgetItems sheet={sheet} query={query} path={path} userId={userId} reading={reading} units={units} />
-        <ConservationLine sums={budget.allocations} reading={readingAt(reference ?? point)} />
+        <ConservationLine
+          sums={budget.allocations}
+          reading={readingAt(reference ?? point)}
+          reserveHref={`${sheetAddress(`/products/${budget.product.code}/operating-points`, SheetQuery.parse({ issue, on }), {})}#reserve`}
+        />
         <MeasuresTable sheet={sheet} units={units} />
       </WorkingsProvider>
       <RetiredLines lines={sheet.retired} />

@@ -6,6 +6,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
+import { reserveHistory } from "@/lib/budget/reserve-history";
 import { indexState } from "@/lib/evaluation/budget/indexed-state";
 import { type FieldRow, fieldRows } from "@/lib/evaluation/lines/field-rows";
 import { nameBookOf } from "@/lib/evaluation/lines/name-book";
@@ -16,10 +17,10 @@ import { FieldTable } from "../_components/field-table";
 import { NotEstablished } from "../_components/not-established";
 import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
-import { pageBudget, pageProduct } from "../_server/read-page";
+import { pageBudget, pageProduct, readForPage } from "../_server/read-page";
 import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
-import { FinishTable } from "./_components/finish-table";
 import { PointsTable } from "./_components/points-table";
+import { ReserveSection } from "./_components/reserve-section";
 import { StreamSourcesList } from "./_components/stream-sources-list";
 
 type Props = PageProps<"/products/[productCode]/operating-points">;
@@ -43,6 +44,7 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
   }
 
   const base = `/products/${product.code}`;
+  const histories = await readForPage(() => reserveHistory(actor, product.code, budget.issue.number));
   const names = nameBookOf(budget.state, new Map(budget.people.map(({ id, name }) => [id, name])));
   const terms = budget.state.lines.find(({ kind }) => kind === "terms");
   const { operatingPoints } = indexState(budget.state);
@@ -51,6 +53,8 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
     return body ? [{ number, body }] : [];
   });
   const termsRows = terms ? fieldRows(terms, names) : [];
+  const onTerms = { on: "Line", productId: product.id, kind: "terms", ownerBefore: null, ownerAfter: null } as const;
+  const mayDraw = covers(abilityFor(actor), { ...onTerms, action: "revise" });
 
   return (
     <>
@@ -74,10 +78,16 @@ export default async function OperatingPointsPage({ params, searchParams }: Prop
             Estimate-to-test growth, and what growth table it suggests
           </Link>
         </p>
+        <ReserveSection
+          histories={histories}
+          asked={query.point}
+          units={units}
+          productCode={product.code}
+          hrefOf={(point) => sheetAddress(`${base}/operating-points`, query, { point })}
+          mayDraw={mayDraw}
+        />
         <SectionHeading aside="a program manager signs too on what is said yes to">Review rules</SectionHeading>
         <FieldTable rows={termsRows.filter(isReviewRule).map(shortRule)} caption="Review rules" units={units} />
-        <SectionHeading>Finishes</SectionHeading>
-        <FinishTable lines={budget.state.lines} units={units} />
       </Sheet>
     </>
   );

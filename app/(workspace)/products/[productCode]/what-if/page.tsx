@@ -1,21 +1,26 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 
-import { requireActor } from "@/app/_server/session";
+import { chosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import { type EffectReadings, effectReadings } from "@/app/(workspace)/_measures/effect-readings";
+import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { EmptyNote } from "@/app/_components/empty-note";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
+import { NEWTONS } from "@/lib/evaluation/measures/reading";
 import { whatIfView, type WhatIfView } from "@/lib/proposals/what-if";
 
 import { EffectSummary } from "../_components/effect-summary";
 import { ItemEffects } from "../_components/item-effects";
 import { ServiceWindCaution } from "../_components/service-wind-caution";
+import { TouchedItems } from "../_components/touched-items";
 import { readForPage } from "../_server/read-page";
 import { MovedAllocations } from "./_components/moved-allocations";
 import { StepsTable } from "./_components/steps-table";
 import { TickTable } from "./_components/tick-table";
-import { tickedKeys } from "./_components/ticked-keys";
+import { tickedKeys, whatIfAddress } from "./_components/ticked-keys";
 
 type Props = PageProps<"/products/[productCode]/what-if">;
 
@@ -25,11 +30,17 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 
 export default async function WhatIfPage({ params, searchParams }: Props) {
   const { productCode } = await params;
-  const ticked = tickedKeys((await searchParams).with);
-  const actor = await requireActor();
+  const query = await searchParams;
+  const ticked = tickedKeys(query.with);
+  const [actor, preferences] = await Promise.all([requireActor(), currentPreferences()]);
   const view = await readForPage(() => whatIfView(actor, productCode, ticked));
   if (!view) notFound();
   const { product, issue, candidates } = view;
+  const path = `/products/${product.code}/what-if`;
+  const asked = typeof query.measure === "string" ? query.measure : undefined;
+  const today = view.bases.flatMap(({ operatingPoint, was }) => (operatingPoint === view.worstPoint && was ? was : []));
+  const chosen = chosenMeasure(asked, preferences, today);
+  const reading = today[0] ? readingFor(chosen, today[0]) : NEWTONS;
 
   return (
     <>
@@ -52,12 +63,15 @@ export default async function WhatIfPage({ params, searchParams }: Props) {
           </EmptyNote>
         ) : (
           <>
+            <MeasureBar chosen={chosen} reading={reading} hrefOf={(measure) => whatIfAddress(path, ticked, measure)} />
             <TickTable
-              path={`/products/${product.code}/what-if`}
+              path={path}
               candidates={candidates}
               worstPoint={view.worstPoint}
+              reading={reading}
+              measure={asked}
             />
-            <JointResult view={view} />
+            <JointResult view={view} readings={effectReadings(chosen, view.bases)} />
           </>
         )}
       </Sheet>
@@ -65,18 +79,24 @@ export default async function WhatIfPage({ params, searchParams }: Props) {
   );
 }
 
-function JointResult({ view: { product, steps, effect, allocations } }: { view: WhatIfView }) {
+interface JointResultProps {
+  view: WhatIfView;
+  readings: EffectReadings;
+}
+
+function JointResult({ view: { product, steps, effect, allocations }, readings }: JointResultProps) {
   if (steps.length === 0)
     return <p className="mt-5 text-ink-2">Tick one or more to see what they would do together.</p>;
 
   return (
     <div className="mt-7">
-      {effect ? <EffectSummary effect={effect} withLabel="with them" everyPoint /> : null}
+      {effect ? <EffectSummary effect={effect} withLabel="with them" everyPoint readings={readings} /> : null}
       <StepsTable steps={steps} productCode={product.code} />
       {effect ? (
         <>
-          <ItemEffects heading="Results of the edited items" effects={effect.edited} />
-          <ItemEffects heading="What only follows" effects={effect.followers} />
+          <TouchedItems touches={effect.touches} readings={readings} />
+          <ItemEffects heading="Results of the edited items" effects={effect.edited} readings={readings} />
+          <ItemEffects heading="What only follows" effects={effect.followers} readings={readings} />
           <MovedAllocations rows={allocations} />
         </>
       ) : null}

@@ -1,3 +1,6 @@
+import type { Route } from "next";
+import Link from "next/link";
+
 import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import type { AllocationsView } from "@/lib/evaluation/budget/allocations-view";
@@ -10,13 +13,15 @@ interface ConservationLineProps {
   sums: AllocationsView;
   /** Of the reference operating point, where allocations are set. */
   reading: Reading;
+  /** Where the reserve's history stands. */
+  reserveHref: string;
 }
 
 /**
  * Allocations, unallocated and reserve against the limit: the sum that must hold after every act. It holds in newtons
  * to 0.01 N, so newtons stand first in every measure.
  */
-export function ConservationLine({ sums, reading }: ConservationLineProps) {
+export function ConservationLine({ sums, reading, reserveHref }: ConservationLineProps) {
   const parts = [
     { sign: "", label: "allocated", value: sums.allocatedHundredths, figure: null },
     { sign: "+", label: "unallocated", value: sums.unallocatedHundredths, figure: "unallocated" },
@@ -44,6 +49,11 @@ export function ConservationLine({ sums, reading }: ConservationLineProps) {
               ) : (
                 `${formatHundredths(value)} N`
               )}
+              {label === "reserve" ? (
+                <Link href={reserveHref as Route} className="link ml-2 text-sm font-normal print:hidden">
+                  its history
+                </Link>
+              ) : null}
               {isKept(reading) ? null : (
                 <span className="block text-sm font-normal text-ink-2">{readText(reading, value / 100)}</span>
               )}

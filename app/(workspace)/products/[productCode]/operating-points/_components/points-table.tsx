@@ -14,7 +14,7 @@ import { formatExact, formatPercent, formatSignificant } from "@/lib/units/forma
 import { formatQuantity } from "@/lib/units/format-quantity";
 import type { UnitSystem, UsDimension } from "@/lib/units/us-customary";
 
-import { InUsUnits } from "./in-us-units";
+import { InUsUnits } from "@/app/(workspace)/products/[productCode]/_components/in-us-units";
 
 /** Derived numbers of a stream are printed to four digits, so that a hand calculation can start from them. */
 const DIGITS = 4;

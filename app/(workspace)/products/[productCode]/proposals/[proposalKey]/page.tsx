@@ -1,19 +1,24 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 
+import { chosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import { EFFECT_IN_NEWTONS, effectReadings } from "@/app/(workspace)/_measures/effect-readings";
+import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
 import { ExportMenu } from "@/app/_components/export-menu";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { dayText } from "@/app/_components/utc-text";
-import { requireActor } from "@/app/_server/session";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { noteOpened } from "@/lib/proposals/opened-texts";
 import { proposalView } from "@/lib/proposals/queries";
 import type { ProposalView } from "@/lib/proposals/views";
+import type { Preferences } from "@/lib/vocabulary/measures";
 
 import { readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
 import { stateWords } from "../_components/state-words";
 import { ChangeSheet } from "./_components/change-sheet";
+import { effectShown } from "./_components/effect-shown";
 import { ProposalMoves } from "./_components/proposal-moves";
 import { SignOffTable } from "./_components/sign-off-table";
 import { WhatSignersOpened } from "./_components/what-signers-opened";
@@ -28,10 +33,13 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 
 export default async function ProposalPage({ params, searchParams }: Props) {
   const { productCode, proposalKey } = await params;
-  const round = roundAsked((await searchParams).round);
-  const actor = await requireActor();
+  const query = await searchParams;
+  const round = roundAsked(query.round);
+  const [actor, preferences] = await Promise.all([requireActor(), currentPreferences()]);
   const proposal = await readForPage(() => proposalView(actor, productCode, proposalKey, round));
   if (!proposal) notFound();
+  const base = `/products/${productCode}/proposals/${proposal.key}`;
+  const measured = measureOf(proposal, measureAsked(query.measure), preferences);
   if (proposal.signingSheet) await noteOpened(actor, proposal.signingSheet.textHash);
 
   return (
@@ -60,10 +68,31 @@ export default async function ProposalPage({ params, searchParams }: Props) {
           </SignOffTable>
         }
       >
-        <ChangeSheet proposal={proposal} now={new Date()} />
+        {measured ? (
+          <MeasureBar
+            chosen={measured.chosen}
+            reading={measured.reading}
+            hrefOf={(measure) => `${base}?${round === undefined ? "" : `round=${round}&`}measure=${measure}`}
+          />
+        ) : null}
+        <ChangeSheet proposal={proposal} readings={measured ? measured.readings : EFFECT_IN_NEWTONS} now={new Date()} />
       </Sheet>
     </>
   );
+}
+
+/** In what the effects are read; nothing where there is none yet. */
+function measureOf(proposal: ProposalView, asked: string | undefined, preferences: Preferences) {
+  const effect = effectShown(proposal);
+  const worst = effect?.bases.find(({ operatingPoint }) => operatingPoint === effect.points[0]?.operatingPoint);
+  const basis = worst?.now ?? worst?.was;
+  if (!effect || !basis) return null;
+  const chosen = chosenMeasure(asked, preferences, [basis]);
+  return { chosen, reading: readingFor(chosen, basis), readings: effectReadings(chosen, effect.bases) };
+}
+
+function measureAsked(text: string | string[] | undefined): string | undefined {
+  return typeof text === "string" ? text : undefined;
 }
 
 function roundAsked(text: string | string[] | undefined): number | undefined {

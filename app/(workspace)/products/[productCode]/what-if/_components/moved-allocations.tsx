@@ -9,7 +9,9 @@ export function MovedAllocations({ rows }: { rows: readonly MovedAllocation[] })
 
   return (
     <section className="mt-7">
-      <SectionHeading>Allocations that move</SectionHeading>
+      <SectionHeading aside="kept and shown in newtons, in which they add up to the limit">
+        Allocations that move
+      </SectionHeading>
       <Table caption="Allocations that move" narrow="stack">
         <TableHead>
           <Head>Holder</Head>

@@ -5,26 +5,37 @@ import { useRouter } from "next/navigation";
 import { useOptimistic, useTransition } from "react";
 
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import { type Reading, readChangeNumber } from "@/lib/evaluation/measures/reading";
 import type { WhatIfCandidate } from "@/lib/proposals/what-if";
-import { formatNewtonsChangeNumber } from "@/lib/units/format-newtons";
+
+import { tickedAfter, whatIfAddress } from "./ticked-keys";
 
 interface TickTableProps {
   path: string;
   candidates: readonly WhatIfCandidate[];
   worstPoint: string;
+  /** Of the worst operating point, as it stands today. */
+  reading: Reading;
+  /** That the address asks for. */
+  measure: string | undefined;
 }
 
 /** What may be ticked. The ticks stand in the address, so that a set can be sent to somebody. */
-export function TickTable({ path, candidates, worstPoint }: TickTableProps) {
+export function TickTable({ path, candidates, worstPoint, reading, measure }: TickTableProps) {
   const router = useRouter();
   const [isPending, startTransition] = useTransition();
   const [ticked, showTicked] = useOptimistic(candidates.filter(({ isTicked }) => isTicked).map(({ key }) => key));
 
   function tick(key: string, isTicked: boolean) {
-    const keys = candidates.map((each) => each.key).filter((each) => (each === key ? isTicked : ticked.includes(each)));
+    const keys = tickedAfter(
+      candidates.map((each) => each.key),
+      ticked,
+      key,
+      isTicked,
+    );
     startTransition(() => {
       showTicked(keys);
-      router.replace((keys.length === 0 ? path : `${path}?with=${keys.join(",")}`) as Route, { scroll: false });
+      router.replace(whatIfAddress(path, keys, measure) as Route, { scroll: false });
     });
   }
 
@@ -35,7 +46,7 @@ export function TickTable({ path, candidates, worstPoint }: TickTableProps) {
           <Head className="w-[52%]">Proposal</Head>
           <Head>By</Head>
           <Head>State</Head>
-          <Head numeric unit="N">
+          <Head numeric unit={reading.unit}>
             Alone, at {worstPoint}
           </Head>
         </TableHead>
@@ -58,7 +69,7 @@ export function TickTable({ path, candidates, worstPoint }: TickTableProps) {
               <Cell label="By">{candidate.proposer.name}</Cell>
               <Cell label="State">{candidate.state}</Cell>
               <Cell numeric label="Alone">
-                {candidate.predictedDelta === null ? "–" : formatNewtonsChangeNumber(candidate.predictedDelta)}
+                {candidate.predictedDelta === null ? "–" : readChangeNumber(reading, candidate.predictedDelta)}
               </Cell>
             </Row>
           ))}

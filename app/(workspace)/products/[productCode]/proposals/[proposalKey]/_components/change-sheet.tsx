@@ -1,36 +1,52 @@
 import Link from "next/link";
 import type { Route } from "next";
 
+import { type EffectReadings, movesBasis, readingAt } from "@/app/(workspace)/_measures/effect-readings";
 import { MarkdownText } from "@/app/_components/markdown-text";
 import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { UtcTime } from "@/app/_components/utc-time";
+import { NEWTONS } from "@/lib/evaluation/measures/reading";
 import type { ProposalView } from "@/lib/proposals/views";
 
 import { EffectSummary } from "@/app/(workspace)/products/[productCode]/_components/effect-summary";
 import { ItemEffects } from "@/app/(workspace)/products/[productCode]/_components/item-effects";
+import { TouchedItems } from "@/app/(workspace)/products/[productCode]/_components/touched-items";
 
 import { ChangeTable } from "./change-table";
+import { effectShown } from "./effect-shown";
 import { EvidenceSection } from "./evidence-section";
 import { RemarksSchedule } from "./remarks-schedule";
 import { TransfersTable } from "./transfers-table";
 
+interface ChangeSheetProps {
+  proposal: ProposalView;
+  /** In what the effects are read. */
+  readings: EffectReadings;
+  now: Date;
+}
+
 /** The body of a change sheet: effect, lines field by field, what follows, evidence, reason, remarks. */
-export function ChangeSheet({ proposal, now }: { proposal: ProposalView; now: Date }) {
-  const effect = proposal.effectToday ?? proposal.effectOnBase;
+export function ChangeSheet({ proposal, readings, now }: ChangeSheetProps) {
+  const effect = effectShown(proposal);
+  const worst = effect?.points[0] ? readingAt(readings, effect.points[0].operatingPoint) : null;
+  // Steps of a line add up only where both sides are read alike; newtons are what is kept.
+  const fieldReading = worst && !movesBasis(worst) ? worst.now : NEWTONS;
   const baseIssue = proposal.round?.baseIssue ?? proposal.newestIssue;
   const mayRemark = proposal.moves.remark.applies && proposal.moves.remark.allowed;
 
   return (
     <>
       <Warnings proposal={proposal} />
-      {effect ? <EffectSummary effect={effect} withLabel={`with ${shortLabel(proposal)}`} /> : null}
+      {effect ? <EffectSummary effect={effect} withLabel={`with ${shortLabel(proposal)}`} readings={readings} /> : null}
+      {effect ? <TouchedItems touches={effect.touches} readings={readings} /> : null}
       {proposal.lines.map((line) => (
         <ChangeTable
           key={`${line.kind} ${line.number}`}
           proposalId={proposal.proposalId}
           line={line}
           baseIssue={baseIssue}
+          effectReading={fieldReading}
           mayRemark={mayRemark}
           people={proposal.addressable}
         />
@@ -38,8 +54,8 @@ export function ChangeSheet({ proposal, now }: { proposal: ProposalView; now: Da
       <TransfersTable transfers={proposal.transfers} />
       {effect ? (
         <>
-          <ItemEffects heading="Results of the edited items" effects={effect.edited} />
-          <ItemEffects heading="What only follows" effects={effect.followers} />
+          <ItemEffects heading="Results of the edited items" effects={effect.edited} readings={readings} />
+          <ItemEffects heading="What only follows" effects={effect.followers} readings={readings} />
         </>
       ) : null}
       <EvidenceSection proposal={proposal} now={now} />

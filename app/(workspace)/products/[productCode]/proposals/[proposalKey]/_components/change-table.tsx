@@ -1,8 +1,8 @@
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { RemarkFlag } from "@/app/_components/remark-flag";
 import { RevisionLetter } from "@/app/_components/revision-letter";
+import { type Reading, readChange, readChangeNumber } from "@/lib/evaluation/measures/reading";
 import type { FieldChangeRow, LineChangeView, PersonView } from "@/lib/proposals/views";
-import { formatNewtonsChange, formatNewtonsChangeNumber } from "@/lib/units/format-newtons";
 import type { EditOperation } from "@/lib/vocabulary/lines";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
@@ -22,29 +22,39 @@ interface ChangeTableProps {
   proposalId: number;
   line: LineChangeView;
   baseIssue: number;
+  /** Of the worst operating point. */
+  effectReading: Reading;
   mayRemark: boolean;
   people: readonly PersonView[];
 }
 
 /** One line of the change sheet: every field as it was and as it is to be, changed rows with a bar in the margin. */
-export function ChangeTable({ proposalId, line, baseIssue, mayRemark, people }: ChangeTableProps) {
+export function ChangeTable({ proposalId, line, baseIssue, effectReading, mayRemark, people }: ChangeTableProps) {
   const added = line.operation === "add";
   // A field that somebody remarked on is at issue, changed or not.
   const isAtIssue = (row: FieldChangeRow) => row.changed || row.remarkNumbers.length > 0;
   const staying = line.rows.filter((row) => !isAtIssue(row));
   const fieldRow = (row: FieldChangeRow) => (
-    <FieldRow key={row.field} proposalId={proposalId} line={line} row={row} mayRemark={mayRemark} people={people} />
+    <FieldRow
+      key={row.field}
+      proposalId={proposalId}
+      line={line}
+      row={row}
+      reading={effectReading}
+      mayRemark={mayRemark}
+      people={people}
+    />
   );
 
   return (
     <section className="mt-7" aria-label={`${line.number} ${line.name}, ${OPERATION_WORDS[line.operation]}`}>
-      <LineHeading line={line} />
+      <LineHeading line={line} reading={effectReading} />
       <Table caption={`Fields of ${line.number} ${line.name}`} narrow="stack">
         <TableHead>
           <Head className="w-[27%]">Field</Head>
           <Head className="w-[29%]">{added ? "Was" : `Was, issue ${baseIssue}`}</Head>
           <Head className="w-[29%]">To be</Head>
-          <Head numeric unit="N">
+          <Head numeric unit={effectReading.unit}>
             Effect
           </Head>
           <Head>
@@ -62,7 +72,7 @@ export function ChangeTable({ proposalId, line, baseIssue, mayRemark, people }: 
   );
 }
 
-function LineHeading({ line }: { line: LineChangeView }) {
+function LineHeading({ line, reading }: { line: LineChangeView; reading: Reading }) {
   return (
     <div className="mb-1 flex flex-wrap items-baseline gap-x-2.5 gap-y-1">
       <h2 className="text-lg">
@@ -77,7 +87,7 @@ function LineHeading({ line }: { line: LineChangeView }) {
       <RevisionLetter letter={line.nextLetter} />
       <span className="ml-auto text-sm text-ink-2">
         {OPERATION_WORDS[line.operation]}
-        {line.effect === null ? "" : `, ${formatNewtonsChange(line.effect)}`}
+        {line.effect === null ? "" : `, ${readChange(reading, line.effect)}`}
       </span>
     </div>
   );
@@ -87,11 +97,12 @@ interface FieldRowProps {
   proposalId: number;
   line: LineChangeView;
   row: FieldChangeRow;
+  reading: Reading;
   mayRemark: boolean;
   people: readonly PersonView[];
 }
 
-function FieldRow({ proposalId, line, row, mayRemark, people }: FieldRowProps) {
+function FieldRow({ proposalId, line, row, reading, mayRemark, people }: FieldRowProps) {
   // What stays as it is takes one line on a narrow screen, so that what changes is found.
   const wideOnly = row.changed ? "" : "max-sm:!hidden";
 
@@ -111,7 +122,7 @@ function FieldRow({ proposalId, line, row, mayRemark, people }: FieldRowProps) {
         <ValueText value={row.toBe} unit={row.unit} />
       </Cell>
       <Cell label="Effect" numeric className={`text-water ${wideOnly}`}>
-        {row.effect === null ? "" : formatNewtonsChangeNumber(row.effect)}
+        {row.effect === null ? "" : readChangeNumber(reading, row.effect)}
       </Cell>
       <Cell className="max-sm:!flex">
         <span className="flex flex-wrap items-center justify-end gap-1.5">

@@ -5,7 +5,7 @@ import { MessageSheet } from "@/app/_components/message-sheet";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
-import { requireActor } from "@/app/_server/session";
+import { currentPreferences, requireActor } from "@/app/_server/session";
 import { type EditorView, editorView } from "@/lib/proposals/editor-view";
 import { Refusal } from "@/lib/vocabulary/refusal";
 
@@ -26,6 +26,7 @@ export default async function EditProposalPage({ params }: Props) {
     return <MessageSheet title="This proposal can’t be edited">{view.message}</MessageSheet>;
   }
   const { draft, budget } = view;
+  const preferences = await currentPreferences();
 
   return (
     <>
@@ -47,7 +48,7 @@ export default async function EditProposalPage({ params }: Props) {
           />
         }
       >
-        <ProposalEditor key={`${draft.proposalId}`} view={view} />
+        <ProposalEditor key={`${draft.proposalId}`} view={view} preferences={preferences} />
       </Sheet>
     </>
   );

@@ -10,6 +10,7 @@ import type { EditorNames } from "@/app/_components/line-fields/editor-names";
 import { FieldInput } from "@/app/_components/line-fields/field-input";
 import { withMethod } from "@/app/_components/line-fields/new-edit";
 import { isShown, valuesOf, withoutHidden } from "@/lib/evaluation/lines/field-rows";
+import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import { sameBody } from "@/lib/evaluation/lines/same-body";
 import { fieldsOfBody } from "@/lib/evaluation/lines/field-catalogue";
 import { type FieldSpec, setByChoice } from "@/lib/evaluation/lines/field-spec";
@@ -19,12 +20,16 @@ import type { DraftView } from "@/lib/proposals/workspace-views";
 import type { FieldFault } from "@/lib/vocabulary/refusal";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
+import { isAdopted, VersionLine } from "./version-line";
+
 interface LineFormProps {
   edit: DraftEdit;
   index: number;
   onChange: (edit: DraftEdit) => void;
   onRemove: () => void;
   names: EditorNames;
+  /** The budget on which the proposal stands. */
+  state: BudgetState;
   faults: readonly FieldFault[];
   /** Before the first try to propose, empty fields are no faults yet. */
   strict: boolean;
@@ -38,11 +43,14 @@ const OPERATION_WORDS = { add: "new", revise: "revised", retire: "to be retired"
 
 /** One line of the proposal as a form, drawn from the field catalogue of its kind. */
 export function LineForm(props: LineFormProps) {
-  const { edit, index, onChange, onRemove, names, faults, strict, before, touched } = props;
+  const { edit, index, onChange, onRemove, names, state, faults, strict, before, touched } = props;
   const [left, setLeft] = useState<Body>({});
+  const [opened, setOpened] = useState(false);
   const own = faults
     .filter(({ path }) => path.startsWith(`edits.${index}.`))
     .map(({ path, sentence }) => ({ path: path.replace(/^edits\.\d+\.(body\.)?/, ""), sentence }));
+  // A version adopted for many items needs no form for each of them.
+  const isFolded = !opened && own.length === 0 && changesVersionAlone(before, edit.body);
 
   return (
     <section className="mt-5 border-t border-ink pt-3" aria-label={`${edit.number} ${nameOf(edit, before)}`}>
@@ -53,7 +61,12 @@ export function LineForm(props: LineFormProps) {
         </h3>
         {edit.baseLetter ? <RevisionLetter letter={edit.baseLetter} /> : null}
         <span className="text-sm text-ink-2">{OPERATION_WORDS[edit.operation]}</span>
-        <span className="ml-auto">
+        <span className="ml-auto flex gap-x-4">
+          {isFolded ? (
+            <button type="button" className="link min-h-6 text-sm" onClick={() => setOpened(true)}>
+              Show its fields
+            </button>
+          ) : null}
           <button type="button" className="link min-h-6 text-sm" onClick={onRemove}>
             Take out of the proposal
           </button>
@@ -72,12 +85,14 @@ export function LineForm(props: LineFormProps) {
           />
         </div>
       ) : null}
-      {edit.body ? (
+      {edit.body ? <VersionLine before={before} body={edit.body} /> : null}
+      {edit.body && !isFolded ? (
         <Fields
           edit={edit}
           body={edit.body}
           onChange={(body) => onChange({ ...edit, body })}
           names={names}
+          state={state}
           faults={own}
           strict={strict}
           before={before}
@@ -91,6 +106,12 @@ export function LineForm(props: LineFormProps) {
   );
 }
 
+function changesVersionAlone(before: Body | null, body: Body | null): boolean {
+  if (!before || !body || !isAdopted(before, body)) return false;
+
+  return sameBody({ ...body, methodVersion: before.methodVersion }, before);
+}
+
 function nameOf(edit: DraftEdit, before: Body | null): string {
   const name = edit.body?.name ?? before?.name;
 
@@ -99,7 +120,7 @@ function nameOf(edit: DraftEdit, before: Body | null): string {
 
 interface FieldsProps extends Pick<
   LineFormProps,
-  "edit" | "index" | "names" | "faults" | "strict" | "before" | "touched"
+  "edit" | "index" | "names" | "state" | "faults" | "strict" | "before" | "touched"
 > {
   body: Body;
   onChange: (body: Body) => void;
@@ -108,7 +129,8 @@ interface FieldsProps extends Pick<
   onLeave: (left: Body) => void;
 }
 
-function Fields({ edit, index, body, onChange, names, faults, strict, before, touched, left, onLeave }: FieldsProps) {
+function Fields(props: FieldsProps) {
+  const { edit, index, body, onChange, names, state, faults, strict, before, touched, left, onLeave } = props;
   const specs = fieldsOfBody(edit.kind, body).filter((spec) => !spec.fixed && spec.key !== "justifications");
   const shown = specs.filter((spec) => isShown(spec, valuesOf(body)));
   const faultAt = (path: string) => {
@@ -124,7 +146,7 @@ function Fields({ edit, index, body, onChange, names, faults, strict, before, to
     }
     const known = { ...left, ...body };
     onLeave(known);
-    onChange(withMethod(known, value));
+    onChange(withMethod(known, value, state));
   };
 
   return (

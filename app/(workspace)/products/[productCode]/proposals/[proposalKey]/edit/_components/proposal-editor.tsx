@@ -11,7 +11,9 @@ import { bodyBefore } from "@/app/_components/line-fields/new-edit";
 import type { EditorView } from "@/lib/proposals/editor-view";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
+import type { Preferences } from "@/lib/vocabulary/measures";
 
+import { AdoptVersionForm } from "./adopt-version-form";
 import { CoEditors } from "./co-editors";
 import { EffectPanel } from "./effect-panel";
 import { JustificationsForm } from "./justifications-form";
@@ -26,8 +28,14 @@ import { TransfersForm } from "./transfers-form";
 import { usePreview } from "./use-preview";
 import { useSavedDraft } from "./use-saved-draft";
 
+interface ProposalEditorProps {
+  view: EditorView;
+  /** In what the person likes to read: the effects stand in it, what is typed is typed in any unit. */
+  preferences: Preferences;
+}
+
 /** The working copy of a proposal: its lines as forms, and beside them what they do. */
-export function ProposalEditor({ view }: { view: EditorView }) {
+export function ProposalEditor({ view, preferences }: ProposalEditorProps) {
   const { draft, budget } = view;
   const { content, setContent, save, lockVersion, settle, touched } = useSavedDraft(draft);
   const preview = usePreview(view, content);
@@ -52,7 +60,7 @@ export function ProposalEditor({ view }: { view: EditorView }) {
       </div>
       <aside className="min-w-0 lg:sticky lg:top-4 lg:max-h-[calc(100dvh-2rem)] lg:self-start lg:overflow-y-auto lg:border-l lg:border-rule lg:pl-6">
         <SaveWords save={save} />
-        <EffectPanel preview={preview} issue={budget.issue} />
+        <EffectPanel preview={preview} budget={budget} edits={content.edits} preferences={preferences} />
         <RoutingPanel preview={preview} />
         <CoEditors draft={draft} isProposer={draft.proposer.id === view.me.userId} />
         <Obstacles
@@ -148,6 +156,7 @@ function Lines({ view, content, setContent, preview, strict, touched }: LinesPro
           onChange={(changed) => replace(at, changed)}
           onRemove={() => setEdits((edits) => edits.filter((_, index) => index !== at))}
           names={names}
+          state={state}
           faults={preview.obstacles}
           strict={strict}
           before={bodyBefore(edit, state)}
@@ -160,6 +169,7 @@ function Lines({ view, content, setContent, preview, strict, touched }: LinesPro
         me={view.me}
         onAdd={(edit) => setEdits((edits) => [...edits, edit])}
       />
+      <AdoptVersionForm state={state} edits={content.edits} me={view.me} onAdopt={(edits) => setEdits(() => edits)} />
       <JustificationsForm needs={preview.justifications} edits={content.edits} onChange={replace} />
       <SectionHeading aside={content.transfers.length || ""}>Transfers of allocation</SectionHeading>
       <TransfersForm
