@@ -3,6 +3,7 @@ import { makeBaseline } from "@/lib/products/make-baseline";
 import { nameDeputy } from "@/lib/products/name-deputy";
 import { BRACKET_DRAWING, TRIM_DRAWING, TRIM_READINGS } from "./demo-files";
 import type { DemoHouse } from "./demo-house";
+import { drawRun } from "./drawn-run";
 import { FAIRING_GROUPS, FAIRING_ITEMS } from "./fairing-items";
 import { degreesCelsius, metresPerSecond, squareMetres } from "./item-draft";
 import { added, citation, firstSheet, fromItem, revised } from "./line-edits";
@@ -25,6 +26,8 @@ export async function tellFairingStory(house: DemoHouse): Promise<void> {
   await askInsideItem(house, acts);
   await addColdPoint(house, acts);
   await leaveDraft(house, acts);
+  house.at(1, "11:40");
+  await drawRun(house, "lusia", CODE);
   await nameHolidayDeputy(house);
 }
 

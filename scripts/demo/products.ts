@@ -57,5 +57,5 @@ export const SIGN: DemoProduct = {
   product: { code: "GS4", name: "Motorway gantry sign panel GS-4, edge on", kind: "sign_panel", timeZone: TIME_ZONE },
   firstDay: 132,
   operatingPoint: firstPoint("Service wind along the panel", 20, 10, 290, null),
-  terms: firstTerms(15, {}),
+  terms: firstTerms(16.5, {}),
 };

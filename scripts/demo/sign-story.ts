@@ -1,4 +1,6 @@
+import { TERMS_NUMBER } from "@/lib/evaluation/lines/terms-body";
 import type { DemoHouse } from "./demo-house";
+import { drawRun } from "./drawn-run";
 import { degreesCelsius, metresPerSecond, squareMetres } from "./item-draft";
 import { citation, firstSheet, revised } from "./line-edits";
 import { SIGN } from "./products";
@@ -17,6 +19,8 @@ export async function tellSignStory(house: DemoHouse): Promise<void> {
   await askForLimit(house, acts);
   await moveJunctionBox(house, acts);
   await mistakeReferenceArea(house, acts);
+  house.at(4, "14:05");
+  await drawRun(house, "ines", CODE);
 }
 
 async function bookFirstSheet(house: DemoHouse, acts: ProposalActs): Promise<void> {
@@ -34,9 +38,14 @@ async function bookFirstSheet(house: DemoHouse, acts: ProposalActs): Promise<voi
 async function settleOperatingPoint(house: DemoHouse, acts: ProposalActs): Promise<void> {
   house.at(112, "09:05");
   const faster = await acts.submit("fenno", {
-    title: "Service wind 20 to 22 m/s",
-    reason: "The road authority's vibration guideline names 22 m/s along the panel.",
-    edits: [await revised(CODE, "operating_point", "OP-1", { speed: metresPerSecond(22) })],
+    title: "Service wind 20 to 22 m/s, 1.5 N from the reserve",
+    reason:
+      "The road authority's vibration guideline names 22 m/s along the panel. 1.5 N of the reserve were held back for " +
+      "that very question: they are drawn now and stay unallocated until the attachments are drawn.",
+    edits: [
+      await revised(CODE, "operating_point", "OP-1", { speed: metresPerSecond(22) }),
+      await revised(CODE, "terms", TERMS_NUMBER, { reserves: [{ operatingPoint: "OP-1", hundredths: 1500 }] }),
+    ],
   });
   house.at(110, "14:15");
   await acts.approve("bram", "reviewer", faster);

@@ -3,7 +3,10 @@ import os from "node:os";
 import path from "node:path";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { verifyChain } from "@/lib/audit/verify-chain";
+import { budgetAt } from "@/lib/budget/queries";
+import { reserveHistory } from "@/lib/budget/reserve-history";
 import { loadNewestBudget, productByCode } from "@/lib/budget/load-budget";
+import { actorById } from "@/lib/users/queries";
 import { proposalLabel } from "@/lib/vocabulary/proposals";
 import { closeDatabase, inSnapshot, openDatabase } from "@/models/database";
 import { migrateDatabase } from "@/models/migrations/migrate";
@@ -79,6 +82,26 @@ describe("the demo", () => {
     expect(inState("draft")).toEqual(["unnumbered"]);
     expect(inState("proposed")).toHaveLength(10);
     expect(inState("approved")).toHaveLength(13);
+  });
+
+  it("keeps a Monte Carlo run beside the first order, and a draw on a reserve that ends where the table has it", async () => {
+    const runs = await rows<{ code: string; draws: number }>(
+      "SELECT p.code, m.draws FROM monte_carlo_runs m JOIN products p ON p.id = m.product_id ORDER BY p.code",
+    );
+    expect(runs.map(({ code, draws }) => [code, draws])).toEqual([
+      ["GS4", 10_000],
+      ["TF2", 10_000],
+    ]);
+    const [lusia] = await rows<{ id: number }>("SELECT id FROM users WHERE email LIKE 'lusia@%'");
+    const account = await actorById(lusia?.id ?? 0, filledAt.toISOString());
+    if (!account) throw new Error("Lusia has no account");
+    const { issue } = await budgetAt(account.actor, "GS4", "newest");
+    const [reserve] = await reserveHistory(account.actor, "GS4", issue.number);
+    // The demo's table: limit 290 N, reserve 15 N.
+    expect(reserve?.moves.map(({ change, balance }) => [change, balance])).toEqual([
+      [1650, 1650],
+      [-150, 1500],
+    ]);
   });
 
   it("breaks no invariant, and every chain of its history is whole", async () => {

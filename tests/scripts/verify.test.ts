@@ -15,6 +15,7 @@ const verify = (dataFolder: string) =>
 describe("npm run verify", { timeout: 120_000 }, () => {
   let dataFolder: string;
   let lusia: Actor;
+  let tansy: Actor;
 
   beforeEach(async () => {
     dataFolder = temporaryTree();
@@ -22,7 +23,7 @@ describe("npm run verify", { timeout: 120_000 }, () => {
     await migrateDatabase();
     await product("TF-2");
     lusia = await withRole(await person("Lusia Brand"), "TF-2", "program_manager");
-    const tansy = await withRole(await person("Tansy Merle"), "TF-2", "component_owner");
+    tansy = await withRole(await person("Tansy Merle"), "TF-2", "component_owner");
     await establish(lusia, "TF-2", "2026-03-01T09:00:00.000Z");
     await approve("TF-2", "2026-03-10T09:00:00.000Z", {
       proposer: tansy,
@@ -43,8 +44,8 @@ describe("npm run verify", { timeout: 120_000 }, () => {
   });
 
   it("recomputes each issue by the version of a method that it names, before and after another is adopted", async () => {
-    const plate = (methodVersion: number) => plateItem(lusia.userId, methodVersion);
-    const change = { proposer: lusia, signers: [[lusia, "program_manager"]] as const };
+    const plate = (methodVersion: number) => plateItem(tansy.userId, methodVersion);
+    const change = { proposer: tansy, signers: [[lusia, "program_manager"]] as const };
     await approve("TF-2", "2026-03-20T09:00:00.000Z", { ...change, edits: [addItem("020", plate(1))] });
     const adopted = { operation: "revise", kind: "item", number: "020", baseLetter: "–", body: plate(2) } as const;
     await approve("TF-2", "2026-03-30T09:00:00.000Z", { ...change, edits: [adopted] });

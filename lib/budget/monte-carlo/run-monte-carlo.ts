@@ -1,6 +1,6 @@
 import path from "node:path";
 import type { Worker } from "node:worker_threads";
-import type { MonteCarloOutcome } from "@/lib/evaluation/uncertainty/monte-carlo";
+import { monteCarlo, type MonteCarloOutcome } from "@/lib/evaluation/uncertainty/monte-carlo";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { MonteCarloMessage, type MonteCarloJob } from "./job";
 
@@ -18,6 +18,8 @@ export interface RunOptions {
   timeoutMs?: number;
   /** The built thread; that of the built application where nothing is said. */
   workerFile?: string;
+  /** On this thread, where nobody waits for an answer meanwhile: the filling of the demo. */
+  onThisThread?: boolean;
 }
 
 /**
@@ -27,12 +29,19 @@ export interface RunOptions {
  */
 export async function runMonteCarlo(job: MonteCarloJob, options: RunOptions = {}): Promise<MonteCarloOutcome> {
   options.signal?.throwIfAborted();
+  if (options.onThisThread) return drawnHere(job);
   const worker = new threads.Worker(options.workerFile ?? builtWorkerFile(), { workerData: job });
   try {
     return await outcomeOf(worker, options);
   } finally {
     await worker.terminate();
   }
+}
+
+function drawnHere({ state, operatingPoint, draws, seed }: MonteCarloJob): MonteCarloOutcome {
+  const outcome = monteCarlo(state, operatingPoint, { draws, seed });
+  if (!outcome) throw new Error("A run that nobody stopped has no result.");
+  return outcome;
 }
 
 /** Beside the build that it belongs to. */
