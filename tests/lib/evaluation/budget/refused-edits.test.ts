@@ -152,7 +152,7 @@ describe("edits that are refused, each at its field", () => {
     ],
     [
       "a method's version that nobody knows",
-      [revise("item", "010", { methodVersion: 2 })],
+      [revise("item", "010", { methodVersion: 3 })],
       "edits.0.body.methodVersion",
       "No method of this version is known.",
     ],
