@@ -14,13 +14,13 @@ const SCHLICHTING = "Schlichting, Boundary-Layer Theory, 7th ed. 1979, ch. XXI";
 const FRICTION_VERSIONS: readonly MethodVersion[] = [
   {
     version: 1,
-    what: "One-fifth law C_F = 0.074 Re^(−1/5), its constants adjusted to tests; every other line as printed.",
+    what: "One-fifth law with 0.074 (mean) and 0.0592 (local), adjusted to tests; every other line as printed.",
     source: `Prandtl 1927; ${SCHLICHTING}.`,
   },
   {
     version: 2,
     what:
-      "One-fifth law C_F = 0.072 Re^(−1/5), the constants that the momentum integral gives, 2.7 % lower; " +
+      "One-fifth law with 0.072 (mean) and 0.0576 (local), as the momentum integral gives them, 2.7 % lower; " +
       "every other line as in version 1.",
     source: `von Kármán 1921, Prandtl 1921; ${SCHLICHTING}.`,
   },

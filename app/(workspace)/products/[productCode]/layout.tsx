@@ -29,7 +29,7 @@ export default async function ProductLayout({ children, params }: ProductLayoutP
             { href: `${base}/budget`, label: "Budget" },
             { href: `${base}/proposals`, label: "Proposals", count: open },
             { href: `${base}/operating-points`, label: "Operating points" },
-            { href: `${base}/catalogue`, label: "Finishes and methods" },
+            { href: `${base}/catalogue`, label: "Catalogue" },
             { href: `${base}/uncertainty`, label: "Uncertainty" },
             { href: `${base}/issues`, label: "Issues" },
             { href: `${base}/pictures`, label: "Pictures" },

@@ -21,7 +21,7 @@ import { MethodsTable } from "./_components/methods-table";
 type Props = PageProps<"/products/[productCode]/catalogue">;
 
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
-  return { title: `Finishes and methods of ${(await params).productCode}` };
+  return { title: `Catalogue of ${(await params).productCode}` };
 }
 
 export default async function CataloguePage({ params, searchParams }: Props) {
@@ -48,7 +48,7 @@ export default async function CataloguePage({ params, searchParams }: Props) {
   return (
     <>
       <PageHeading
-        title="Finishes and methods"
+        title="Catalogue of finishes and methods"
         subtitle={`${product.code} · ${product.name} · issue ${budget.issue.number}`}
       />
       <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, null)} />}>

@@ -31,7 +31,7 @@ export function ReserveSection({ histories, asked, units, productCode, hrefOf, m
   const { operatingPoint, balance, moves } = shown;
 
   return (
-    <section aria-labelledby="reserve">
+    <section aria-labelledby="reserve" className="mt-7">
       <SectionHeading id="reserve" aside={`${formatHundredths(balance)} N at ${operatingPoint}`}>
         Reserve and its history
       </SectionHeading>
