@@ -56,6 +56,16 @@ export function readText(reading: Reading, newtons: number): string {
   return reading.unit === "" ? number : `${number}${space}${reading.unit}`;
 }
 
+/** The value as a number for other programs, rounded as it is printed. */
+export function readValue({ perNewton: factor, decimals }: Reading, newtons: number): number {
+  if (toHundredths(newtons) === 0) return 0;
+  const value = newtons * factor;
+  return decimals === null ? Number(value.toPrecision(PRINTED_DIGITS)) : Number(value.toFixed(decimals));
+}
+
+/** Of coefficients and pascals. */
+const PRINTED_DIGITS = 3;
+
 /** A change without its unit, its sign always before it: "+0.00104"; what is 0.00 N has none. */
 export function readChangeNumber(reading: Reading, newtons: number): string {
   return `${toHundredths(newtons) > 0 ? "+" : ""}${readNumber(reading, newtons)}`;

@@ -3,7 +3,9 @@ import { describe, expect, it } from "vitest";
 import { csvText } from "@/app/(workspace)/products/[productCode]/_export/csv-text";
 import { type ExportTable, sheetTable } from "@/app/(workspace)/products/[productCode]/_export/sheet-table";
 import { xlsxFile } from "@/app/(workspace)/products/[productCode]/_export/xlsx-file";
-import { budgetSheet, pointOf } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { budgetSheet, pointOf, sheetBasis } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { readingOf } from "@/lib/evaluation/measures/reading";
+import type { Measure } from "@/lib/vocabulary/measures";
 import { sideFairing, signPanel } from "@/tests/support/demo-budgets";
 import { frozenBudget } from "./frozen-budget";
 
@@ -14,11 +16,14 @@ const sheetOf = (text: string): WorkSheet => {
 };
 const recordsOf = (sheet: WorkSheet) => utils.sheet_to_json<Record<string, unknown>>(sheet, { defval: null });
 
-function tableOf(state: ReturnType<typeof signPanel>): ExportTable {
+function tableOf(state: ReturnType<typeof signPanel>, measure: Measure = "newtons"): ExportTable {
   const budget = frozenBudget(state);
   const point = pointOf(budget, "OP-1");
   if (!point) throw new Error("a budget has an operating point");
-  return sheetTable(budgetSheet(budget, point));
+  const sheet = budgetSheet(budget, point);
+  const reading = readingOf(measure, sheetBasis(sheet), "si");
+  if (!reading) throw new Error(`this product has no ${measure}`);
+  return sheetTable(sheet, reading);
 }
 
 const NASTY = ["=2+5", "+1", "-1 °C", "@SUM(A1)", '=HYPERLINK("x")', "\tx", 'a "quoted", text', "two\r\nlines"];
@@ -35,6 +40,22 @@ describe("the sheet as CSV", () => {
     const total = records.at(-1);
     expect(total).toMatchObject({ Item: "total", "Operating point": "OP-1" });
     expect([Number(total?.["Basic [N]"]), Number(total?.["Predicted [N]"])]).toEqual([54.96, 61.59]);
+  });
+
+  it("has the chosen measure beside the newtons, its unit in each header and what it is referred to", async () => {
+    const table = tableOf(sideFairing(), "counts");
+    const records = recordsOf(sheetOf(csvText(table)));
+    // The demo's own table D1: P = 61.59 N at q 382.8 Pa on 10.0 m² is 16.1 road counts; 010 has 6.76 N.
+    expect(Number(records.at(-1)?.["Predicted, counts [counts]"])).toBeCloseTo(16.1, 1);
+    const first = records.find((record) => record.Item === "010");
+    expect(Number(first?.["Predicted [N]"])).toBe(6.76);
+    expect(Number(first?.["Predicted, counts [counts]"])).toBeCloseTo(6.76 / (382.8 * 10 * 0.001), 2);
+    expect(Number(first?.["Margin, counts [counts]"])).toBeCloseTo((7 - 6.76) / (382.8 * 10 * 0.001), 2);
+    expect(Object.fromEntries(table.about)["Read in"]).toBe(
+      "Counts, 1 count = 0.001 on 10.00\u2009m²; newtons are kept, and decide",
+    );
+    const workbook = read(await xlsxFile(table));
+    expect(recordsOf(workbook.Sheets.Budget ?? {}).at(-1)?.["Predicted, counts [counts]"]).toBeCloseTo(16.1, 1);
   });
 
   it("lets no text become a formula, and loses no character", () => {

@@ -1,8 +1,10 @@
 import { utcMinuteText } from "@/app/_components/utc-text";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
+import { isKept, NEWTONS, type Reading, readValue } from "@/lib/evaluation/measures/reading";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import { roundStored, toHundredths } from "@/lib/units/rounding";
 import { MATURITY_GRADE_NAMES } from "@/lib/vocabulary/grades";
+import { MEASURE_NAMES } from "@/lib/vocabulary/measures";
 
 import { approvedBy, proposedBy } from "../_components/sheet-fields";
 import type { BudgetSheet, ItemRow } from "../_sheet/budget-sheet";
@@ -41,8 +43,13 @@ const COLUMNS: readonly Column[] = [
   ["Notes", ({ result }) => result.notes.map(noteSentence).join(" ")],
 ];
 
-export function sheetTable(sheet: BudgetSheet): ExportTable {
+/**
+ * The sheet with every force in newtons, which are kept and add up, and where it is read in another measure the same
+ * forces in that beside them.
+ */
+export function sheetTable(sheet: BudgetSheet, reading: Reading = NEWTONS): ExportTable {
   const { budget, point } = sheet;
+  const columns = [...COLUMNS.slice(0, -1), ...readColumns(reading), ...COLUMNS.slice(-1)];
   const { product, issue } = budget;
   const caution = serviceWindText(product.kind);
   const place: ExportCell[] = [product.code, issue.number, point.operatingPoint];
@@ -52,19 +59,18 @@ export function sheetTable(sheet: BudgetSheet): ExportTable {
   return {
     headers: [
       ...["Product", "Issue", "Operating point"],
-      ...COLUMNS.map(([header]) => header),
+      ...columns.map(([header]) => header),
       ...(caution === null ? [] : ["Caution"]),
     ],
-    rows: [...items.map((row) => COLUMNS.map(([, of]) => of(row, sheet))), totalRow(sheet)].map((row) => [
-      ...place,
-      ...row,
-      ...close,
-    ]),
+    rows: [...items.map((row) => columns.map(([, of]) => of(row, sheet))), totalRow(sheet, columns, reading)].map(
+      (row) => [...place, ...row, ...close],
+    ),
     about: [
       ["Product", `${product.code} ${product.name}`],
       ["Issue", String(issue.number)],
       ["Issued", utcMinuteText(issue.at)],
       ["Operating point", `${point.operatingPoint} ${point.name}`],
+      ...readAbout(reading),
       ["Proposed", proposedBy(issue)],
       ["Approved", approvedBy(issue)],
       ["Content hash", issue.contentHash],
@@ -73,7 +79,37 @@ export function sheetTable(sheet: BudgetSheet): ExportTable {
   };
 }
 
-function totalRow({ point }: BudgetSheet): ExportCell[] {
+/** Forces that a measure reads; what has no force has no reading. */
+const READ_FIGURES: readonly [label: string, of: (row: ItemRow, sheet: BudgetSheet) => number | null][] = [
+  ["Basic", (row) => (row.result.refused ? null : row.basic)],
+  ["Growth", (row) => (row.result.refused ? null : row.growth)],
+  ["Predicted", (row) => (row.result.refused ? null : row.predicted)],
+  ["Margin", ({ marginHundredths }, { isReference }) => (isReference ? newtons(marginHundredths) : null)],
+];
+
+function readColumns(reading: Reading): Column[] {
+  if (isKept(reading)) return [];
+  return READ_FIGURES.map(([label, of]): Column => {
+    const value = (row: ItemRow, sheet: BudgetSheet): ExportCell => {
+      const force = of(row, sheet);
+      return force === null ? null : readValue(reading, force);
+    };
+    return [readHeader(label, reading), value];
+  });
+}
+
+/** "Predicted, counts [counts]": the measure beside the unit, so that no two columns have one name. */
+function readHeader(label: string, { measure, unit }: Reading): string {
+  return `${label}, ${MEASURE_NAMES[measure].toLowerCase()} [${unit === "" ? "1" : unit}]`;
+}
+
+function readAbout(reading: Reading): [string, string][] {
+  if (isKept(reading)) return [];
+  const { measure, basis } = reading;
+  return [["Read in", `${MEASURE_NAMES[measure]}${basis ? `, ${basis}` : ""}; newtons are kept, and decide`]];
+}
+
+function totalRow({ point }: BudgetSheet, columns: readonly Column[], reading: Reading): ExportCell[] {
   const { basic, growth, predicted } = point.totals;
   const figures = new Map<string, ExportCell>([
     ["Item", "total"],
@@ -81,8 +117,11 @@ function totalRow({ point }: BudgetSheet): ExportCell[] {
     ["Growth [N]", toHundredths(growth) / 100],
     ["Predicted [N]", toHundredths(predicted) / 100],
     ["Predicted drag area [m²]", roundStored(predicted / point.stream.dynamicPressure)],
+    [readHeader("Basic", reading), readValue(reading, basic)],
+    [readHeader("Growth", reading), readValue(reading, growth)],
+    [readHeader("Predicted", reading), readValue(reading, predicted)],
   ]);
-  return COLUMNS.map(([header]) => figures.get(header) ?? null);
+  return columns.map(([header]) => figures.get(header) ?? null);
 }
 
 /** To 0.01 N, as the sheet prints it; nothing where the item is refused. */

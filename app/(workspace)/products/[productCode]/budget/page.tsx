@@ -70,6 +70,7 @@ export default async function BudgetPage({ params, searchParams }: Props) {
             productCode={product.code}
             issue={budget.issue.number}
             operatingPoint={point.operatingPoint}
+            measure={chosen}
             mayStart={mayStart}
           />
         }

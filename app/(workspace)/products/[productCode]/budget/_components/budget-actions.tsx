@@ -1,3 +1,4 @@
+import type { ChosenMeasure } from "@/app/(workspace)/_measures/chosen-measure";
 import { ButtonLink } from "@/app/_components/button";
 import { ExportMenu } from "@/app/_components/export-menu";
 
@@ -5,13 +6,22 @@ interface BudgetActionsProps {
   productCode: string;
   issue: number;
   operatingPoint: string;
+  /** In which the sheet is read: a file has it beside the newtons. */
+  measure: Pick<ChosenMeasure, "measure" | "units">;
   mayStart: boolean;
 }
 
 /** What one may do from the budget sheet; an auditor takes it along, and changes nothing. */
-export function BudgetActions({ productCode, issue, operatingPoint, mayStart }: BudgetActionsProps) {
+export function BudgetActions({
+  productCode,
+  issue,
+  operatingPoint,
+  measure: { measure, units },
+  mayStart,
+}: BudgetActionsProps) {
+  const read = { ...(measure === "newtons" ? {} : { measure }), ...(units === "si" ? {} : { units }) };
   const file = (format: string) =>
-    `/api/products/${productCode}/sheet?${new URLSearchParams({ format, issue: String(issue), point: operatingPoint })}`;
+    `/api/products/${productCode}/sheet?${new URLSearchParams({ format, issue: String(issue), point: operatingPoint, ...read })}`;
 
   return (
     <div className="flex flex-wrap gap-2">

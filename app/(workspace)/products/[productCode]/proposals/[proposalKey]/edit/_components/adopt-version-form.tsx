@@ -75,7 +75,9 @@ function offersOf(state: BudgetState, edits: readonly DraftEdit[], me: AdoptVers
     METHOD_VERSIONS[method].toReversed().flatMap((published) => {
       const { version } = published;
       const adopted = adoptVersion(state, edits, { method, version, mayEdit });
-      return adopted.items.length === 0 ? [] : [{ key: `${method} ${version}`, method, published, adopted }];
+      // What every item stands at already is nothing to adopt, whatever this draft does to it.
+      const isNew = adoptVersion(state, [], { method, version, mayEdit }).items.length > 0;
+      return adopted.items.length === 0 || !isNew ? [] : [{ key: `${method} ${version}`, method, published, adopted }];
     }),
   );
 }
