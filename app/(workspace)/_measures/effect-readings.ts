@@ -46,8 +46,11 @@ export function readingAt({ byPoint }: EffectReadings, operatingPoint: string): 
 
 /** Does the change move what forces are referred to there, so that its steps don't add up in this measure? */
 export function movesBasis({ was, now }: EffectReading): boolean {
-  return was.perNewton !== now.perNewton || was.unit !== now.unit;
+  return was.unit !== now.unit || Math.abs(was.perNewton / now.perNewton - 1) > STORED_ROUNDING;
 }
+
+/** What an issue keeps is rounded to 12 significant digits, what a change computes is not. */
+const STORED_ROUNDING = 1e-9;
 
 interface MovedFigure {
   was: number | null;
@@ -63,7 +66,8 @@ export function effectText(reading: EffectReading, figure: MovedFigure, withUnit
 }
 
 /** The newtons that after the change make up the difference of the two readings. */
-function asAfter({ was: before, now: after }: EffectReading, { was, now, delta }: MovedFigure): number {
-  if (was === null || now === null || before.unit !== after.unit) return delta;
-  return before.perNewton === after.perNewton ? delta : now - (was * before.perNewton) / after.perNewton;
+function asAfter(reading: EffectReading, { was, now, delta }: MovedFigure): number {
+  const { was: before, now: after } = reading;
+  if (was === null || now === null || before.unit !== after.unit || !movesBasis(reading)) return delta;
+  return now - (was * before.perNewton) / after.perNewton;
 }

@@ -26,8 +26,8 @@ export interface AllocatedItem extends Pick<AllocationLine, "number" | "name" | 
   marginHundredths: number | null;
 }
 
-/** Every item on one ruler: basic solid, growth hatched behind it, its allocation as a post. */
-export function allocationsLayout(items: readonly AllocatedItem[]): AllocationsLayout {
+/** Every item on one ruler, with round values of the measure in which a newton is `perNewton`: basic solid, growth hatched behind it, its allocation as a post. */
+export function allocationsLayout(items: readonly AllocatedItem[], perNewton = 1): AllocationsLayout {
   const rows = items.map(({ number, name, basic, predicted, allocationHundredths, marginHundredths }) => {
     const allocation = allocationHundredths === null ? null : allocationHundredths / 100;
     const isOver = marginHundredths !== null && marginHundredths < 0;
@@ -43,5 +43,5 @@ export function allocationsLayout(items: readonly AllocatedItem[]): AllocationsL
   });
   const ends = rows.flatMap(({ solid, growth, allocation }) => [solid.from, growth.from, growth.to, allocation ?? 0]);
   const scale = { min: Math.min(0, ...ends), max: Math.max(0, ...ends) * 1.04 || 1 };
-  return { rows, scale, ticks: rulerTicks(scale, 6) };
+  return { rows, scale, ticks: rulerTicks(scale, 6, perNewton) };
 }

@@ -1,6 +1,6 @@
 import { useId } from "react";
 
-import { formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 
 import { type AllocationRow, type AllocationsLayout } from "./allocations-layout";
 import { at, BAR, lengthOf, ROW, RowsPicture } from "./rows-picture";
@@ -8,12 +8,17 @@ import type { Scale } from "./scale";
 import { Hatches } from "./stave";
 import type { Span } from "./stave-layout";
 
+interface AllocationsPictureProps {
+  layout: AllocationsLayout;
+  reading: Reading;
+}
+
 /** Items against their allocations on one ruler, the margin at the right. */
-export function AllocationsPicture({ layout: { rows, scale, ticks } }: { layout: AllocationsLayout }) {
+export function AllocationsPicture({ layout: { rows, scale, ticks }, reading }: AllocationsPictureProps) {
   const id = useId();
   const drawn = rows.map((row) => ({
     label: row.label,
-    figure: row.margin === null ? "–" : formatNewtonsNumber(row.margin),
+    figure: row.margin === null ? "–" : readNumber(reading, row.margin),
     bar: <Bar row={row} scale={scale} id={id} />,
   }));
 
@@ -22,7 +27,7 @@ export function AllocationsPicture({ layout: { rows, scale, ticks } }: { layout:
       <svg width="0" height="0" className="absolute">
         <Hatches id={id} />
       </svg>
-      <RowsPicture rows={drawn} scale={scale} ticks={ticks} />
+      <RowsPicture rows={drawn} scale={scale} ticks={ticks} reading={reading} />
     </>
   );
 }

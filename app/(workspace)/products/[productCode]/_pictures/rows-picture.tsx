@@ -1,7 +1,7 @@
 import type { ReactNode } from "react";
 
 import { SymbolText } from "@/app/_components/symbol-text";
-import { formatExact } from "@/lib/units/format-number";
+import { NEWTONS, type Reading, readTick } from "@/lib/evaluation/measures/reading";
 
 import { type Scale, fractionOf, percent } from "./scale";
 
@@ -21,10 +21,12 @@ interface RowsPictureProps {
   rows: readonly PictureRow[];
   scale: Scale;
   ticks: readonly number[];
+  /** In which the ruler is read; what is drawn stays where its newtons are. */
+  reading?: Reading;
 }
 
 /** Rows on one ruler: the name at the left, what is drawn to scale, the figure at the right. */
-export function RowsPicture({ rows, scale, ticks }: RowsPictureProps) {
+export function RowsPicture({ rows, scale, ticks, reading = NEWTONS }: RowsPictureProps) {
   const height = rows.length * ROW;
 
   return (
@@ -44,7 +46,7 @@ export function RowsPicture({ rows, scale, ticks }: RowsPictureProps) {
           <g key={tick}>
             <line x1={at(scale, tick)} x2={at(scale, tick)} y1="0" y2={height} className="stroke-rule" />
             <text x={at(scale, tick)} y={height + 16} textAnchor="middle" className="fill-ink-2 text-2xs">
-              {formatExact(tick)}
+              {readTick(reading, tick)}
             </text>
           </g>
         ))}

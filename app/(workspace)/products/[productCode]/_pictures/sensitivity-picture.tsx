@@ -1,4 +1,4 @@
-import { formatNewtonsChangeNumber } from "@/lib/units/format-newtons";
+import { type Reading, readChangeNumber } from "@/lib/evaluation/measures/reading";
 
 import { at, BAR, lengthOf, ROW, RowsPicture } from "./rows-picture";
 import { type Scale, rulerTicks } from "./scale";
@@ -11,7 +11,7 @@ export interface SensitivityBar {
 }
 
 /** What moves the total most stands on top: solid to where one step more takes it, hollow to where one step less does. */
-export function SensitivityPicture({ bars }: { bars: readonly SensitivityBar[] }) {
+export function SensitivityPicture({ bars, reading }: { bars: readonly SensitivityBar[]; reading: Reading }) {
   const greatest = Math.max(
     0.01,
     ...bars.flatMap(({ lower, higher }) => [Math.abs(lower ?? 0), Math.abs(higher ?? 0)]),
@@ -19,15 +19,15 @@ export function SensitivityPicture({ bars }: { bars: readonly SensitivityBar[] }
   const scale: Scale = { min: -greatest * 1.05, max: greatest * 1.05 };
   const rows = bars.map((bar) => ({
     label: bar.label,
-    figure: `${changeText(bar.lower)} | ${changeText(bar.higher)}`,
+    figure: `${changeText(bar.lower, reading)} | ${changeText(bar.higher, reading)}`,
     bar: <Bar bar={bar} scale={scale} />,
   }));
 
-  return <RowsPicture rows={rows} scale={scale} ticks={rulerTicks(scale, 6)} />;
+  return <RowsPicture rows={rows} scale={scale} ticks={rulerTicks(scale, 6, reading.perNewton)} reading={reading} />;
 }
 
-export function changeText(newtons: number | null): string {
-  return newtons === null ? "refused" : formatNewtonsChangeNumber(newtons);
+export function changeText(newtons: number | null, reading: Reading): string {
+  return newtons === null ? "refused" : readChangeNumber(reading, newtons);
 }
 
 function Bar({ bar: { lower, higher }, scale }: { bar: SensitivityBar; scale: Scale }) {

@@ -1,6 +1,5 @@
 import type { TotalAtSpeed } from "@/lib/evaluation/budget/total-over-speed";
-import { formatNewtons } from "@/lib/units/format-newtons";
-import { formatSignificant } from "@/lib/units/format-number";
+import { type Reading, readText } from "@/lib/evaluation/measures/reading";
 
 import { straightAxis } from "@/app/(workspace)/_friction-pictures/axis";
 import type { PlotLayout } from "@/app/(workspace)/_friction-pictures/plot-layout";
@@ -12,111 +11,66 @@ interface OwnPoint {
   limit: number;
 }
 
+/** How forces and speeds are read over the speed: a force at another speed by the stream of that speed. */
+export interface SpeedReading {
+  at: (speed: number) => Reading;
+  /** What one metre a second is on the axis, and what the axis is called. */
+  speed: { perSi: number; unit: string };
+}
+
 /** ΣP and ΣB over the speed, with the limit across; the operating point is marked. */
-export function dragOverSpeedLayout(points: readonly TotalAtSpeed[], own: OwnPoint): PlotLayout {
-  const drawn = answered(points);
-  const greatest = Math.max(own.limit, ...drawn.map(({ predicted }) => predicted));
-  const plot = plotOf(points, greatest, "N");
-  return {
-    ...plot.frame,
-    curves: [
-      {
-        ...plot.curve(
-          "predicted",
-          "own",
-          drawn.map((point) => [point.speed, point.predicted]),
-        ),
-        label: null,
-      },
-      {
-        ...plot.curve(
-          "basic",
-          "faint",
-          drawn.map((point) => [point.speed, point.basic]),
-        ),
-        label: null,
-      },
-      {
-        ...plot.curve(
-          "limit",
-          "ink",
-          [plot.from, plot.to].map((speed) => [speed, own.limit]),
-        ),
-        label: {
-          ...plot.place(plot.to, own.limit),
-          text: `limit ${formatNewtons(own.limit)}`,
-          anchor: "end",
-          side: "below",
-        },
-      },
-    ],
-    marks: [
-      { ...plot.place(own.speed, own.predicted), text: formatNewtons(own.predicted), sign: "ring", side: "above" },
-    ],
-  };
-}
-
-/** Drag times speed, with what the limit allows at each speed. */
-export function powerOverSpeedLayout(points: readonly TotalAtSpeed[], own: OwnPoint): PlotLayout {
-  const drawn = answered(points);
-  const greatest = Math.max(...points.map(({ speed }) => speed * own.limit), ...drawn.map(power));
-  const plot = plotOf(points, greatest, "W");
-  const ownPower = own.speed * own.predicted;
-  return {
-    ...plot.frame,
-    curves: [
-      {
-        ...plot.curve(
-          "power",
-          "own",
-          drawn.map((point) => [point.speed, power(point)]),
-        ),
-        label: null,
-      },
-      {
-        ...plot.curve(
-          "limit",
-          "ink",
-          [plot.from, plot.to].map((speed) => [speed, speed * own.limit]),
-        ),
-        label: {
-          ...plot.place(plot.to, plot.to * own.limit),
-          ...{ text: "limit × speed", anchor: "end", side: "below" },
-        },
-      },
-    ],
-    marks: [
-      { ...plot.place(own.speed, ownPower), text: `${formatSignificant(ownPower)} W`, sign: "ring", side: "above" },
-    ],
-  };
-}
-
-interface Answered {
-  speed: number;
-  basic: number;
-  predicted: number;
-}
-
-function answered(points: readonly TotalAtSpeed[]): Answered[] {
-  return points.flatMap(({ speed, totals }) => (totals === null ? [] : [{ speed, ...totals }]));
-}
-
-function power({ speed, predicted }: Answered): number {
-  return speed * predicted;
-}
-
-function plotOf(points: readonly TotalAtSpeed[], greatest: number, unit: string) {
+export function totalOverSpeedLayout(
+  points: readonly TotalAtSpeed[],
+  own: OwnPoint,
+  { at, speed: axis }: SpeedReading,
+): PlotLayout {
+  const read = (speed: number, newtons: number): number => newtons * at(speed).perNewton;
+  const drawn = points.flatMap(({ speed, totals }) => (totals === null ? [] : [{ speed, ...totals }]));
   const speeds = points.map(({ speed }) => speed);
-  const xAxis = straightAxis(speeds);
-  const yAxis = straightAxis([greatest * 1.08]);
-  const place = (speed: number, value: number) => ({ x: xAxis.fraction(speed), y: yAxis.fraction(value) });
+  const limits = speeds.map((speed) => read(speed, own.limit));
+  // What a limit in newtons comes to at a crawl lies far above anything that is drawn.
+  const highest = Math.max(read(own.speed, own.limit), ...drawn.map(({ speed, predicted }) => read(speed, predicted)));
+  const xAxis = straightAxis(speeds.map((speed) => speed * axis.perSi));
+  const yAxis = straightAxis([highest * 1.08]);
+  const place = (speed: number, value: number) => ({ x: xAxis.fraction(speed * axis.perSi), y: yAxis.fraction(value) });
+  const limitCurve = speeds.map((speed, index) => place(speed, limits[index] ?? 0)).filter(({ y }) => y <= 1);
+  const ownReading = at(own.speed);
   return {
-    from: Math.min(...speeds),
-    to: Math.max(...speeds),
-    place,
-    curve: <Look extends string>(name: string, look: Look, line: readonly (readonly [number, number])[]) => ({
-      ...{ name, look, points: line.map(([speed, value]) => place(speed, value)) },
-    }),
-    frame: { xTicks: xAxis.ticks, yTicks: yAxis.ticks, xTitle: "U, m/s", yTitle: unit, bands: [] },
+    xTicks: xAxis.ticks,
+    yTicks: yAxis.ticks,
+    xTitle: `U, ${axis.unit}`,
+    yTitle: ownReading.unit,
+    bands: [],
+    curves: [
+      {
+        name: "predicted",
+        look: "own",
+        points: drawn.map(({ speed, predicted }) => place(speed, read(speed, predicted))),
+        label: null,
+      },
+      {
+        name: "basic",
+        look: "faint",
+        points: drawn.map(({ speed, basic }) => place(speed, read(speed, basic))),
+        label: null,
+      },
+      { name: "limit", look: "ink", points: limitCurve, label: limitLabel(limitCurve, own, ownReading) },
+    ],
+    marks: [
+      {
+        ...place(own.speed, read(own.speed, own.predicted)),
+        ...{ text: readText(ownReading, own.predicted), sign: "ring", side: "above" },
+      },
+    ],
   };
+}
+
+function limitLabel(curve: readonly { x: number; y: number }[], { limit }: OwnPoint, reading: Reading) {
+  const [start, end] = [curve[0], curve.at(-1)];
+  if (!start || !end) return null;
+  // In any other measure the same newtons are another value at each speed.
+  const where = reading.measure === "newtons" ? "" : " at the operating point";
+  const text = `limit ${readText(reading, limit)}${where}`;
+  const side = end.y > start.y ? "above" : "below";
+  return { ...end, text, anchor: "end", side } as const;
 }

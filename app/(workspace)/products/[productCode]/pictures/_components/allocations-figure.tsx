@@ -2,16 +2,23 @@ import { EmptyNote } from "@/app/_components/empty-note";
 import { FigureWithTable } from "@/app/_components/figure-with-table";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { BudgetAt } from "@/lib/budget/views";
-import { formatHundredths, formatNewtonsNumber } from "@/lib/units/format-newtons";
+import { type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 
 import {
   type AllocatedItem,
   allocationsLayout,
 } from "@/app/(workspace)/products/[productCode]/_pictures/allocations-layout";
 import { AllocationsPicture } from "@/app/(workspace)/products/[productCode]/_pictures/allocations-picture";
+import { inUnit } from "./in-unit";
+
+interface AllocationsFigureProps {
+  budget: BudgetAt;
+  /** Of the reference operating point. */
+  reading: Reading;
+}
 
 /** Every item against what it may use, at the reference operating point, where allocations are set. */
-export function AllocationsFigure({ budget: { allocations, results } }: { budget: BudgetAt }) {
+export function AllocationsFigure({ budget: { allocations, results }, reading }: AllocationsFigureProps) {
   const point = results.points.find(({ operatingPoint }) => operatingPoint === allocations.operatingPoint);
   const items = allocations.lines.flatMap((line): AllocatedItem[] => {
     const result = point?.items.find(({ item, refused }) => line.kind === "item" && item === line.number && !refused);
@@ -28,16 +35,16 @@ export function AllocationsFigure({ budget: { allocations, results } }: { budget
         `${items.length} items against their allocations at ${allocations.operatingPoint}; over: ` +
         `${over.length === 0 ? "none" : over.map(({ number, name }) => `${number} ${name}`).join(", ")}.`
       }
-      picture={<AllocationsPicture layout={allocationsLayout(items)} />}
-      caption="Newtons. Solid: basic; hatched: growth; post: allocation; hatched the other way, beyond the post: over. At the right the margin; a dash where there is no allocation."
-      table={<AllocationsTable items={items} />}
+      picture={<AllocationsPicture layout={allocationsLayout(items, reading.perNewton)} reading={reading} />}
+      caption={`Every force${inUnit(reading)}. Solid: basic; hatched: growth; post: allocation; hatched the other way, beyond the post: over. At the right the margin; a dash where there is no allocation.`}
+      table={<AllocationsTable items={items} reading={reading} />}
     />
   );
 }
 
-function AllocationsTable({ items }: { items: readonly AllocatedItem[] }) {
+function AllocationsTable({ items, reading }: { items: readonly AllocatedItem[]; reading: Reading }) {
   return (
-    <Table caption="The numbers of the picture, in newtons">
+    <Table caption={`The numbers of the picture${inUnit(reading)}`}>
       <TableHead>
         <Head>Item</Head>
         <Head numeric>Basic</Head>
@@ -51,10 +58,12 @@ function AllocationsTable({ items }: { items: readonly AllocatedItem[] }) {
             <RowHead>
               {number} {name}
             </RowHead>
-            <Cell numeric>{formatNewtonsNumber(basic)}</Cell>
-            <Cell numeric>{formatNewtonsNumber(predicted)}</Cell>
-            <Cell numeric>{allocationHundredths === null ? "none" : formatHundredths(allocationHundredths)}</Cell>
-            <Cell numeric>{marginHundredths === null ? "–" : formatHundredths(marginHundredths)}</Cell>
+            <Cell numeric>{readNumber(reading, basic)}</Cell>
+            <Cell numeric>{readNumber(reading, predicted)}</Cell>
+            <Cell numeric>
+              {allocationHundredths === null ? "none" : readNumber(reading, allocationHundredths / 100)}
+            </Cell>
+            <Cell numeric>{marginHundredths === null ? "–" : readNumber(reading, marginHundredths / 100)}</Cell>
           </Row>
         ))}
       </tbody>
