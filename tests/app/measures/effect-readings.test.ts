@@ -16,7 +16,10 @@ const q = (speed: number) => 0.5 * 1.225 * speed ** 2;
 
 describe("the effects of a change in another measure", () => {
   it("are read by the stream of their operating point, with the sign always", () => {
-    const readings = effectReadings(DRAG_AREA, effectBases(before, changeBy(revise("item", "030", { force: { value: 5 } }))));
+    const readings = effectReadings(
+      DRAG_AREA,
+      effectBases(before, changeBy(revise("item", "030", { force: { value: 5 } }))),
+    );
     expect(readings).toMatchObject({ unit: "m²", isKept: false });
     const moved = { was: 10, now: 9, delta: -1 };
     expect(Number(effectText(readingAt(readings, "OP-1"), moved, false).replace("−", "-"))).toBeCloseTo(-1 / q(25), 4);
