@@ -11,7 +11,7 @@ test("budget, change sheet and report print clean on A4, the report on one page"
 
   await opened(page, "/products/TF2/budget");
   await expectCleanPrint(page);
-  await expect(page.getByRole("row", { name: /^130 Interference of panel and wheel/ })).toBeVisible();
+  await expect(page.getByRole("row", { name: /^130\s*Interference of panel and wheel/ })).toBeVisible();
   // A note in full, where the screen has its first clause.
   await expect(page.getByText("say why the layer starts anew.")).toBeVisible();
 
@@ -41,7 +41,8 @@ async function expectCleanPrint(page: Page): Promise<void> {
   await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
   await expect(page.locator("dt", { hasText: /^Product$/ })).toBeVisible();
   await expect(page.getByRole("navigation").filter({ visible: true })).toHaveCount(0);
-  await expect(page.getByRole("button").filter({ visible: true })).toHaveCount(0);
+  // A number that opens its working is a number on paper; every other button acts.
+  await expect(page.locator("button:not([title])").filter({ visible: true })).toHaveCount(0);
   const overhang = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
   expect(overhang).toBeLessThanOrEqual(0);
 }
