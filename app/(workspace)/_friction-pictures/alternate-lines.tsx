@@ -1,21 +1,23 @@
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import { NEWTONS, type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 import type { AlternateLine } from "@/lib/evaluation/methods/alternate-lines";
-import { formatNewtonsNumber } from "@/lib/units/format-newtons";
 import { formatPercent, formatSignificant } from "@/lib/units/format-number";
 
 interface AlternateLinesProps {
   lines: readonly AlternateLine[];
   caption: string;
+  /** In newtons outside of a budget. */
+  reading?: Reading;
 }
 
 /** One item by several friction lines, its own marked. */
-export function AlternateLines({ lines, caption }: AlternateLinesProps) {
+export function AlternateLines({ lines, caption, reading = NEWTONS }: AlternateLinesProps) {
   return (
     <Table caption={caption}>
       <TableHead>
         <Head>Line</Head>
         <Head numeric>Mean coefficient</Head>
-        <Head numeric unit="N">
+        <Head numeric unit={reading.unit}>
           Drag
         </Head>
         <Head numeric unit="of this item's">
@@ -31,7 +33,7 @@ export function AlternateLines({ lines, caption }: AlternateLinesProps) {
               {isItemsOwn ? <span className="ml-2 text-xs text-ink-2">in use</span> : null}
             </RowHead>
             <Cell numeric>{formatSignificant(meanCoefficient)}</Cell>
-            <Cell numeric>{formatNewtonsNumber(drag)}</Cell>
+            <Cell numeric>{readNumber(reading, drag)}</Cell>
             <Cell numeric>{formatPercent(difference, 1)}</Cell>
             <Cell>{fitsSurface ? "yes" : "no"}</Cell>
           </Row>

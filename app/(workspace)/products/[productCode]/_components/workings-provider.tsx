@@ -6,6 +6,8 @@ import useSWRImmutable from "swr/immutable";
 import { ModalSheet } from "@/app/_components/modal-sheet";
 import { Notice } from "@/app/_components/notice";
 
+import type { Preferences } from "@/lib/vocabulary/measures";
+
 import type { FigureQuestion, Working } from "../_workings/working";
 import { WorkingView } from "./working-view";
 
@@ -16,15 +18,17 @@ interface WorkingsProviderProps {
   /** Issue and operating point of the sheet whose numbers are asked about. */
   issue: number;
   point: string;
+  /** In which its forces are read: a working ends with that beside the newtons. */
+  read?: Pick<Preferences, "measure" | "units">;
   children: ReactNode;
 }
 
 /** Lets every number below it answer a click; the workings of a frozen issue are read when they are asked for. */
-export function WorkingsProvider({ productCode, issue, point, children }: WorkingsProviderProps) {
+export function WorkingsProvider({ productCode, issue, point, read, children }: WorkingsProviderProps) {
   const dialog = useRef<HTMLDialogElement>(null);
   const [question, setQuestion] = useState<FigureQuestion | null>(null);
   const { data, error } = useSWRImmutable(
-    question ? addressOf(productCode, issue, point, question) : null,
+    question ? addressOf(productCode, { issue: String(issue), point, ...read }, question) : null,
     readWorking,
   );
 
@@ -77,10 +81,9 @@ export function WorkingNumber({ children, name, figure, of, number }: WorkingNum
   );
 }
 
-function addressOf(productCode: string, issue: number, point: string, { figure, of, number }: FigureQuestion): string {
+function addressOf(productCode: string, sheet: Record<string, string>, { figure, of, number }: FigureQuestion): string {
   const query = new URLSearchParams({
-    issue: String(issue),
-    point,
+    ...sheet,
     figure,
     of,
     ...(number === null ? {} : { number }),

@@ -110,7 +110,12 @@ function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
         <NewerIssue productCode={budget.product.code} shown={budget.issue.number} />
       ) : null}
       <ServiceWindCaution kind={budget.product.kind} />
-      <WorkingsProvider productCode={budget.product.code} issue={budget.issue.number} point={point.operatingPoint}>
+      <WorkingsProvider
+        productCode={budget.product.code}
+        issue={budget.issue.number}
+        point={point.operatingPoint}
+        read={{ measure: reading.measure, units }}
+      >
         <PointChoice
           points={budget.results.points}
           worstPoint={budget.results.worstPoint}

@@ -1,7 +1,15 @@
 import { z } from "zod";
 
-import { type BudgetSheet, budgetSheet, pointOf } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import {
+  type BudgetSheet,
+  budgetSheet,
+  pointOf,
+  sheetBasis,
+} from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
+import { figureNewtons } from "@/app/(workspace)/products/[productCode]/_workings/figure-newtons";
 import { figureWorking } from "@/app/(workspace)/products/[productCode]/_workings/figure-working";
+import { readStep } from "@/app/(workspace)/products/[productCode]/_workings/read-step";
 import { runWorking } from "@/app/(workspace)/products/[productCode]/_workings/run-working";
 import { FIGURE_OWNERS, FIGURES, type Working } from "@/app/(workspace)/products/[productCode]/_workings/working";
 import { answerRead } from "@/app/_server/route-problem";
@@ -10,6 +18,7 @@ import { runsOf } from "@/lib/budget/monte-carlo/runs-of";
 import { budgetAt } from "@/lib/budget/queries";
 import { ALLOCATIONS_NUMBER } from "@/lib/evaluation/lines/allocations-body";
 import type { Actor } from "@/lib/vocabulary/actor";
+import { MEASURES, UNIT_SYSTEMS } from "@/lib/vocabulary/measures";
 import { Refusal } from "@/lib/vocabulary/refusal";
 
 const Question = z.object({
@@ -18,13 +27,15 @@ const Question = z.object({
   figure: z.enum(FIGURES),
   of: z.enum(FIGURE_OWNERS),
   number: z.string().min(1).max(80).nullable(),
+  measure: z.enum(MEASURES).nullable(),
+  units: z.enum(UNIT_SYSTEMS).nullable(),
 });
 
 /** How one number of a budget sheet came about. */
 export async function GET(request: Request, { params }: RouteContext<"/api/products/[productCode]/workings">) {
   const { productCode } = await params;
   const asked = new URL(request.url).searchParams;
-  const keys = ["issue", "point", "figure", "of", "number"] as const;
+  const keys = ["issue", "point", "figure", "of", "number", "measure", "units"] as const;
   const question = Question.safeParse(Object.fromEntries(keys.map((key) => [key, asked.get(key)])));
 
   return answerRead((actor) => {
@@ -36,7 +47,7 @@ export async function GET(request: Request, { params }: RouteContext<"/api/produ
 async function workingFor(
   actor: Actor,
   productCode: string,
-  { issue, point: operatingPoint, figure, of, number }: z.output<typeof Question>,
+  { issue, point: operatingPoint, figure, of, number, measure, units }: z.output<typeof Question>,
 ): Promise<Working> {
   const budget = await budgetAt(actor, productCode, issue);
   const point = pointOf(budget, operatingPoint);
@@ -49,7 +60,11 @@ async function workingFor(
     of === "run" ? await workingOfRun(actor, sheet, number) : figureWorking(sheet, { figure, of, number }, until);
   if (!working) throw new Refusal("not_found", "The sheet has no such number.");
 
-  return working;
+  const newtons = figureNewtons(sheet, { figure, of, number });
+  const basis = sheetBasis(sheet);
+  const reading = readingFor({ measure: measure ?? "newtons", units: units ?? "si" }, basis);
+  const read = newtons === null ? null : readStep(reading, basis, newtons);
+  return read ? { ...working, steps: [...working.steps, read] } : working;
 }
 
 async function workingOfRun(actor: Actor, sheet: BudgetSheet, number: string | null): Promise<Working | null> {

@@ -53,10 +53,10 @@ export function ItemMatter({ line, points, shownAt, measure, hrefOf, revisions, 
       >
         How it comes about at {shown.sheet.point.operatingPoint}
       </SectionHeading>
-      <ItemWorking shown={shown} />
+      <ItemWorking shown={shown} measure={measure} />
       <SectionHeading>What the method gives</SectionHeading>
       <AnswerTable points={points} units={measure.units} />
-      <AlternateLinesTable shown={shown} />
+      <AlternateLinesTable shown={shown} measure={measure} />
       <ItemPictures shown={shown} />
       <SectionHeading>Fields</SectionHeading>
       <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} units={measure.units} />
