@@ -1,7 +1,7 @@
 import type { MethodInput } from "@/lib/evaluation/document/schema";
+import { NEWTONS, type Reading, readText } from "@/lib/evaluation/measures/reading";
 import { evaluateMethod } from "@/lib/evaluation/methods/method-registry";
 import type { StreamState } from "@/lib/evaluation/methods/stream-state";
-import { formatNewtons } from "@/lib/units/format-newtons";
 
 import { straightAxis } from "./axis";
 import { evenly, type PlotLayout } from "./plot-layout";
@@ -37,24 +37,37 @@ export interface SpeedCurve {
   own: { speed: number; drag: number };
 }
 
+/** How a force is read at a speed, and the speed itself: a force at another speed by the stream of that speed. */
+export interface SpeedReading {
+  at: (speed: number) => Reading;
+  /** What one metre a second is on the axis, and what the axis is called. */
+  speed: { perSi: number; unit: string };
+}
+
+export const READ_IN_SI: SpeedReading = { at: () => NEWTONS, speed: { perSi: 1, unit: "m/s" } };
+
 /** One curve, or two beside each other: solid with a ring and dashed with a square. */
-export function dragOverSpeedLayout(curves: readonly SpeedCurve[]): PlotLayout {
+export function dragOverSpeedLayout(
+  curves: readonly SpeedCurve[],
+  { at, speed: axis }: SpeedReading = READ_IN_SI,
+): PlotLayout {
+  const read = ({ speed, drag }: { speed: number; drag: number }): number => drag * at(speed).perNewton;
   const answered = curves.map(({ points }) =>
     points.flatMap(({ speed, drag }) => (drag === null ? [] : [{ speed, drag }])),
   );
   const all = [...answered.flat(), ...curves.map(({ own }) => own)];
-  const xAxis = straightAxis(curves.flatMap(({ points }) => points.map(({ speed }) => speed)));
-  const yAxis = straightAxis(all.map(({ drag }) => drag * 1.06));
-  const place = ({ speed, drag }: { speed: number; drag: number }) => ({
-    x: xAxis.fraction(speed),
-    y: yAxis.fraction(drag),
+  const xAxis = straightAxis(curves.flatMap(({ points }) => points.map(({ speed }) => speed * axis.perSi)));
+  const yAxis = straightAxis(all.map((point) => read(point) * 1.06));
+  const place = (point: { speed: number; drag: number }) => ({
+    x: xAxis.fraction(point.speed * axis.perSi),
+    y: yAxis.fraction(read(point)),
   });
 
   return {
     xTicks: xAxis.ticks,
     yTicks: yAxis.ticks,
-    xTitle: "U, m/s",
-    yTitle: "N",
+    xTitle: `U, ${axis.unit}`,
+    yTitle: at(curves[0]?.own.speed ?? 1).unit,
     bands: [],
     curves: curves.map(({ word }, at) => ({
       name: word ? `drag of ${word}` : "drag",
@@ -64,7 +77,7 @@ export function dragOverSpeedLayout(curves: readonly SpeedCurve[]): PlotLayout {
     })),
     marks: curves.map(({ word, own }) => ({
       ...place(own),
-      text: word ? `${word} ${formatNewtons(own.drag)}` : formatNewtons(own.drag),
+      text: `${word ? `${word} ` : ""}${readText(at(own.speed), own.drag)}`,
       sign: word === "B" ? "square" : "ring",
       side: word === "B" ? "below" : "above",
     })),

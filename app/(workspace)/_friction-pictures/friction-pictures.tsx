@@ -1,6 +1,7 @@
 import type { MethodInput } from "@/lib/evaluation/document/schema";
 import type { StreamState } from "@/lib/evaluation/methods/stream-state";
 
+import type { SpeedReading } from "./drag-over-speed";
 import { DragOverSpeedFigure } from "./drag-over-speed-figure";
 import { FrictionChartFigure } from "./friction-chart-figure";
 import { frictionSubject } from "./friction-subject";
@@ -15,10 +16,12 @@ interface FrictionPicturesProps {
   name: string;
   /** Beside each other where there is room. */
   wide?: boolean;
+  /** How forces over the speed are read; coefficients, thicknesses and shear are none. */
+  read?: SpeedReading;
 }
 
 /** The pictures of an item, drawn by the functions that compute it; other methods than friction have drag over speed only. */
-export function FrictionPictures({ version, input, stream, name, wide = false }: FrictionPicturesProps) {
+export function FrictionPictures({ version, input, stream, name, wide = false, read }: FrictionPicturesProps) {
   const subject = frictionSubject(version, input, stream);
 
   return (
@@ -30,7 +33,7 @@ export function FrictionPictures({ version, input, stream, name, wide = false }:
           <ShearFigure subject={subject} name={name} />
         </>
       ) : null}
-      <DragOverSpeedFigure version={version} input={input} stream={stream} name={name} />
+      <DragOverSpeedFigure version={version} input={input} stream={stream} name={name} read={read} />
     </div>
   );
 }

@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { readStep } from "@/app/(workspace)/products/[productCode]/_workings/read-step";
 import type { MeasureBasis } from "@/lib/evaluation/measures/measure-basis";
 import { readingOf } from "@/lib/evaluation/measures/reading";
-import { MEASURES } from "@/lib/vocabulary/measures";
+import type { Measure } from "@/lib/vocabulary/measures";
 
 /** The demo's fairing at 25 m/s: q = 382.8 Pa, 10 m², a count of 0.001, 2600 hours a year. */
 const BASIS: MeasureBasis = {
@@ -10,7 +10,7 @@ const BASIS: MeasureBasis = {
   ...{ dynamicPressure: 382.8, speed: 25, hoursPerYear: 2600 },
 };
 
-function stepOf(measure: (typeof MEASURES)[number], units: "si" | "us" = "si") {
+function stepOf(measure: Measure, units: "si" | "us" = "si") {
   const reading = readingOf(measure, BASIS, units);
   return reading && readStep(reading, BASIS, 61.59);
 }

@@ -2,6 +2,7 @@ import type { TotalAtSpeed } from "@/lib/evaluation/budget/total-over-speed";
 import { type Reading, readText } from "@/lib/evaluation/measures/reading";
 
 import { straightAxis } from "@/app/(workspace)/_friction-pictures/axis";
+import type { SpeedReading } from "@/app/(workspace)/_friction-pictures/drag-over-speed";
 import type { PlotLayout } from "@/app/(workspace)/_friction-pictures/plot-layout";
 
 interface OwnPoint {
@@ -9,13 +10,6 @@ interface OwnPoint {
   predicted: number;
   /** Newtons. */
   limit: number;
-}
-
-/** How forces and speeds are read over the speed: a force at another speed by the stream of that speed. */
-export interface SpeedReading {
-  at: (speed: number) => Reading;
-  /** What one metre a second is on the axis, and what the axis is called. */
-  speed: { perSi: number; unit: string };
 }
 
 /** ΣP and ΣB over the speed, with the limit across; the operating point is marked. */

@@ -1,22 +1,19 @@
 import type { ReactNode } from "react";
 
-import { type ChosenMeasure, readingFor } from "@/app/(workspace)/_measures/chosen-measure";
+import type { ChosenMeasure } from "@/app/(workspace)/_measures/chosen-measure";
+import { speedReading } from "@/app/(workspace)/_measures/speed-reading";
+import type { SpeedReading } from "@/app/(workspace)/_friction-pictures/drag-over-speed";
 import { Plot } from "@/app/(workspace)/_friction-pictures/plot";
 import { FigureWithTable } from "@/app/_components/figure-with-table";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { BudgetAt } from "@/lib/budget/views";
 import type { PointResult } from "@/lib/evaluation/budget/results";
 import { totalOverSpeed, type TotalAtSpeed } from "@/lib/evaluation/budget/total-over-speed";
-import type { MeasureBasis } from "@/lib/evaluation/measures/measure-basis";
 import { isKept, readNumber, readText } from "@/lib/evaluation/measures/reading";
 import { formatSignificant } from "@/lib/units/format-number";
-import { US_UNITS, usPerSi } from "@/lib/units/us-customary";
 import { MEASURE_NAMES } from "@/lib/vocabulary/measures";
 
-import {
-  type SpeedReading,
-  totalOverSpeedLayout,
-} from "@/app/(workspace)/products/[productCode]/_pictures/total-over-speed-layout";
+import { totalOverSpeedLayout } from "@/app/(workspace)/products/[productCode]/_pictures/total-over-speed-layout";
 import { budgetSheet, sheetBasis } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
 
 const POINTS_OF_CURVE = 31;
@@ -44,17 +41,6 @@ export function SpeedFigures({ budget, point, chosen }: SpeedFiguresProps) {
     <SpeedFigure key={reading.at(basis.speed).measure} points={points} point={point} reading={reading} table={table} />
   ));
 }
-
-/** At another speed the dynamic pressure goes with its square. */
-function speedReading(chosen: Pick<ChosenMeasure, "measure" | "units">, basis: MeasureBasis): SpeedReading {
-  const { speed: own, dynamicPressure } = basis;
-  return {
-    at: (speed) => readingFor(chosen, { ...basis, speed, dynamicPressure: dynamicPressure * (speed / own) ** 2 }),
-    speed: chosen.units === "us" ? { perSi: usPerSi("speed"), unit: US_UNITS.speed.printed } : METRES_PER_SECOND,
-  };
-}
-
-const METRES_PER_SECOND = { perSi: 1, unit: "m/s" };
 
 interface SpeedFigureProps {
   points: readonly TotalAtSpeed[];

@@ -57,7 +57,7 @@ export function ItemMatter({ line, points, shownAt, measure, hrefOf, revisions, 
       <SectionHeading>What the method gives</SectionHeading>
       <AnswerTable points={points} units={measure.units} />
       <AlternateLinesTable shown={shown} measure={measure} />
-      <ItemPictures shown={shown} />
+      <ItemPictures shown={shown} measure={measure} />
       <SectionHeading>Fields</SectionHeading>
       <FieldTable rows={fieldRows(line, names)} caption={`Fields of item ${line.number}`} units={measure.units} />
       <SectionHeading>Evidence</SectionHeading>
