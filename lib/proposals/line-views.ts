@@ -2,6 +2,8 @@ import type { LineEdit } from "@/lib/evaluation/budget/edits";
 import { fieldEffects, type LineEffect } from "@/lib/evaluation/budget/field-effects";
 import type { BudgetAtIssue, ProposalPreview } from "./preview-proposal";
 import { changedRows, lineChanges, type ChangedRow, type LineChange } from "./line-changes";
+import { comparedText } from "./compared-text";
+import type { SidesEffect } from "./sheet-views";
 import type { FieldChangeRow, LineChangeView, RemarkView } from "./views";
 
 interface ShownChange {
@@ -9,36 +11,47 @@ interface ShownChange {
   /** The issue that the change is shown against. */
   on: BudgetAtIssue;
   preview: ProposalPreview;
+  base: BudgetAtIssue;
   today: BudgetAtIssue;
   remarks: readonly RemarkView[];
   people: ReadonlyMap<number, string>;
 }
 
 /** Every line that the change revises, field by field, with what each field brings at the worst operating point. */
-export function lineViews({ edits, on, preview, today, remarks, people }: ShownChange): LineChangeView[] {
+export function lineViews({ edits, on, preview, base, today, remarks, people }: ShownChange): LineChangeView[] {
   const { after, changedLines } = preview.change;
   const { worstPoint } = after.results;
   return lineChanges(edits, on.state, after.state, changedLines, people).map((change) => {
     const { kind, number, name, operation, letterWas, letterNow } = change;
     const edit = edits.find((each) => each.kind === kind && each.number === number);
-    const effect = edit ? fieldEffects(on.state, on.results, edit, worstPoint) : null;
+    const effectOn = ({ state, results }: BudgetAtIssue) =>
+      edit ? fieldEffects(state, results, edit, worstPoint) : null;
+    const onBase = effectOn(base);
+    const effects = { onBase, onToday: today.issue === base.issue ? onBase : effectOn(today) };
     const todays = today.state.lines.find((line) => line.kind === kind && line.number === number);
     return {
       ...{ kind, number, name, operation, baseLetter: letterWas, nextLetter: letterNow },
       todayLetter: todays?.letter ?? null,
-      rows: rowViews(change, effect, remarks),
-      effect: effect?.predictedDelta ?? null,
+      rows: rowViews(change, effects, remarks),
+      effect: {
+        onBase: effects.onBase?.predictedDelta ?? null,
+        onToday: effects.onToday?.predictedDelta ?? null,
+      },
     };
   });
 }
 
-function rowViews(change: LineChange, effect: LineEffect | null, remarks: readonly RemarkView[]): FieldChangeRow[] {
+type Effects = Record<keyof SidesEffect, LineEffect | null>;
+
+function rowViews(change: LineChange, effects: Effects, remarks: readonly RemarkView[]): FieldChangeRow[] {
   const rows = changedRows(change);
-  const effects = effectByRow(rows, effect);
+  const onBase = effectByRow(rows, effects.onBase);
+  const onToday = effectByRow(rows, effects.onToday);
   const here = remarks.filter(({ line }) => line?.kind === change.kind && line.number === change.number);
   return rows.map((row) => ({
     ...row,
-    effect: effects.get(row.field) ?? null,
+    effect: { onBase: onBase.get(row.field) ?? null, onToday: onToday.get(row.field) ?? null },
+    compared: comparedText(row.was, row.toBe),
     remarkNumbers: here.filter(({ field }) => field === row.field).map(({ number }) => number),
   }));
 }

@@ -4,9 +4,11 @@ import { ROLE_NAMES } from "@/lib/vocabulary/roles";
 import { Assignment } from "@/models/assignment";
 import { Issue } from "@/models/issue";
 import type { BudgetReader } from "./budget-reader";
+import { comparedText } from "./compared-text";
 import { unsettledRequests } from "./demand-approvable";
 import { effectView } from "./effect-views";
 import { evidenceViewOf } from "./evidence-views";
+import { jointEffectOf } from "./joint-effect";
 import { lineViews } from "./line-views";
 import { isOpen } from "./moves";
 import { deputyRights, moveViews } from "./move-views";
@@ -18,7 +20,7 @@ import { reviewRound, type RoundReview } from "./round-review";
 import { personOf, routingView, signatureViews } from "./routing-views";
 import { holderName } from "./transfer-text";
 import { unsubmittedRound } from "./unsubmitted-round";
-import type { ProposalView, RoundView, TransferView } from "./views";
+import type { PersonView, ProposalView, RoundView, TransferView } from "./views";
 
 interface Reading {
   at: string;
@@ -61,12 +63,12 @@ export async function proposalViewOf(
     ...changeShown(review, remarks),
     evidence: await evidenceViewOf(actor, review, tx),
     effectToday: onIssue === undefined || madeIssue !== null ? effectOn(review) : null,
+    jointly: isCurrent ? await jointEffectOf(review, budgets, tx) : null,
+    comparedReason: comparedText(reasonBefore(rounds, round), round.reason),
     namedBecause: await whyNamed(proposal.id, tx),
     objections: await objectionViews(proposal, roundNumbers, tx),
     remarks,
-    addressable: review.signing.members
-      .filter(({ userId }) => userId !== actor.userId)
-      .map(({ userId, printedName }) => ({ id: userId, name: printedName })),
+    addressable: addressable(actor, review),
     moves: moveViews(actor, asOf, await unsettledRequests(proposal.id, tx)),
     signingSheet:
       submitted && isCurrent ? { text: review.text, textHash: review.textHash, roundHash: round.hash } : null,
@@ -74,6 +76,16 @@ export async function proposalViewOf(
       deputyFor ? [{ capacity, person: { id: deputyFor.userId, name: deputyFor.printedName } }] : [],
     ),
   };
+}
+
+function addressable({ userId: reader }: Actor, { signing }: RoundReview): PersonView[] {
+  return signing.members.flatMap(({ userId, printedName }) =>
+    userId === reader ? [] : [{ id: userId, name: printedName }],
+  );
+}
+
+function reasonBefore(rounds: readonly RoundRecord[], { number }: RoundRecord): string | null {
+  return rounds.find((round) => round.number === number - 1)?.reason ?? null;
 }
 
 function facts(proposal: ProposalRecord, round: RoundRecord, { today, people }: RoundReview) {
@@ -96,7 +108,7 @@ function changeShown(review: RoundReview, remarks: ProposalView["remarks"]) {
   const missing = review.routing.find((capacity) => capacity.missing !== null);
   const blocked = obstacles[0] ?? (missing ? `${ROLE_NAMES[missing.capacity]}: ${missing.missing}` : null);
   return {
-    lines: lineViews({ edits: round.edits, on, preview, today, remarks, people }),
+    lines: lineViews({ edits: round.edits, on, preview, base, today, remarks, people }),
     transfers: transferViews(review),
     effectOnBase: effectView({ before: base, ...onBase.change, edits: round.edits }),
     faults: preview.obstacles.map(({ path, sentence }) => ({ path, sentence })),

@@ -3,6 +3,7 @@ import type { EffectBasis } from "@/lib/evaluation/measures/effect-bases";
 import type { EditOperation, LineKind, ProductKind } from "@/lib/vocabulary/lines";
 import type { Decision, ProposalState } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
+import type { ComparedText, JointView, SidesEffect } from "./sheet-views";
 
 export interface PersonView {
   id: number;
@@ -65,7 +66,9 @@ export interface FieldChangeRow {
   unit: string | null;
   changed: boolean;
   /** Newtons at the worst operating point, applied in the order shown so that they sum to the line's. */
-  effect: number | null;
+  effect: SidesEffect;
+  /** A long text that changed, line by line; null for anything else. */
+  compared: ComparedText | null;
   remarkNumbers: number[];
 }
 
@@ -76,7 +79,7 @@ export interface LineChangeView extends LineReference {
   todayLetter: string | null;
   nextLetter: string;
   rows: FieldChangeRow[];
-  effect: number | null;
+  effect: SidesEffect;
 }
 
 export interface HolderView {
@@ -274,6 +277,10 @@ export interface ProposalView {
   /** null where the content cannot be computed; `faults` says why. */
   effectOnBase: EffectView | null;
   effectToday: EffectView | null;
+  /** null where nothing else is proposed, or where it is decided; the number of others where they are too many. */
+  jointly: JointView | number | null;
+  /** The reason of the round before beside this one's, where it changed. */
+  comparedReason: ComparedText | null;
   faults: { path: string; sentence: string }[];
   /** Why today's issue could not take it: "010 would have to give 0.40 N more than it holds." */
   blocked: string | null;

@@ -10,6 +10,7 @@ import { monteCarloRuns } from "./0007-monte-carlo-runs";
 import { datedFiles } from "./0008-dated-files";
 import { namedAndAddressed } from "./0009-named-and-addressed";
 import { touchedFields } from "./0009-touched-fields";
+import { sheetsSeen } from "./0028-sheets-seen";
 import type { Migration } from "./migration";
 
 /** A static list: a folder that is read at run time would be missing from the built application. */
@@ -24,6 +25,7 @@ const MIGRATIONS: readonly Migration[] = [
   datedFiles,
   namedAndAddressed,
   touchedFields,
+  sheetsSeen,
 ];
 
 /** Brings the open database to the newest schema, each step in a transaction of its own; answers what it ran. */

@@ -6,7 +6,7 @@ import { z } from "zod";
  * What an act that was refused may still touch: the history with its heads, mails on their way, sessions, and who
  * looked at what.
  */
-const LIVING = ["history_entries", "chain_heads", "outbox_messages", "sessions", "lookings"];
+const LIVING = ["history_entries", "chain_heads", "outbox_messages", "sessions", "lookings", "sheets_seen"];
 
 export interface HistoryRow {
   id: number;

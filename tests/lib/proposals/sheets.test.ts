@@ -9,8 +9,20 @@ import { saveDraft } from "@/lib/proposals/save-draft";
 import { shareDraft } from "@/lib/proposals/share-draft";
 import { startDraft } from "@/lib/proposals/start-draft";
 import { noteVisit } from "@/lib/proposals/visits";
+import { addItem, shareItem } from "@/tests/support/budget-on-file";
 import { withDatabase } from "@/tests/support/database";
-import { adding, approvedItems, approves, CODE, content, formKey, proposed, revising, team } from "./review-cycle";
+import {
+  adding,
+  approvedItems,
+  approves,
+  CODE,
+  content,
+  editOf,
+  formKey,
+  proposed,
+  revising,
+  team,
+} from "./review-cycle";
 
 withDatabase();
 
@@ -37,9 +49,9 @@ describe("the sheet of a proposal", () => {
       ["name", "Mirror", "Mirror, rounded"],
       ["dragCoefficient", "0.5", "0.49"],
     ]);
-    expect(changed[0]?.effect).toBe(0);
-    expect(changed[1]?.effect).toBeCloseTo(-0.01 * PREDICTED_PER_CD, 2);
-    expect(line?.effect).toBeCloseTo(-0.01 * PREDICTED_PER_CD, 2);
+    expect(changed[0]?.effect).toEqual({ onBase: 0, onToday: 0 });
+    expect(changed[1]?.effect.onToday).toBeCloseTo(-0.01 * PREDICTED_PER_CD, 2);
+    expect(line?.effect.onToday).toBeCloseTo(-0.01 * PREDICTED_PER_CD, 2);
     expect(sheet?.effectToday?.sentence).toBe("Predicted falls by 0.46\u2009N; still inside.");
     expect(sheet?.signingSheet?.text).toContain("dragCoefficient: 0.5 -> 0.49");
   });
@@ -210,3 +222,60 @@ describe("the day sheet", () => {
     expect(changedSince).toMatchObject([{ issue: 3, label: "TF-2-CP-02", title: "Round the mirror" }]);
   });
 });
+
+describe("the effect beside others", () => {
+  /** 010 by Tansy and 020 by Odo are proposed on issue 2, and a share of a tenth follows both. */
+  async function withTwoProposed() {
+    const people = await team();
+    const { tansy, odo, fenno, clock } = people;
+    const share = editOf(addItem("030", shareItem(tansy.userId, 0.1, ["010", "020"])));
+    await approvedItems(people, [adding("010", tansy.userId, 0.5), adding("020", odo.userId, 0.3), share], fenno);
+    const first = await proposed(tansy, clock, { edits: [revising("010", "–", tansy.userId, 0.49)] });
+    await proposed(odo, clock, { edits: [revising("020", "–", odo.userId, 0.29)] });
+    return { ...people, first };
+  }
+
+  it("stands field by field and line by line on the base issue and on today's", async () => {
+    const { ines, lusia, odo, fenno, clock } = await withTwoProposed();
+    // Overtakes nothing: another owner's item joins, and the share's members with it.
+    const joins = adding("040", odo.userId, 0.2);
+    const members = { ...editOf(addItem("030", shareItem(odo.userId, 0.2, ["010", "020", "040"]))) };
+    const wider = { ...members, operation: "revise" as const, baseLetter: "–" };
+    const other = await proposed(fenno, clock, { edits: [joins, wider] });
+    await approves(ines, other, "reviewer", clock);
+    await approves(lusia, other, "program_manager", clock);
+
+    const sheet = await proposalView(ines, CODE, "2", undefined, clock);
+    const [line] = sheet?.lines ?? [];
+    const changed = line?.rows.find(({ field }) => field === "dragCoefficient");
+    expect(changed?.effect.onBase).toBeCloseTo(-0.01 * PREDICTED_PER_CD, 2);
+    expect(line?.effect).toEqual(changed?.effect);
+    // The share of a tenth makes the total move by a tenth more, the share of a fifth by a fifth more.
+    expect([sheet?.effectOnBase?.onIssue, sheet?.effectToday?.onIssue]).toEqual([2, 3]);
+    expect(sheet?.effectOnBase?.points[0]?.predictedDelta).toBeCloseTo(-0.011 * PREDICTED_PER_CD, 2);
+    expect(sheet?.effectToday?.points[0]?.predictedDelta).toBeCloseTo(-0.012 * PREDICTED_PER_CD, 2);
+    expect(sheet?.effectToday?.followers.map(({ item }) => item)).toEqual(["030"]);
+  });
+
+  it("stands jointly with the others that are proposed, and names what could not follow", async () => {
+    const { tansy, ines, clock, first } = await withTwoProposed();
+    const sheet = await proposalView(ines, CODE, "2", undefined, clock);
+    const jointly = jointlyOf(sheet);
+    expect(jointly.points[0]?.predictedDelta).toBeCloseTo(-0.022 * PREDICTED_PER_CD, 2);
+    expect(jointly.others).toEqual([{ key: "3", label: "TF-2-CP-03", title: "A change", counts: true, conflicts: [] }]);
+
+    await proposed(tansy, clock, { edits: [revising("010", "–", tansy.userId, 0.48)] });
+    const [, third] = jointlyOf(await proposalView(ines, CODE, "2", undefined, clock)).others;
+    expect(third?.counts).toBe(false);
+    expect(third?.conflicts[0]).toContain("both change");
+    // What is decided stands for itself.
+    await approves(ines, first, "reviewer", clock);
+    expect((await proposalView(ines, CODE, "2", undefined, clock))?.jointly).toBeNull();
+  });
+});
+
+function jointlyOf(sheet: Awaited<ReturnType<typeof proposalView>>) {
+  const jointly = sheet?.jointly;
+  if (typeof jointly !== "object" || jointly === null) throw new Error("nothing else is proposed");
+  return jointly;
+}

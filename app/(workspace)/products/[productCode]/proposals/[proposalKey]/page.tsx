@@ -10,6 +10,7 @@ import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { dayText } from "@/app/_components/utc-text";
 import { currentPreferences, requireActor } from "@/app/_server/session";
+import { noteSheetSeen } from "@/lib/proposals/note-sheet-seen";
 import { noteOpened } from "@/lib/proposals/opened-texts";
 import { proposalView } from "@/lib/proposals/queries";
 import type { ProposalView } from "@/lib/proposals/views";
@@ -41,6 +42,7 @@ export default async function ProposalPage({ params, searchParams }: Props) {
   const base = `/products/${productCode}/proposals/${proposal.key}`;
   const measured = measureOf(proposal, measureAsked(query.measure), preferences);
   if (proposal.signingSheet) await noteOpened(actor, proposal.signingSheet.textHash);
+  const moved = round === undefined ? await noteSheetSeen(actor, proposal) : null;
 
   return (
     <>
@@ -75,7 +77,13 @@ export default async function ProposalPage({ params, searchParams }: Props) {
             hrefOf={(measure) => `${base}?${round === undefined ? "" : `round=${round}&`}measure=${measure}`}
           />
         ) : null}
-        <ChangeSheet proposal={proposal} readings={measured ? measured.readings : EFFECT_IN_NEWTONS} now={new Date()} />
+        <ChangeSheet
+          proposal={proposal}
+          readings={measured ? measured.readings : EFFECT_IN_NEWTONS}
+          moved={moved}
+          onlyMoved={query.only === "moved"}
+          now={new Date()}
+        />
       </Sheet>
     </>
   );

@@ -7,6 +7,7 @@ import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { UtcTime } from "@/app/_components/utc-time";
 import { NEWTONS } from "@/lib/evaluation/measures/reading";
+import type { MovedView } from "@/lib/proposals/sheet-views";
 import type { ProposalView } from "@/lib/proposals/views";
 
 import { EffectSummary } from "@/app/(workspace)/products/[productCode]/_components/effect-summary";
@@ -14,8 +15,11 @@ import { ItemEffects } from "@/app/(workspace)/products/[productCode]/_component
 import { TouchedItems } from "@/app/(workspace)/products/[productCode]/_components/touched-items";
 
 import { ChangeTable } from "./change-table";
+import { ComparedLines } from "./compared-text";
 import { effectShown } from "./effect-shown";
+import { EffectsBeside } from "./effects-beside";
 import { EvidenceSection } from "./evidence-section";
+import { MovedNotice } from "./moved-notice";
 import { RemarksSchedule } from "./remarks-schedule";
 import { TransfersTable } from "./transfers-table";
 
@@ -23,22 +27,29 @@ interface ChangeSheetProps {
   proposal: ProposalView;
   /** In what the effects are read. */
   readings: EffectReadings;
+  /** What moved since the reader last looked; null on a first look. */
+  moved: MovedView | null;
+  onlyMoved: boolean;
   now: Date;
 }
 
 /** The body of a change sheet: effect, lines field by field, what follows, evidence, reason, remarks. */
-export function ChangeSheet({ proposal, readings, now }: ChangeSheetProps) {
+export function ChangeSheet({ proposal, readings, moved, onlyMoved, now }: ChangeSheetProps) {
   const effect = effectShown(proposal);
   const worst = effect?.points[0] ? readingAt(readings, effect.points[0].operatingPoint) : null;
-  // Steps of a line add up only where both sides are read alike; newtons are what is kept.
-  const fieldReading = worst && !movesBasis(worst) ? worst.now : NEWTONS;
   const baseIssue = proposal.round?.baseIssue ?? proposal.newestIssue;
+  const todayIssue = effect && effect.onIssue !== baseIssue ? effect.onIssue : null;
+  // Steps of a line add up only where all sides are read alike; newtons are what is kept.
+  const fieldReading = worst && !movesBasis(worst) && todayIssue === null ? worst.now : NEWTONS;
+  const only = onlyMoved && moved !== null;
   const mayRemark = proposal.moves.remark.applies && proposal.moves.remark.allowed;
 
   return (
     <>
+      {moved ? <MovedNotice moved={moved} only={only} sheet={sheetAddress(proposal)} /> : null}
       <Warnings proposal={proposal} />
       {effect ? <EffectSummary effect={effect} withLabel={`with ${shortLabel(proposal)}`} readings={readings} /> : null}
+      <EffectsBeside proposal={proposal} />
       {effect ? <TouchedItems touches={effect.touches} readings={readings} /> : null}
       {proposal.lines.map((line) => (
         <ChangeTable
@@ -47,6 +58,9 @@ export function ChangeSheet({ proposal, readings, now }: ChangeSheetProps) {
           line={line}
           baseIssue={baseIssue}
           effectReading={fieldReading}
+          todayIssue={todayIssue}
+          moved={moved}
+          onlyMoved={only}
           mayRemark={mayRemark}
           people={proposal.addressable}
         />
@@ -62,6 +76,12 @@ export function ChangeSheet({ proposal, readings, now }: ChangeSheetProps) {
       <section className="mt-7">
         <SectionHeading>Reason</SectionHeading>
         <MarkdownText text={proposal.reason} />
+        {proposal.comparedReason && proposal.round ? (
+          <ComparedLines
+            compared={proposal.comparedReason}
+            title={`Line by line with round ${proposal.round.round - 1}`}
+          />
+        ) : null}
       </section>
       <Rounds proposal={proposal} />
       <Objections proposal={proposal} />
@@ -73,6 +93,10 @@ export function ChangeSheet({ proposal, readings, now }: ChangeSheetProps) {
       />
     </>
   );
+}
+
+function sheetAddress({ product, key }: ProposalView): string {
+  return `/products/${product.code}/proposals/${key}`;
 }
 
 function shortLabel({ number, label }: ProposalView): string {
@@ -107,7 +131,7 @@ function Warnings({ proposal }: { proposal: ProposalView }) {
 
 function Rounds({ proposal }: { proposal: ProposalView }) {
   if (proposal.rounds.length < 2) return null;
-  const base = `/products/${proposal.product.code}/proposals/${proposal.key}`;
+  const base = sheetAddress(proposal);
 
   return (
     <section className="mt-7">
