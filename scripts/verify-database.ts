@@ -1,9 +1,11 @@
-// Recomputes every issue with the versions that its lines name, and checks every chain. Exit 1 where anything differs.
+// Recomputes every issue with the versions that its lines name, checks every chain, and reads every file of evidence.
+// Exit 1 where anything differs.
 import { existsSync } from "node:fs";
 import { QueryTypes } from "sequelize";
 import { verifyChain } from "@/lib/audit/verify-chain";
 import { recomputeIssue } from "@/lib/budget/recompute-issue";
 import type { RecomputedDifference } from "@/lib/budget/recomputed-difference";
+import { verifyFiles } from "@/lib/evidence/verify-files";
 import { HOUSE_CHAIN } from "@/lib/vocabulary/acts";
 import { closeDatabase, database, databaseFile, inSnapshot, openDatabase } from "@/models/database";
 
@@ -26,6 +28,7 @@ async function verifyDatabase(): Promise<void> {
     const issues = await storedIssues();
     let faults = await faultsOfChains([HOUSE_CHAIN, ...new Set(issues.map(({ code }) => code))]);
     for (const issue of issues) faults += await faultsOfIssue(issue);
+    faults += await faultsOfFiles();
     console.log(faults === 0 ? "\nEverything agrees." : `\n${faults} ${faults === 1 ? "fault" : "faults"}.`);
     process.exitCode = faults === 0 ? 0 : 1;
   } finally {
@@ -59,6 +62,13 @@ async function faultsOfIssue({ productId, code, number }: StoredIssue): Promise<
   console.log(`${code} issue ${number}: ${differences.length === 0 ? "computes to what it keeps" : "differs"}`);
   for (const difference of differences) console.log(`  ${differenceText(difference)}`);
   return differences.length;
+}
+
+async function faultsOfFiles(): Promise<number> {
+  const { files, faults } = await inSnapshot(verifyFiles);
+  console.log(`files: ${files} of evidence, ${faults.length} ${faults.length === 1 ? "fault" : "faults"}`);
+  for (const { file, sentence } of faults) console.log(`  ${file}: ${sentence}`);
+  return faults.length;
 }
 
 function differenceText({ operatingPoint, item, quantity, stored, recomputed }: RecomputedDifference): string {

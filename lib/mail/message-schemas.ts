@@ -1,6 +1,7 @@
 import { z } from "zod";
 import { CAPACITIES } from "@/lib/vocabulary/roles";
 import { approvalTakenBack, approved, disapproved, returned, signed, withdrawn } from "@/templates/decided";
+import { evidenceAdded, evidenceVoided } from "@/templates/evidence";
 import { aheadChanged, leftPlannedBand, overtaken, reminder, superseded } from "@/templates/moved";
 import type { MailFrame, MailText } from "@/templates/proposal-notice";
 import { proposed } from "@/templates/proposed";
@@ -45,6 +46,8 @@ const SCHEMAS = {
   remark_asks_action: Remark,
   remark_answered: Remark,
   remark_settled: Remark,
+  evidence_added: ByActor,
+  evidence_voided: ByActor,
 };
 
 export type MailTemplate = keyof typeof SCHEMAS;
@@ -73,6 +76,8 @@ const RENDERERS: Record<MailTemplate, Render> = {
   remark_asks_action: renderer(SCHEMAS.remark_asks_action, remarkAsksAction),
   remark_answered: renderer(SCHEMAS.remark_answered, remarkAnswered),
   remark_settled: renderer(SCHEMAS.remark_settled, remarkSettled),
+  evidence_added: renderer(SCHEMAS.evidence_added, evidenceAdded),
+  evidence_voided: renderer(SCHEMAS.evidence_voided, evidenceVoided),
 };
 
 /** The text of a stored message. Throws when the template or its data are not what they were written as. */

@@ -7,6 +7,7 @@ import { Attachment } from "@/models/attachment";
 import { authorize } from "@/policies/authorize";
 import { actOnProposal, type ProposalAct } from "./act-on-proposal";
 import { readableFiles } from "./file-records";
+import { mailEvidenceAdded } from "./mail-evidence";
 import { isOpen, wrongStateSentence } from "./moves";
 import { noteEditor } from "./note-editor";
 import { proposalQuestion } from "./proposal-record";
@@ -90,10 +91,11 @@ async function heldAlready(
 
 async function written(
   actor: Actor,
-  { proposal, tx, at, record }: ProposalAct,
+  context: ProposalAct,
   { place, name, sourceDate }: AddFileInput,
   file: ReceivedFile,
 ): Promise<AddedFile> {
+  const { proposal, tx, at, record } = context;
   const { sha256, size, type: mediaType } = file;
   const facts = { productId: proposal.productId, ownerType: place, ownerId: proposal.id };
   const { id: fileId } = await Attachment.create(
@@ -104,6 +106,7 @@ async function written(
   // A working copy is its editors' own: the history keeps the content's hash and, bound by it, the row.
   const content = { file: fileId, mediaType, size, sha256 };
   record({ now: place === "proposal" ? { ...content, name, sourceDate } : content });
+  if (place === "proposal") await mailEvidenceAdded(actor, context, fileId);
   await keepFile(file);
   return { outcome: "added", fileId, name, sha256, sourceDate };
 }

@@ -1,7 +1,6 @@
 import type { Transaction } from "sequelize";
 import { effectsOf } from "@/lib/evaluation/budget/effects-of";
 import type { BudgetReader } from "./budget-reader";
-import { effectView } from "./effect-views";
 import { jointChange, type JointProposal } from "./joint-change";
 import { isOpen } from "./moves";
 import { keyOf, labelOf, proposalsOf, type ProposalRecord } from "./proposal-record";
@@ -40,11 +39,13 @@ export async function jointEffectOf(
   if (waiting.length < 2) return null;
   waiting.sort((one, other) => place(one.proposal) - place(other.proposal));
 
-  const set = waiting.map(({ joint }) => joint);
-  const { steps, after } = jointChange(today, set, people);
-  const edited = set.flatMap(({ edits }) => edits.filter(({ kind }) => kind === "item").map(({ number }) => number));
+  const { steps, after } = jointChange(
+    today,
+    waiting.map(({ joint }) => joint),
+    people,
+  );
   return {
-    points: effectView(today.issue, effectsOf(today.results, after.results, edited), after).points,
+    points: effectsOf(today.results, after.results).points,
     others: waiting.flatMap(({ proposal: other, title, joint }) => {
       const step = steps.find(({ key }) => key === joint.key);
       return other.id === proposal.id || !step

@@ -114,6 +114,7 @@ function changeShown(review: RoundReview, remarks: ProposalView["remarks"]) {
     faults: preview.obstacles.map(({ path, sentence }) => ({ path, sentence })),
     blocked: isOpen(review.proposal.state) ? blocked : null,
     overtaken: isOpen(review.proposal.state) ? overtaken : [],
+    voidedEvidence: review.voidedEvidence,
     routing: routingView(review),
     signatures: signatureViews(review),
   };

@@ -16,6 +16,7 @@ import { signaturesOf, standingApprovals, type SignatureRecord } from "./signatu
 import { signingFactsOf } from "./signing-facts";
 import { routingOfText, signingText } from "./signing-text";
 import { transferText } from "./transfer-text";
+import { voidedCitations } from "./voided-citations";
 
 /** A round beside its base and beside an issue that it is judged on: everything a page shows and a signature binds. */
 export interface RoundReview {
@@ -34,6 +35,8 @@ export interface RoundReview {
   signatures: SignatureRecord[];
   approvals: SignatureRecord[];
   people: ReadonlyMap<number, string>;
+  /** Files that the round cites and that were voided, a sentence each. */
+  voidedEvidence: string[];
   /** The text that a signature would stand under now. */
   text: string;
   textHash: string;
@@ -58,9 +61,11 @@ export async function reviewRound(
   const required = grownBy(onBase.routing, signatures, round, onToday.routing);
   const people = new Map((await namesOf(proposal.productId, tx)).map(({ id, name }) => [id, name]));
   const obstacles = onToday.obstacles.map(({ sentence }) => sentence);
-  const text = sheetText(proposal, round, { today, onToday, obstacles, required, people });
+  const voidedEvidence = await voidedCitations(proposal.productId, round.edits, tx);
+  const text = sheetText(proposal, round, { today, onToday, obstacles, required, people, voidedEvidence });
   return {
     ...{ proposal, round, base, today, onBase, onToday, obstacles, required, signing, signatures, people, text },
+    voidedEvidence,
     overtaken: overtakenReasons(base.state, today.state, round.edits),
     routing: routeCapacities(required, signing),
     approvals: standingApprovals(signatures, round.id),
@@ -108,7 +113,7 @@ function grownBy(
 function sheetText(
   proposal: ProposalRecord,
   round: RoundRecord,
-  shown: Pick<RoundReview, "today" | "onToday" | "obstacles" | "required" | "people">,
+  shown: Pick<RoundReview, "today" | "onToday" | "obstacles" | "required" | "people" | "voidedEvidence">,
 ): string {
   const { state: after } = shown.onToday.change.after;
   const changes = lineChanges(round.edits, shown.today.state, after, shown.onToday.change.changedLines, shown.people);
@@ -119,6 +124,7 @@ function sheetText(
     roundHash: round.hash,
     lines: changes.map((change) => ({ ...change, title: lineTitle(change), rows: canonicalRows(change) })),
     transfers: round.transfers.map((transfer) => transferText(transfer, after)),
+    voidedEvidence: shown.voidedEvidence,
     onIssue: shown.today.issue,
     effects: shown.onToday.change.effects,
     obstacles: shown.obstacles,

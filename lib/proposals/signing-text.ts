@@ -1,4 +1,6 @@
-import type { Effects, PointEffect } from "@/lib/evaluation/budget/effects";
+import type { Effects, ItemEffect, PointEffect, PointFigures } from "@/lib/evaluation/budget/effects";
+import type { Note } from "@/lib/evaluation/notes/note";
+import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
 import { formatHundredths, formatNewtons, formatNewtonsChange } from "@/lib/units/format-newtons";
 import type { EditOperation } from "@/lib/vocabulary/lines";
 import type { Decision } from "@/lib/vocabulary/proposals";
@@ -24,6 +26,8 @@ export interface SignedSheet {
   lines: readonly SignedLine[];
   /** "0.30 N from the unallocated rest to item 050" */
   transfers: readonly string[];
+  /** Files that it cites and that were voided, a sentence each. */
+  voidedEvidence: readonly string[];
   onIssue: number;
   effects: Effects;
   /** Why it cannot be applied to that issue; empty when it can. */
@@ -43,10 +47,11 @@ export function signingText(sheet: SignedSheet): string {
     "",
     ...sheet.lines.flatMap(lineRows),
     ...sheet.transfers.map((transfer) => `transfer: ${transfer}`),
+    ...sheet.voidedEvidence.map((sentence) => `evidence: ${sentence}`),
     "",
     `effect on issue ${sheet.onIssue}`,
     ...sheet.effects.points.map(pointRow),
-    ...sheet.effects.items.map(itemRow),
+    ...sheet.effects.items.flatMap(itemRows),
     ...sheet.obstacles.map((obstacle) => `cannot be applied: ${obstacle}`),
     "",
     ROUTING_HEADING,
@@ -110,16 +115,43 @@ function lineRows({ title, operation, letterWas, letterNow, rows }: SignedLine):
   ];
 }
 
-function pointRow({ operatingPoint, was, now, predictedDelta }: PointEffect): string {
-  if (now === null) return `${operatingPoint}: retired`;
-  const figures = `predicted ${formatNewtons(now.predicted)} of ${formatHundredths(now.limitHundredths)} N, margin ${formatNewtons(now.margin)}, ${STANDING_NAMES[now.standing]}`;
-  if (was === null) return `${operatingPoint}: new, ${figures}`;
-  return `${operatingPoint}: ${formatNewtonsChange(predictedDelta)}, ${figures}, was ${STANDING_NAMES[was.standing]}`;
+function pointRow({ operatingPoint, name, was, now, predictedDelta, marginDelta }: PointEffect): string {
+  const point = `${operatingPoint} ${name}`;
+  if (now === null) return was === null ? `${point}: retired` : `${point}: retired, was ${figuresText(was)}`;
+  if (was === null) return `${point}: new, ${figuresText(now)}`;
+  const deltas = `${formatNewtonsChange(predictedDelta)}, margin ${formatNewtonsChange(marginDelta)}`;
+  return `${point}: ${deltas}, ${figuresText(now)}, was ${figuresText(was)}`;
 }
 
-function itemRow({ item, operatingPoint, predictedDelta, newNotes, vanishedNotes }: Effects["items"][number]): string {
-  const notes = [...newNotes.map(({ code }) => `+${code}`), ...vanishedNotes.map(({ code }) => `-${code}`)];
-  return `  item ${item} at ${operatingPoint}: ${[formatNewtonsChange(predictedDelta), ...notes].join(", ")}`;
+function figuresText(figures: PointFigures): string {
+  const { basic, growth, predicted, limitHundredths, reserveHundredths, margin, clearOfReserve, standing } = figures;
+  return [
+    `basic ${formatNewtons(basic)} and growth ${formatNewtons(growth)}`,
+    `predicted ${formatNewtons(predicted)} of ${formatHundredths(limitHundredths)} N`,
+    `reserve ${formatHundredths(reserveHundredths)} N`,
+    `margin ${formatNewtons(margin)}`,
+    `clear of the reserve ${formatNewtons(clearOfReserve)}`,
+    STANDING_NAMES[standing],
+  ].join(", ");
+}
+
+function itemRows(effect: ItemEffect): string[] {
+  const { item, operatingPoint, edited, predictedDelta, basicDelta } = effect;
+  const side = (name: string, basic: number | null, predicted: number | null) =>
+    `${name} ${basic === null ? "none" : formatNewtons(basic)} / ${predicted === null ? "none" : formatNewtons(predicted)}`;
+  const figures = [
+    formatNewtonsChange(predictedDelta),
+    `basic ${formatNewtonsChange(basicDelta)}`,
+    side("was", effect.basicWas, effect.predictedWas),
+    side("to be", effect.basicNow, effect.predictedNow),
+  ];
+  const note = (word: string) => (each: Note) => `    ${word} ${each.severity} ${each.code}: ${noteSentence(each)}`;
+  return [
+    `  item ${item}${edited ? "" : ", which only follows,"} at ${operatingPoint}: ${figures.join(", ")}`,
+    ...effect.newNotes.map(note("new")),
+    ...effect.vanishedNotes.map(note("no longer")),
+    ...(effect.refusedNow ? [note("refused by")(effect.refusedNow)] : []),
+  ];
 }
 
 function routingRows({ capacity, count, reasons, signedBySubmitting }: RequiredCapacity): string[] {

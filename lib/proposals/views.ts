@@ -279,12 +279,13 @@ export interface ProposalView {
   effectToday: EffectView | null;
   /** null where nothing else is proposed, or where it is decided; the number of others where they are too many. */
   jointly: JointView | number | null;
-  /** The reason of the round before beside this one's, where it changed. */
   comparedReason: ComparedText | null;
   faults: { path: string; sentence: string }[];
   /** Why today's issue could not take it: "010 would have to give 0.40 N more than it holds." */
   blocked: string | null;
   overtaken: string[];
+  /** Files that it cites and that were voided, a sentence each. */
+  voidedEvidence: string[];
   routing: RoutingView | null;
   /** Why the named reviewer took the place of another; null where nobody was replaced. */
   namedBecause: string | null;

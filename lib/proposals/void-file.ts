@@ -7,6 +7,7 @@ import { inSnapshot } from "@/models/database";
 import { authorize } from "@/policies/authorize";
 import type { Transaction } from "sequelize";
 import { fileById, readableFiles, type FileRecord } from "./file-records";
+import { mailEvidenceVoided } from "./mail-evidence";
 import { proposalById } from "./proposal-record";
 import type { VoidFileInput } from "./schema";
 
@@ -29,6 +30,7 @@ export async function voidFile(
     const voided = { voidedById: actor.userId, voidedAt: at, voidReason: reason };
     await Attachment.update(voided, { where: { id: fileId }, transaction: tx });
     record({ act: frame.act, subject, was: { voided: false }, now: { voided: true, sha256 }, reason });
+    await mailEvidenceVoided(actor, file, { tx, at });
   });
 }
 

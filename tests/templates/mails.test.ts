@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { approvalTakenBack, approved, disapproved, returned, signed, withdrawn } from "@/templates/decided";
+import { evidenceAdded, evidenceVoided } from "@/templates/evidence";
 import { html } from "@/templates/html";
 import { aheadChanged, leftPlannedBand, overtaken, reminder, superseded } from "@/templates/moved";
 import { proposed } from "@/templates/proposed";
@@ -36,6 +37,8 @@ const MAILS = {
   remarkAsksAction: remarkAsksAction(frame, remark),
   remarkAnswered: remarkAnswered(frame, remark),
   remarkSettled: remarkSettled(frame, remark),
+  evidenceAdded: evidenceAdded(frame, actor),
+  evidenceVoided: evidenceVoided(frame, actor),
 };
 
 describe.each(Object.entries(MAILS))("the mail %s", (_, mail) => {

@@ -104,8 +104,8 @@ function shortLabel({ number, label }: ProposalView): string {
 }
 
 function Warnings({ proposal }: { proposal: ProposalView }) {
-  const { overtaken, blocked, faults } = proposal;
-  if (overtaken.length === 0 && !blocked && faults.length === 0) return null;
+  const { overtaken, blocked, faults, voidedEvidence } = proposal;
+  if (overtaken.length + faults.length + voidedEvidence.length === 0 && !blocked) return null;
 
   return (
     <div className="mb-4 space-y-2">
@@ -120,6 +120,12 @@ function Warnings({ proposal }: { proposal: ProposalView }) {
           <strong className="font-semibold">Blocked.</strong> {blocked}
         </Notice>
       ) : null}
+      {voidedEvidence.map((sentence) => (
+        <Notice key={sentence} kind="caution">
+          <strong className="font-semibold">Evidence was voided.</strong> {sentence}. Who signs it, signs it without that
+          file.
+        </Notice>
+      ))}
       {faults.map((fault) => (
         <Notice key={`${fault.path} ${fault.sentence}`} kind="caution">
           {fault.sentence}
