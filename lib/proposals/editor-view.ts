@@ -1,5 +1,6 @@
+import type { Transaction } from "sequelize";
 import { approvedMoves } from "@/lib/budget/approved-moves";
-import { loadBudget, productByCode } from "@/lib/budget/load-budget";
+import { productByCode, type LoadedBudget } from "@/lib/budget/load-budget";
 import { membersAt, namesOf } from "@/lib/budget/members";
 import { termsOf } from "@/lib/evaluation/budget/indexed-state";
 import type { Actor } from "@/lib/vocabulary/actor";
@@ -7,18 +8,21 @@ import { systemClock, type Clock } from "@/lib/vocabulary/clock";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { inSnapshot } from "@/models/database";
 import { authorize } from "@/policies/authorize";
+import { budgetReader } from "./budget-reader";
 import { draftViewOf } from "./draft-view";
 import { heldFiles } from "./file-views";
 import { isOpen, wrongStateSentence } from "./moves";
 import type { BudgetAtIssue, RoutingContext } from "./preview-proposal";
-import { proposalByKey, proposalQuestion } from "./proposal-record";
+import { overtakenReasons } from "./overtaken";
+import { proposalByKey, proposalQuestion, type ProposalRecord } from "./proposal-record";
 import type { FileView, PersonView } from "./views";
+import { storedChange } from "./working-copy";
 import type { DraftView } from "./workspace-views";
 
 /** All that the editor of a proposal computes with, so that it previews what the server will decide. */
 export interface EditorView {
   draft: DraftView;
-  /** The budget at the issue on which the working copy stands. */
+  /** Today's budget, on which it would be submitted; the one it stands on where it was overtaken since. */
   budget: BudgetAtIssue;
   people: PersonView[];
   /** Persons who may own an item here. */
@@ -44,7 +48,7 @@ export function editorView(
     authorize(actor, proposalQuestion(proposal, actor, "edit"));
     if (!isOpen(proposal.state)) throw new Refusal("wrong_state", wrongStateSentence(proposal.state));
 
-    const { issue, state, results } = await loadBudget(proposal.productId, proposal.baseIssue, tx);
+    const { issue, state, results } = await budgetToEditOn(proposal, tx);
     const rules = termsOf(state).reviewRules;
     const members = await membersAt(proposal.productId, at, tx);
     const mine = members.find(({ userId }) => userId === actor.userId)?.roles ?? [];
@@ -65,4 +69,11 @@ export function editorView(
       me: { userId: actor.userId, isProgramManager },
     };
   });
+}
+
+async function budgetToEditOn(proposal: ProposalRecord, tx: Transaction): Promise<LoadedBudget> {
+  const budgets = budgetReader(proposal.productId, tx);
+  const [base, newest] = [await budgets.at(proposal.baseIssue), await budgets.newest()];
+  const { edits } = await storedChange({ proposalId: proposal.id }, tx);
+  return overtakenReasons(base.state, newest.state, edits).length === 0 ? newest : base;
 }

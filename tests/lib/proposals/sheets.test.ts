@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { addRemark } from "@/lib/proposals/add-remark";
+import { budgetWith } from "@/lib/proposals/budget-with";
 import { daySheet } from "@/lib/proposals/day-sheet";
 import { propose } from "@/lib/proposals/propose";
 import { proposalList, proposalPatch, proposalView } from "@/lib/proposals/queries";
@@ -54,6 +55,19 @@ describe("the sheet of a proposal", () => {
     expect(line?.effect.onToday).toBeCloseTo(-0.01 * PREDICTED_PER_CD, 2);
     expect(sheet?.effectToday?.sentence).toBe("Predicted falls by 0.46\u2009N; still inside.");
     expect(sheet?.signingSheet?.text).toContain("dragCoefficient: 0.5 -> 0.49");
+  });
+
+  it("gives who signs it today's budget with the change, to follow its figures, while a round is open", async () => {
+    const { tansy, ines, small, clock } = await withSmallChange();
+    const budget = await budgetWith(ines, CODE, "2");
+    const result = budget?.results.points[0]?.items.find(({ item }) => item === "010");
+    expect(result?.predicted).toBeCloseTo(0.49 * PREDICTED_PER_CD, 2);
+    expect(budget?.issue.number).toBe(2);
+    const { proposalId } = await startDraft(tansy, { productCode: CODE, title: "Later", key: formKey() }, clock);
+    await expect(budgetWith(ines, CODE, `draft-${proposalId}`)).rejects.toMatchObject({ code: "forbidden" });
+    expect(await budgetWith(tansy, CODE, `draft-${proposalId}`)).toBeNull();
+    await approves(ines, small, "reviewer", clock);
+    expect(await budgetWith(ines, CODE, "2")).toBeNull();
   });
 
   it("offers each reader the moves that are theirs, and tells the barred why", async () => {

@@ -10,6 +10,7 @@ import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { dayText } from "@/app/_components/utc-text";
 import { currentPreferences, requireActor } from "@/app/_server/session";
+import { budgetWith } from "@/lib/proposals/budget-with";
 import { noteSheetSeen } from "@/lib/proposals/note-sheet-seen";
 import { noteOpened } from "@/lib/proposals/opened-texts";
 import { proposalView } from "@/lib/proposals/queries";
@@ -42,6 +43,7 @@ export default async function ProposalPage({ params, searchParams }: Props) {
   const base = `/products/${productCode}/proposals/${proposal.key}`;
   const measured = measureOf(proposal, measureAsked(query.measure), preferences);
   if (proposal.signingSheet) await noteOpened(actor, proposal.signingSheet.textHash);
+  const budget = proposal.signingSheet ? await budgetWith(actor, productCode, proposalKey) : null;
   const moved = round === undefined ? await noteSheetSeen(actor, proposal) : null;
 
   return (
@@ -80,6 +82,7 @@ export default async function ProposalPage({ params, searchParams }: Props) {
         <ChangeSheet
           proposal={proposal}
           readings={measured ? measured.readings : EFFECT_IN_NEWTONS}
+          budgetWith={budget}
           moved={moved}
           onlyMoved={query.only === "moved"}
           now={new Date()}

@@ -7,6 +7,7 @@ import { Notice } from "@/app/_components/notice";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { UtcTime } from "@/app/_components/utc-time";
 import { NEWTONS } from "@/lib/evaluation/measures/reading";
+import type { BudgetAt } from "@/lib/budget/views";
 import type { MovedView } from "@/lib/proposals/sheet-views";
 import type { ProposalView } from "@/lib/proposals/views";
 
@@ -22,11 +23,14 @@ import { EvidenceSection } from "./evidence-section";
 import { MovedNotice } from "./moved-notice";
 import { RemarksSchedule } from "./remarks-schedule";
 import { TransfersTable } from "./transfers-table";
+import { WorkedSteps } from "./worked-steps";
 
 interface ChangeSheetProps {
   proposal: ProposalView;
   /** In what the effects are read. */
   readings: EffectReadings;
+  /** Today's budget with the round that is open to signers; null where none is. */
+  budgetWith: BudgetAt | null;
   /** What moved since the reader last looked; null on a first look. */
   moved: MovedView | null;
   onlyMoved: boolean;
@@ -34,7 +38,7 @@ interface ChangeSheetProps {
 }
 
 /** The body of a change sheet: effect, lines field by field, what follows, evidence, reason, remarks. */
-export function ChangeSheet({ proposal, readings, moved, onlyMoved, now }: ChangeSheetProps) {
+export function ChangeSheet({ proposal, readings, budgetWith, moved, onlyMoved, now }: ChangeSheetProps) {
   const effect = effectShown(proposal);
   const worst = effect?.points[0] ? readingAt(readings, effect.points[0].operatingPoint) : null;
   const baseIssue = proposal.round?.baseIssue ?? proposal.newestIssue;
@@ -72,6 +76,7 @@ export function ChangeSheet({ proposal, readings, moved, onlyMoved, now }: Chang
           <ItemEffects heading="What only follows" effects={effect.followers} readings={readings} />
         </>
       ) : null}
+      {budgetWith ? <WorkedSteps budget={budgetWith} items={editedItems(proposal)} /> : null}
       <EvidenceSection proposal={proposal} now={now} />
       <section className="mt-7">
         <SectionHeading>Reason</SectionHeading>
@@ -93,6 +98,10 @@ export function ChangeSheet({ proposal, readings, moved, onlyMoved, now }: Chang
       />
     </>
   );
+}
+
+function editedItems({ lines }: ProposalView): string[] {
+  return lines.flatMap(({ kind, number }) => (kind === "item" ? [number] : []));
 }
 
 function sheetAddress({ product, key }: ProposalView): string {
@@ -122,8 +131,8 @@ function Warnings({ proposal }: { proposal: ProposalView }) {
       ) : null}
       {voidedEvidence.map((sentence) => (
         <Notice key={sentence} kind="caution">
-          <strong className="font-semibold">Evidence was voided.</strong> {sentence}. Who signs it, signs it without that
-          file.
+          <strong className="font-semibold">Evidence was voided.</strong> {sentence}. Who signs it, signs it without
+          that file.
         </Notice>
       ))}
       {faults.map((fault) => (
