@@ -37,6 +37,7 @@ const TARGETS: TrialTargets = {
   items: [ITEM],
   taken: ["010", "020"],
   nextOrder: 30,
+  versions: { "flat-plate-friction": 1, "drag-area": 1, "bluff-body": 1 },
   finishes: [
     { number: "F30", roughness: 6e-6 },
     { number: "F80", roughness: 150e-6 },
@@ -80,6 +81,8 @@ describe("a trial as a proposal", () => {
   it("keeps the version of the item's method, which only a proposal that says so moves", () => {
     const adopted = { ...ITEM, body: { ...ITEM.body, methodVersion: 2 } };
     expect(revisedItemEdit(SETTING, adopted, TARGETS).body?.methodVersion).toBe(2);
+    const budget = { ...TARGETS, versions: { "flat-plate-friction": 2 } };
+    expect(newItemEdit(SETTING, { number: "030", name: "Side panel" }, budget).body?.methodVersion).toBe(2);
   });
 
   it("keeps the source of an item, unless the trial chose a catalogued shape", () => {

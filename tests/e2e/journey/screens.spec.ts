@@ -20,6 +20,7 @@ const OTHERS = [
   "/products/PD7/budget?point=OP-2",
   "/products/PD7/growth",
   "/products/TF2/uncertainty",
+  "/products/TF2/catalogue",
   "/products/GS4/budget",
   "/products/GS4/items/010",
 ];

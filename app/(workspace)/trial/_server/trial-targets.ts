@@ -1,6 +1,8 @@
 import { asRecord } from "@/app/_components/line-fields/body";
 import { budgetAt } from "@/lib/budget/queries";
 import type { BudgetAt } from "@/lib/budget/views";
+import { adoptedVersion } from "@/lib/evaluation/budget/adopted-versions";
+import { METHOD_NAMES } from "@/lib/evaluation/methods/method-name";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { authorize, isAllowed } from "@/policies/authorize";
 
@@ -15,6 +17,7 @@ export async function trialTargets(actor: Actor, productCode: string): Promise<T
     items: revisable(actor, product.id, state.lines),
     taken: state.lines.filter(({ kind }) => kind === "item").map(({ number }) => number),
     nextOrder: (state.lines.filter(({ kind }) => kind === "item").length + 1) * 10,
+    versions: Object.fromEntries(METHOD_NAMES.map((method) => [method, adoptedVersion(state, method)])),
     finishes: state.lines.flatMap((line) =>
       line.kind === "finish" && !line.retired ? [{ number: line.number, roughness: line.body.roughness.value }] : [],
     ),

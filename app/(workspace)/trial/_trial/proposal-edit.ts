@@ -1,6 +1,7 @@
 import { z } from "zod";
 
 import { asRecord, type Body, type Json } from "@/app/_components/line-fields/body";
+import { FIRST_METHOD_VERSION } from "@/lib/evaluation/methods/method-versions";
 import { FINISH_CATALOGUE } from "@/lib/products/finish-catalogue";
 import type { DraftEdit } from "@/lib/proposals/schema";
 
@@ -21,6 +22,8 @@ export const TrialTargets = z.object({
   /** Numbers of items that stand or stood. */
   taken: z.array(z.string()),
   nextOrder: z.number(),
+  /** By which version of a method a new item there is computed. */
+  versions: z.record(z.string(), z.number()),
   finishes: z.array(z.object({ number: z.string(), roughness: z.number() })),
 });
 export type TrialTargets = z.infer<typeof TrialTargets>;
@@ -31,7 +34,8 @@ export function newItemEdit(
   { number, name }: { number: string; name: string },
   targets: TrialTargets,
 ): DraftEdit {
-  const body = { ...setting.item, name, ownerId: targets.userId, order: targets.nextOrder };
+  const own = { name, ownerId: targets.userId, order: targets.nextOrder };
+  const body = { ...setting.item, ...own, methodVersion: versionIn(targets, setting.item) };
   return { operation: "add", kind: "item", number, baseLetter: null, body: { ...body, ...surface(setting, targets) } };
 }
 
@@ -41,21 +45,26 @@ const DECIDED = ["method", "runUpFollows"];
 /** The setting as a revision: what the trial doesn't ask stays as the item has it. */
 export function revisedItemEdit(setting: TrialSetting, item: TargetItem, targets: TrialTargets): DraftEdit {
   const asked = [...askedItemFields(setting.item).map(({ key }) => key), ...DECIDED];
-  // Only a proposal that says so moves an item to another version of its method.
-  if (setting.item.method !== item.body.method) asked.push("methodVersion");
   const body = Object.fromEntries(
     Object.entries(setting.item).map(([key, typed]) => [
       key,
       asked.includes(key) ? typed : kept(key, item.body, typed),
     ]),
   );
+  // Only a proposal that says so moves an item to another version of its method.
+  const isSameMethod = setting.item.method === item.body.method;
+  const methodVersion = isSameMethod ? (item.body.methodVersion ?? null) : versionIn(targets, setting.item);
   return {
     operation: "revise",
     kind: "item",
     number: item.number,
     baseLetter: item.letter,
-    body: { ...body, ...surface(setting, targets) },
+    body: { ...body, methodVersion, ...surface(setting, targets) },
   };
+}
+
+function versionIn({ versions }: TrialTargets, { method }: Body): number {
+  return versions[String(method)] ?? FIRST_METHOD_VERSION;
 }
 
 /** A source that a choice of the trial brought (a catalogued shape) goes with its coefficient. */
