@@ -33,7 +33,9 @@ export function DragOverSpeedFigure({ version, input, stream, name, read = READ_
       caption={
         <span>
           Drag by the method over the speed of the operating point, in the same fluid.
-          {read.at(stream.speed).measure === "newtons" ? "" : " Each force is read by the stream of its speed."}
+          {read.at(2 * stream.speed).perNewton === read.at(stream.speed).perNewton
+            ? ""
+            : " Each force is read by the stream of its speed."}
           {isBroken ? " Where the method refuses the item there is no line." : ""}
         </span>
       }

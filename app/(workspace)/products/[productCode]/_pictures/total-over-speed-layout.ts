@@ -62,8 +62,8 @@ export function totalOverSpeedLayout(
 function limitLabel(curve: readonly { x: number; y: number }[], { limit }: OwnPoint, reading: Reading) {
   const [start, end] = [curve[0], curve.at(-1)];
   if (!start || !end) return null;
-  // In any other measure the same newtons are another value at each speed.
-  const where = reading.measure === "newtons" ? "" : " at the operating point";
+  // In some measures the same newtons are another value at each speed.
+  const where = Math.abs(end.y - start.y) < 1e-9 ? "" : " at the operating point";
   const text = `limit ${readText(reading, limit)}${where}`;
   const side = end.y > start.y ? "above" : "below";
   return { ...end, text, anchor: "end", side } as const;

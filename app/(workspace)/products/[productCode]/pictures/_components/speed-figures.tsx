@@ -9,7 +9,7 @@ import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/ta
 import type { BudgetAt } from "@/lib/budget/views";
 import type { PointResult } from "@/lib/evaluation/budget/results";
 import { totalOverSpeed, type TotalAtSpeed } from "@/lib/evaluation/budget/total-over-speed";
-import { isKept, readNumber, readText } from "@/lib/evaluation/measures/reading";
+import { readNumber, readText } from "@/lib/evaluation/measures/reading";
 import { formatSignificant } from "@/lib/units/format-number";
 import { MEASURE_NAMES } from "@/lib/vocabulary/measures";
 
@@ -55,7 +55,8 @@ function SpeedFigure({ points, point, reading, table }: SpeedFigureProps) {
   const read = reading.at(own.speed);
   const name = MEASURE_NAMES[read.measure];
   const broken = points.some(({ totals }) => totals === null) ? " Where an item is refused there is no line." : "";
-  const byStream = isKept(read) || read.measure === "newtons" ? "" : " Each force is read by the stream of its speed.";
+  const goesWithSpeed = reading.at(2 * own.speed).perNewton !== read.perNewton;
+  const byStream = goesWithSpeed ? " Each force is read by the stream of its speed." : "";
   const speed = `${formatSignificant(own.speed * reading.speed.perSi)} ${reading.speed.unit}`;
 
   return (
