@@ -43,14 +43,7 @@ export async function draftViewOf(
     touched: [...(await touchedLines(proposal.id, tx))].flatMap(([line, fields]) =>
       Object.entries(fields).map(([field, { userId, at: when }]) => ({ line, field, by: person(userId), at: when })),
     ),
-    touchedElsewhere: (await touchedElsewhere(proposal, tx)).map(
-      ({ kind, number, name, proposerId: by, ...other }) => ({
-        line: { kind, number, name: name ?? "" },
-        by: person(by),
-        state: other.state,
-        number: other.proposalNumber,
-      }),
-    ),
+    touchedElsewhere: await touchedElsewhere(proposal, tx),
     warning: editingWarning(actor, proposal, members.find(({ userId }) => userId === actor.userId)?.roles ?? []),
   };
 }
@@ -81,8 +74,21 @@ interface TouchedLine {
   proposalNumber: number | null;
 }
 
-/** Others learn of a draft only that somebody's draft touches the line. */
-function touchedElsewhere({ id, productId }: ProposalRecord, tx: Transaction): Promise<TouchedLine[]> {
+/** Lines that others touch too. Of a draft they learn only that somebody's draft touches the line. */
+export async function touchedElsewhere(
+  proposal: ProposalRecord,
+  tx: Transaction,
+): Promise<DraftView["touchedElsewhere"]> {
+  const names = new Map((await namesOf(proposal.productId, tx)).map(({ id, name }) => [id, name]));
+  return (await othersLines(proposal, tx)).map(({ kind, number, name, proposerId, state, proposalNumber }) => ({
+    line: { kind, number, name: name ?? "" },
+    by: state === "draft" ? null : { id: proposerId, name: names.get(proposerId) ?? "" },
+    state,
+    number: proposalNumber,
+  }));
+}
+
+function othersLines({ id, productId }: ProposalRecord, tx: Transaction): Promise<TouchedLine[]> {
   return database.query<TouchedLine>(
     `SELECT DISTINCT l.kind, l.number, (SELECT json_extract(r.body, '$.name') FROM line_revisions r
          WHERE r.line_id = l.id ORDER BY r.issue DESC LIMIT 1) AS name, p.proposer_id AS proposerId, p.state, p.number AS proposalNumber

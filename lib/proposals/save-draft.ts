@@ -8,7 +8,7 @@ import { inSnapshot, inTransaction } from "@/models/database";
 import { Proposal } from "@/models/proposal";
 import { authorize } from "@/policies/authorize";
 import { authorizeChange } from "./authorize-change";
-import { draftViewOf } from "./draft-view";
+import { draftViewOf, touchedElsewhere } from "./draft-view";
 import { reserveLines } from "./line-ids";
 import { isOpen, wrongStateSentence } from "./moves";
 import { noteEditor } from "./note-editor";
@@ -20,7 +20,7 @@ import { replaceWorkingCopy, storedChange, touchedLines, type StoredChange } fro
 import type { DraftView } from "./workspace-views";
 
 export type SavedDraft =
-  | { outcome: "saved"; lockVersion: number; savedAt: string }
+  | { outcome: "saved"; lockVersion: number; savedAt: string; touchedElsewhere: DraftView["touchedElsewhere"] }
   /** Somebody else saved since: what is stored now, and nothing of it was overwritten. */
   | { outcome: "moved"; stored: DraftView };
 
@@ -54,7 +54,8 @@ export async function saveDraft(actor: Actor, input: SaveDraftInput, clock: Cloc
       await replaceWorkingCopy(proposal, input.content, tx, touched);
       await updateFacts(proposal, input.content, tx);
       await noteEditor(proposal.id, actor.userId, at, tx);
-      return { outcome: "saved", lockVersion: proposal.lockVersion + 1, savedAt: at };
+      const elsewhere = await touchedElsewhere(proposal, tx);
+      return { outcome: "saved", lockVersion: proposal.lockVersion + 1, savedAt: at, touchedElsewhere: elsewhere };
     });
   } catch (problem) {
     if (!(problem instanceof Refusal)) throw problem;

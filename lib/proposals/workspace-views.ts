@@ -26,8 +26,8 @@ export interface DraftView {
   couldCoEdit: PersonView[];
   /** Who changed a field last; of "item 030" as the line is keyed, field "" says who put the line in. */
   touched: { line: string; field: string; by: PersonView; at: string }[];
-  /** Lines of this draft that drafts or open proposals of others touch too. */
-  touchedElsewhere: { line: LineReference; by: PersonView; state: ProposalState; number: number | null }[];
+  /** Lines of this draft that drafts or open proposals of others touch too; whose a draft is stays untold. */
+  touchedElsewhere: { line: LineReference; by: PersonView | null; state: ProposalState; number: number | null }[];
   /** Warned before the first keystroke: editing bars from signing. */
   warning: string | null;
 }

@@ -12,7 +12,7 @@ interface DraftSaving {
 }
 
 export type DraftAnswer =
-  | { state: "stored"; lockVersion: number; at: string }
+  | { state: "stored"; lockVersion: number; at: string; touchedElsewhere: DraftView["touchedElsewhere"] }
   /** Not saved, with the sentence why. */
   | { state: "failed"; sentence: string; faults: readonly FieldFault[]; triesAgain: boolean }
   /** Somebody else saved meanwhile. */
@@ -33,7 +33,12 @@ export async function putDraft({ productCode, ...input }: DraftSaving): Promise<
   const answer: SavedDraft | Problem = await response.json();
   if ("outcome" in answer) {
     return answer.outcome === "saved"
-      ? { state: "stored", lockVersion: answer.lockVersion, at: answer.savedAt }
+      ? {
+          state: "stored",
+          lockVersion: answer.lockVersion,
+          at: answer.savedAt,
+          touchedElsewhere: answer.touchedElsewhere,
+        }
       : { state: "moved", stored: answer.stored };
   }
 

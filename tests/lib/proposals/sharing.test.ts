@@ -1,13 +1,14 @@
 import { describe, expect, it } from "vitest";
 import { historyPage } from "@/lib/audit/queries";
 import { editorView } from "@/lib/proposals/editor-view";
+import { propose } from "@/lib/proposals/propose";
 import { saveDraft } from "@/lib/proposals/save-draft";
 import { shareDraft } from "@/lib/proposals/share-draft";
 import { startDraft } from "@/lib/proposals/start-draft";
 import { unshareDraft } from "@/lib/proposals/unshare-draft";
 import { withdrawProposal } from "@/lib/proposals/withdraw-proposal";
 import { withDatabase } from "@/tests/support/database";
-import { adding, CODE, content, formKey, team } from "./review-cycle";
+import { adding, approvedItems, CODE, content, formKey, revising, team } from "./review-cycle";
 
 withDatabase();
 
@@ -20,6 +21,30 @@ async function sharedDraft() {
   await shareDraft(tansy, { proposalId, userId: lusia.userId }, clock);
   return { ...people, proposalId, key };
 }
+
+describe("two drafts that touch the same line", () => {
+  it("warn each other as soon as they are saved; whose a draft is stays untold until it is proposed", async () => {
+    const people = await team();
+    const { tansy, fenno, clock } = people;
+    await approvedItems(people, [adding("010", tansy.userId, 0.5)], fenno);
+    const drafted = async (actor: typeof tansy, coefficient: number) => {
+      const { proposalId, key } = await startDraft(actor, { productCode: CODE, title: "", key: formKey() }, clock);
+      const edits = [revising("010", "–", tansy.userId, coefficient)];
+      const saved = await saveDraft(actor, { proposalId, lockVersion: 0, content: content({ edits }) }, clock);
+      return { proposalId, key, elsewhere: saved.outcome === "saved" ? saved.touchedElsewhere : null };
+    };
+    const first = await drafted(tansy, 0.49);
+    const second = await drafted(fenno, 0.48);
+    const warning = { line: { kind: "item", number: "010", name: "Mirror" }, by: null, state: "draft", number: null };
+    expect([first.elsewhere, second.elsewhere]).toEqual([[], [warning]]);
+    expect((await editorView(tansy, CODE, first.key, clock)).draft.touchedElsewhere).toEqual([warning]);
+
+    await propose(tansy, { proposalId: first.proposalId, lockVersion: 1, key: formKey(), password: null }, clock);
+    expect((await editorView(fenno, CODE, second.key, clock)).draft.touchedElsewhere).toEqual([
+      { ...warning, by: { id: tansy.userId, name: "Tansy Owner" }, state: "proposed", number: 2 },
+    ]);
+  });
+});
 
 describe("a shared draft", () => {
   it("says of each field who changed it last, and of each line who put it in", async () => {

@@ -24,6 +24,7 @@ import { ProposeDialog } from "./propose-dialog";
 import { RoutingPanel } from "./routing-panel";
 import { MovedNotice } from "./moved-notice";
 import { SaveWords } from "./save-words";
+import { TouchedElsewhere } from "./touched-elsewhere";
 import { TransfersForm } from "./transfers-form";
 import { usePreview } from "./use-preview";
 import { useSavedDraft } from "./use-saved-draft";
@@ -37,7 +38,7 @@ interface ProposalEditorProps {
 /** The working copy of a proposal: its lines as forms, and beside them what they do. */
 export function ProposalEditor({ view, preferences }: ProposalEditorProps) {
   const { draft, budget } = view;
-  const { content, setContent, save, lockVersion, settle, touched } = useSavedDraft(draft);
+  const { content, setContent, save, lockVersion, settle, touched, touchedElsewhere } = useSavedDraft(draft);
   const preview = usePreview(view, content);
   const [strict, setStrict] = useState(false);
 
@@ -62,6 +63,7 @@ export function ProposalEditor({ view, preferences }: ProposalEditorProps) {
         <SaveWords save={save} />
         <EffectPanel preview={preview} budget={budget} edits={content.edits} preferences={preferences} />
         <RoutingPanel preview={preview} />
+        <TouchedElsewhere lines={touchedElsewhere} productCode={draft.productCode} />
         <CoEditors draft={draft} isProposer={draft.proposer.id === view.me.userId} />
         <Obstacles
           edits={content.edits}

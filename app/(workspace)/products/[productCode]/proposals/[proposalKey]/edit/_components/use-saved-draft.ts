@@ -47,6 +47,7 @@ export function useSavedDraft(draft: DraftView) {
   const { content, lockVersion, current, keep } = useTypedContent(draft);
   const [save, setSave] = useState<SaveState>({ state: "saved", at: draft.savedAt });
   const [touched, setTouched] = useState(draft.touched);
+  const [touchedElsewhere, setTouchedElsewhere] = useState(draft.touchedElsewhere);
   const sent = useRef<DraftContent[]>([]);
 
   const setContent = useCallback(
@@ -61,6 +62,7 @@ export function useSavedDraft(draft: DraftView) {
   const settle = useCallback(
     (merged: DraftContent, stored: DraftView) => {
       setTouched(stored.touched);
+      setTouchedElsewhere(stored.touchedElsewhere);
       keep({ lockVersion: stored.lockVersion, base: stored.content, content: merged });
       setSave({ state: "waiting" });
     },
@@ -80,6 +82,7 @@ export function useSavedDraft(draft: DraftView) {
       return merge.conflicts.length > 0 ? setSave({ ...answer, base }) : settle(merge.content, answer.stored);
     }
     sent.current = [];
+    setTouchedElsewhere(answer.touchedElsewhere);
     keep({ lockVersion: answer.lockVersion, base: asStored(typed) });
     if (current().content !== typed) return setSave({ state: "waiting" });
     dropBackup(proposalId);
@@ -89,7 +92,7 @@ export function useSavedDraft(draft: DraftView) {
   useSending(save, send);
   useKeptBackup(draft, keep, setSave);
 
-  return { content, setContent, save, lockVersion, settle, touched };
+  return { content, setContent, save, lockVersion, settle, touched, touchedElsewhere };
 }
 
 /** A save whose answer was lost is no change of somebody else's: what is stored then is what was sent. */
