@@ -3,6 +3,7 @@
 import { existsSync } from "node:fs";
 import { QueryTypes } from "sequelize";
 import { verifyChain } from "@/lib/audit/verify-chain";
+import { differingSheets } from "@/lib/budget/differing-sheets";
 import { recomputeIssue } from "@/lib/budget/recompute-issue";
 import type { RecomputedDifference } from "@/lib/budget/recomputed-difference";
 import { verifyFiles } from "@/lib/evidence/verify-files";
@@ -59,9 +60,11 @@ async function faultsOfChains(chains: readonly string[]): Promise<number> {
 
 async function faultsOfIssue({ productId, code, number }: StoredIssue): Promise<number> {
   const differences = await inSnapshot((tx) => recomputeIssue(productId, number, tx));
+  const sheets = await inSnapshot((tx) => differingSheets(productId, number, tx));
   console.log(`${code} issue ${number}: ${differences.length === 0 ? "computes to what it keeps" : "differs"}`);
   for (const difference of differences) console.log(`  ${differenceText(difference)}`);
-  return differences.length;
+  for (const operatingPoint of sheets) console.log(`  ${operatingPoint}: the sheet that was kept says something else`);
+  return differences.length + sheets.length;
 }
 
 async function faultsOfFiles(): Promise<number> {

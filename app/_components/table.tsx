@@ -11,6 +11,8 @@ interface TableProps {
    * "stack" turns each row into a block whose cells carry their `label`.
    */
   narrow?: "scroll" | "stack";
+  /** Rows of the body, where not all of them stand in the document. */
+  rowCount?: number;
   children: ReactNode;
 }
 
@@ -21,9 +23,12 @@ const STACK =
   "max-sm:block max-sm:[&_caption]:block max-sm:[&_thead]:sr-only max-sm:[&_tbody]:block max-sm:[&_tbody_tr]:block max-sm:[&_tbody_tr]:border-b max-sm:[&_tbody_tr]:border-rule-strong max-sm:[&_tbody_tr]:py-2 max-sm:[&_tbody_tr>*]:grid max-sm:[&_tbody_tr>*:has(>div:only-child:empty)]:hidden max-sm:[&_tbody_tr>*]:grid-cols-[8rem_minmax(0,1fr)] max-sm:[&_tbody_tr>*]:gap-x-3 max-sm:[&_tbody_tr>*]:border-0 max-sm:[&_tbody_tr>*]:px-0 max-sm:[&_tbody_tr>*]:py-1 max-sm:[&_tbody_tr>*]:text-left max-sm:[&_tbody_tr>*]:whitespace-normal max-sm:[&_tbody_tr>*]:before:text-xs max-sm:[&_tbody_tr>*]:before:font-normal max-sm:[&_tbody_tr>*]:before:text-ink-2 max-sm:[&_tbody_tr>*]:before:content-[attr(data-label)]";
 
 /** A table of a sheet. Its header stays in sight while a long one is read. */
-export function Table({ caption, showCaption = false, narrow = "scroll", children }: TableProps) {
+export function Table({ caption, showCaption = false, narrow = "scroll", rowCount, children }: TableProps) {
   const table = (
-    <table className={`w-full border-collapse text-table ${narrow === "stack" ? STACK : SCROLL}`}>
+    <table
+      aria-rowcount={rowCount === undefined ? undefined : rowCount + 1}
+      className={`w-full border-collapse text-table ${narrow === "stack" ? STACK : SCROLL}`}
+    >
       <caption className={showCaption ? "pb-1 text-left text-sm text-ink-2" : "sr-only"}>{caption}</caption>
       {children}
     </table>

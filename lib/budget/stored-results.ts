@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { indexState } from "@/lib/evaluation/budget/indexed-state";
-import type { BudgetResults, ItemResult, PointResult } from "@/lib/evaluation/budget/results";
+import type { BudgetResults, ItemResult, PointResult, PointTotals } from "@/lib/evaluation/budget/results";
 import { itemsInSheetOrder } from "@/lib/evaluation/budget/sheet-order";
 import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import type { MethodAnswer } from "@/lib/evaluation/methods/method-answer";
@@ -9,7 +9,7 @@ import { roundStored } from "@/lib/units/rounding";
 import { STANDING_ORDER } from "@/lib/vocabulary/standing";
 
 /** What an issue keeps of an operating point beside the rows of its items. */
-export type StoredPoint = Omit<PointResult, "items">;
+export type StoredPoint = PointTotals;
 export interface StoredTotals {
   worstPoint: string;
   points: StoredPoint[];

@@ -10,6 +10,7 @@ import { Issue } from "@/models/issue";
 import { Line } from "@/models/line";
 import { LineRevision } from "@/models/line-revision";
 import { Result } from "@/models/result";
+import { keepSheets } from "./kept-sheets";
 import type { ProductRow } from "./load-budget";
 import { textsToStore, totalsToStore } from "./stored-results";
 import { uncertaintyToStore } from "./stored-uncertainty";
@@ -47,7 +48,8 @@ export async function writeIssue(issue: IssueToWrite, tx: Transaction): Promise<
   const revisions = issue.changedLines.map((line) => storedRevision(line, product.code));
   const rows = changedResults(issue.resultsBefore, results);
   const totals = canonicalJson(totalsToStore(results));
-  const uncertainty = canonicalJson(uncertaintyToStore(issue.state, results));
+  const uncertain = uncertaintyToStore(issue.state, results);
+  const uncertainty = canonicalJson(uncertain);
   const contentHash = issueContentHash({
     productCode: product.code,
     number,
@@ -74,6 +76,7 @@ export async function writeIssue(issue: IssueToWrite, tx: Transaction): Promise<
   const lineIds = await lineIdsOf(product.id, issue.changedLines, madeAt, tx);
   await writeRevisions(revisions, number, issue, lineIds, tx);
   await writeResults(rows, number, product.id, lineIds, tx);
+  await keepSheets(product.id, { issue: number, state: issue.state, results, uncertainty: uncertain }, tx);
   return { number, madeAt, contentHash };
 }
 

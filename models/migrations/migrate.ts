@@ -10,6 +10,7 @@ import { monteCarloRuns } from "./0007-monte-carlo-runs";
 import { datedFiles } from "./0008-dated-files";
 import { namedAndAddressed } from "./0009-named-and-addressed";
 import { touchedFields } from "./0009-touched-fields";
+import { issueSheets } from "./0025-issue-sheets";
 import { sheetsSeen } from "./0028-sheets-seen";
 import type { Migration } from "./migration";
 
@@ -25,6 +26,7 @@ const MIGRATIONS: readonly Migration[] = [
   datedFiles,
   namedAndAddressed,
   touchedFields,
+  issueSheets,
   sheetsSeen,
 ];
 

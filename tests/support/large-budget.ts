@@ -32,8 +32,8 @@ export function pointSketch(number: keyof typeof SPEEDS) {
 }
 
 export const FINISHES = {
-  F10: { name: "paint", roughness: { value: 6e-6 }, source: "judgement" },
-  F20: { name: "galvanised", roughness: { value: 1.5e-4 }, source: "judgement" },
+  B1: { name: "paint", roughness: { value: 6e-6 }, source: "judgement" },
+  B2: { name: "galvanised", roughness: { value: 1.5e-4 }, source: "judgement" },
 };
 
 export function groupSketches(): Record<string, object> {
@@ -83,7 +83,7 @@ function body(index: number): object {
 function plate(index: number): object {
   const size = { length: { value: 1 + index / 100 }, breadth: { value: 0.5 }, faces: 1 };
   // One plate in five hundred has the second finish.
-  return { method: "flat-plate-friction", ...size, finish: index === 100 ? "F20" : "F10" };
+  return { method: "flat-plate-friction", ...size, finish: index === 100 ? "B2" : "B1" };
 }
 
 function behind(index: number): object {

@@ -49,3 +49,6 @@ export interface BudgetResults {
   /** The number of the operating point that stands worst. */
   worstPoint: string;
 }
+
+/** An operating point without the results of its items. */
+export type PointTotals = Omit<PointResult, "items">;

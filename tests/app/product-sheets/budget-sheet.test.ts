@@ -5,13 +5,11 @@ import {
   budgetSheet,
   pointOf,
 } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import {
-  SheetQuery,
-  chosenRows,
-  isOver,
-  sheetAddress,
-} from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { chosenRows, isOver, shownRows } from "@/app/(workspace)/products/[productCode]/_sheet/chosen-rows";
+import { sheetAddress } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-address";
+import { SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { staveInput } from "@/app/(workspace)/products/[productCode]/_sheet/stave-input";
+import { sheetsOf } from "@/lib/budget/sheet-data";
 import { budgetState, line } from "@/tests/support/budget-state";
 import { SIGN_PANEL, sideFairing, signPanel } from "@/tests/support/demo-budgets";
 import { frozenBudget } from "./frozen-budget";
@@ -21,6 +19,36 @@ function sheetOf(state: ReturnType<typeof signPanel>): BudgetSheet {
   const point = pointOf(budget, undefined);
   if (!point) throw new Error("a budget has an operating point");
   return budgetSheet(budget, point);
+}
+
+/** Item 010 in a group, 020 in a subgroup of it, the others in none. */
+function groupedFairing() {
+  const state = sideFairing();
+  return {
+    ...state,
+    lines: [
+      line("group", "G10", { name: "Panels", order: 0 }),
+      line("group", "G11", { name: "Outer", order: 0, parent: "G10" }),
+      ...state.lines.map((each) =>
+        each.kind === "item" && Number(each.number) <= 20
+          ? { ...each, body: { ...each.body, group: each.number === "010" ? "G10" : "G11" } }
+          : each,
+      ),
+    ],
+  };
+}
+
+/** Numbers of the rows that a sheet shows to a person who asks this of it. */
+function asked(state: ReturnType<typeof signPanel>, query: object, userId = 1): string[] {
+  const { people, ...budget } = frozenBudget(state);
+  const [sheet] = sheetsOf({ ...budget, issue: budget.issue.number });
+  const rows = shownRows(sheet?.rows ?? [], people);
+  return numbersOf(chosenRows(rows, SheetQuery.parse(query), { userId, isReference: true }));
+}
+
+function staveOf(state: ReturnType<typeof signPanel>) {
+  const { rows, point } = sheetOf(state);
+  return staveInput(rows, point);
 }
 
 const numbersOf = (rows: readonly { number: string }[]) => rows.map(({ number }) => number);
@@ -44,19 +72,7 @@ describe("the rows of the budget sheet", () => {
   });
 
   it("sum a group over its subgroups and leave it without a margin where it has no allocation", () => {
-    const state = sideFairing();
-    const grouped = {
-      ...state,
-      lines: [
-        line("group", "G10", { name: "Panels", order: 0 }),
-        line("group", "G11", { name: "Outer", order: 0, parent: "G10" }),
-        ...state.lines.map((each) =>
-          each.kind === "item" && Number(each.number) <= 20
-            ? { ...each, body: { ...each.body, group: each.number === "010" ? "G10" : "G11" } }
-            : each,
-        ),
-      ],
-    };
+    const grouped = groupedFairing();
     const rows = sheetOf(grouped).rows;
     const [outer, whole] = [rows.find(({ number }) => number === "G11"), rows.find(({ number }) => number === "G10")];
     const item = (number: string) => rows.find((row) => row.kind === "item" && row.number === number)?.predicted ?? NaN;
@@ -85,21 +101,20 @@ describe("the rows of the budget sheet", () => {
     const [row] = sheetOf(state).rows;
 
     expect(row).toMatchObject({ kind: "item", allocationHundredths: 100, marginHundredths: null });
-    expect(staveInput(sheetOf(state)).items).toEqual([]);
+    expect(staveOf(state).items).toEqual([]);
   });
 });
 
 describe("the stave of a sheet", () => {
   it("ends its solid part at the sum that is frozen", () => {
-    const { items, basic } = staveInput(sheetOf(signPanel()));
+    const { items, basic } = staveOf(signPanel());
 
     expect(items.reduce((sum, item) => sum + item.basic, 0)).toBeCloseTo(basic, 9);
   });
 });
 
 describe("what the address asks of the sheet", () => {
-  const sheet = sheetOf(signPanel());
-  const ask = (query: object) => numbersOf(chosenRows(sheet, SheetQuery.parse(query), 1));
+  const ask = (query: object, userId = 1) => asked(signPanel(), query, userId);
 
   it("finds by words in number, name or owner, whatever their case", () => {
     expect(ask({ find: "FACE" })).toEqual(["010", "020"]);
@@ -110,7 +125,7 @@ describe("what the address asks of the sheet", () => {
 
   it("shows only what is over, or only what the reader owns", () => {
     expect(ask({ only: "over" })).toEqual(["020", "060", "090", "100", "110"]);
-    expect(numbersOf(chosenRows(sheet, SheetQuery.parse({ only: "mine" }), 2))).toEqual([]);
+    expect(ask({ only: "mine" }, 2)).toEqual([]);
   });
 
   it("sorts by a column, up and down", () => {
@@ -118,10 +133,20 @@ describe("what the address asks of the sheet", () => {
     expect(ask({ sort: "margin" })[0]).toBe("060");
   });
 
+  it("keeps the groups of what is found, and folds a closed group with all below it", () => {
+    const grouped = groupedFairing();
+
+    expect(asked(grouped, { find: "020" })).toEqual(["G10", "G11", "020"]);
+    expect(asked(grouped, { find: "010" })).toEqual(["G10", "010"]);
+    expect(asked(grouped, { closed: "G10" }).slice(0, 2)).toEqual(["G10", "030"]);
+    expect(asked(grouped, { closed: "G11" }).slice(0, 4)).toEqual(["G10", "G11", "010", "030"]);
+    expect(asked(grouped, { sort: "number", closed: "G10" })).toContain("020");
+  });
+
   it("reads what it does not know as if it were not there, and writes only what matters", () => {
     const query = SheetQuery.parse({ issue: "x", point: "<script>", sort: "sideways", only: "all", on: "yesterday" });
 
-    expect(query).toEqual({ find: "", only: "all", sort: "sheet" });
+    expect(query).toEqual({ find: "", only: "all", sort: "sheet", closed: [] });
     expect(sheetAddress("/b", query, { point: "OP-2", find: "a b" })).toBe("/b?point=OP-2&find=a+b");
     expect(sheetAddress("/b", query, {})).toBe("/b");
   });

@@ -53,7 +53,7 @@ describe(`a preview on ${ITEMS} items computes anew`, () => {
   });
 
   it("the one plate with the finish that is edited, and its share", () => {
-    const edit = revise("finish", "F20", { roughness: { value: 3e-4 } });
+    const edit = revise("finish", "B2", { roughness: { value: 3e-4 } });
     expect(computedAnew(edit)).toEqual(atEach(100, 129));
   });
 

@@ -6,7 +6,13 @@ import { utcMinuteText } from "@/app/_components/utc-text";
 import type { BudgetAt } from "@/lib/budget/views";
 
 /** Says plainly that an earlier issue is shown, and leads to the newest. */
-export function AsStoodBanner({ budget, newestHref }: { budget: BudgetAt; newestHref: string }) {
+export function AsStoodBanner({
+  budget,
+  newestHref,
+}: {
+  budget: Pick<BudgetAt, "product" | "issue">;
+  newestHref: string;
+}) {
   const { issue, product } = budget;
   if (product.newestIssue === null || issue.number === product.newestIssue) return null;
 

@@ -4,7 +4,11 @@ import { chanceText } from "../_uncertainty/chance-text";
 import { WorkingNumber } from "./workings-provider";
 
 /** Both probabilities over the limit; each opens its working. */
-export function ExceedanceWords({ frozen }: { frozen: PointUncertainty }) {
+export function ExceedanceWords({
+  frozen,
+}: {
+  frozen: Pick<PointUncertainty, "basicExceedsLimit" | "predictedExceedsLimit">;
+}) {
   return (
     <>
       Probability that ΣB + ΣG exceeds the limit{" "}

@@ -1,20 +1,26 @@
 import type { Route } from "next";
 import Link from "next/link";
 
-import type { PointResult } from "@/lib/evaluation/budget/results";
+import type { PointTotals } from "@/lib/evaluation/budget/results";
 import { standingSentence } from "@/lib/evaluation/budget/standing-sentence";
 
-interface PointChoiceProps {
-  points: readonly PointResult[];
+interface PointChoiceProps<Point extends PointTotals> {
+  points: readonly Point[];
   worstPoint: string;
   chosen: string;
   hrefOf: (operatingPoint: string) => string;
   /** How a force at a point is printed; in newtons where it isn't said. */
-  print?: (point: PointResult, newtons: number) => string;
+  print?: (point: Point, newtons: number) => string;
 }
 
 /** The operating points of the budget, the worst named first, each with where it stands. */
-export function PointChoice({ points, worstPoint, chosen, hrefOf, print }: PointChoiceProps) {
+export function PointChoice<Point extends PointTotals>({
+  points,
+  worstPoint,
+  chosen,
+  hrefOf,
+  print,
+}: PointChoiceProps<Point>) {
   if (points.length < 2) return null;
   const ordered = points.toSorted(
     (one, other) => Number(other.operatingPoint === worstPoint) - Number(one.operatingPoint === worstPoint),

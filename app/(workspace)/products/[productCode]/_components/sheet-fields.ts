@@ -1,10 +1,13 @@
 import { dayText } from "@/app/_components/utc-text";
 import type { TitleBlockField } from "@/app/_components/title-block";
 import type { BudgetAt, IssueFacts } from "@/lib/budget/views";
-import type { PointResult } from "@/lib/evaluation/budget/results";
+import type { PointTotals } from "@/lib/evaluation/budget/results";
 
 /** The title block of a sheet that shows a budget at an issue. */
-export function budgetFields({ product, issue }: BudgetAt, point: PointResult | null): TitleBlockField[] {
+export function budgetFields(
+  { product, issue }: Pick<BudgetAt, "product" | "issue">,
+  point: Pick<PointTotals, "operatingPoint" | "name"> | null,
+): TitleBlockField[] {
   return [
     { label: "Product", value: `${product.code} ${product.name}` },
     { label: "Issue", value: String(issue.number) },

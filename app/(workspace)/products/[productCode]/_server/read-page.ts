@@ -24,7 +24,7 @@ export async function pageBudget(
 }
 
 /** An issue by its number, else the one that stood when a day ended, else the newest. */
-function asOf({ issue, on }: { issue?: number; on?: string }): AsOf {
+export function asOf({ issue, on }: { issue?: number; on?: string }): AsOf {
   if (issue !== undefined) return issue;
   return on === undefined ? "newest" : { day: on };
 }

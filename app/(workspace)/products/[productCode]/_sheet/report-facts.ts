@@ -1,5 +1,5 @@
 import type { BudgetSheet, ItemRow } from "./budget-sheet";
-import { isOver } from "./sheet-filter";
+import { isOver } from "./chosen-rows";
 
 export interface ReportItem {
   row: ItemRow;

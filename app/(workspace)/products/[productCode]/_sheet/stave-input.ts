@@ -1,9 +1,12 @@
+import type { SheetDataRow } from "@/lib/budget/sheet-data";
+import type { PointTotals } from "@/lib/evaluation/budget/results";
+
 import type { StaveInput } from "../_pictures/stave-layout";
-import type { BudgetSheet, ItemRow } from "./budget-sheet";
+import type { BudgetRow } from "./budget-sheet";
 
 /** What the stave draws: the items in the order of the sheet, and the totals as frozen. */
-export function staveInput({ rows, point }: BudgetSheet): StaveInput {
-  const items = rows.filter((row): row is ItemRow => row.kind === "item" && row.result.refused === null);
+export function staveInput(rows: readonly (BudgetRow | SheetDataRow)[], point: PointTotals): StaveInput {
+  const items = rows.filter((row) => row.kind === "item" && !isRefused(row));
   const { basic, growth, predicted } = point.totals;
 
   return {
@@ -14,4 +17,9 @@ export function staveInput({ rows, point }: BudgetSheet): StaveInput {
     limit: point.limitHundredths / 100,
     reserve: point.reserveHundredths / 100,
   };
+}
+
+function isRefused(row: BudgetRow | SheetDataRow): boolean {
+  if (row.kind === "group") return false;
+  return "result" in row ? row.result.refused !== null : row.refused;
 }

@@ -1,10 +1,10 @@
-import type { PointResult } from "@/lib/evaluation/budget/results";
+import type { PointTotals } from "@/lib/evaluation/budget/results";
 import { formatSignificant } from "@/lib/units/format-number";
 import { formatResultIn } from "@/lib/units/format-quantity";
 import type { UnitSystem } from "@/lib/units/us-customary";
 
 /** "OP-1 motorway, 25.0 m/s, ρ 1.225 kg/m³, q 382.8 Pa"; in US customary units with these beside. */
-export function streamText({ operatingPoint, name, stream }: PointResult, units: UnitSystem = "si"): string {
+export function streamText({ operatingPoint, name, stream }: PointTotals, units: UnitSystem = "si"): string {
   const { speed, density, dynamicPressure } = stream;
   const parts = [
     formatResultIn(units, speed, "speed", `${formatSignificant(speed)} m/s`),

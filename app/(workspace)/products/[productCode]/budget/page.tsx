@@ -7,7 +7,8 @@ import { currentPreferences, requireActor } from "@/app/_server/session";
 import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
-import type { PointResult } from "@/lib/evaluation/budget/results";
+import type { SheetAt } from "@/lib/budget/sheet-at";
+import type { SheetPoint } from "@/lib/budget/sheet-data";
 import { readText } from "@/lib/evaluation/measures/reading";
 import { abilityFor, covers } from "@/policies/ability";
 
@@ -17,9 +18,10 @@ import { PointChoice } from "../_components/point-choice";
 import { ServiceWindCaution } from "../_components/service-wind-caution";
 import { budgetFields } from "../_components/sheet-fields";
 import { WorkingsProvider } from "../_components/workings-provider";
-import { pageBudget, pageProduct } from "../_server/read-page";
-import { type BudgetSheet, budgetSheet, pointOf, sheetBasis } from "../_sheet/budget-sheet";
-import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
+import { pageProduct } from "../_server/read-page";
+import { pageSheet } from "../_server/read-sheet";
+import { sheetAddress } from "../_sheet/sheet-address";
+import { SheetQuery } from "../_sheet/sheet-filter";
 import { streamText } from "../_sheet/stream-text";
 import { BudgetActions } from "./_components/budget-actions";
 import { BudgetItems } from "./_components/budget-items";
@@ -42,83 +44,80 @@ export async function generateMetadata({ params, searchParams }: Props): Promise
 export default async function BudgetPage({ params, searchParams }: Props) {
   const { productCode } = await params;
   const query = SheetQuery.parse(await searchParams);
-  const [actor, preferences, product, budget] = await Promise.all([
+  const [actor, preferences, product, found] = await Promise.all([
     requireActor(),
     currentPreferences(),
     pageProduct(productCode),
-    pageBudget(productCode, query),
+    pageSheet(productCode, query),
   ]);
   const ability = abilityFor(actor);
-  if (!budget) {
+  if (!found) {
     const mayEstablish = covers(ability, { on: "Product", action: "establish", productId: product.id });
     return <NotEstablished product={product} mayEstablish={mayEstablish} />;
   }
 
-  const point = pointOf(budget, query.point);
+  const { sheet, issue } = found;
+  const point = sheet.points.find(({ operatingPoint }) => operatingPoint === sheet.operatingPoint);
   if (!point) notFound();
-  const sheet = budgetSheet(budget, point);
-  const chosen = chosenMeasure(query.measure, preferences, [sheetBasis(sheet)]);
+  const chosen = chosenMeasure(query.measure, preferences, [point.basis]);
   const mayStart = covers(ability, { on: "Product", action: "start_draft", productId: product.id });
 
   return (
     <>
       <PageHeading
         title={product.name}
-        subtitle={`${product.code} · issue ${budget.issue.number} · ${streamText(point, chosen.units)}`}
+        subtitle={`${product.code} · issue ${issue.number} · ${streamText(point, chosen.units)}`}
         actions={
           <BudgetActions
             productCode={product.code}
-            issue={budget.issue.number}
+            issue={issue.number}
             operatingPoint={point.operatingPoint}
             measure={chosen}
             mayStart={mayStart}
           />
         }
       />
-      <BudgetMatter sheet={sheet} query={query} userId={actor.userId} chosen={chosen} />
+      <BudgetMatter found={found} point={point} query={query} userId={actor.userId} chosen={chosen} />
     </>
   );
 }
 
 interface BudgetMatterProps {
-  sheet: BudgetSheet;
+  found: SheetAt;
+  point: SheetPoint;
   query: SheetQuery;
   userId: number;
   chosen: ChosenMeasure;
 }
 
-function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
-  const { budget, point } = sheet;
+function BudgetMatter({ found, point, query, userId, chosen }: BudgetMatterProps) {
+  const { sheet, product, issue } = found;
   const { units } = chosen;
-  const readingAt = (at: PointResult) => readingFor(chosen, sheetBasis({ ...sheet, point: at }));
+  const readingAt = ({ basis }: SheetPoint) => readingFor(chosen, basis);
   const reading = readingAt(point);
-  const reference = budget.results.points.find((each) => each.operatingPoint === budget.allocations.operatingPoint);
-  const path = `/products/${budget.product.code}/budget`;
-  const { issue, on } = query;
-  const uncertaintyHref = sheetAddress(
-    `/products/${budget.product.code}/uncertainty`,
-    SheetQuery.parse({ issue, on }),
-    {
-      point: point.operatingPoint,
-    },
-  );
+  const reference = sheet.points.find(({ operatingPoint }) => operatingPoint === sheet.referencePoint);
+  const path = `/products/${product.code}/budget`;
+  const asStood = SheetQuery.parse({ issue: query.issue, on: query.on });
+  const uncertaintyHref = sheetAddress(`/products/${product.code}/uncertainty`, asStood, {
+    point: point.operatingPoint,
+  });
 
   return (
-    <Sheet titleBlock={<TitleBlock fields={budgetFields(budget, point)} />}>
-      <AsStoodBanner budget={budget} newestHref={sheetAddress(path, query, { issue: undefined, on: undefined })} />
+    <Sheet titleBlock={<TitleBlock fields={budgetFields(found, point)} />}>
+      <AsStoodBanner budget={found} newestHref={sheetAddress(path, query, { issue: undefined, on: undefined })} />
       {query.issue === undefined && query.on === undefined ? (
-        <NewerIssue productCode={budget.product.code} shown={budget.issue.number} />
+        <NewerIssue productCode={product.code} shown={issue.number} />
       ) : null}
-      <ServiceWindCaution kind={budget.product.kind} />
+      <ServiceWindCaution kind={product.kind} />
       <WorkingsProvider
-        productCode={budget.product.code}
-        issue={budget.issue.number}
+        productCode={product.code}
+        issue={issue.number}
         point={point.operatingPoint}
         read={{ measure: reading.measure, units }}
       >
         <PointChoice
-          points={budget.results.points}
-          worstPoint={budget.results.worstPoint}
+          points={sheet.points}
+          worstPoint={sheet.worstPoint}
           chosen={point.operatingPoint}
           hrefOf={(operatingPoint) => sheetAddress(path, query, { point: operatingPoint })}
           print={(at, newtons) => readText(readingAt(at), newtons)}
@@ -126,14 +125,14 @@ function BudgetMatter({ sheet, query, userId, chosen }: BudgetMatterProps) {
         <MeasureBar chosen={chosen} reading={reading} hrefOf={(measure) => sheetAddress(path, query, { measure })} />
         <StandingHead point={point} reading={reading} />
         <UncertaintyLine sheet={sheet} href={uncertaintyHref} />
-        <StaveFigure sheet={sheet} reading={reading} />
-        <BudgetItems sheet={sheet} query={query} path={path} userId={userId} reading={reading} units={units} />
+        <StaveFigure rows={sheet.rows} point={point} reading={reading} />
+        <BudgetItems found={found} point={point} query={query} userId={userId} reading={reading} units={units} />
         <ConservationLine
-          sums={budget.allocations}
+          sums={sheet.allocations}
           reading={readingAt(reference ?? point)}
-          reserveHref={`${sheetAddress(`/products/${budget.product.code}/operating-points`, SheetQuery.parse({ issue, on }), {})}#reserve`}
+          reserveHref={`${sheetAddress(`/products/${product.code}/operating-points`, asStood, {})}#reserve`}
         />
-        <MeasuresTable sheet={sheet} units={units} />
+        <MeasuresTable point={point} units={units} />
       </WorkingsProvider>
       <RetiredLines lines={sheet.retired} />
     </Sheet>

@@ -16,7 +16,8 @@ import { budgetFields } from "../_components/sheet-fields";
 import { WorkingsProvider } from "../_components/workings-provider";
 import { pageBudget, pageProduct, readForPage } from "../_server/read-page";
 import { budgetSheet, pointOf } from "../_sheet/budget-sheet";
-import { sheetAddress, SheetQuery } from "../_sheet/sheet-filter";
+import { sheetAddress } from "../_sheet/sheet-address";
+import { SheetQuery } from "../_sheet/sheet-filter";
 import { streamText } from "../_sheet/stream-text";
 import { UncertaintyMatter } from "./_components/uncertainty-matter";
 

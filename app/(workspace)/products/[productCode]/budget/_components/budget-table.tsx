@@ -1,92 +1,104 @@
-import { Head, Table, TableHead } from "@/app/_components/table";
+"use client";
+
+import { Fragment } from "react";
+
+import { Table } from "@/app/_components/table";
+import type { SheetPoint } from "@/lib/budget/sheet-data";
+import type { PersonName } from "@/lib/budget/views";
 import type { Reading } from "@/lib/evaluation/measures/reading";
 import type { UnitSystem } from "@/lib/units/us-customary";
 
-import type { BudgetRow, BudgetSheet } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import {
-  sheetAddress,
-  type SheetQuery,
-  type SortKey,
-} from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import type { Reader, ShownRow } from "@/app/(workspace)/products/[productCode]/_sheet/chosen-rows";
+import type { SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { BudgetTableHead } from "./budget-table-head";
 import { GroupTableRow } from "./group-table-row";
 import { ItemTableRow } from "./item-table-row";
+import { RowGap } from "./row-gap";
+import { MOST_ROWS } from "./row-window";
+import { TableKeys } from "./table-keys";
 import { TotalRows } from "./total-rows";
+import { useAnchoredRow } from "./use-anchored-row";
+import { useRowKeys } from "./use-row-keys";
+import { useRowWindow } from "./use-row-window";
+import { rowKey, useSheetRows } from "./use-sheet-rows";
 
 interface BudgetTableProps {
-  sheet: BudgetSheet;
-  rows: readonly BudgetRow[];
-  path: string;
+  product: string;
+  issue: number;
+  point: SheetPoint;
+  /** All rows, or the first ones of a long list. */
+  rows: readonly ShownRow[];
+  count: number;
+  people: readonly PersonName[];
+  reader: Reader;
+  /** Names of the methods. */
+  methods: Readonly<Record<string, string>>;
   query: SheetQuery;
   reading: Reading;
   units: UnitSystem;
 }
 
 /** Items and groups with their numbers; every number opens its working. */
-export function BudgetTable({ sheet, rows, path, query, reading, units }: BudgetTableProps) {
-  const { product } = sheet.budget;
-  const itemHref = (number: string) => itemAddress(product.code, number, query);
+export function BudgetTable(props: BudgetTableProps) {
+  const { product, point, count, query, reading, units, reader, methods } = props;
+  const path = `/products/${product}/budget`;
+  const { rows, keys, problem } = useSheetRows(props);
+  const { body, window, reveal, offsetOf } = useRowWindow({ keys, count });
+  const onKeyDown = useRowKeys(body, { count: keys.length, reveal });
+  useAnchoredRow(body, { keys, reveal, offsetOf });
+  const isLong = count > MOST_ROWS;
 
   return (
-    <Table
-      caption={`Items at ${sheet.point.operatingPoint} ${sheet.point.name}${reading.basis ? `; ${reading.basis}` : ""}`}
-    >
-      <TableHead>
-        <Head className="min-w-36 lg:min-w-48" {...sorting("number", path, query)}>
-          Item
-        </Head>
-        <Head className="max-sm:hidden">Method</Head>
-        <Head>Rev</Head>
-        {COLUMNS.map(({ key, label }) => (
-          <Head key={key} numeric unit={reading.unit} {...sorting(key, path, query)}>
-            {label}
-          </Head>
-        ))}
-        <Head className="max-sm:hidden">Against allocation</Head>
-      </TableHead>
-      <tbody>
-        {rows.map((row) =>
-          row.kind === "item" ? (
-            <ItemTableRow
-              key={`item ${row.number}`}
-              row={row}
-              isReference={sheet.isReference}
-              href={itemHref(row.number)}
-              reading={reading}
-              units={units}
-            />
-          ) : (
-            <GroupTableRow key={`group ${row.number}`} row={row} isReference={sheet.isReference} reading={reading} />
-          ),
-        )}
-      </tbody>
-      <tfoot>
-        <TotalRows point={sheet.point} reading={reading} />
-      </tfoot>
-    </Table>
+    <>
+      <Table
+        caption={`Items at ${point.operatingPoint} ${point.name}${reading.basis ? `; ${reading.basis}` : ""}`}
+        rowCount={isLong ? count : undefined}
+      >
+        <BudgetTableHead path={path} query={query} unit={reading.unit} />
+        <tbody ref={body} onKeyDown={onKeyDown}>
+          {window.shown.map((place, at) => {
+            const row = rows[place];
+            if (!row) return null;
+            const place_ = {
+              "data-row": rowKey(row),
+              "data-place": place,
+              ...(isLong ? { "aria-rowindex": place + 2 } : {}),
+            };
+            return (
+              <Fragment key={rowKey(row)}>
+                <RowGap height={window.gaps[at] ?? 0} />
+                {row.kind === "item" ? (
+                  <ItemTableRow
+                    place={place_}
+                    row={row}
+                    isReference={reader.isReference}
+                    method={methods[row.method] ?? row.method}
+                    href={itemAddress(product, row.number, query)}
+                    reading={reading}
+                    units={units}
+                  />
+                ) : (
+                  <GroupTableRow
+                    place={place_}
+                    row={row}
+                    isReference={reader.isReference}
+                    path={path}
+                    query={query}
+                    reading={reading}
+                  />
+                )}
+              </Fragment>
+            );
+          })}
+          <RowGap height={window.gaps.at(-1) ?? 0} />
+        </tbody>
+        <tfoot>
+          <TotalRows point={point} reading={reading} />
+        </tfoot>
+      </Table>
+      <TableKeys isLong={isLong} isRead={keys.length === count} problem={problem} />
+    </>
   );
-}
-
-const COLUMNS: readonly { key: SortKey; label: string }[] = [
-  { key: "basic", label: "Basic" },
-  { key: "growth", label: "Growth" },
-  { key: "predicted", label: "Predicted" },
-  { key: "allocation", label: "Allocation" },
-  { key: "margin", label: "Margin" },
-];
-
-/** First up, then down, then the order of the sheet again. */
-function sorting(key: SortKey, path: string, query: SheetQuery) {
-  const isSorted = query.sort === key;
-  const isDown = query.down !== undefined;
-  const next: Partial<SheetQuery> = !isSorted
-    ? { sort: key, down: undefined }
-    : isDown
-      ? { sort: "sheet", down: undefined }
-      : { sort: key, down: "1" };
-  return {
-    sortHref: sheetAddress(path, query, next),
-    sorted: isSorted ? (isDown ? ("descending" as const) : ("ascending" as const)) : undefined,
-  };
 }
 
 function itemAddress(productCode: string, number: string, { issue, point, measure }: SheetQuery): string {

@@ -10,7 +10,7 @@ import { formatHundredths } from "@/lib/units/format-newtons";
 import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 
 interface ConservationLineProps {
-  sums: AllocationsView;
+  sums: Omit<AllocationsView, "lines">;
   /** Of the reference operating point, where allocations are set. */
   reading: Reading;
   /** Where the reserve's history stands. */

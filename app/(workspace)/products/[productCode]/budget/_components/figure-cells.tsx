@@ -3,8 +3,7 @@ import { type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 
 import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 import { AllocationBar } from "@/app/(workspace)/products/[productCode]/_pictures/allocation-bar";
-import type { BudgetRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { isOver } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { isOver, type ShownRow } from "@/app/(workspace)/products/[productCode]/_sheet/chosen-rows";
 
 const SUMS = [
   { figure: "basic", label: "Basic estimate" },
@@ -13,7 +12,7 @@ const SUMS = [
 ] as const;
 
 interface FigureCellsProps {
-  row: BudgetRow;
+  row: ShownRow;
   isReference: boolean;
   reading: Reading;
 }

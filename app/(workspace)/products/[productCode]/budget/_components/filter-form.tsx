@@ -3,7 +3,8 @@ import Link from "next/link";
 
 import { Button } from "@/app/_components/button";
 
-import { sheetAddress, type SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { sheetAddress } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-address";
+import type { SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 
 interface FilterFormProps {
   path: string;
@@ -21,8 +22,8 @@ export function FilterForm({ path, query, found, all, isReference }: FilterFormP
   return (
     <form action={path} className="mt-6 mb-2 flex flex-wrap items-end gap-x-4 gap-y-2 print:hidden" role="search">
       {KEPT.map((key) => {
-        const value = query[key];
-        return value === undefined || value === "sheet" ? null : (
+        const value = key === "closed" ? query.closed.join(",") : query[key];
+        return value === undefined || value === "sheet" || value === "" ? null : (
           <input key={key} type="hidden" name={key} value={value} />
         );
       })}
@@ -63,7 +64,7 @@ export function FilterForm({ path, query, found, all, isReference }: FilterFormP
   );
 }
 
-const KEPT = ["issue", "on", "point", "measure", "sort", "down"] as const;
+const KEPT = ["issue", "on", "point", "measure", "sort", "down", "closed"] as const;
 
 const ONLY = [
   { value: "all", label: "all items" },

@@ -5,17 +5,19 @@ import { Fragment } from "react";
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { SymbolText } from "@/app/_components/symbol-text";
 import { Cell, Row, RowHead } from "@/app/_components/table";
-import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
 import type { Reading } from "@/lib/evaluation/measures/reading";
 import type { UnitSystem } from "@/lib/units/us-customary";
 
-import type { ItemRow } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { keyFigures } from "@/app/(workspace)/products/[productCode]/_sheet/key-figures";
+import type { ShownItem } from "@/app/(workspace)/products/[productCode]/_sheet/chosen-rows";
 import { FigureCells } from "./figure-cells";
 import { NoteCount, RowNotes } from "./row-notes";
+import type { RowPlace } from "./row-place";
 
 interface ItemTableRowProps {
-  row: ItemRow;
+  place: RowPlace;
+  row: ShownItem;
+  /** Name of the method. */
+  method: string;
   isReference: boolean;
   href: string;
   reading: Reading;
@@ -23,11 +25,11 @@ interface ItemTableRowProps {
 }
 
 /** An item on the budget sheet. */
-export function ItemTableRow({ row, isReference, href, reading, units }: ItemTableRowProps) {
-  const { number, name, owner, letter, depth, body, result } = row;
+export function ItemTableRow({ place, row, method, isReference, href, reading, units }: ItemTableRowProps) {
+  const { number, name, owner, letter, depth, saving, figures, notes } = row;
 
   return (
-    <Row data-item={number}>
+    <Row {...place} id={`item-${number}`} data-item={number}>
       <RowHead>
         <span className="block" style={{ paddingLeft: `${depth * 0.9}rem` }}>
           <Link href={href as Route} className="hover:underline">
@@ -36,17 +38,17 @@ export function ItemTableRow({ row, isReference, href, reading, units }: ItemTab
           </Link>
           <span className="block text-xs text-ink-2">
             {owner}
-            {body.saving ? " · a saving" : ""}
+            {saving ? " · a saving" : ""}
           </span>
           <span className="block sm:hidden">
-            <NoteCount notes={result.notes} />
+            <NoteCount notes={notes} />
           </span>
         </span>
       </RowHead>
       <Cell className="min-w-44 max-sm:hidden lg:max-w-64">
-        {ITEM_METHODS[body.method].label}
+        {method}
         <span className="block text-xs text-ink-2">
-          {keyFigures(body, result.answer, units).map(({ symbol, text }, at, all) => (
+          {figures[units].map(({ symbol, text }, at, all) => (
             <Fragment key={symbol}>
               <span className="whitespace-nowrap">
                 <SymbolText symbol={symbol} /> {text}
@@ -55,7 +57,7 @@ export function ItemTableRow({ row, isReference, href, reading, units }: ItemTab
             </Fragment>
           ))}
         </span>
-        <RowNotes notes={result.notes} />
+        <RowNotes notes={notes} />
       </Cell>
       <Cell>
         <RevisionLetter letter={letter} />

@@ -1,16 +1,14 @@
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
+import type { SheetPoint } from "@/lib/budget/sheet-data";
 import { measuresOffered } from "@/lib/evaluation/measures/measure-basis";
 import { readingOf, readText } from "@/lib/evaluation/measures/reading";
 import type { UnitSystem } from "@/lib/units/us-customary";
 import { MEASURE_NAMES } from "@/lib/vocabulary/measures";
 
-import { type BudgetSheet, sheetBasis } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-
 /** The total and its limit in every measure that the product has; newtons are what is kept. */
-export function MeasuresTable({ sheet, units }: { sheet: BudgetSheet; units: UnitSystem }) {
-  const { point } = sheet;
-  const basis = sheetBasis(sheet);
+export function MeasuresTable({ point, units }: { point: SheetPoint; units: UnitSystem }) {
+  const { basis } = point;
   const readings = measuresOffered(basis).flatMap((measure) => [
     ...(measure === "newtons" && units === "us" ? [readingOf(measure, basis, "si")] : []),
     readingOf(measure, basis, units),

@@ -1,11 +1,10 @@
 import { RevisionLetter } from "@/app/_components/revision-letter";
 import { SectionHeading } from "@/app/_components/section-heading";
-import { lineName } from "@/lib/evaluation/lines/name-book";
-import type { LineState } from "@/lib/evaluation/lines/line-state";
+import type { SheetData } from "@/lib/budget/sheet-data";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 
 /** Lines that are no longer in force: their numbers stay theirs. */
-export function RetiredLines({ lines }: { lines: readonly LineState[] }) {
+export function RetiredLines({ lines }: { lines: SheetData["retired"] }) {
   if (lines.length === 0) return null;
 
   return (
@@ -19,7 +18,7 @@ export function RetiredLines({ lines }: { lines: readonly LineState[] }) {
             <span className="text-ink-2">
               {LINE_KIND_NAMES[line.kind]} {line.number}
             </span>
-            <span>{lineName(line)}</span>
+            <span>{line.name}</span>
             <span className="ml-auto">
               <RevisionLetter letter={line.letter} />
             </span>

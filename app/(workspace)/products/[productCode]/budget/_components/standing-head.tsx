@@ -1,4 +1,4 @@
-import type { PointResult } from "@/lib/evaluation/budget/results";
+import type { PointTotals } from "@/lib/evaluation/budget/results";
 import { standingSentence } from "@/lib/evaluation/budget/standing-sentence";
 import { isKept, type Reading, readText } from "@/lib/evaluation/measures/reading";
 import { formatNewtons } from "@/lib/units/format-newtons";
@@ -7,7 +7,7 @@ import { formatPercent } from "@/lib/units/format-number";
 import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_components/workings-provider";
 
 /** Where the total stands, in one sentence; the figures behind it open their workings, in the newtons that decide. */
-export function StandingHead({ point, reading }: { point: PointResult; reading: Reading }) {
+export function StandingHead({ point, reading }: { point: PointTotals; reading: Reading }) {
   const { totals, limitHundredths, reserveHundredths, standing } = point;
   const isOver = standing === "over";
   const share = Math.abs(totals.margin) / (limitHundredths / 100);
@@ -40,7 +40,7 @@ export function StandingHead({ point, reading }: { point: PointResult; reading: 
 }
 
 /** "inside by 1.41 N": what was decided stands beside what is read. */
-function kept(point: PointResult): string {
+function kept(point: PointTotals): string {
   const sentence = standingSentence(point);
   return sentence.charAt(0).toLowerCase() + sentence.slice(1);
 }

@@ -1,5 +1,5 @@
 import { Cell, Row, RowHead } from "@/app/_components/table";
-import type { PointResult } from "@/lib/evaluation/budget/results";
+import type { PointTotals } from "@/lib/evaluation/budget/results";
 import { type Reading, readNumber } from "@/lib/evaluation/measures/reading";
 import { toHundredths } from "@/lib/units/rounding";
 
@@ -8,7 +8,7 @@ import { WorkingNumber } from "@/app/(workspace)/products/[productCode]/_compone
 const FIGURES = ["basic", "growth", "predicted"] as const;
 
 /** The totals, with savings and, where there are any, without them. */
-export function TotalRows({ point: { totals }, reading }: { point: PointResult; reading: Reading }) {
+export function TotalRows({ point: { totals }, reading }: { point: PointTotals; reading: Reading }) {
   const hasSavings = toHundredths(totals.predicted) !== toHundredths(totals.predictedWithoutSavings);
 
   return (

@@ -20,7 +20,8 @@ import { budgetFields } from "@/app/(workspace)/products/[productCode]/_componen
 import { ServiceWindCaution } from "@/app/(workspace)/products/[productCode]/_components/service-wind-caution";
 import { pageBudget, readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
 import { budgetSheet, pointOf, sheetBasis } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { sheetAddress, SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { sheetAddress } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-address";
+import { SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { ItemMatter } from "./_components/item-matter";
 import { RetiredItem } from "./_components/retired-item";
 import type { PointRow } from "./_components/results-table";

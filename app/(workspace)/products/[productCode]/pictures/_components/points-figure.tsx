@@ -24,7 +24,7 @@ export function PointsFigure({ budget, chosen }: { budget: BudgetAt; chosen: Cho
   const [first] = points;
   const staves = points.map(({ point, reading }) => ({
     label: point.operatingPoint,
-    input: staveInput(budgetSheet(budget, point)),
+    input: staveInput(budgetSheet(budget, point).rows, point),
     perNewton: reading.perNewton,
     text: `${readText(reading, point.totals.predicted)} predicted`,
   }));

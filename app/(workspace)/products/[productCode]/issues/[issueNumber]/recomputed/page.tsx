@@ -13,7 +13,8 @@ import { budgetFields } from "@/app/(workspace)/products/[productCode]/_componen
 import { PointChoice } from "@/app/(workspace)/products/[productCode]/_components/point-choice";
 import { pageBudget, readForPage } from "@/app/(workspace)/products/[productCode]/_server/read-page";
 import { pointOf } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { sheetAddress, SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { sheetAddress } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-address";
+import { SheetQuery } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
 import { RecomputedTable } from "./_components/recomputed-table";
 import { differencesSentence } from "./_components/differences-sentence";
 

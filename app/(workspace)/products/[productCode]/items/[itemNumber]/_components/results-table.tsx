@@ -8,7 +8,7 @@ import {
   type ItemRow,
   sheetBasis,
 } from "@/app/(workspace)/products/[productCode]/_sheet/budget-sheet";
-import { isOver } from "@/app/(workspace)/products/[productCode]/_sheet/sheet-filter";
+import { isOver } from "@/app/(workspace)/products/[productCode]/_sheet/chosen-rows";
 
 export interface PointRow {
   sheet: BudgetSheet;
