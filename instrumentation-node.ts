@@ -1,6 +1,6 @@
 import { sweepIncoming } from "@/lib/evidence/keep-file";
 import { startDeliveryLoop } from "@/lib/mail/delivery-loop";
-import { startReminderLoop } from "@/lib/proposals/reminder-loop";
+import { startReminderLoop } from "@/lib/proposals/notices/reminder-loop";
 import { openDatabase } from "@/models/database";
 import { migrateDatabase } from "@/models/migrations/migrate";
 

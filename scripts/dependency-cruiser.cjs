@@ -40,6 +40,27 @@ function packageStaysIn(name, home, packages) {
   };
 }
 
+/**
+ * lib/proposals from the ground up: rows as they are kept, what follows from them, who is told, the acts, what pages
+ * read. The files at its root are its vocabulary; queries.ts is the door of the pages.
+ */
+const PROPOSAL_FLOORS = [
+  ...["records", "review", "notices"],
+  ...["drafting", "submitting", "signing", "remarks", "files"],
+  ...["reading", "day-sheet"],
+];
+
+/** No floor of lib/proposals imports from one above it. */
+function proposalFloors() {
+  return PROPOSAL_FLOORS.slice(0, -1).map((floor, at) => ({
+    name: `proposals-${floor}-imports`,
+    comment: "lib/proposals is built from its records up to what pages read",
+    severity: "error",
+    from: { path: `^lib/proposals/${floor}/` },
+    to: { path: `^lib/proposals/(${PROPOSAL_FLOORS.slice(at + 1).join("|")})/` },
+  }));
+}
+
 const DOMAIN = ["^lib/(vocabulary|units|aero|evaluation|audit|users|evidence)/", "^models/", "^policies/"];
 
 /** @type {import("dependency-cruiser").IConfiguration} */
@@ -72,6 +93,7 @@ module.exports = {
       from: { pathNot: "^(tests|scripts)/" },
       to: { path: "^(tests|scripts)/" },
     },
+    ...proposalFloors(),
     only("lib/vocabulary", [], "words everyone may use: no package, no Node built-in"),
     only("lib/units", npm("js-quantities"), "the one unit package"),
     only("lib/aero", ["^lib/units/"], "pure formulas"),

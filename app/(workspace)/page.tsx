@@ -9,8 +9,8 @@ import { UtcTime } from "@/app/_components/utc-time";
 import { dayText } from "@/app/_components/utc-text";
 import { productsToEstablish } from "@/app/_server/products-to-establish";
 import { requireActor } from "@/app/_server/session";
-import { daySheet } from "@/lib/proposals/day-sheet";
-import { noteVisit } from "@/lib/proposals/visits";
+import { daySheet } from "@/lib/proposals/day-sheet/day-sheet";
+import { noteVisit } from "@/lib/proposals/records/visits";
 import { systemClock } from "@/lib/vocabulary/clock";
 
 import { AwaitedTable } from "./_components/day-sheet/awaited-table";

@@ -1,4 +1,4 @@
-import type { AddedFile } from "@/lib/proposals/add-file";
+import type { AddedFile } from "@/lib/proposals/files/add-file";
 import { fileSizeText, LONGEST_FILE } from "@/lib/vocabulary/files";
 
 export interface FileToSend {

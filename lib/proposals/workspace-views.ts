@@ -2,9 +2,16 @@ import type { LineKind } from "@/lib/vocabulary/lines";
 import type { ProposalState } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
 import type { Standing } from "@/lib/vocabulary/standing";
-import type { MarginEffect } from "./margin-share";
 import type { DraftContent } from "./schema";
 import type { LineReference, PersonView } from "./views";
+
+/** What a change does to the margin to the limit, in newtons at the operating point that stands worst with it. */
+export interface MarginEffect {
+  operatingPoint: string;
+  predictedDelta: number;
+  /** Margin on today's issue, before the change. */
+  marginWas: number;
+}
 
 /** The working copy as its editors see it. */
 export interface DraftView {

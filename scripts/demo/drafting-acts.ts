@@ -1,9 +1,9 @@
 import { Readable } from "node:stream";
-import { addFile } from "@/lib/proposals/add-file";
-import { propose } from "@/lib/proposals/propose";
-import { saveDraft } from "@/lib/proposals/save-draft";
+import { addFile } from "@/lib/proposals/files/add-file";
+import { propose } from "@/lib/proposals/submitting/propose";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
 import { AddFileInput, SaveDraftInput, type DraftContent } from "@/lib/proposals/schema";
-import { startDraft } from "@/lib/proposals/start-draft";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
 import type { DemoFile } from "./demo-files";
 import type { Desk } from "./desk";
 import type { DemoPerson } from "./people";

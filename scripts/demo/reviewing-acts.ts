@@ -1,10 +1,10 @@
-import { addRemark } from "@/lib/proposals/add-remark";
-import { fileToOpen, noteOpening } from "@/lib/proposals/open-file";
-import { raiseObjection } from "@/lib/proposals/raise-objection";
-import { returnProposal } from "@/lib/proposals/return-proposal";
+import { addRemark } from "@/lib/proposals/remarks/add-remark";
+import { fileToOpen, noteOpening } from "@/lib/proposals/files/open-file";
+import { raiseObjection } from "@/lib/proposals/signing/raise-objection";
+import { returnProposal } from "@/lib/proposals/signing/return-proposal";
 import { AddRemarkInput, ReturnProposalInput, SignProposalInput } from "@/lib/proposals/schema";
-import { settleRemark } from "@/lib/proposals/settle-remark";
-import { signProposal } from "@/lib/proposals/sign-proposal";
+import { settleRemark } from "@/lib/proposals/remarks/settle-remark";
+import { signProposal } from "@/lib/proposals/signing/sign-proposal";
 import { SIGNATURE_MEANINGS } from "@/lib/vocabulary/proposals";
 import type { Capacity } from "@/lib/vocabulary/roles";
 import { Attachment } from "@/models/attachment";

@@ -1,9 +1,9 @@
 import { loadNewestBudget, productByCode } from "@/lib/budget/load-budget";
 import type { LineState } from "@/lib/evaluation/lines/line-state";
-import { budgetReader } from "@/lib/proposals/budget-reader";
-import { proposalById } from "@/lib/proposals/proposal-record";
-import { roundOf } from "@/lib/proposals/round-record";
-import { reviewRound } from "@/lib/proposals/round-review";
+import { budgetReader } from "@/lib/proposals/records/budget-reader";
+import { proposalById } from "@/lib/proposals/records/proposal-record";
+import { roundOf } from "@/lib/proposals/records/round-record";
+import { reviewRound } from "@/lib/proposals/review/round-review";
 import type { Clock } from "@/lib/vocabulary/clock";
 import type { LineKind } from "@/lib/vocabulary/lines";
 import { inSnapshot } from "@/models/database";

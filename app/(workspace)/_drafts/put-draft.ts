@@ -1,4 +1,4 @@
-import type { SavedDraft } from "@/lib/proposals/save-draft";
+import type { SavedDraft } from "@/lib/proposals/drafting/save-draft";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 import type { FieldFault } from "@/lib/vocabulary/refusal";

@@ -11,7 +11,7 @@ import { MeasureBar } from "@/app/(workspace)/_measures/measure-bar";
 import { currentPreferences, requireActor } from "@/app/_server/session";
 import { NEWTONS } from "@/lib/evaluation/measures/reading";
 import { registerSheet } from "@/lib/products/register-sheet";
-import { waitingByProduct } from "@/lib/proposals/waiting-by-product";
+import { waitingByProduct } from "@/lib/proposals/day-sheet/waiting-by-product";
 import { systemClock } from "@/lib/vocabulary/clock";
 import { isAllowed } from "@/policies/authorize";
 

@@ -2,6 +2,6 @@
 
 import { defineAction } from "@/app/_server/define-action";
 import { SignSheetsInput } from "@/lib/proposals/schema";
-import { signSheets } from "@/lib/proposals/sign-sheets";
+import { signSheets } from "@/lib/proposals/signing/sign-sheets";
 
 export const signSheetsAction = defineAction(SignSheetsInput, signSheets);

@@ -5,7 +5,7 @@ import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { dayText } from "@/app/_components/utc-text";
 import { requireActor } from "@/app/_server/session";
-import { sheetsToSign } from "@/lib/proposals/sheets-to-sign";
+import { sheetsToSign } from "@/lib/proposals/reading/sheets-to-sign";
 import { systemClock } from "@/lib/vocabulary/clock";
 
 import { SignSheetsForm } from "./_components/sign-sheets-form";

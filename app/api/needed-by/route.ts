@@ -1,5 +1,5 @@
 import { currentActor } from "@/app/_server/session";
-import { neededByCalendar } from "@/lib/proposals/needed-by-calendar";
+import { neededByCalendar } from "@/lib/proposals/day-sheet/needed-by-calendar";
 
 /** The reader's needed-by dates as a calendar file. */
 export async function GET(request: Request): Promise<Response> {

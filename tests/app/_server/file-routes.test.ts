@@ -2,7 +2,7 @@ import { beforeEach, describe, expect, it, vi } from "vitest";
 import { POST } from "@/app/api/products/[productCode]/files/route";
 import { GET } from "@/app/api/products/[productCode]/files/[fileId]/route";
 import { isDownload } from "@/app/_server/security-headers";
-import { voidFile } from "@/lib/proposals/void-file";
+import { voidFile } from "@/lib/proposals/files/void-file";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { LONGEST_FILE } from "@/lib/vocabulary/files";
 import { Attachment } from "@/models/attachment";

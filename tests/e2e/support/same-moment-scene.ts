@@ -1,5 +1,5 @@
 // A script of its own: the domain cannot be loaded into the process of the tests.
-import { shareDraft } from "@/lib/proposals/share-draft";
+import { shareDraft } from "@/lib/proposals/drafting/share-draft";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { adding, bluff, content, revising } from "./http-bodies";
 import { PRODUCT } from "./http-people";

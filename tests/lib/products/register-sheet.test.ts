@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { registerSheet } from "@/lib/products/register-sheet";
-import { waitingByProduct } from "@/lib/proposals/waiting-by-product";
+import { waitingByProduct } from "@/lib/proposals/day-sheet/waiting-by-product";
 import { withDatabase } from "@/tests/support/database";
 import { person, product, withRole } from "@/tests/support/people";
 import { cast, close, Q, threeIssues } from "@/tests/support/three-issues";

@@ -1,10 +1,10 @@
 import { QueryTypes } from "sequelize";
 import { describe, expect, it } from "vitest";
 import { verifyChain } from "@/lib/audit/verify-chain";
-import { propose } from "@/lib/proposals/propose";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { signProposal } from "@/lib/proposals/sign-proposal";
-import { startDraft } from "@/lib/proposals/start-draft";
+import { propose } from "@/lib/proposals/submitting/propose";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { signProposal } from "@/lib/proposals/signing/sign-proposal";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
 import { database } from "@/models/database";
 import { withDatabase } from "@/tests/support/database";
 import { adding, approval, approves, CODE, content, formKey, proposed, team } from "./review-cycle";

@@ -1,9 +1,9 @@
 import { existsSync, readdirSync } from "node:fs";
 import { filesFolder } from "@/lib/evidence/file-places";
-import { addFile, type AddedFile } from "@/lib/proposals/add-file";
-import { propose } from "@/lib/proposals/propose";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { startDraft } from "@/lib/proposals/start-draft";
+import { addFile, type AddedFile } from "@/lib/proposals/files/add-file";
+import { propose } from "@/lib/proposals/submitting/propose";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { inPieces, samplePdf } from "@/tests/support/sample-files";
 import { adding, CODE, content, formKey, type Team } from "./review-cycle";

@@ -4,8 +4,9 @@ import { firstModel } from "./walk/first-issues";
 import { pureDesk } from "./walk/pure-desk";
 import { walkCommands } from "./walk/walk-commands";
 
-/** More of them are run by hand: LEEBOARD_PURE_WALKS=20000. */
-const WALKS = Number(process.env.LEEBOARD_PURE_WALKS ?? 500);
+/** More of them, and others, are run by hand: LEEBOARD_PURE_WALKS=20000 LEEBOARD_WALK_SEED=1. */
+const WALKS = Number(process.env.LEEBOARD_PURE_WALKS ?? 2000);
+const SEED = Number(process.env.LEEBOARD_WALK_SEED ?? 20_261_201);
 const ACTS = 24;
 const ACTS_TOLD = [
   ...["start", "save", "propose", "propose again", "approve as reviewer", "approve as program_manager", "return"],
@@ -21,7 +22,7 @@ describe(`${WALKS} walks of random acts by random people, in memory`, () => {
       fc.asyncProperty(walks, (commands) =>
         fc.asyncModelRun(() => ({ model: firstModel(), real: pureDesk() }), commands),
       ),
-      { numRuns: WALKS },
+      { numRuns: WALKS, seed: SEED },
     );
     // The walks are worth something only if they went everywhere, allowed and not.
     for (const act of ACTS_TOLD) {

@@ -1,9 +1,9 @@
 import { describe, expect, it } from "vitest";
 import { historyPage } from "@/lib/audit/queries";
-import { addRemark } from "@/lib/proposals/add-remark";
-import { propose } from "@/lib/proposals/propose";
+import { addRemark } from "@/lib/proposals/remarks/add-remark";
+import { propose } from "@/lib/proposals/submitting/propose";
 import { proposalView } from "@/lib/proposals/queries";
-import { saveDraft } from "@/lib/proposals/save-draft";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
 import { Comment } from "@/models/comment";
 import { OutboxMessage } from "@/models/outbox-message";
 import { withDatabase } from "@/tests/support/database";

@@ -1,10 +1,10 @@
 import { describe, expect, it } from "vitest";
 import { newOperatingPoint } from "@/lib/evaluation/lines/operating-point-body";
-import { editorView } from "@/lib/proposals/editor-view";
-import { previewProposal } from "@/lib/proposals/preview-proposal";
-import { propose } from "@/lib/proposals/propose";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { startDraft } from "@/lib/proposals/start-draft";
+import { editorView } from "@/lib/proposals/reading/editor-view";
+import { previewProposal } from "@/lib/proposals/review/preview-proposal";
+import { propose } from "@/lib/proposals/submitting/propose";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { withDatabase } from "@/tests/support/database";
 import {

@@ -1,12 +1,12 @@
 import { describe, expect, it } from "vitest";
 import { historyPage } from "@/lib/audit/queries";
-import { editorView } from "@/lib/proposals/editor-view";
-import { propose } from "@/lib/proposals/propose";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { shareDraft } from "@/lib/proposals/share-draft";
-import { startDraft } from "@/lib/proposals/start-draft";
-import { unshareDraft } from "@/lib/proposals/unshare-draft";
-import { withdrawProposal } from "@/lib/proposals/withdraw-proposal";
+import { editorView } from "@/lib/proposals/reading/editor-view";
+import { propose } from "@/lib/proposals/submitting/propose";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { shareDraft } from "@/lib/proposals/drafting/share-draft";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
+import { unshareDraft } from "@/lib/proposals/drafting/unshare-draft";
+import { withdrawProposal } from "@/lib/proposals/submitting/withdraw-proposal";
 import { withDatabase } from "@/tests/support/database";
 import { adding, approvedItems, CODE, content, formKey, revising, team } from "./review-cycle";
 

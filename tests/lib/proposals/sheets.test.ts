@@ -1,15 +1,15 @@
 import { describe, expect, it } from "vitest";
-import { addRemark } from "@/lib/proposals/add-remark";
-import { budgetWith } from "@/lib/proposals/budget-with";
-import { daySheet } from "@/lib/proposals/day-sheet";
-import { propose } from "@/lib/proposals/propose";
+import { addRemark } from "@/lib/proposals/remarks/add-remark";
+import { budgetWith } from "@/lib/proposals/reading/budget-with";
+import { daySheet } from "@/lib/proposals/day-sheet/day-sheet";
+import { propose } from "@/lib/proposals/submitting/propose";
 import { proposalList, proposalPatch, proposalView } from "@/lib/proposals/queries";
-import { raiseObjection } from "@/lib/proposals/raise-objection";
-import { returnProposal } from "@/lib/proposals/return-proposal";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { shareDraft } from "@/lib/proposals/share-draft";
-import { startDraft } from "@/lib/proposals/start-draft";
-import { noteVisit } from "@/lib/proposals/visits";
+import { raiseObjection } from "@/lib/proposals/signing/raise-objection";
+import { returnProposal } from "@/lib/proposals/signing/return-proposal";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { shareDraft } from "@/lib/proposals/drafting/share-draft";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
+import { noteVisit } from "@/lib/proposals/records/visits";
 import { addItem, shareItem } from "@/tests/support/budget-on-file";
 import { withDatabase } from "@/tests/support/database";
 import {

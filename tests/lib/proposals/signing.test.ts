@@ -1,11 +1,11 @@
 import { describe, expect, it } from "vitest";
 import { historyPage } from "@/lib/audit/queries";
-import { nameReviewer } from "@/lib/proposals/name-reviewer";
+import { nameReviewer } from "@/lib/proposals/signing/name-reviewer";
 import { proposalView } from "@/lib/proposals/queries";
-import { remindSigners } from "@/lib/proposals/remind-signers";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { shareDraft } from "@/lib/proposals/share-draft";
-import { signProposal } from "@/lib/proposals/sign-proposal";
+import { remindSigners } from "@/lib/proposals/notices/remind-signers";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { shareDraft } from "@/lib/proposals/drafting/share-draft";
+import { signProposal } from "@/lib/proposals/signing/sign-proposal";
 import { inTransaction } from "@/models/database";
 import { Deputy } from "@/models/deputy";
 import { OutboxMessage } from "@/models/outbox-message";

@@ -1,9 +1,9 @@
 import { describe, expect, it } from "vitest";
 import { allocationsOf } from "@/lib/evaluation/budget/indexed-state";
-import { propose } from "@/lib/proposals/propose";
+import { propose } from "@/lib/proposals/submitting/propose";
 import { proposalView } from "@/lib/proposals/queries";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { startDraft } from "@/lib/proposals/start-draft";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
 import { Round } from "@/models/round";
 import { newestBudget } from "@/tests/support/budget-on-file";
 import { withDatabase } from "@/tests/support/database";

@@ -1,11 +1,11 @@
 import { describe, expect, it } from "vitest";
-import { addFile } from "@/lib/proposals/add-file";
-import { itemFiles } from "@/lib/proposals/item-files";
-import { fileToOpen, noteOpening } from "@/lib/proposals/open-file";
-import { openLineHistory } from "@/lib/proposals/open-line-history";
+import { addFile } from "@/lib/proposals/files/add-file";
+import { itemFiles } from "@/lib/proposals/reading/item-files";
+import { fileToOpen, noteOpening } from "@/lib/proposals/files/open-file";
+import { openLineHistory } from "@/lib/proposals/reading/open-line-history";
 import { proposalView } from "@/lib/proposals/queries";
-import { saveDraft } from "@/lib/proposals/save-draft";
-import { propose } from "@/lib/proposals/propose";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
+import { propose } from "@/lib/proposals/submitting/propose";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Looking } from "@/models/looking";
 import { Proposal } from "@/models/proposal";

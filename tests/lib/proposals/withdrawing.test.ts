@@ -1,9 +1,9 @@
 import { describe, expect, it } from "vitest";
 import { historyPage } from "@/lib/audit/queries";
 import { verifyChain } from "@/lib/audit/verify-chain";
-import { raiseObjection } from "@/lib/proposals/raise-objection";
-import { startDraft } from "@/lib/proposals/start-draft";
-import { withdrawProposal } from "@/lib/proposals/withdraw-proposal";
+import { raiseObjection } from "@/lib/proposals/signing/raise-objection";
+import { startDraft } from "@/lib/proposals/drafting/start-draft";
+import { withdrawProposal } from "@/lib/proposals/submitting/withdraw-proposal";
 import { OutboxMessage } from "@/models/outbox-message";
 import { Proposal } from "@/models/proposal";
 import { newestBudget } from "@/tests/support/budget-on-file";

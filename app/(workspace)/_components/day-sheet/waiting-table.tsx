@@ -5,8 +5,8 @@ import { EmptyNote } from "@/app/_components/empty-note";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { UtcTime } from "@/app/_components/utc-time";
 import { dayText } from "@/app/_components/utc-text";
-import { marginShare } from "@/lib/proposals/margin-share";
-import type { WaitingOrder } from "@/lib/proposals/waiting-order";
+import { marginShare } from "@/lib/proposals/review/margin-share";
+import type { WaitingOrder } from "@/lib/proposals/day-sheet/waiting-order";
 import type { DaySheetEntry } from "@/lib/proposals/workspace-views";
 import { formatNewtons } from "@/lib/units/format-newtons";
 

@@ -4,7 +4,7 @@ import Link from "next/link";
 import { CONTROL } from "@/app/_components/field";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { dayText } from "@/app/_components/utc-text";
-import type { SheetToSign } from "@/lib/proposals/sheets-to-sign";
+import type { SheetToSign } from "@/lib/proposals/reading/sheets-to-sign";
 import { SIGNATURE_MEANINGS } from "@/lib/vocabulary/proposals";
 import { ROLE_NAMES } from "@/lib/vocabulary/roles";
 

@@ -8,8 +8,8 @@ import { Button } from "@/app/_components/button";
 import { EmptyNote } from "@/app/_components/empty-note";
 import { Notice } from "@/app/_components/notice";
 import { TextField } from "@/app/_components/text-field";
-import type { SheetToSign } from "@/lib/proposals/sheets-to-sign";
-import type { SignedSheets } from "@/lib/proposals/sign-sheets";
+import type { SheetToSign } from "@/lib/proposals/reading/sheets-to-sign";
+import type { SignedSheets } from "@/lib/proposals/signing/sign-sheets";
 
 import { signSheetsAction } from "../actions";
 import { SheetsTable } from "./sheets-table";

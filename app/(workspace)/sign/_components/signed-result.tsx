@@ -1,5 +1,5 @@
 import { Notice } from "@/app/_components/notice";
-import type { SignedSheets } from "@/lib/proposals/sign-sheets";
+import type { SignedSheets } from "@/lib/proposals/signing/sign-sheets";
 
 interface SignedResultProps {
   answer: SignedSheets;

@@ -3,7 +3,7 @@ import { adoptedVersion } from "@/lib/evaluation/budget/adopted-versions";
 import { evaluateBudget } from "@/lib/evaluation/budget/evaluate-budget";
 import { previewChange } from "@/lib/evaluation/budget/preview-change";
 import { touchesOf } from "@/lib/evaluation/budget/touches";
-import { touchSentence, touchTitle } from "@/lib/proposals/touch-text";
+import { touchSentence, touchTitle } from "@/lib/proposals/review/touch-text";
 import { retire, revise, STATE } from "./edit-fixture";
 
 const FROZEN = evaluateBudget(STATE);

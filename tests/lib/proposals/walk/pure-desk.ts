@@ -1,5 +1,5 @@
-import { actorsOf } from "@/lib/proposals/authorize-change";
-import { stateAfter } from "@/lib/proposals/moves";
+import { actorsOf } from "@/lib/proposals/drafting/authorize-change";
+import { stateAfter } from "@/lib/proposals/records/moves";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import type { Role } from "@/lib/vocabulary/roles";
 import { authorize } from "@/policies/authorize";

@@ -3,7 +3,7 @@ import { previewChange } from "@/lib/evaluation/budget/preview-change";
 import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import { newTerms } from "@/lib/evaluation/lines/terms-body";
 import { firstIssueLines } from "@/lib/products/first-issue";
-import type { BudgetAtIssue } from "@/lib/proposals/preview-proposal";
+import type { BudgetAtIssue } from "@/lib/proposals/review/preview-proposal";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Refusal } from "@/lib/vocabulary/refusal";

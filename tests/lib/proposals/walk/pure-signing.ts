@@ -1,8 +1,8 @@
 import { ownersOfEdits, releasedGrowth } from "@/lib/budget/routing-facts";
-import { stateAfter, type Move } from "@/lib/proposals/moves";
-import { overtakenReasons } from "@/lib/proposals/overtaken";
-import type { BudgetAtIssue } from "@/lib/proposals/preview-proposal";
-import { sameValue } from "@/lib/proposals/same-value";
+import { stateAfter, type Move } from "@/lib/proposals/records/moves";
+import { overtakenReasons } from "@/lib/proposals/review/overtaken";
+import type { BudgetAtIssue } from "@/lib/proposals/review/preview-proposal";
+import { sameValue } from "@/lib/proposals/records/same-value";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { Actor } from "@/lib/vocabulary/actor";
 import type { Capacity } from "@/lib/vocabulary/roles";

@@ -1,11 +1,11 @@
 import { termsOf } from "@/lib/evaluation/budget/indexed-state";
-import { authorizeChange } from "@/lib/proposals/authorize-change";
-import { isOpen, stateAfter, wrongStateSentence } from "@/lib/proposals/moves";
-import { overtakenReasons } from "@/lib/proposals/overtaken";
-import { previewProposal, type BudgetAtIssue } from "@/lib/proposals/preview-proposal";
-import { sameValue } from "@/lib/proposals/same-value";
+import { authorizeChange } from "@/lib/proposals/drafting/authorize-change";
+import { isOpen, stateAfter, wrongStateSentence } from "@/lib/proposals/records/moves";
+import { overtakenReasons } from "@/lib/proposals/review/overtaken";
+import { previewProposal, type BudgetAtIssue } from "@/lib/proposals/review/preview-proposal";
+import { sameValue } from "@/lib/proposals/records/same-value";
 import { DraftEdit, type DraftContent } from "@/lib/proposals/schema";
-import { carriedEdits, settledEdit } from "@/lib/proposals/settlement";
+import { carriedEdits, settledEdit } from "@/lib/proposals/review/settlement";
 import type { Actor } from "@/lib/vocabulary/actor";
 import { Refusal } from "@/lib/vocabulary/refusal";
 import { authorize } from "@/policies/authorize";

@@ -2,6 +2,6 @@
 
 import { defineAction } from "@/app/_server/define-action";
 import { VoidFileInput } from "@/lib/proposals/schema";
-import { voidFile } from "@/lib/proposals/void-file";
+import { voidFile } from "@/lib/proposals/files/void-file";
 
 export const voidFileAction = defineAction(VoidFileInput, voidFile);

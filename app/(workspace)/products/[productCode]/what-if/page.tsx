@@ -10,7 +10,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { NEWTONS } from "@/lib/evaluation/measures/reading";
-import { whatIfView, type WhatIfView } from "@/lib/proposals/what-if";
+import { whatIfView, type WhatIfView } from "@/lib/proposals/reading/what-if";
 
 import { EffectSummary } from "../_components/effect-summary";
 import { ItemEffects } from "../_components/item-effects";

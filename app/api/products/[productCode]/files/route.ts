@@ -4,7 +4,7 @@ import { refusalResponse, signedOut } from "@/app/_server/route-problem";
 import { NO_CONTENT_POLICY, securityHeaders } from "@/app/_server/security-headers";
 import { currentActor } from "@/app/_server/session";
 import { tooLarge } from "@/lib/evidence/receive-file";
-import { addFile } from "@/lib/proposals/add-file";
+import { addFile } from "@/lib/proposals/files/add-file";
 import { AddFileInput } from "@/lib/proposals/schema";
 import { LONGEST_FILE } from "@/lib/vocabulary/files";
 import { Refusal } from "@/lib/vocabulary/refusal";

@@ -13,7 +13,7 @@ import { findLine } from "@/lib/evaluation/budget/indexed-state";
 import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
 import type { LineOf } from "@/lib/evaluation/lines/line-state";
 import type { PointResult } from "@/lib/evaluation/budget/results";
-import { type ItemFile, itemFiles } from "@/lib/proposals/item-files";
+import { type ItemFile, itemFiles } from "@/lib/proposals/reading/item-files";
 
 import { AsStoodBanner } from "@/app/(workspace)/products/[productCode]/_components/as-stood-banner";
 import { budgetFields } from "@/app/(workspace)/products/[productCode]/_components/sheet-fields";

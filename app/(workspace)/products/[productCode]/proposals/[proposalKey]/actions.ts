@@ -1,11 +1,11 @@
 "use server";
 
 import { defineAction } from "@/app/_server/define-action";
-import { addRemark } from "@/lib/proposals/add-remark";
-import { nameReviewer } from "@/lib/proposals/name-reviewer";
-import { openLineHistory } from "@/lib/proposals/open-line-history";
-import { raiseObjection } from "@/lib/proposals/raise-objection";
-import { returnProposal } from "@/lib/proposals/return-proposal";
+import { addRemark } from "@/lib/proposals/remarks/add-remark";
+import { nameReviewer } from "@/lib/proposals/signing/name-reviewer";
+import { openLineHistory } from "@/lib/proposals/reading/open-line-history";
+import { raiseObjection } from "@/lib/proposals/signing/raise-objection";
+import { returnProposal } from "@/lib/proposals/signing/return-proposal";
 import {
   AddRemarkInput,
   NameReviewerInput,
@@ -17,10 +17,10 @@ import {
   TakeBackApprovalInput,
   WithdrawProposalInput,
 } from "@/lib/proposals/schema";
-import { settleRemark } from "@/lib/proposals/settle-remark";
-import { signProposal } from "@/lib/proposals/sign-proposal";
-import { takeBackApproval } from "@/lib/proposals/take-back-approval";
-import { withdrawProposal } from "@/lib/proposals/withdraw-proposal";
+import { settleRemark } from "@/lib/proposals/remarks/settle-remark";
+import { signProposal } from "@/lib/proposals/signing/sign-proposal";
+import { takeBackApproval } from "@/lib/proposals/signing/take-back-approval";
+import { withdrawProposal } from "@/lib/proposals/submitting/withdraw-proposal";
 
 export const addRemarkAction = defineAction(AddRemarkInput, addRemark);
 export const settleRemarkAction = defineAction(SettleRemarkInput, settleRemark);

@@ -1,6 +1,6 @@
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import type { MovedAllocation } from "@/lib/proposals/what-if";
+import type { MovedAllocation } from "@/lib/proposals/reading/what-if";
 import { formatHundredths } from "@/lib/units/format-newtons";
 
 /** The rows of the allocations sheet that the set would move, limit and reserve among them. */

@@ -4,7 +4,7 @@ import Link from "next/link";
 import { NoteMark } from "@/app/_components/note-mark";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import type { JointStep } from "@/lib/proposals/joint-change";
+import type { JointStep } from "@/lib/proposals/review/joint-change";
 
 interface StepsTableProps {
   steps: readonly JointStep[];

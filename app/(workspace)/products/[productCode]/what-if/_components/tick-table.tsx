@@ -6,7 +6,7 @@ import { useOptimistic, useTransition } from "react";
 
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import { type Reading, readChangeNumber } from "@/lib/evaluation/measures/reading";
-import type { WhatIfCandidate } from "@/lib/proposals/what-if";
+import type { WhatIfCandidate } from "@/lib/proposals/reading/what-if";
 
 import { tickedAfter, whatIfAddress } from "./ticked-keys";
 

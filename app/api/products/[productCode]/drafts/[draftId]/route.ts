@@ -1,5 +1,5 @@
 import { answerWrite } from "@/app/_server/route-problem";
-import { saveDraft } from "@/lib/proposals/save-draft";
+import { saveDraft } from "@/lib/proposals/drafting/save-draft";
 import { SaveDraftInput } from "@/lib/proposals/schema";
 
 type Context = RouteContext<"/api/products/[productCode]/drafts/[draftId]">;

@@ -6,7 +6,7 @@ import { refusalResponse, signedOut } from "@/app/_server/route-problem";
 import { DOWNLOAD_POLICY } from "@/app/_server/security-headers";
 import { currentActor } from "@/app/_server/session";
 import { downloadName } from "@/lib/evidence/download-name";
-import { fileToOpen, noteOpening, type OpenedFile } from "@/lib/proposals/open-file";
+import { fileToOpen, noteOpening, type OpenedFile } from "@/lib/proposals/files/open-file";
 import { Refusal } from "@/lib/vocabulary/refusal";
 
 type Context = RouteContext<"/api/products/[productCode]/files/[fileId]">;

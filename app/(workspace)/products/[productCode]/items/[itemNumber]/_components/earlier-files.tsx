@@ -5,7 +5,7 @@ import { RevisionLetter } from "@/app/_components/revision-letter";
 import { SectionHeading } from "@/app/_components/section-heading";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { LineRevisionView } from "@/lib/budget/views";
-import type { ItemFile } from "@/lib/proposals/item-files";
+import type { ItemFile } from "@/lib/proposals/reading/item-files";
 
 import { FileCell } from "@/app/(workspace)/products/[productCode]/_evidence/file-cell";
 

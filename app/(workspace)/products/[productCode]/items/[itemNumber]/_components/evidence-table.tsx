@@ -1,6 +1,6 @@
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
 import type { EvidenceCitation } from "@/lib/evaluation/lines/items/item-common";
-import type { ItemFile } from "@/lib/proposals/item-files";
+import type { ItemFile } from "@/lib/proposals/reading/item-files";
 
 import { AgeText } from "@/app/(workspace)/products/[productCode]/_evidence/age-text";
 import { FileCell } from "@/app/(workspace)/products/[productCode]/_evidence/file-cell";

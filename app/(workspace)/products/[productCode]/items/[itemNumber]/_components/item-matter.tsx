@@ -8,7 +8,7 @@ import type { LineRevisionView } from "@/lib/budget/views";
 import { fieldRows } from "@/lib/evaluation/lines/field-rows";
 import type { LineOf } from "@/lib/evaluation/lines/line-state";
 import { nameBookOf } from "@/lib/evaluation/lines/name-book";
-import type { ItemFile } from "@/lib/proposals/item-files";
+import type { ItemFile } from "@/lib/proposals/reading/item-files";
 
 import { FieldTable } from "@/app/(workspace)/products/[productCode]/_components/field-table";
 import { RevisionsTable } from "@/app/(workspace)/products/[productCode]/_components/revisions-table";

@@ -1,10 +1,10 @@
 "use server";
 
 import { defineAction } from "@/app/_server/define-action";
-import { propose } from "@/lib/proposals/propose";
+import { propose } from "@/lib/proposals/submitting/propose";
 import { ProposeInput, ShareDraftInput } from "@/lib/proposals/schema";
-import { shareDraft } from "@/lib/proposals/share-draft";
-import { unshareDraft } from "@/lib/proposals/unshare-draft";
+import { shareDraft } from "@/lib/proposals/drafting/share-draft";
+import { unshareDraft } from "@/lib/proposals/drafting/unshare-draft";
 
 export const proposeAction = defineAction(ProposeInput, propose);
 export const shareDraftAction = defineAction(ShareDraftInput, shareDraft);

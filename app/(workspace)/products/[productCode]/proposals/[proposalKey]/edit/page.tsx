@@ -6,7 +6,7 @@ import { PageHeading } from "@/app/_components/page-heading";
 import { Sheet } from "@/app/_components/sheet";
 import { TitleBlock } from "@/app/_components/title-block";
 import { currentPreferences, requireActor } from "@/app/_server/session";
-import { type EditorView, editorView } from "@/lib/proposals/editor-view";
+import { type EditorView, editorView } from "@/lib/proposals/reading/editor-view";
 import { Refusal } from "@/lib/vocabulary/refusal";
 
 import { ProposalEditor } from "./_components/proposal-editor";

@@ -8,7 +8,7 @@ import { ITEM_METHODS } from "@/lib/evaluation/lines/item-methods";
 import type { BudgetState } from "@/lib/evaluation/lines/line-state";
 import type { MethodName } from "@/lib/evaluation/methods/method-name";
 import { METHOD_VERSIONS, METHODS_WITH_VERSIONS, type MethodVersion } from "@/lib/evaluation/methods/method-versions";
-import { type AdoptedVersion, adoptVersion } from "@/lib/proposals/adopt-version";
+import { type AdoptedVersion, adoptVersion } from "@/lib/proposals/drafting/adopt-version";
 import { type DraftEdit, MAX_EDITS } from "@/lib/proposals/schema";
 
 interface AdoptVersionFormProps {

@@ -1,5 +1,5 @@
 import { fieldRows } from "@/lib/evaluation/lines/field-rows";
-import type { DraftConflict } from "@/lib/proposals/merge-drafts";
+import type { DraftConflict } from "@/lib/proposals/drafting/merge-drafts";
 import type { DraftContent, DraftEdit } from "@/lib/proposals/schema";
 import { LINE_KIND_NAMES } from "@/lib/vocabulary/lines";
 

@@ -8,10 +8,10 @@ import { touchesOf } from "@/lib/evaluation/budget/touches";
 import { effectBases } from "@/lib/evaluation/measures/effect-bases";
 import { readNumber } from "@/lib/evaluation/measures/reading";
 import { noteSentence } from "@/lib/evaluation/notes/note-catalogue";
-import { effectSentence } from "@/lib/proposals/effect-sentence";
-import type { BudgetAtIssue, ProposalPreview } from "@/lib/proposals/preview-proposal";
+import { effectSentence } from "@/lib/proposals/review/effect-sentence";
+import type { BudgetAtIssue, ProposalPreview } from "@/lib/proposals/review/preview-proposal";
 import type { DraftEdit } from "@/lib/proposals/schema";
-import { touchSentence, touchTitle } from "@/lib/proposals/touch-text";
+import { touchSentence, touchTitle } from "@/lib/proposals/review/touch-text";
 import type { Preferences } from "@/lib/vocabulary/measures";
 import { STANDING_NAMES } from "@/lib/vocabulary/standing";
 

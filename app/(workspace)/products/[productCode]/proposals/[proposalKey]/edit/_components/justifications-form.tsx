@@ -2,7 +2,7 @@
 
 import { TextArea } from "@/app/_components/text-area";
 import { asList, asRecord } from "@/app/_components/line-fields/body";
-import type { JustificationNeed } from "@/lib/proposals/change-checks";
+import type { JustificationNeed } from "@/lib/proposals/review/change-checks";
 import type { DraftEdit } from "@/lib/proposals/schema";
 
 interface JustificationsFormProps {

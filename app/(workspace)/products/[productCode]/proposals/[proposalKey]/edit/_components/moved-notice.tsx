@@ -5,7 +5,7 @@ import { useMemo, useState } from "react";
 import { Button } from "@/app/_components/button";
 import { Notice } from "@/app/_components/notice";
 import { Cell, Head, Row, RowHead, Table, TableHead } from "@/app/_components/table";
-import { type DraftConflict, type DraftSide, mergeDrafts } from "@/lib/proposals/merge-drafts";
+import { type DraftConflict, type DraftSide, mergeDrafts } from "@/lib/proposals/drafting/merge-drafts";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 

@@ -1,7 +1,7 @@
 "use client";
 
 import { namedFault } from "@/lib/evaluation/lines/named-fault";
-import type { Obstacle } from "@/lib/proposals/preview-proposal";
+import type { Obstacle } from "@/lib/proposals/review/preview-proposal";
 import type { DraftEdit } from "@/lib/proposals/schema";
 
 interface ObstaclesProps {

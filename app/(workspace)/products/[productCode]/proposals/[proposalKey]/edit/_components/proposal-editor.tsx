@@ -8,7 +8,7 @@ import { SectionHeading } from "@/app/_components/section-heading";
 import { TextField } from "@/app/_components/text-field";
 import { type FileShelf, linesToName, type ShelvedFile } from "@/app/_components/line-fields/editor-names";
 import { bodyBefore } from "@/app/_components/line-fields/new-edit";
-import type { EditorView } from "@/lib/proposals/editor-view";
+import type { EditorView } from "@/lib/proposals/reading/editor-view";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 import type { Preferences } from "@/lib/vocabulary/measures";

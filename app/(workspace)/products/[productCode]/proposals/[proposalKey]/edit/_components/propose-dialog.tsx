@@ -6,7 +6,7 @@ import { useRef, useState } from "react";
 
 import { ConfirmDialog } from "@/app/_components/confirm-dialog";
 import { TextField } from "@/app/_components/text-field";
-import type { ProposalPreview } from "@/lib/proposals/preview-proposal";
+import type { ProposalPreview } from "@/lib/proposals/review/preview-proposal";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 
 import { proposeAction } from "../actions";

@@ -1,6 +1,6 @@
 "use client";
 
-import type { ProposalPreview } from "@/lib/proposals/preview-proposal";
+import type { ProposalPreview } from "@/lib/proposals/review/preview-proposal";
 import { ROLE_NAMES } from "@/lib/vocabulary/roles";
 
 /** Who will have to sign, and why, as the draft stands. */

@@ -2,8 +2,8 @@
 
 import { useDeferredValue, useMemo } from "react";
 
-import type { EditorView } from "@/lib/proposals/editor-view";
-import { previewProposal, type ProposalPreview } from "@/lib/proposals/preview-proposal";
+import type { EditorView } from "@/lib/proposals/reading/editor-view";
+import { previewProposal, type ProposalPreview } from "@/lib/proposals/review/preview-proposal";
 import type { DraftContent } from "@/lib/proposals/schema";
 
 /** The effect of what is typed, computed here by the code that decides on the server. */

@@ -3,8 +3,8 @@
 import { useCallback, useEffect, useRef, useState } from "react";
 
 import { type DraftAnswer, putDraft } from "@/app/(workspace)/_drafts/put-draft";
-import { asStored, mergeDrafts } from "@/lib/proposals/merge-drafts";
-import { sameValue } from "@/lib/proposals/same-value";
+import { asStored, mergeDrafts } from "@/lib/proposals/drafting/merge-drafts";
+import { sameValue } from "@/lib/proposals/records/same-value";
 import type { DraftContent } from "@/lib/proposals/schema";
 import type { DraftView } from "@/lib/proposals/workspace-views";
 
