@@ -28,7 +28,7 @@ test("budget, change sheet and report print clean on A4, the report on one page"
   await opened(page, "/products/TF2/report");
   await expectCleanPrint(page);
   await expect(page.getByText(/empirical correlations/)).toBeVisible();
-  expect(pagesOf(await page.pdf({ format: "A4" }))).toBe(1);
+  expect(pagesOf(await page.pdf({ preferCSSPageSize: true }))).toBe(1);
 });
 
 async function opened(page: Page, path: string): Promise<void> {

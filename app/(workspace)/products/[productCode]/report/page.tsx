@@ -42,7 +42,8 @@ export default async function ReportPage({ params, searchParams }: Props) {
   const { terms } = sheet.indexed;
 
   return (
-    <>
+    // What goes upward is one page: a report of usual length fits upright A4 at this size.
+    <div className="print:[zoom:0.82]">
       <PageHeading
         title={`Report on ${budget.product.name}`}
         subtitle={`${budget.product.code} · issue ${budget.issue.number} · ${point.operatingPoint} ${point.name}`}
@@ -63,7 +64,7 @@ export default async function ReportPage({ params, searchParams }: Props) {
         />
         <ReportItems sheet={sheet} />
       </Sheet>
-    </>
+    </div>
   );
 }
 
