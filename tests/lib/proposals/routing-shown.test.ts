@@ -113,7 +113,7 @@ describe("the routing shown before submission", () => {
   it("is that of today's issue, also where it moved since the draft was begun", async () => {
     const people = await withItems();
     const { tansy, ines, fenno, lusia, clock } = people;
-    // 0.61 · 45.94 N are 28.0 N; 1.36 more predict 90.5 N of 100 N, into the reserve of 10 N: any rise worsens that.
+    // 0.61 · 45.94 N are 28.0 N; 1.36 more predict 90.5 N of 100 N, into the reserve of 10 N: every rise worsens that.
     const filling = async () => {
       const other = await proposed(fenno, clock, { edits: [adding("080", tansy.userId, 1.36)] });
       await approves(ines, other, "reviewer", clock);

@@ -34,14 +34,14 @@ async function plates() {
   return people;
 }
 
-const any = () => true;
+const ofEverybody = () => true;
 
 describe("another version of a method", () => {
   it("is adopted by a proposal that lists what it does to every item, and moves nothing before it is signed", async () => {
     const people = await plates();
     const { ines, fenno, clock } = people;
     const { state, results } = await newestBudget(CODE);
-    const adoption = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: any });
+    const adoption = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: ofEverybody });
     expect(adoption).toMatchObject({ items: ["010", "020", "030"], left: [] });
     await proposed(fenno, clock, { title: "Constants of one set", edits: adoption.edits });
 
@@ -78,7 +78,7 @@ describe("another version of a method", () => {
     const people = await plates();
     const { ines, fenno, clock } = people;
     const { state } = await newestBudget(CODE);
-    const { edits } = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: any });
+    const { edits } = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: ofEverybody });
     const proposalId = await proposed(fenno, clock, { edits });
     await approves(ines, proposalId, "reviewer", clock);
 
@@ -98,7 +98,7 @@ describe("another version of a method", () => {
     const mayEdit = ({ body }: { body: { ownerId: number } }) => body.ownerId === tansy.userId;
     expect(adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit }).items).toEqual(["010"]);
 
-    const all = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: any });
+    const all = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: ofEverybody });
     const { proposalId } = await startDraft(tansy, { productCode: CODE, title: "All", key: formKey() }, clock);
     await expect(
       saveDraft(tansy, { proposalId, lockVersion: 0, content: content({ edits: all.edits }) }, clock),
@@ -111,15 +111,15 @@ describe("another version of a method", () => {
   it("keeps what the draft typed already, and says what one proposal has no room for", async () => {
     await plates();
     const { state } = await newestBudget(CODE);
-    const first = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: any }).edits[0];
+    const first = adoptVersion(state, [], { method: FRICTION, version: 2, mayEdit: ofEverybody }).edits[0];
     if (!first?.body) throw new Error("no edit");
     const typed = { ...first, body: { ...first.body, faces: 1, methodVersion: 1 } };
-    const again = adoptVersion(state, [typed], { method: FRICTION, version: 2, mayEdit: any });
+    const again = adoptVersion(state, [typed], { method: FRICTION, version: 2, mayEdit: ofEverybody });
     expect(again.edits[0]).toEqual({ ...first, body: { ...first.body, faces: 1 } });
     expect(again.items).toEqual(["010", "020", "030"]);
 
     const many = Array.from({ length: MAX_EDITS - 1 }, (_, at) => ({ ...first, number: `X${at}`, body: null }));
-    const full = adoptVersion(state, many, { method: FRICTION, version: 2, mayEdit: any });
+    const full = adoptVersion(state, many, { method: FRICTION, version: 2, mayEdit: ofEverybody });
     expect(full).toMatchObject({ items: ["010"], left: ["020", "030"] });
     expect(full.edits).toHaveLength(MAX_EDITS);
   });
